@@ -1,0 +1,143 @@
+import { z } from 'zod';
+import { LIMITS } from './limits';
+
+/**
+ * The design document `evendraft/design@1`: source of truth of the published JSON Schema.
+ * SI units; angles in degrees, temperatures in degrees Celsius, relative humidity from 0 to 1.
+ */
+export const DESIGN_FORMAT = 'evendraft/design@1';
+
+/** Keys of other versions are kept and noted by the solution, but are no part of the types. */
+function open<S extends z.ZodRawShape>(shape: S): z.ZodObject<S> {
+	return z.looseObject(shape) as unknown as z.ZodObject<S>;
+}
+const between = (range: { readonly min: number; readonly max: number }, about: string) =>
+	z.number().min(range.min).max(range.max).describe(about);
+const upTo = (max: number, about: string) => z.number().min(0).max(max).describe(about);
+const either = (max: number, about: string) => z.number().min(-max).max(max).describe(about);
+const text = z.string().max(LIMITS.text);
+const tag = z.string().min(1).max(LIMITS.tag);
+const count = z.int().min(1).max(LIMITS.count).describe('how many of it');
+const toBeConfirmed = z.boolean().describe('the value is not settled yet');
+const coefficient = either(LIMITS.coefficient, "coefficient on the row's own velocity pressure");
+const exponent = upTo(LIMITS.exponent, 'loss grows with flow to this power; 2 if absent');
+const dimension = between(LIMITS.size, 'm, inside');
+const roughness = upTo(LIMITS.roughness, 'absolute roughness, m');
+const material = z.string().describe('a key of the catalogue of materials');
+
+export const sizeSchema = z.discriminatedUnion('shape', [
+	open({ shape: z.literal('round'), diameter: dimension }),
+	open({ shape: z.literal('rectangular'), width: dimension, height: dimension }),
+	open({ shape: z.literal('oval'), width: dimension, height: dimension })
+]);
+
+const stateByTemperature = open({
+	temperature: between(LIMITS.temperature, 'degC'),
+	relativeHumidity: upTo(1, '0 to 1; 0 if absent').optional(),
+	elevation: between(LIMITS.elevation, 'm above sea level; 0 if absent').optional(),
+	pressure: between(LIMITS.pressure, 'absolute, Pa; overrides the elevation').optional()
+});
+const stateByDensity = open({
+	density: between(LIMITS.density, 'kg/m3'),
+	viscosity: between(LIMITS.viscosity, 'dynamic, Pa s').optional()
+});
+export const airSchema = z.union([stateByTemperature, stateByDensity]);
+
+const flow = between(LIMITS.flow, 'm3/s');
+
+export const fanSchema = open({
+	totalPressure: upTo(LIMITS.loss, 'Pa').optional(),
+	curve: z
+		.array(z.tuple([upTo(LIMITS.flow.max, 'm3/s'), either(LIMITS.loss, 'Pa')]))
+		.min(2)
+		.max(LIMITS.parts)
+		.describe('[flow, total pressure], flow rising')
+		.optional()
+});
+
+/** `fixed` carries its own coefficient; any other kind is a key of the catalogue, with its parameters beside it. */
+export const fittingSchema = open({
+	kind: z.string().min(1).describe("'fixed', or a key of the catalogue; its parameters stand beside it"),
+	coefficient: coefficient.optional(),
+	count: count.optional(),
+	name: text.optional(),
+	toBeConfirmed: toBeConfirmed.optional()
+});
+
+export const junctionSchema = open({
+	kind: z.string().min(1).describe("'fixed'"),
+	coefficient: coefficient.optional(),
+	name: text.optional(),
+	toBeConfirmed: toBeConfirmed.optional()
+});
+
+export const equipmentSchema = open({
+	name: text,
+	loss: upTo(LIMITS.loss, 'total-pressure loss at atFlow, Pa'),
+	atFlow: flow.describe('m3/s; the design flow of the row if absent').optional(),
+	exponent: exponent.optional(),
+	toBeConfirmed: toBeConfirmed.optional()
+});
+
+export const outletSchema = open({
+	name: text.optional(),
+	flow,
+	loss: upTo(LIMITS.loss, 'Pa at the flow; absent: an open end of one velocity pressure').optional(),
+	exponent: exponent.optional(),
+	lossIs: z.enum(['total', 'static']).describe("'total' if absent").optional(),
+	pressure: either(LIMITS.loss, 'gauge pressure of the room, Pa; 0 if absent').optional(),
+	toBeConfirmed: toBeConfirmed.optional()
+});
+
+export const flexibleSchema = open({
+	length: upTo(LIMITS.length, 'm'),
+	factor: upTo(100, "times the row's own rigid friction rate; 4 if absent").optional()
+});
+
+export const rowSchema = open({
+	id: tag.describe('travels to problems').optional(),
+	tag,
+	joins: tag.nullable().describe("the row on the fan's side; null where the row meets the fan"),
+	side: z.enum(['supply', 'return', 'exhaust', 'outdoor']),
+	serves: text.optional(),
+	size: sizeSchema,
+	length: upTo(LIMITS.length, 'centre line, m'),
+	rise: either(LIMITS.rise, 'elevation of the far end less that of the fan end, m').optional(),
+	roughness: roughness.optional(),
+	material: material.optional(),
+	flexible: flexibleSchema.optional(),
+	junction: junctionSchema.optional(),
+	fittings: z.array(fittingSchema).max(LIMITS.parts).optional(),
+	equipment: z.array(equipmentSchema).max(LIMITS.parts).optional(),
+	outlet: outletSchema.optional()
+});
+
+export const criteriaSchema = open({
+	mainVelocity: upTo(1_000, 'm/s, most in rows that others join').optional(),
+	runOutVelocity: upTo(1_000, 'm/s, most in rows with an outlet').optional(),
+	frictionRate: upTo(LIMITS.loss, 'Pa/m, most').optional(),
+	flexibleLength: upTo(LIMITS.length, 'm, most').optional(),
+	damperAtOutlet: z.boolean().describe('every row with an outlet has a damper').optional(),
+	aspectRatio: z.number().min(1).max(1_000).describe('longer side to shorter, most').optional()
+});
+
+export const designSchema = open({
+	format: z.literal(DESIGN_FORMAT),
+	title: text.optional(),
+	air: airSchema,
+	surroundings: airSchema.describe('for thermal gravity; the same air if absent').optional(),
+	fan: fanSchema.optional(),
+	roughness: roughness.optional(),
+	material: material.optional(),
+	criteria: criteriaSchema.optional(),
+	service: z
+		.enum(['general', 'kitchen-grease', 'laboratory', 'hazardous', 'smoke-control'])
+		.describe("'general' if absent")
+		.optional(),
+	rows: z.array(rowSchema).min(1).max(LIMITS.rows)
+});
+
+/** JSON Schema (2020-12) of the design document, generated from the above. */
+export function designJsonSchema(): object {
+	return z.toJSONSchema(designSchema);
+}

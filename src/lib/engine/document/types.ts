@@ -1,0 +1,201 @@
+import type { z } from 'zod';
+import type {
+	airSchema,
+	criteriaSchema,
+	designSchema,
+	equipmentSchema,
+	fittingSchema,
+	flexibleSchema,
+	junctionSchema,
+	outletSchema,
+	rowSchema,
+	sizeSchema
+} from './schema';
+
+type Frozen<T> = T extends readonly (infer E)[]
+	? readonly Frozen<E>[]
+	: T extends object
+		? { readonly [K in keyof T]: Frozen<T[K]> }
+		: T;
+
+/** What was designed: plain JSON in SI units. The types follow the schema. */
+export type DesignDocument = Frozen<z.infer<typeof designSchema>>;
+export type DesignRow = Frozen<z.infer<typeof rowSchema>>;
+export type RowSize = Frozen<z.infer<typeof sizeSchema>>;
+export type DesignAir = Frozen<z.infer<typeof airSchema>>;
+export type Junction = Frozen<z.infer<typeof junctionSchema>>;
+export type Equipment = Frozen<z.infer<typeof equipmentSchema>>;
+export type Outlet = Frozen<z.infer<typeof outletSchema>>;
+export type Flexible = Frozen<z.infer<typeof flexibleSchema>>;
+export type Criteria = Frozen<z.infer<typeof criteriaSchema>>;
+export type Side = DesignRow['side'];
+export type Service = NonNullable<DesignDocument['service']>;
+
+/** A fitting as written. The parameters of its kind stand beside these keys: read them with `parametersOf`. */
+export type Fitting = Frozen<z.infer<typeof fittingSchema>>;
+/** A fitting with parameters of its kind, for whoever writes one: `{ kind: 'round-elbow-smooth', angle: 45 } satisfies FittingEntry`. */
+export type FittingEntry = Fitting & { readonly [parameter: string]: string | number | boolean | undefined };
+
+export type ProblemCode =
+	| 'format'
+	| 'type'
+	| 'missing'
+	| 'not-finite'
+	| 'negative'
+	| 'zero-size'
+	| 'out-of-range'
+	| 'text-length'
+	| 'unknown-key-value'
+	| 'no-rows'
+	| 'too-many-rows'
+	| 'too-many-parts'
+	| 'too-large'
+	| 'too-deep'
+	| 'duplicate-tag'
+	| 'duplicate-id'
+	| 'joins-itself'
+	| 'ring'
+	| 'joins-unknown'
+	| 'side-differs'
+	| 'outlet-missing'
+	| 'outlet-in-middle'
+	| 'flow-zero'
+	| 'size-shape'
+	| 'fan-curve'
+	| 'unknown-material'
+	| 'unknown-fitting'
+	| 'fitting-shape'
+	| 'parameter-missing'
+	| 'parameter-unknown'
+	| 'parameter-range'
+	| 'outside-formula'
+	| 'too-great';
+
+/** Why a document cannot be solved, and where. */
+export interface Problem {
+	readonly code: ProblemCode;
+	/** JSON path, like `rows[3].size.width`; `$` is the document itself. */
+	readonly path: string;
+	/** Tag of the row, when it has one. */
+	readonly row: string | null;
+	/** Id of the row, when it has one. */
+	readonly id: string | null;
+	/** Key of the row that holds the fault. */
+	readonly field: string | null;
+	/** What is wrong. */
+	readonly message: string;
+	/** What was expected. */
+	readonly expected: string;
+}
+
+export type ValidateResult =
+	| { readonly ok: true; readonly document: DesignDocument }
+	| { readonly ok: false; readonly problems: readonly Problem[] };
+
+/** One loss, or gain, that a row is made of [Pa]. */
+export interface Item {
+	readonly part: 'duct' | 'flexible' | 'junction' | 'fitting' | 'equipment' | 'outlet' | 'gravity';
+	readonly name: string;
+	readonly kind: string | null;
+	readonly count: number | null;
+	/** Of one piece, on the row's own velocity pressure. */
+	readonly coefficient: number | null;
+	/** Of all pieces [Pa]; a gain by thermal gravity is negative. */
+	readonly loss: number;
+	readonly source: string | null;
+	readonly toBeConfirmed: boolean;
+}
+
+/** A row solved. Pressures are gauge, at [fan end, far end]. */
+export interface SolvedRow {
+	readonly side: Side;
+	readonly flow: number; // m3/s
+	readonly area: number; // m2
+	readonly hydraulicDiameter: number; // m
+	readonly velocity: number; // m/s
+	readonly velocityPressure: number; // Pa
+	readonly reynolds: number;
+	readonly frictionFactor: number;
+	readonly frictionRate: number; // Pa/m of the rigid duct
+	readonly frictionLoss: number; // Pa, rigid duct alone
+	readonly flexibleLoss: number; // Pa
+	readonly fittingLoss: number; // Pa
+	readonly junctionLoss: number; // Pa
+	readonly equipmentLoss: number; // Pa
+	readonly outletLoss: number; // Pa
+	readonly thermalGravity: number; // Pa, gain in the direction of flow
+	readonly loss: number; // Pa, of total pressure
+	readonly totalPressure: readonly [number, number]; // Pa
+	readonly staticPressure: readonly [number, number]; // Pa
+	/** Least spare of all paths through the row [Pa]. */
+	readonly spare: number;
+	readonly items: readonly Item[];
+}
+
+/** From the fan to an outlet, or from an inlet to the fan. */
+export interface Path {
+	/** Tag of the row with the outlet. */
+	readonly outlet: string;
+	readonly side: Side;
+	/** Tags from the fan outward. */
+	readonly rows: readonly string[];
+	readonly loss: number; // Pa
+	readonly roomPressure: number; // Pa, gauge
+	readonly spare: number; // Pa
+}
+
+export type FlagRule =
+	| 'reynolds-transition'
+	| 'no-junction-loss'
+	| 'velocity-main'
+	| 'velocity-run-out'
+	| 'friction-rate'
+	| 'flexible-length'
+	| 'aspect-ratio'
+	| 'damper-missing'
+	| 'coefficient-range'
+	| 'to-be-confirmed'
+	| 'fan-flows-differ'
+	| 'service-caution'
+	| 'fire-damper-caution'
+	| 'negative-loss'
+	| 'rise-exceeds-length'
+	| 'static-loss-at-inlet'
+	| 'key-not-read';
+
+/** Something an engineer should look at. `row` is null when it concerns the whole design. */
+export interface Flag {
+	readonly rule: FlagRule;
+	readonly row: string | null;
+	readonly severity: 'note' | 'caution' | 'fault';
+	readonly message: string;
+	readonly value?: number;
+	readonly threshold?: number;
+	/** Where the threshold, or the rule, comes from. */
+	readonly basis: string;
+}
+
+/** What was found: plain data, finite numbers. Equal after JSON and structuredClone. */
+export interface Solution {
+	readonly format: 'evendraft/solution@1';
+	readonly engineVersion: string;
+	readonly mode: 'design';
+	readonly air: { readonly density: number; readonly viscosity: number };
+	readonly rows: { readonly [tag: string]: SolvedRow };
+	readonly paths: readonly Path[];
+	/** Outlet of the index path on each side; `return` covers return, exhaust and outdoor. */
+	readonly index: { readonly supply: string | null; readonly return: string | null };
+	readonly fan: {
+		readonly flow: number; // m3/s
+		readonly totalPressure: number; // Pa
+		readonly supplyPressure: number; // Pa, requirement of the supply side
+		readonly returnPressure: number; // Pa, requirement of the other side
+		readonly staticPressure: number | null; // Pa; null without a supply row
+	};
+	readonly totals: { readonly supplyFlow: number; readonly returnFlow: number };
+	readonly flags: readonly Flag[];
+}
+
+export type SolveResult =
+	| { readonly ok: true; readonly solution: Solution }
+	| { readonly ok: false; readonly problems: readonly Problem[] };
