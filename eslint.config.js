@@ -14,7 +14,10 @@ const screen = { group: ['**/components/**', '**/*.svelte'], message: 'The serve
 const tests = { group: ['**/tests/**', '**/fixtures/**'], message: 'The product stands without its tests.' };
 const pure = (allowed, message) => ({ regex: `^(?!\\.{1,2}/)(?!(?:${allowed})$)`, message });
 const inward = { regex: '^\\.\\./\\.\\./\\.\\./(?!engine)', message: 'The engine imports nothing but itself.' };
-const outOfEngine = { group: ['**/server/**', '**/sheet/**', '**/components/**', '**/report/**', '$lib/**'], message: 'The engine imports nothing but itself.' };
+const outOfEngine = {
+	group: ['**/server/**', '**/sheet/**', '**/components/**', '**/report/**', '$lib/**'],
+	message: 'The engine imports nothing but itself.'
+};
 
 export default ts.config(
 	{ ignores: ['.svelte-kit/', 'build/', '.evendraft/', 'node_modules/', 'static/'] },
@@ -36,7 +39,12 @@ export default ts.config(
 	{ files: ['scripts/**', 'tests/**'], rules: { 'no-console': 'off' } },
 	{ files: ['src/**/*.{ts,svelte}'], rules: ban(engine, tests) },
 	{
-		files: ['src/lib/components/**/*.{ts,svelte}', 'src/lib/sheet/**/*.{ts,svelte}', 'src/routes/**/*.svelte', 'src/routes/**/+{page,layout}.ts'],
+		files: [
+			'src/lib/components/**/*.{ts,svelte}',
+			'src/lib/sheet/**/*.{ts,svelte}',
+			'src/routes/**/*.svelte',
+			'src/routes/**/+{page,layout}.ts'
+		],
 		rules: ban(engine, server, sql, tests)
 	},
 	{ files: ['src/lib/{report,drawing,schemas}/**/*.ts'], rules: ban(engine, server, sql, screen, tests) },

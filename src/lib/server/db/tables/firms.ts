@@ -1,5 +1,15 @@
 import { sql } from 'drizzle-orm';
-import { doublePrecision, index, pgPolicy, pgTable, primaryKey, text, timestamp, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
+import {
+	doublePrecision,
+	index,
+	pgPolicy,
+	pgTable,
+	primaryKey,
+	text,
+	timestamp,
+	uniqueIndex,
+	uuid
+} from 'drizzle-orm/pg-core';
 import { application, currentUser, ofCurrentFirm } from '../roles';
 import { user } from './sign-in';
 
@@ -72,4 +82,3 @@ export const project = pgTable(
 		ofCurrentFirm()
 	]
 );
-

@@ -16,10 +16,7 @@ export const user = pgTable(
 		passwordHash: text('password_hash'),
 		createdAt: moment('created_at').notNull().defaultNow()
 	},
-	(t) => [
-		uniqueIndex('user_email').on(t.email),
-		check('user_email_lower', sql`${t.email} = lower(${t.email})`)
-	]
+	(t) => [uniqueIndex('user_email').on(t.email), check('user_email_lower', sql`${t.email} = lower(${t.email})`)]
 );
 
 /** Identities at outside providers, as the Auth.js adapter keeps them. */
