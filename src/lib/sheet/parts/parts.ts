@@ -1,0 +1,84 @@
+/** Keys of the symbols that draw a part. */
+export type Picture =
+	| 'elbow'
+	| 'tee'
+	| 'shoe'
+	| 'wye'
+	| 'transition'
+	| 'damper'
+	| 'firedamper'
+	| 'flexible'
+	| 'silencer'
+	| 'coil'
+	| 'filter'
+	| 'fan'
+	| 'louvre'
+	| 'diffuser'
+	| 'grille';
+
+/** What family of part a word names. */
+export type PartWord = 'elbow' | 'junction' | 'transition' | 'entry' | 'exit' | 'damper' | 'device';
+
+/** A part whose loss goes with the row's own velocity pressure. */
+export interface PartFitting {
+	readonly word: PartWord;
+	/** 'fixed' (has a coefficient), or a kind of the catalogue without its shape: 'elbow-smooth', 'entry-flush' … */
+	readonly kind: string;
+	readonly count: number;
+	/** As printed: 'Elbow', 'Tee, branch', 'Fire damper FD-01'. */
+	readonly name: string;
+	readonly coefficient?: number;
+	readonly parameters: Readonly<Record<string, number | string>>;
+	readonly picture: Picture;
+	/** Set by a trailing question mark. */
+	readonly toBeConfirmed: boolean;
+}
+
+/** A part whose loss is given as a pressure [Pa] at the row's design flow. */
+export interface PartEquipment {
+	readonly name: string;
+	readonly loss: number;
+	readonly exponent: number;
+	readonly picture: Picture;
+	readonly toBeConfirmed: boolean;
+}
+
+/** All that one Parts cell holds. */
+export interface Parts {
+	/** The junction at the row's fan end. */
+	readonly junction: PartFitting | null;
+	readonly fittings: readonly PartFitting[];
+	readonly equipment: readonly PartEquipment[];
+}
+
+/** A fitting as the design document holds it. */
+export type DocumentFitting = {
+	readonly kind: string;
+	readonly count?: number;
+	readonly name?: string;
+	readonly coefficient?: number;
+	readonly toBeConfirmed?: boolean;
+} & Readonly<Record<string, string | number | boolean | undefined>>;
+
+/** An equipment loss as the design document holds it. */
+export interface DocumentEquipment {
+	readonly name: string;
+	readonly loss: number;
+	readonly exponent: number;
+	readonly toBeConfirmed?: boolean;
+}
+
+/** A part that does not suit the row. */
+export interface PartProblem {
+	readonly part: string;
+	readonly message: string;
+	readonly expected: string;
+}
+
+/** The parts of a row, ready for its document. */
+export interface DocumentParts {
+	readonly junction: DocumentFitting | null;
+	readonly fittings: readonly DocumentFitting[];
+	readonly equipment: readonly DocumentEquipment[];
+	readonly problems: readonly PartProblem[];
+}
