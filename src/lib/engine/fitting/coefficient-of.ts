@@ -1,0 +1,31 @@
+import { findDefinition } from './catalogue';
+import { readParameters } from './parameters';
+import type { CoefficientResult, FittingContext, FittingParameters } from './types';
+
+/**
+ * Coefficient of a fitting of the catalogue, on the velocity pressure of the row it sits in.
+ *
+ * @param kind key of the catalogue
+ * @param parameters those of the entry [-, °]; a missing one takes its default, one beyond its limits the limit, with a note
+ * @param context the row: size [m], Reynolds number [-], velocity [m/s], relative roughness [-], friction factor [-]
+ * @returns coefficient [-] with method, source and what lies outside the range
+ * @throws {Error} when the catalogue has no such key
+ * @source That of the entry
+ * @check fixtures/published/elbows.json
+ */
+export function coefficientOf(kind: string, parameters: FittingParameters, context: FittingContext): CoefficientResult {
+	const definition = findDefinition(kind);
+	if (!definition) throw new Error(`the catalogue has no fitting ${kind}`);
+	const { entry } = definition;
+	const notes: string[] = [];
+	const note = (text: string) => void (notes.includes(text) || notes.push(text));
+	if (!entry.shapes.includes(context.size.shape)) note(`the source is not for ${context.size.shape} ducts`);
+	const coefficient = definition.coefficient(readParameters(entry, parameters, note), context, note);
+	return {
+		coefficient: coefficient === 0 ? 0 : coefficient, // never -0
+		method: entry.method,
+		source: entry.source,
+		inRange: notes.length === 0,
+		rangeNote: notes.length === 0 ? null : notes.join('; ')
+	};
+}

@@ -1,0 +1,3 @@
+import type { FittingDefinition } from './definition';
+
+export const exits: readonly FittingDefinition[] = [];

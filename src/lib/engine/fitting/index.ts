@@ -1,0 +1,14 @@
+export { catalogue, fittingEntry } from './catalogue';
+export { coefficientOf } from './coefficient-of';
+export { lossAtDensity, meanFilterLoss, ratedLoss } from './rated-loss';
+export { coefficientOnLeg } from './reference-change';
+export type {
+	CatalogueEntry,
+	CoefficientResult,
+	Family,
+	FittingContext,
+	FittingParameter,
+	FittingParameters,
+	Known,
+	Picture
+} from './types';

@@ -1,0 +1,8 @@
+export {
+	equivalentDiameter,
+	equivalentOvalHeytDiaz1975,
+	equivalentRectangleHuebscher1948
+} from './equivalent-diameter';
+export { LAMINAR_ROUND, laminarRectangle } from './laminar-constant';
+export { sectionOf, type Section } from './section';
+export type { Shape, Size } from './size';
