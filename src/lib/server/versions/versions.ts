@@ -1,0 +1,54 @@
+import { and, desc, eq } from 'drizzle-orm';
+import type { DesignDocument, Solution } from '$lib/engine';
+import type { Sheet } from '$lib/sheet/sheet';
+import type { FirmScope } from '../auth/scope';
+import { inFirm } from '../db';
+import { user, version } from '../db/schema';
+import type { DesignHeading } from '../designs/find-design';
+
+/** The saved versions of a design, newest first, without their contents. */
+export function listVersions(scope: FirmScope, designId: string) {
+	return inFirm(scope, (tx) =>
+		tx
+			.select({
+				number: version.number,
+				revision: version.revision,
+				note: version.note,
+				status: version.status,
+				seq: version.seq,
+				sha256: version.sha256,
+				engineVersion: version.engineVersion,
+				savedAt: version.savedAt,
+				by: user.email
+			})
+			.from(version)
+			.innerJoin(user, eq(user.id, version.userId))
+			.where(and(eq(version.firmId, scope.firmId), eq(version.designId, designId)))
+			.orderBy(desc(version.number))
+	);
+}
+
+export type VersionLine = Awaited<ReturnType<typeof listVersions>>[number];
+
+/** One saved version with the figures that were stored; nothing is computed anew. Null when absent. */
+export function openVersion(scope: FirmScope, designId: string, number: number) {
+	return inFirm(scope, async (tx) => {
+		const [row] = await tx
+			.select({ saved: version, by: user.email })
+			.from(version)
+			.innerJoin(user, eq(user.id, version.userId))
+			.where(and(eq(version.firmId, scope.firmId), eq(version.designId, designId), eq(version.number, number)));
+		if (!row) return null;
+		const { firmId: _firm, userId: _user, ...saved } = row.saved;
+		return {
+			...saved,
+			by: row.by,
+			sheet: saved.sheet as Sheet,
+			document: saved.document as DesignDocument,
+			solution: saved.solution as Solution,
+			heading: saved.heading as DesignHeading
+		};
+	});
+}
+
+export type SavedVersion = NonNullable<Awaited<ReturnType<typeof openVersion>>>;

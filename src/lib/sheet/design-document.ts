@@ -1,0 +1,196 @@
+/** The design document of a sheet: which rows count, what keeps the others from counting, and at which cell. */
+import { type Criteria, type DesignAir, type DesignDocument, type DesignRow, type Side } from '$lib/engine';
+import { fittingsFor } from './parts';
+import { settingOf, valueOf, type RowField, type SettingField, type Sheet, type SheetRow } from './sheet';
+import { readingOf } from './reading-of';
+import { linksOf, type Links } from './links';
+
+/** Something that a person must mend, at its cell. `row` is null for a setting. */
+export interface SheetProblem {
+	readonly row: string | null;
+	readonly field: RowField | SettingField;
+	readonly message: string;
+	readonly expected: string;
+}
+
+export interface SheetDocument {
+	/** Null while no row counts. */
+	readonly document: DesignDocument | null;
+	readonly problems: readonly SheetProblem[];
+	/** Ids of rows that the document leaves out. */
+	readonly uncounted: ReadonlySet<string>;
+}
+
+/**
+ * Builds the design document from the rows that can be counted. A row counts when its own cells are understood, the
+ * row that it joins counts, and air leaves or enters somewhere beyond it. Nothing is guessed for the others.
+ */
+export function documentOf(sheet: Sheet): SheetDocument {
+	const problems: SheetProblem[] = settingProblems(sheet);
+	const links = linksOf(sheet.rows, problems);
+	const sides = new Map<string, Side | null>();
+	const drafts = new Map<string, DesignRow>();
+	for (const row of links.fromFan) {
+		sides.set(row.id, sideOf(row, links, sides));
+		const draft = draftRow(sheet, row, links, sides, problems);
+		const parent = links.parent.get(row.id);
+		if (draft && (parent === null || (parent && drafts.has(parent.id)))) drafts.set(row.id, draft);
+	}
+	prune(links, drafts, problems);
+	const rows = sheet.rows.flatMap((row) => drafts.get(row.id) ?? []);
+	const uncounted = new Set(sheet.rows.map(({ id }) => id).filter((id) => !drafts.has(id)));
+	return { document: rows.length ? { ...frameOf(sheet), rows } : null, problems, uncounted };
+}
+
+function settingProblems(sheet: Sheet): SheetProblem[] {
+	return Object.entries(sheet.settings).flatMap(([field, cell]) => {
+		if (!cell || cell.value !== null) return [];
+		return [{ row: null, field: field as SettingField, ...readingOf('setting', field, cell) }];
+	});
+}
+
+/** The document without its rows. */
+function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
+	const density = settingOf(sheet, 'density');
+	const air: DesignAir =
+		density !== null
+			? { density }
+			: {
+					temperature: settingOf(sheet, 'temperature') ?? 20,
+					relativeHumidity: settingOf(sheet, 'humidity') ?? 0,
+					elevation: settingOf(sheet, 'elevation') ?? 0
+				};
+	const surroundings = settingOf(sheet, 'surroundings');
+	const criteria = criteriaOf(sheet);
+	return {
+		format: 'evendraft/design@1',
+		title: settingOf(sheet, 'title') ?? '',
+		air,
+		...(surroundings !== null && {
+			surroundings: { temperature: surroundings, relativeHumidity: 0, elevation: settingOf(sheet, 'elevation') ?? 0 }
+		}),
+		material: settingOf(sheet, 'material') ?? 'galvanized-steel',
+		service: settingOf(sheet, 'service') ?? 'general',
+		...(criteria && { criteria })
+	};
+}
+
+function criteriaOf(sheet: Sheet): Criteria | null {
+	const fields = [
+		'mainVelocity',
+		'runOutVelocity',
+		'frictionRate',
+		'flexibleLength',
+		'aspectRatio',
+		'damperAtOutlet'
+	] as const;
+	const given = fields.flatMap((field) => {
+		const value = settingOf(sheet, field);
+		return value === null ? [] : [[field, value] as const];
+	});
+	return given.length ? (Object.fromEntries(given) as Criteria) : null;
+}
+
+/** One row as the document holds it; null, with problems, when its own cells do not suffice. */
+function draftRow(
+	sheet: Sheet,
+	row: SheetRow,
+	links: Links,
+	sides: ReadonlyMap<string, Side | null>,
+	problems: SheetProblem[]
+): DesignRow | null {
+	const before = problems.length;
+	const fault = (field: RowField, message: string, expected: string) =>
+		problems.push({ row: row.id, field, message, expected });
+	for (const [field, cell] of Object.entries(row.cells))
+		if (cell && cell.value === null) {
+			const { message, expected } = readingOf('row', field, cell);
+			fault(field as RowField, message, expected);
+		}
+	const tag = valueOf(row, 'tag');
+	const size = valueOf(row, 'size');
+	const length = valueOf(row, 'length');
+	if (!row.cells.tag) fault('tag', 'This row has no tag.', 'a tag of its own, as S01');
+	if (!row.cells.size) fault('size', 'This row has no size.', 'a size, as 600x300 or Ø250');
+	if (!row.cells.length) fault('length', 'This row has no length.', 'the length on the centre line; 0 for none');
+	const side = sides.get(row.id) ?? null;
+	if (side === null)
+		fault('side', 'Air cannot run toward the fan and away from it in one run.', sideExpected(row, links, sides));
+	const parts = valueOf(row, 'parts');
+	const fitted = parts && size ? fittingsFor(parts, size) : null;
+	for (const { message, expected } of fitted?.problems ?? []) fault('parts', message, expected);
+	const flow = valueOf(row, 'flow');
+	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
+	if (!isEnd && row.cells.flow)
+		fault(
+			'flow',
+			`Rows join ${tag ?? 'this row'}, so its flow is their sum.`,
+			'a blank; type flows at the outlets only'
+		);
+	if (links.faulty.has(row.id) || problems.length > before || tag === null || !size || length === null || !side)
+		return null;
+	const flex = valueOf(row, 'flex');
+	const outlet = valueOf(row, 'outlet');
+	return {
+		id: row.id,
+		tag,
+		joins: links.parent.get(row.id) ? valueOf(row, 'joins') : null,
+		side,
+		size,
+		length,
+		serves: valueOf(row, 'serves') ?? '',
+		rise: valueOf(row, 'rise') ?? 0,
+		...(valueOf(row, 'material') && { material: valueOf(row, 'material') ?? '' }),
+		...(flex && { flexible: { length: flex, factor: settingOf(sheet, 'flexFactor') ?? 4 } }),
+		...(fitted?.junction && { junction: fitted.junction }),
+		fittings: fitted?.fittings ?? [],
+		equipment: fitted?.equipment ?? [],
+		...(isEnd &&
+			flow !== null && {
+				outlet: {
+					name: valueOf(row, 'serves') ?? '',
+					flow,
+					...(outlet?.loss !== null &&
+						outlet && { loss: outlet.loss, lossIs: outlet.lossIs, toBeConfirmed: outlet.toBeConfirmed }),
+					pressure: valueOf(row, 'pressure') ?? 0
+				}
+			})
+	};
+}
+
+const towardFan = (side: Side) => side !== 'supply';
+
+/** The side as typed, or that of the row it joins; null where the two cannot stand in one run. */
+function sideOf(row: SheetRow, links: Links, sides: ReadonlyMap<string, Side | null>): Side | null {
+	const parent = links.parent.get(row.id);
+	const inherited = parent ? (sides.get(parent.id) ?? null) : 'supply';
+	const own = valueOf(row, 'side') ?? inherited;
+	if (!parent || own === null || inherited === null) return own;
+	return towardFan(own) === towardFan(inherited) ? own : null;
+}
+
+function sideExpected(row: SheetRow, links: Links, sides: ReadonlyMap<string, Side | null>): string {
+	const parent = links.parent.get(row.id);
+	const inherited = parent && sides.get(parent.id);
+	return inherited && towardFan(inherited)
+		? 'return, exhaust or outdoor, as the row it joins'
+		: 'supply, as the row it joins';
+}
+
+/** Takes out ends without a flow, and then the rows that nothing counted joins any more, from the ends inward. */
+function prune(links: Links, drafts: Map<string, DesignRow>, problems: SheetProblem[]): void {
+	for (const row of [...links.fromFan].reverse()) {
+		const draft = drafts.get(row.id);
+		if (!draft) continue;
+		const children = links.children.get(row.id) ?? [];
+		if (children.some(({ id }) => drafts.has(id)) || draft.outlet) continue;
+		drafts.delete(row.id);
+		if (children.length === 0)
+			problems.push({
+				row: row.id,
+				field: 'flow',
+				message: `Nothing joins ${draft.tag}, so it needs an outlet.`,
+				expected: 'the flow of its outlet, or a row that joins it'
+			});
+	}
+}

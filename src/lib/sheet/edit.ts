@@ -1,0 +1,46 @@
+/** What a person does to a sheet. Checked on both sides; the server reads the typed texts itself. */
+import { z } from 'zod';
+import { MOST_ROWS } from './sheet';
+
+const rowId = z.uuid();
+const units = z.enum(['SI', 'IP']);
+const typed = z.string().max(2_000);
+const cell = z.object({ typed, units });
+const field = z.string().max(40);
+
+const set = z.object({ kind: z.literal('set'), row: rowId.nullable(), field, typed, units });
+const insert = z.object({
+	kind: z.literal('insert'),
+	rows: z
+		.array(z.object({ id: rowId, cells: z.record(field, cell) }))
+		.min(1)
+		.max(MOST_ROWS),
+	before: rowId.nullable()
+});
+const remove = z.object({ kind: z.literal('delete'), rows: z.array(rowId).min(1).max(MOST_ROWS) });
+const move = z.object({
+	kind: z.literal('move'),
+	rows: z.array(rowId).min(1).max(MOST_ROWS),
+	before: rowId.nullable()
+});
+const single = z.discriminatedUnion('kind', [set, insert, remove, move]);
+const batch = z.object({ kind: z.literal('batch'), edits: z.array(single).min(1).max(100_000) });
+
+/**
+ * `set` writes one cell (row null: a setting; typed '' clears it). `insert`, `delete` and `move` act on whole rows,
+ * before a named row or at the end. A `batch` is one step for undo.
+ */
+export const editSchema = z.discriminatedUnion('kind', [set, insert, remove, move, batch]);
+export type SingleEdit = z.infer<typeof single>;
+export type Edit = z.infer<typeof editSchema>;
+export type TypedCell = z.infer<typeof cell>;
+
+/** An edit with the id that its client gave it: sent again, it is applied once. */
+export const sentEditSchema = z.object({ id: z.uuid(), edit: editSchema });
+export type SentEdit = z.infer<typeof sentEditSchema>;
+
+/** Body of the route that takes edits. `base` is the last entry that the client has. */
+export const editsBodySchema = z.object({
+	base: z.int().min(0),
+	edits: z.array(sentEditSchema).max(1_000)
+});

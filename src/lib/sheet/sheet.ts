@@ -1,0 +1,122 @@
+/**
+ * The working sheet of a design: rows of cells as a person typed them, each with what was understood.
+ * Plain data; never changed in place.
+ */
+import type { Size, UnitSystem } from '$lib/engine';
+import type { Parts } from './parts';
+
+export const SHEET_FORMAT = 'evendraft/sheet@1';
+
+/** Rows of one sheet, at most. */
+export const MOST_ROWS = 5_000;
+
+/** What the outlet at a row's far end loses. */
+export interface OutletLoss {
+	/** Total-pressure loss [Pa]; null: an open end, of one velocity pressure. */
+	readonly loss: number | null;
+	readonly lossIs: 'total' | 'static';
+	readonly toBeConfirmed: boolean;
+}
+
+/** What a cell of each column holds once understood; SI units. */
+export interface RowValues {
+	tag: string;
+	/** Tag of the row on the fan's side. */
+	joins: string;
+	side: 'supply' | 'return' | 'exhaust' | 'outdoor';
+	serves: string;
+	/** Design flow of the outlet [m3/s]. */
+	flow: number;
+	size: Size;
+	/** On the centre line [m]. */
+	length: number;
+	/** Of the far end over the fan end [m]. */
+	rise: number;
+	/** Of flexible duct [m]. */
+	flex: number;
+	/** Key of the engine's catalogue of materials. */
+	material: string;
+	parts: Parts;
+	outlet: OutletLoss;
+	/** Of the room, gauge [Pa]. */
+	pressure: number;
+}
+
+/** What the settings of a design hold; SI units. */
+export interface SettingValues {
+	title: string;
+	units: UnitSystem;
+	service: 'general' | 'kitchen-grease' | 'laboratory' | 'hazardous' | 'smoke-control';
+	/** Of the air in the ducts [degC]. */
+	temperature: number;
+	/** Relative, 0 to 1. */
+	humidity: number;
+	/** Above sea level [m]. */
+	elevation: number;
+	/** Given density [kg/m3]; overrides the three above. */
+	density: number;
+	/** Of the air around the ducts [degC]; for thermal gravity. */
+	surroundings: number;
+	material: string;
+	/** Flexible duct loses this many times the rigid rate. */
+	flexFactor: number;
+	mainVelocity: number;
+	runOutVelocity: number;
+	frictionRate: number;
+	flexibleLength: number;
+	aspectRatio: number;
+	damperAtOutlet: boolean;
+}
+
+export type RowField = keyof RowValues;
+export type SettingField = keyof SettingValues;
+
+/** One cell: the text as typed, the units in force then, and the value; null where it was not understood. */
+export interface Cell<T> {
+	readonly typed: string;
+	readonly units: UnitSystem;
+	readonly value: T | null;
+}
+
+export type RowCells = { readonly [F in RowField]?: Cell<RowValues[F]> };
+export type SettingCells = { readonly [F in SettingField]?: Cell<SettingValues[F]> };
+
+export interface SheetRow {
+	/** Made by whoever inserted the row; stays for its life. */
+	readonly id: string;
+	readonly cells: RowCells;
+}
+
+export interface Sheet {
+	readonly format: typeof SHEET_FORMAT;
+	readonly settings: SettingCells;
+	readonly rows: readonly SheetRow[];
+}
+
+export const EMPTY_SHEET: Sheet = { format: SHEET_FORMAT, settings: {}, rows: [] };
+
+/** What holds where a setting was not typed. */
+export const DEFAULT_SETTINGS = {
+	units: 'SI',
+	service: 'general',
+	temperature: 20,
+	humidity: 0.5,
+	elevation: 0,
+	material: 'galvanized-steel',
+	flexFactor: 4
+} as const satisfies Partial<SettingValues>;
+
+/** The value of a setting, or its default, or null where there is none. */
+export function settingOf<F extends SettingField>(sheet: Sheet, field: F): SettingValues[F] | null {
+	const value = sheet.settings[field]?.value;
+	if (value !== undefined && value !== null) return value as SettingValues[F];
+	return (DEFAULT_SETTINGS as Partial<SettingValues>)[field] ?? null;
+}
+
+/** The units in which the sheet is shown. */
+export const unitsOf = (sheet: Sheet): UnitSystem => settingOf(sheet, 'units') ?? 'SI';
+
+/** The understood value of a row's cell; null where it is blank or not understood. */
+export function valueOf<F extends RowField>(row: SheetRow, field: F): RowValues[F] | null {
+	return (row.cells[field]?.value as RowValues[F] | null | undefined) ?? null;
+}
