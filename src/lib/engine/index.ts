@@ -1,29 +1,47 @@
 /** The only door of the calculation. Design document in, solution out: plain data, SI units. */
-export { DESIGN_FORMAT, designJsonSchema } from './document/schema';
-export { LIMITS } from './document/limits';
-export type {
-	Criteria,
-	DesignAir,
-	DesignDocument,
-	DesignRow,
-	Equipment,
-	Fitting,
-	FittingEntry,
-	Flag,
-	FlagRule,
-	Flexible,
-	Item,
-	Junction,
-	Outlet,
-	Path,
-	Problem,
-	ProblemCode,
-	RowSize,
-	Service,
-	Side,
-	Solution,
-	SolvedRow,
-	SolveResult,
-	ValidateResult
-} from './document/types';
+export {
+	canonicalText,
+	DESIGN_FORMAT,
+	designJsonSchema,
+	LIMITS,
+	validateDocument,
+	type Criteria,
+	type DesignAir,
+	type DesignDocument,
+	type DesignRow,
+	type Equipment,
+	type Fitting,
+	type FittingEntry,
+	type Flag,
+	type FlagRule,
+	type Flexible,
+	type Item,
+	type Junction,
+	type Outlet,
+	type Path,
+	type Problem,
+	type ProblemCode,
+	type RowSize,
+	type Service,
+	type Side,
+	type Solution,
+	type SolvedRow,
+	type SolveResult,
+	type ValidateResult
+} from './document';
+export { solveDesign } from './network';
 export { ENGINE_VERSION } from './version';
+export * from './quantity';
+export {
+	catalogue,
+	fittingEntry,
+	type CatalogueEntry,
+	type Family,
+	type FittingParameter,
+	type Known,
+	type Picture
+} from './fitting';
+export { airState, type AirState } from './air';
+export { findMaterial, materials, regime, type Material } from './friction';
+export { equivalentDiameter, sectionOf, type Section } from './shape';
+export { OutOfRangeError } from './errors';

@@ -6,6 +6,7 @@ export const LIMITS = {
 	rows: 20_000,
 	parts: 500, // fittings or equipment of one row
 	values: 3_000_000, // of the whole document
+	pathRows: 4_000_000, // rows of all paths together
 	depth: 40, // of nesting
 	text: 500, // characters
 	tag: 100, // characters

@@ -41,7 +41,7 @@ const stateByDensity = open({
 	density: between(LIMITS.density, 'kg/m3'),
 	viscosity: between(LIMITS.viscosity, 'dynamic, Pa s').optional()
 });
-export const airSchema = z.union([stateByTemperature, stateByDensity]);
+export const airSchema = z.union([stateByDensity, stateByTemperature]);
 
 const flow = between(LIMITS.flow, 'm3/s');
 

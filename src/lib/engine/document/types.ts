@@ -60,15 +60,14 @@ export type ProblemCode =
 	| 'outlet-missing'
 	| 'outlet-in-middle'
 	| 'flow-zero'
-	| 'size-shape'
 	| 'fan-curve'
 	| 'unknown-material'
 	| 'unknown-fitting'
-	| 'fitting-shape'
 	| 'parameter-missing'
 	| 'parameter-unknown'
 	| 'parameter-range'
 	| 'outside-formula'
+	| 'unreadable'
 	| 'too-great';
 
 /** Why a document cannot be solved, and where. */
@@ -197,5 +196,4 @@ export interface Solution {
 }
 
 export type SolveResult =
-	| { readonly ok: true; readonly solution: Solution }
-	| { readonly ok: false; readonly problems: readonly Problem[] };
+	{ readonly ok: true; readonly solution: Solution } | { readonly ok: false; readonly problems: readonly Problem[] };

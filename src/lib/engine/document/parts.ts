@@ -1,0 +1,101 @@
+import { fittingEntry, type CatalogueEntry } from '../fitting';
+import { findMaterial, materials } from '../friction';
+import { fault, isRecord, rowsOf, shown, textAt, type Step } from './fault';
+import type { Problem } from './types';
+
+/** Keys of a fitting that are no parameters of its kind. */
+const OWN_KEYS: readonly string[] = ['kind', 'count', 'name', 'toBeConfirmed', 'id', 'note'];
+
+/** What is wrong with materials, fittings and junctions beyond their schema: keys and parameters of the catalogue. */
+export function partProblems(document: unknown): Problem[] {
+	const problems: Problem[] = [];
+	materialProblem(document, [], problems);
+	fanProblems(document, problems);
+	rowsOf(document).forEach((row, i) => {
+		if (!isRecord(row)) return;
+		materialProblem(row, ['rows', i], problems);
+		if (Array.isArray(row.fittings))
+			row.fittings.forEach((one, k) => fittingProblems(one, ['rows', i, 'fittings', k], problems));
+		junctionProblems(row.junction, ['rows', i, 'junction'], problems);
+	});
+	return problems;
+}
+
+function materialProblem(holder: unknown, path: readonly Step[], problems: Problem[]): void {
+	const material = textAt(holder, 'material');
+	if (material === null || findMaterial(material) !== null) return;
+	const keys = materials.map((one) => one.key).join(', ');
+	problems.push(fault('unknown-material', [...path, 'material'], `is ${shown(material)}`, `one of ${keys}`));
+}
+
+function junctionProblems(junction: unknown, path: readonly Step[], problems: Problem[]): void {
+	const kind = textAt(junction, 'kind');
+	if (kind === null || !isRecord(junction)) return;
+	if (kind !== 'fixed') problems.push(fault('unknown-fitting', [...path, 'kind'], `is ${shown(kind)}`, '"fixed"'));
+	else if (junction.coefficient === undefined)
+		problems.push(fault('parameter-missing', [...path, 'coefficient'], 'is missing', 'a number'));
+}
+
+function fittingProblems(fitting: unknown, path: readonly Step[], problems: Problem[]): void {
+	const kind = textAt(fitting, 'kind');
+	if (kind === null || kind === '' || !isRecord(fitting)) return;
+	if (kind === 'fixed') {
+		if (fitting.coefficient === undefined)
+			problems.push(fault('parameter-missing', [...path, 'coefficient'], 'is missing', 'a number'));
+		return;
+	}
+	const entry = fittingEntry(kind);
+	if (entry === null) {
+		problems.push(
+			fault('unknown-fitting', [...path, 'kind'], `is ${shown(kind)}`, '"fixed" or a key of the catalogue of fittings')
+		);
+		return;
+	}
+	for (const [key, value] of Object.entries(fitting))
+		if (!OWN_KEYS.includes(key)) parameterProblem(entry, key, value, [...path, key], problems);
+}
+
+function parameterProblem(
+	entry: CatalogueEntry,
+	key: string,
+	value: unknown,
+	path: readonly Step[],
+	problems: Problem[]
+): void {
+	const parameter = entry.parameters.find((one) => one.name === key);
+	if (parameter === undefined) {
+		const names = entry.parameters.map((one) => one.name).join(', ') || 'no parameters';
+		problems.push(fault('parameter-unknown', path, `is no parameter of ${entry.key}`, names));
+		return;
+	}
+	if (parameter.options !== undefined) {
+		if (parameter.options.some((one) => one === value)) return;
+		const options = parameter.options.map((one) => JSON.stringify(one)).join(', ');
+		problems.push(fault('parameter-range', path, `is ${shown(value)}`, `one of ${options}`));
+		return;
+	}
+	if (typeof value !== 'number') {
+		problems.push(fault('type', path, `is ${shown(value)}`, 'a number'));
+		return;
+	}
+	const { min, max, unit } = parameter;
+	if (!Number.isFinite(value) || (value >= (min ?? value) && value <= (max ?? value))) return;
+	const expected = `a number from ${min} to ${max} ${unit}`.trim();
+	problems.push(fault('parameter-range', path, `is ${value}`, expected));
+}
+
+function fanProblems(document: unknown, problems: Problem[]): void {
+	const fan = isRecord(document) ? document.fan : null;
+	const curve = isRecord(fan) ? fan.curve : null;
+	if (!Array.isArray(curve)) return;
+	let before = -1;
+	curve.forEach((point: unknown, i) => {
+		const flow: unknown = Array.isArray(point) ? point[0] : null;
+		if (typeof flow !== 'number') return;
+		if (flow <= before)
+			problems.push(
+				fault('fan-curve', ['fan', 'curve', i, 0], `is ${flow}`, `more than ${before} m3/s, the point before`)
+			);
+		before = flow;
+	});
+}

@@ -1,0 +1,79 @@
+import { LIMITS } from './limits';
+import { fault, type Step } from './fault';
+import type { Problem } from './types';
+
+/**
+ * A copy of plain JSON data, made without recursion. Whatever is no JSON (a function, a ring of objects, NaN) becomes
+ * a problem, so that all later steps may read freely. Keys with the value undefined are left out, -0 becomes 0.
+ */
+export interface PlainCopy {
+	readonly value: unknown;
+	readonly problems: readonly Problem[];
+}
+
+type Holder = unknown[] | Record<string, unknown>;
+interface Visit {
+	readonly from: object;
+	readonly to: Holder;
+	readonly path: readonly Step[];
+}
+
+export function plainCopy(input: unknown): PlainCopy {
+	try {
+		return copyOf(input);
+	} catch {
+		// A getter or a proxy of the caller's threw.
+		const problem = fault('unreadable', [], 'the document cannot be read as plain data', 'plain JSON');
+		return { value: null, problems: [problem] };
+	}
+}
+
+function copyOf(input: unknown): PlainCopy {
+	const problems: Problem[] = [];
+	const waiting: Visit[] = [];
+	let values = 0;
+
+	function place(value: unknown, path: readonly Step[]): unknown {
+		values += 1;
+		if (value === null || typeof value === 'string' || typeof value === 'boolean') return value;
+		if (typeof value === 'number') {
+			if (!Number.isFinite(value)) problems.push(fault('not-finite', path, `is ${value}`, 'a finite number'));
+			return value === 0 ? 0 : value;
+		}
+		if (typeof value !== 'object') {
+			problems.push(fault('type', path, `is a ${typeof value}`, 'plain JSON'));
+			return null;
+		}
+		if (path.length >= LIMITS.depth) {
+			problems.push(fault('too-deep', path, 'is nested too deeply', `at most ${LIMITS.depth} levels`));
+			return null;
+		}
+		const to: Holder = Array.isArray(value) ? [] : {};
+		waiting.push({ from: value, to, path });
+		return to;
+	}
+
+	const value = place(input, []);
+	for (let visit = waiting.pop(); visit !== undefined; visit = waiting.pop()) {
+		const { from, to, path } = visit;
+		if (Array.isArray(from)) {
+			if (values + from.length > LIMITS.values) return tooLarge();
+			for (let i = 0; i < from.length; i += 1) (to as unknown[]).push(place(from[i] ?? null, [...path, i]));
+		} else {
+			const keys = Object.keys(from);
+			if (values + keys.length > LIMITS.values) return tooLarge();
+			for (const key of keys) {
+				const inner = (from as Record<string, unknown>)[key];
+				if (inner === undefined) continue;
+				if (key === '__proto__') problems.push(fault('type', path, 'has a key named __proto__', 'no such key'));
+				else (to as Record<string, unknown>)[key] = place(inner, [...path, key]);
+			}
+		}
+	}
+	return { value, problems };
+}
+
+function tooLarge(): PlainCopy {
+	const problem = fault('too-large', [], 'the document is too large', `at most ${LIMITS.values} values`);
+	return { value: null, problems: [problem] };
+}

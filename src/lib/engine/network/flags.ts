@@ -1,0 +1,46 @@
+import type { DesignDocument, Flag } from '../document/types';
+import type { Network } from './network';
+import { unreadKeyFlags } from './unread-keys';
+import { rowFlags } from './row-flags';
+import { partFlags } from './part-flags';
+import type { RowLoss } from './row-loss';
+import { serviceFlags } from './service-flags';
+
+/** Difference of the sums of supply and of the other side that is worth a word: common practice. */
+const FLOWS_DIFFER = 0.005;
+
+/** What an engineer should look at, in the order of the rows; what concerns the whole design comes first. */
+export function flagsOf(
+	document: DesignDocument,
+	network: Network,
+	losses: readonly RowLoss[],
+	totals: { readonly supplyFlow: number; readonly returnFlow: number }
+): readonly Flag[] {
+	const flags: Flag[] = [...serviceFlags(document), ...fanFlowFlags(totals)];
+	unreadKeyFlags(document, flags);
+	network.rows.forEach((row, place) => {
+		const solved = losses[place];
+		if (solved === undefined) return;
+		const joined = network.joined[place] === 1;
+		rowFlags(row, solved, joined, document.criteria, flags);
+		partFlags(row, solved, document.criteria, flags);
+	});
+	return flags;
+}
+
+function fanFlowFlags({ supplyFlow, returnFlow }: { supplyFlow: number; returnFlow: number }): Flag[] {
+	if (supplyFlow === 0 || returnFlow === 0) return [];
+	const value = Math.abs(supplyFlow - returnFlow) / Math.max(supplyFlow, returnFlow);
+	if (value <= FLOWS_DIFFER) return [];
+	return [
+		{
+			rule: 'fan-flows-differ',
+			row: null,
+			severity: 'caution',
+			message: 'The flows of the supply side and of the return side of the fan differ.',
+			value,
+			threshold: FLOWS_DIFFER,
+			basis: 'conservation of mass; the threshold is common practice'
+		}
+	];
+}

@@ -1,0 +1,1 @@
+export { solveDesign } from './solve';

@@ -1,0 +1,64 @@
+import type { Criteria, DesignRow, Flag } from '../document/types';
+import { fittingEntry } from '../fitting';
+import type { RowLoss } from './row-loss';
+
+const DAMPER = /damper|\bvcd\b/i;
+const FIRE = /\b(fire|smoke)\b/i;
+
+/** Fittings, equipment and outlet of one row: what is not settled, out of range, missing or needs a caution. */
+export function partFlags(row: DesignRow, solved: RowLoss, criteria: Criteria | undefined, flags: Flag[]): void {
+	for (const { name, inRange, note } of solved.rangeNotes)
+		flags.push({
+			rule: 'coefficient-range',
+			row: row.tag,
+			severity: inRange ? 'note' : 'caution',
+			message: `${name}: ${note}`,
+			basis: 'range of the source of the coefficient'
+		});
+
+	const open = solved.items.filter((item) => item.toBeConfirmed).map((item) => item.name);
+	if (open.length > 0)
+		flags.push({
+			rule: 'to-be-confirmed',
+			row: row.tag,
+			severity: 'note',
+			message: `To be confirmed: ${open.join(', ')}.`,
+			value: open.length,
+			basis: 'marked so in the design'
+		});
+
+	const names = [...(row.fittings ?? []).map((one) => one.name ?? ''), ...(row.equipment ?? []).map((one) => one.name)];
+	if (names.some((name) => FIRE.test(name) && DAMPER.test(name)))
+		flags.push({
+			rule: 'fire-damper-caution',
+			row: row.tag,
+			severity: 'caution',
+			message:
+				'Fire or smoke damper: only its pressure drop is counted. Where it must stand, its rating, listing, installation and access are not checked here.',
+			basis: 'outside the scope of a pressure calculation'
+		});
+
+	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !hasBalancingDamper(row, names))
+		flags.push({
+			rule: 'damper-missing',
+			row: row.tag,
+			severity: 'caution',
+			message: 'The row has an outlet but no damper to balance it.',
+			basis: 'criteria of the design'
+		});
+
+	if (row.outlet?.lossIs === 'static' && row.side !== 'supply')
+		flags.push({
+			rule: 'static-loss-at-inlet',
+			row: row.tag,
+			severity: 'note',
+			message:
+				'The loss of the inlet is given as static: one velocity pressure is added, as at an outlet. Give the total-pressure loss if the maker states it.',
+			basis: 'rule of the design document'
+		});
+}
+
+function hasBalancingDamper(row: DesignRow, names: readonly string[]): boolean {
+	if (names.some((name) => DAMPER.test(name) && !FIRE.test(name))) return true;
+	return (row.fittings ?? []).some((one) => fittingEntry(one.kind)?.family === 'dampers');
+}

@@ -1,0 +1,118 @@
+import type { Criteria, DesignRow, Flag } from '../document/types';
+import { COLEBROOK_ROUGHNESS, regime } from '../friction';
+import type { RowLoss } from './row-loss';
+
+const CRITERIA = 'criteria of the design';
+/** Longer side to shorter, where the design names none. */
+const ASPECT_RATIO = 4;
+
+/** Flow, friction and shape of one row against the criteria and against the range of the formulas. */
+export function rowFlags(
+	row: DesignRow,
+	solved: RowLoss,
+	joined: boolean,
+	criteria: Criteria | undefined,
+	flags: Flag[]
+): void {
+	const { reynolds, relativeRoughness, velocity, frictionRate } = solved.hydraulics;
+	if (regime(reynolds) === 'transition')
+		flags.push({
+			rule: 'reynolds-transition',
+			row: row.tag,
+			severity: 'note',
+			message: 'The flow is between laminar and turbulent: the friction factor is a blend, less sure than elsewhere.',
+			value: reynolds,
+			threshold: 4000,
+			basis: 'Colebrook–White holds above a Reynolds number of 4000, the laminar law below 2000'
+		});
+	if (relativeRoughness > COLEBROOK_ROUGHNESS.max)
+		flags.push({
+			rule: 'coefficient-range',
+			row: row.tag,
+			severity: 'caution',
+			message: 'The relative roughness is above the published range of the friction factor.',
+			value: relativeRoughness,
+			threshold: COLEBROOK_ROUGHNESS.max,
+			basis: 'range of Colebrook–White'
+		});
+	if (joined)
+		above('velocity-main', row, velocity, criteria?.mainVelocity, 'The velocity is above that of a main.', flags);
+	else
+		above(
+			'velocity-run-out',
+			row,
+			velocity,
+			criteria?.runOutVelocity,
+			'The velocity is above that of a run-out.',
+			flags
+		);
+	above('friction-rate', row, frictionRate, criteria?.frictionRate, 'The friction rate is above the criterion.', flags);
+	const flexible = row.flexible?.length ?? 0;
+	above(
+		'flexible-length',
+		row,
+		flexible,
+		criteria?.flexibleLength,
+		'The flexible duct is longer than it should be.',
+		flags
+	);
+	aspectFlag(row, criteria, flags);
+	if (row.joins !== null && row.junction === undefined)
+		flags.push({
+			rule: 'no-junction-loss',
+			row: row.tag,
+			severity: 'note',
+			message: 'No loss is counted where this row joins another.',
+			basis: 'the row names no junction'
+		});
+	if (solved.loss < 0)
+		flags.push({
+			rule: 'negative-loss',
+			row: row.tag,
+			severity: 'caution',
+			message: 'The row gains total pressure: a negative coefficient or thermal gravity is greater than its losses.',
+			value: solved.loss,
+			threshold: 0,
+			basis: 'a stream gains only what another one, or gravity, gives'
+		});
+	const rise = Math.abs(row.rise ?? 0);
+	if (rise > row.length + flexible)
+		flags.push({
+			rule: 'rise-exceeds-length',
+			row: row.tag,
+			severity: 'caution',
+			message: 'The rise is greater than the length of the row.',
+			value: rise,
+			threshold: row.length + flexible,
+			basis: 'geometry'
+		});
+}
+
+function above(
+	rule: Flag['rule'],
+	row: DesignRow,
+	value: number,
+	threshold: number | undefined,
+	message: string,
+	flags: Flag[]
+): void {
+	if (threshold === undefined || value <= threshold) return;
+	flags.push({ rule, row: row.tag, severity: 'caution', message, value, threshold, basis: CRITERIA });
+}
+
+function aspectFlag(row: DesignRow, criteria: Criteria | undefined, flags: Flag[]): void {
+	if (row.size.shape === 'round') return;
+	const { width, height } = row.size;
+	const value = Math.max(width, height) / Math.min(width, height);
+	const threshold = criteria?.aspectRatio ?? ASPECT_RATIO;
+	if (value <= threshold) return;
+	flags.push({
+		rule: 'aspect-ratio',
+		row: row.tag,
+		severity: 'caution',
+		message: 'The section is flat: it costs sheet metal and pressure.',
+		value,
+		threshold,
+		basis: criteria?.aspectRatio === undefined ? 'common practice' : CRITERIA
+	});
+}
