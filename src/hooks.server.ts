@@ -1,0 +1,38 @@
+import { randomUUID } from 'node:crypto';
+import type { Handle, HandleServerError, RequestEvent } from '@sveltejs/kit';
+import { authJs } from '$lib/server/auth/auth-js';
+import { refusal } from '$lib/server/auth/guard';
+import { identify } from '$lib/server/auth/identify';
+import { appearanceAttribute, appearanceOf } from '$lib/server/http/appearance';
+import { fromForeignOrigin } from '$lib/server/http/foreign-origin';
+import { log } from '$lib/server/http/log';
+import { problem } from '$lib/server/http/problem';
+import { withSecurityHeaders } from '$lib/server/http/security-headers';
+
+/** The one address of Auth.js that is open: where the form of a sign-in link leads. */
+const LINK_CALLBACK = '/auth/callback/email';
+
+async function answer(event: RequestEvent, resolve: Parameters<Handle>[0]['resolve']): Promise<Response> {
+	if (fromForeignOrigin(event.request, event.url))
+		return problem('foreign-origin', 'This was sent by a page of another site and was not done.');
+	if (event.url.pathname === LINK_CALLBACK && event.request.method === 'GET') return authJs.handle({ event, resolve });
+	await identify(event);
+	const refused = await refusal(event);
+	if (refused) return refused;
+	const attribute = appearanceAttribute(event.locals.appearance);
+	return resolve(event, { transformPageChunk: ({ html }) => html.replace('%appearance%', attribute) });
+}
+
+/** Every request passes here: who asks, whether they may, the reply, its headers. */
+export const handle: Handle = async ({ event, resolve }) => {
+	event.locals.appearance = appearanceOf(event.cookies);
+	return withSecurityHeaders(event.url, await answer(event, resolve));
+};
+
+/** What went wrong stays in the log, under an id that the person can quote. */
+export const handleError: HandleServerError = ({ error, event, status }) => {
+	if (status === 404) return { message: 'Not found' };
+	const id = randomUUID().slice(0, 8);
+	log.error({ id, err: error, method: event.request.method, route: event.route.id, status }, 'a request failed');
+	return { message: 'This did not work', id };
+};

@@ -1,0 +1,33 @@
+import { z } from 'zod';
+
+const messageSchema = z.object({
+	id: z.string(),
+	to: z.string(),
+	from: z.string(),
+	subject: z.string(),
+	date: z.string(),
+	text: z.string(),
+	html: z.string()
+});
+
+export type InboxMessage = z.infer<typeof messageSchema>;
+
+/** Address of the fake mail server's inbox; null where there is none, as in production. */
+export const inboxUrl = (): string | null => process.env.MAIL_INBOX_URL || null;
+
+async function read(path: string): Promise<unknown> {
+	const answer = await fetch(new URL(path, inboxUrl() ?? undefined));
+	if (answer.status === 404) return null;
+	if (!answer.ok) throw new Error(`the inbox answered ${answer.status}`);
+	return answer.json();
+}
+
+/** Every letter in the fake inbox, newest first. */
+export async function listMessages(): Promise<InboxMessage[]> {
+	return z.array(messageSchema).parse(await read('/messages'));
+}
+
+/** One letter; null when it is not there. */
+export async function findMessage(id: string): Promise<InboxMessage | null> {
+	return messageSchema.nullable().parse(await read(`/messages/${encodeURIComponent(id)}`));
+}
