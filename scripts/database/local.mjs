@@ -46,10 +46,12 @@ async function databasePort(cluster, env) {
 /**
  * The local database, running and there to be migrated.
  *
+ * @param {(started: { cluster: Cluster, mark: import('../machine/processes.mjs').ProcessMark, wasRunning: boolean })
+ *   => void} [onStarted] told as soon as it runs, so that it can be stopped should a later step fail
  * @returns {Promise<{ cluster: Cluster, adminUrl: string, appUrl: string, wasRunning: boolean, made: boolean,
- *   mark: import('../machine/processes.mjs').ProcessMark, port: number }>}
+ *   port: number }>}
  */
-export async function startLocalDatabase() {
+export async function startLocalDatabase(onStarted) {
 	makeFolders();
 	requireRoom(KEPT);
 	const cluster = await localCluster();
@@ -61,15 +63,16 @@ export async function startLocalDatabase() {
 			say(`  ${PROJECT} is closed to the database's user: its folder is ${cluster.folder}.`);
 		await makeCluster(cluster, { password: env.DATABASE_OWNER_PASSWORD });
 	}
-	const started = await startCluster(cluster, await databasePort(cluster, env));
-	localEnv({ DATABASE_PORT: String(started.port) });
-	const { port } = started;
+	const { port, wasRunning, mark } = await startCluster(cluster, await databasePort(cluster, env));
+	onStarted?.({ cluster, mark, wasRunning });
+	localEnv({ DATABASE_PORT: String(port) });
 	const owner = { user: OWNER, password: env.DATABASE_OWNER_PASSWORD, port };
 	await requireDatabase(databaseUrl({ ...owner, database: 'postgres' }), NAME, cluster.folder);
 	return {
-		...started,
 		cluster,
 		made,
+		port,
+		wasRunning,
 		adminUrl: databaseUrl({ ...owner, database: NAME }),
 		appUrl: databaseUrl({ user: APP, password: env.DATABASE_APP_PASSWORD, port, database: NAME })
 	};

@@ -12,6 +12,7 @@ import { complain, Interrupted, Refusal } from './say.mjs';
  * @property {(undo: () => unknown) => void} onStop keeps what is to be undone at the end
  * @property {() => void} checkpoint throws Interrupted once a stop was asked for
  * @property {boolean} stopping
+ * @property {boolean} signalled the stop was asked for from outside
  * @property {(code: number) => void} end
  */
 
@@ -41,6 +42,7 @@ export async function live(main, how) {
 	const finished = new Promise((resolve) => (finish = resolve));
 	const life = {
 		stopping: false,
+		signalled: false,
 		onStop: (/** @type {() => unknown} */ step) => void undo.push(step),
 		checkpoint() {
 			if (life.stopping) throw new Interrupted();
@@ -58,7 +60,9 @@ export async function live(main, how) {
 	// A second Ctrl-C changes nothing: npm passes the terminal's signal on, so each arrives twice.
 	for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']))
 		process.on(signal, () => {
-			if (!life.stopping) how.onSignal?.();
+			if (life.stopping) return;
+			life.signalled = true;
+			how.onSignal?.();
 			life.end(how.signalCode(signal));
 		});
 	process.on('uncaughtException', fail);

@@ -1,6 +1,6 @@
 /** Programs that the commands start: each in a process group of its own, stopped by its id. */
 import { spawn } from 'node:child_process';
-import { readFileSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 import { setTimeout as delay } from 'node:timers/promises';
 
 /**
@@ -111,4 +111,34 @@ export function isAlive(mark) {
 	if (!mark) return false;
 	const found = processState(mark.pid);
 	return found !== null && found.state !== 'Z' && found.state !== 'X' && found.began === mark.began;
+}
+
+/**
+ * Stops every process that carries a variable with this value: those that were started with it and all that they
+ * started in turn, also in groups of their own, as a browser's are.
+ * @param {string} name @param {string} value
+ */
+export async function stopMarked(name, value) {
+	const wanted = `${name}=${value}`;
+	const marked = readdirSync('/proc').filter((pid) => {
+		if (!/^\d+$/.test(pid) || Number(pid) === process.pid) return false;
+		try {
+			return readFileSync(`/proc/${pid}/environ`, 'utf8').split('\0').includes(wanted);
+		} catch {
+			return false;
+		}
+	});
+	const marks = marked.map((pid) => markOf(Number(pid)));
+	const send = (/** @type {NodeJS.Signals} */ signal) => {
+		for (const mark of marks) {
+			try {
+				if (isAlive(mark)) process.kill(mark.pid, signal);
+			} catch {
+				// It went in this very moment.
+			}
+		}
+	};
+	send('SIGTERM');
+	for (let n = 0; n < 40 && marks.some(isAlive); n++) await delay(50);
+	send('SIGKILL');
 }
