@@ -1,3 +1,53 @@
+import { BLADES_ANGLE, BUTTERFLY_ANGLE, bladeDamper, butterflyDamper } from './damper-tables';
 import type { FittingDefinition } from './definition';
+import { heldWithin, numberParameter } from './parameters';
 
-export const dampers: readonly FittingDefinition[] = [];
+const openAngle = (max: number) => numberParameter('angle', 'Blade angle from open', '°', 0, { min: 0, max });
+const CAUTION = 'A value from memory; it rises steeply as the blade closes, so the setting is found by measuring.';
+
+const butterfly: FittingDefinition = {
+	entry: {
+		key: 'damper-butterfly',
+		name: 'Butterfly damper',
+		family: 'dampers',
+		shapes: ['round', 'rectangular', 'oval'],
+		parameters: [openAngle(80)],
+		reference: 'row',
+		range: '0 to 60° from open; beyond, the last value',
+		method: 'Table of the angle, log-linear between',
+		source: 'SMACNA, HVAC Systems Duct Design, after Idelchik, from memory',
+		known: 'from memory',
+		uncertainty: 0.4,
+		picture: 'damper',
+		caution: CAUTION
+	},
+	coefficient(values, { size }, note) {
+		if (size.shape === 'oval') note('the table for rectangles stands in for a flat oval');
+		const angle = heldWithin(values.number('angle'), BUTTERFLY_ANGLE, 'angle', note);
+		return butterflyDamper(angle, size.shape === 'round' ? 'round' : 'rectangular');
+	}
+};
+
+function bladed(blades: 'parallel' | 'opposed'): FittingDefinition {
+	return {
+		entry: {
+			key: `damper-${blades}-blades`,
+			name: `Damper, ${blades} blades`,
+			family: 'dampers',
+			shapes: ['rectangular'],
+			parameters: [openAngle(80)],
+			reference: 'row',
+			range: '0 to 80° from open, total blade length over perimeter of 0.3',
+			method: 'Table of the angle, log-linear between',
+			source: 'SMACNA, HVAC Systems Duct Design, multi-blade dampers, from memory',
+			known: 'from memory',
+			uncertainty: 0.4,
+			picture: 'damper',
+			caution: CAUTION
+		},
+		coefficient: (values, _context, note) =>
+			bladeDamper(heldWithin(values.number('angle'), BLADES_ANGLE, 'angle', note), blades)
+	};
+}
+
+export const dampers: readonly FittingDefinition[] = [butterfly, bladed('parallel'), bladed('opposed')];

@@ -1,3 +1,70 @@
+import { CONE_ANGLE, coneFriction, conicalExpansionIdelchik } from './area-change-idelchik';
 import type { FittingDefinition } from './definition';
+import { numberParameter } from './parameters';
+import { idelchik } from './sources';
 
-export const exits: readonly FittingDefinition[] = [];
+const CAUTION =
+	'The velocity pressure lost in the room: leave it out where the loss of the outlet already contains it.';
+
+/**
+ * Plain exit into a room.
+ *
+ *   C = alpha
+ *
+ * @param alpha kinetic energy factor of the velocity profile [-]: 1 uniform, about 1.05 developed turbulent, 2 laminar
+ * @returns C on the velocity pressure in the duct [-]
+ * @source Conservation of energy
+ * @check fixtures/published/exits.json
+ */
+export function plainExit(alpha: number): number {
+	return alpha;
+}
+
+const plain: FittingDefinition = {
+	entry: {
+		key: 'exit-plain',
+		name: 'Exit, plain duct end',
+		family: 'exits',
+		shapes: ['round', 'rectangular', 'oval'],
+		parameters: [],
+		reference: 'row',
+		range: 'uniform velocity; 1.05 for a developed turbulent profile',
+		method: 'The whole velocity pressure is lost',
+		source: 'Conservation of energy',
+		known: 'published formula',
+		uncertainty: 0.05,
+		picture: 'diffuser',
+		caution: CAUTION
+	},
+	coefficient: () => plainExit(1)
+};
+
+const diffuser: FittingDefinition = {
+	entry: {
+		key: 'exit-diffuser',
+		name: 'Exit by a conical diffuser',
+		family: 'exits',
+		shapes: ['round', 'rectangular', 'oval'],
+		parameters: [
+			numberParameter('areaRatio', 'Duct area over outlet area', '', 0.5, { min: 0.01, max: 1 }),
+			numberParameter('angle', 'Included angle', '°', 14, CONE_ANGLE)
+		],
+		reference: 'row',
+		range: 'cones; shock term to 60° included, sudden expansion from 90°',
+		method: 'Idelchik, shock term and wall friction, and the velocity pressure at the outlet',
+		source: idelchik('5-4'),
+		known: 'published formula',
+		uncertainty: 0.3,
+		picture: 'diffuser',
+		caution: CAUTION
+	},
+	coefficient(values, { size, frictionFactor }, note) {
+		const a = values.number('areaRatio');
+		const d = values.number('angle');
+		if (size.shape !== 'round')
+			note('the formula is for cones; a pyramid loses some 1.25 to 1.4 times as much (from memory)');
+		return conicalExpansionIdelchik(d, a) + coneFriction(d, a, frictionFactor) + plainExit(1) * a * a;
+	}
+};
+
+export const exits: readonly FittingDefinition[] = [plain, diffuser];

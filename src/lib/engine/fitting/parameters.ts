@@ -33,6 +33,11 @@ export function heldWithin(value: number, range: Range, what: string, note: Note
 	return held;
 }
 
+/** A note when value is outside range, where the formula is used all the same. */
+export function noteOutside(value: number, range: Range, what: string, note: Note): void {
+	if (!(value >= range.min && value <= range.max)) note(`${what} ${value} is outside ${range.min} to ${range.max}`);
+}
+
 /** Parameters of a document read for one entry: defaults for what is missing, limits for what is beyond them. */
 export function readParameters(entry: CatalogueEntry, given: FittingParameters, note: Note): ParameterValues {
 	const parameterOf = (name: string): FittingParameter => {
