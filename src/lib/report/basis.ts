@@ -1,0 +1,74 @@
+import {
+	findMaterial,
+	formatDensity,
+	formatElevation,
+	formatHumidity,
+	formatRoughness,
+	formatTemperature,
+	unitOf,
+	type DesignAir,
+	type DesignDocument,
+	type UnitSystem
+} from '$lib/engine';
+import type { ReportInput } from './input';
+import type { Labelled } from './model';
+import { SERVICE } from './wording';
+
+/** What the figures rest on: air, formulas, roughness, what is counted and what is not. */
+export function basisOf({ document, solution, units, heading }: ReportInput): Labelled[] {
+	const density = `${formatDensity(solution.air.density, units)} ${unitOf('density', units)}`;
+	const { surroundings } = document;
+	return [
+		{ label: 'Air', value: [...airWords(document.air, units), density].join(', ') },
+		...(surroundings ? [{ label: 'Surroundings', value: surroundingsWords(surroundings, units) }] : []),
+		{ label: 'Service', value: heading.service.trim() || SERVICE[document.service ?? 'general'] },
+		{ label: 'Friction', value: 'Darcy–Weisbach, Colebrook–White' },
+		{ label: 'Roughness', value: roughnessWords(document, units) },
+		{ label: 'Losses', value: 'coefficient × own velocity pressure' },
+		{ label: 'Flexible duct', value: flexibleWords(document) },
+		{ label: 'Pressures', value: 'total pressure, gauge' },
+		{ label: 'Leakage, margin', value: 'none included' },
+		{ label: 'Engine', value: `Evendraft ${solution.engineVersion}` }
+	];
+}
+
+function airWords(air: DesignAir, units: UnitSystem): string[] {
+	if ('density' in air) return ['density as entered'];
+	const { temperature, relativeHumidity = 0, elevation = 0 } = air;
+	const words = [`${formatTemperature(temperature, units)} ${unitOf('temperature', units)}`];
+	if (relativeHumidity > 0) words.push(`${formatHumidity(relativeHumidity, units)} % RH`);
+	if (air.pressure !== undefined) words.push('pressure as entered');
+	else words.push(elevation === 0 ? 'sea level' : `${formatElevation(elevation, units)} ${unitOf('elevation', units)}`);
+	return words;
+}
+
+function surroundingsWords(air: DesignAir, units: UnitSystem): string {
+	if ('density' in air) return `${formatDensity(air.density, units)} ${unitOf('density', units)}, for thermal gravity`;
+	return `${formatTemperature(air.temperature, units)} ${unitOf('temperature', units)}, for thermal gravity`;
+}
+
+type Holder = { readonly roughness?: number; readonly material?: string };
+
+/** The roughness in use, row by row, each named once; a figure goes before a material that stands beside it. */
+function roughnessWords(document: DesignDocument, units: UnitSystem): string {
+	const own = ({ roughness, material }: Holder): string | null => {
+		const known = material === undefined ? null : findMaterial(material);
+		const value = roughness ?? known?.roughness;
+		if (value === undefined) return null;
+		const figure = `${formatRoughness(value, units)} ${unitOf('roughness', units)}`;
+		return roughness === undefined && known ? `${figure}, ${lowered(known.name)}` : figure;
+	};
+	const general = own(document) ?? own({ material: 'galvanized-steel' }) ?? '';
+	const used = [...new Set(document.rows.map((row) => own(row) ?? general))];
+	if (used.length <= 3) return used.join('; ');
+	return `${used.slice(0, 2).join('; ')}; and ${used.length - 2} others`;
+}
+
+function flexibleWords(document: DesignDocument): string {
+	const factors = document.rows.flatMap(({ flexible }) => (flexible ? [flexible.factor ?? 4] : []));
+	if (factors.length === 0) return 'none';
+	const [least, most] = [Math.min(...factors), Math.max(...factors)].map((factor) => String(Number(factor.toFixed(2))));
+	return `${least === most ? least : `${least} to ${most}`} × the rigid rate`;
+}
+
+const lowered = (name: string) => name.charAt(0).toLowerCase() + name.slice(1);

@@ -1,0 +1,50 @@
+import { formatFlow, formatPressure, unitOf, type Side } from '$lib/engine';
+import type { ReportInput } from './input';
+import type { Result, ResultCell } from './model';
+import { requirementOf } from './network-order';
+import { NOTHING } from './wording';
+
+/** The figures that a reader looks for first, each with its basis. */
+export function resultOf({ solution, units }: ReportInput): Result {
+	const { fan, index, paths } = solution;
+	const unit = unitOf('pressure', units);
+	const pressure = (label: string, value: number | null, before = ''): ResultCell => ({
+		label,
+		value: before + formatPressure(value, units),
+		unit: value === null ? '' : unit,
+		aside: null
+	});
+	const indexCell = (label: string, outlet: string | null): ResultCell[] => {
+		const path = paths.find((one) => one.outlet === outlet);
+		if (path === undefined) return [];
+		return [{ label, value: path.outlet, unit: '', aside: `${formatPressure(requirementOf(path), units)} ${unit}` }];
+	};
+	const spread = paths.reduce((most, { spare }) => Math.max(most, spare), 0);
+	const outletPressure = fan.staticPressure === null ? null : fan.totalPressure - fan.staticPressure;
+	const inlets = new Set(paths.map(({ side }) => side));
+	const cells = [
+		pressure('Fan duty, total pressure', fan.totalPressure),
+		{ label: 'at flow, actual', value: formatFlow(fan.flow, units), unit: unitOf('flow', units), aside: null },
+		...indexCell(index.return === null ? 'Index outlet' : 'Index, supply', index.supply),
+		...indexCell(index.supply === null ? 'Index inlet' : `Index, ${suctionName(inlets)}`, index.return),
+		spread > 0 ? pressure('Dampers must take', spread, 'up to ') : pressure('Dampers must take', null)
+	];
+	if (outletPressure !== null) cells.push(pressure('Velocity pressure at fan outlet', outletPressure));
+	return { cells, notes: notesOf(fan.staticPressure, (value) => `${formatPressure(value, units)} ${unit}`) };
+}
+
+function notesOf(staticPressure: number | null, shown: (value: number) => string): string[] {
+	const inside = 'Losses inside the unit are only those entered.';
+	const margin = 'No margin and no leakage are included.';
+	if (staticPressure === null) return [`${inside} ${margin}`];
+	return [
+		`${inside} ${margin} Fan static pressure, total less the velocity pressure at the fan outlet: ${shown(staticPressure)}.`
+	];
+}
+
+/** One word for the side on which the fan draws. */
+export function suctionName(sides: ReadonlySet<Side>): string {
+	const drawing = (['return', 'exhaust', 'outdoor'] as const).filter((side) => sides.has(side));
+	if (drawing.length === 1) return drawing[0] === 'outdoor' ? 'outdoor air' : (drawing[0] ?? NOTHING);
+	return 'suction';
+}
