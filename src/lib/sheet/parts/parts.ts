@@ -1,20 +1,6 @@
-/** Keys of the symbols that draw a part. */
-export type Picture =
-	| 'elbow'
-	| 'tee'
-	| 'shoe'
-	| 'wye'
-	| 'transition'
-	| 'damper'
-	| 'firedamper'
-	| 'flexible'
-	| 'silencer'
-	| 'coil'
-	| 'filter'
-	| 'fan'
-	| 'louvre'
-	| 'diffuser'
-	| 'grille';
+import type { Equipment, FittingEntry, Junction, Picture } from '$lib/engine';
+
+export type { Picture } from '$lib/engine';
 
 /** What family of part a word names. */
 export type PartWord = 'elbow' | 'junction' | 'transition' | 'entry' | 'exit' | 'damper' | 'device';
@@ -25,12 +11,13 @@ export interface PartFitting {
 	/** 'fixed' (has a coefficient), or a kind of the catalogue without its shape: 'elbow-smooth', 'entry-flush' … */
 	readonly kind: string;
 	readonly count: number;
-	/** As printed: 'Elbow', 'Tee, branch', 'Fire damper FD-01'. */
+	/** As printed: 'Elbow', 'Tee branch', 'Fire damper FD-01'. */
 	readonly name: string;
 	readonly coefficient?: number;
+	/** By the names of the catalogue: radiusRatio, angle, pieces, areaRatio, leg … */
 	readonly parameters: Readonly<Record<string, number | string>>;
 	readonly picture: Picture;
-	/** Set by a trailing question mark. */
+	/** Set by a question mark. */
 	readonly toBeConfirmed: boolean;
 }
 
@@ -52,21 +39,9 @@ export interface Parts {
 }
 
 /** A fitting as the design document holds it. */
-export type DocumentFitting = {
-	readonly kind: string;
-	readonly count?: number;
-	readonly name?: string;
-	readonly coefficient?: number;
-	readonly toBeConfirmed?: boolean;
-} & Readonly<Record<string, string | number | boolean | undefined>>;
-
+export type DocumentFitting = FittingEntry;
 /** An equipment loss as the design document holds it. */
-export interface DocumentEquipment {
-	readonly name: string;
-	readonly loss: number;
-	readonly exponent: number;
-	readonly toBeConfirmed?: boolean;
-}
+export type DocumentEquipment = Equipment;
 
 /** A part that does not suit the row. */
 export interface PartProblem {
@@ -77,7 +52,7 @@ export interface PartProblem {
 
 /** The parts of a row, ready for its document. */
 export interface DocumentParts {
-	readonly junction: DocumentFitting | null;
+	readonly junction: Junction | null;
 	readonly fittings: readonly DocumentFitting[];
 	readonly equipment: readonly DocumentEquipment[];
 	readonly problems: readonly PartProblem[];

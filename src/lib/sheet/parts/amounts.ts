@@ -1,0 +1,92 @@
+import { readPressure, type UnitSystem } from '$lib/engine';
+
+/** The figures of one part, taken out of its text. */
+export interface Amounts {
+	readonly count: number;
+	readonly coefficient: number | null;
+	/** Pa */
+	readonly pressure: number | null;
+	readonly exponent: number | null;
+	readonly parameters: Readonly<Record<string, number | string>>;
+	/** What stood in brackets and is no figure. */
+	readonly note: string | null;
+	readonly toBeConfirmed: boolean;
+	/** What is left: words and tags. */
+	readonly rest: string;
+}
+
+const N = '(-?\\d*[.,]?\\d+)';
+const DECIMAL = '(\\d*[.,]\\d+)';
+const START = '(?<![a-z0-9])';
+
+const COEFFICIENT = new RegExp(`${START}(?:c|zeta|ζ) ?[=:]? ?${N}(?![\\d.,]*\\d)`);
+const PRESSURE =
+	/(\d*[.,]?\d+) ?(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o|in\b\.?|")/;
+const PARAMETERS: readonly (readonly [string, RegExp])[] = [
+	['radiusRatio', new RegExp(`${START}r(?: ?/ ?[dwh])? ?=? ?${N}`)],
+	['pieces', /(?<![\d.,])(\d+)[ -]?(?=(?:pieces?|pc|gores?|segments?)\b)/],
+	['angle', new RegExp(`${N} ?(?:°|deg(?:rees?)?\\b)`)],
+	['areaRatio', new RegExp(`${START}(?:area ratio|a) ?=? ?${DECIMAL}`)],
+	['thicknessRatio', new RegExp(`${START}t ?=? ?${DECIMAL}`)],
+	['lengthRatio', new RegExp(`${START}l ?=? ?${DECIMAL}`)]
+];
+const EXPONENT = new RegExp(`${START}n ?=? ?${DECIMAL}`);
+const PLANE = /\bplane ?=? ?(width|height|w|h)\b/;
+/** Angles that people write before an elbow without the sign. */
+const BARE_ANGLE = /^(15|22[.,]5|30|45|60|75|90)(?= |$)(?! ?x)/;
+const COUNT = /^(\d{1,4})(?: ?[x*] ?| (?=\d)| ?(?=[a-z]))/;
+const COUNT_AFTER = / ?[x*] ?(\d{1,4})$/;
+
+/** A figure with a point or a comma. */
+function figure(text: string): number {
+	return Number(text.replace(',', '.'));
+}
+
+/** Takes count, coefficient, pressure, parameters and the question mark out of the plain text of one part. */
+export function takeAmounts(plain: string, units: UnitSystem): Amounts {
+	let rest = plain;
+	const take = (pattern: RegExp): string | null => {
+		const found = pattern.exec(rest);
+		if (!found) return null;
+		rest = `${rest.slice(0, found.index)} ${rest.slice(found.index + found[0].length)}`.replace(/ +/g, ' ').trim();
+		return found[1] ?? found[0];
+	};
+	const toBeConfirmed = take(/\?+/) !== null;
+	const pressureText = PRESSURE.exec(rest)?.[0] ?? null;
+	const coefficient = take(COEFFICIENT);
+	const pressure = pressureText === null || !rest.includes(pressureText) ? null : pressureOf(pressureText, units);
+	if (pressure !== null) take(PRESSURE);
+	const parameters: Record<string, number | string> = {};
+	for (const [name, pattern] of PARAMETERS) {
+		const typed = take(pattern);
+		if (typed !== null) parameters[name] = figure(typed);
+	}
+	const plane = take(PLANE);
+	if (plane !== null) parameters['plane'] = plane.startsWith('w') ? 'width' : 'height';
+	const exponent = take(EXPONENT);
+	rest = rest
+		.replace(/\(\s*\)/g, ' ')
+		.replace(/\( *([bs]) *\)/g, ' $1 ')
+		.replace(/ +/g, ' ')
+		.trim();
+	const note = take(/\(([^()]*)\)/);
+	const bareAngle = take(BARE_ANGLE);
+	const count = bareAngle === null ? (take(COUNT) ?? take(COUNT_AFTER)) : null;
+	const angle = bareAngle ?? take(BARE_ANGLE);
+	if (angle !== null && parameters['angle'] === undefined) parameters['angle'] = figure(angle);
+	return {
+		count: count === null ? 1 : Number(count),
+		coefficient: coefficient === null ? null : figure(coefficient),
+		pressure,
+		exponent: exponent === null ? null : figure(exponent),
+		parameters,
+		note: note === null || note.trim() === '' ? null : note.trim(),
+		toBeConfirmed,
+		rest
+	};
+}
+
+function pressureOf(text: string, units: UnitSystem): number | null {
+	const reading = readPressure(text, units);
+	return reading.ok ? reading.value : null;
+}

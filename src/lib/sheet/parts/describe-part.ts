@@ -1,0 +1,43 @@
+import { formatPressure, unitOf, type UnitSystem } from '$lib/engine';
+import type { PartEquipment, PartFitting, Picture } from './parts';
+
+const LETTERS: Readonly<Record<string, (value: number | string) => string>> = {
+	radiusRatio: (value) => `r ${value}`,
+	angle: (value) => `${value}°`,
+	pieces: (value) => `${value} pieces`,
+	areaRatio: (value) => `area ratio ${value}`,
+	thicknessRatio: (value) => `t ${value}`,
+	lengthRatio: (value) => `l ${value}`,
+	leg: (value) => `row is the ${value} leg`,
+	plane: (value) => `${value} in the plane of the bend`
+};
+
+/** The parameters of a fitting as they are said: `r 1, 45°`. */
+export function parameterWords(parameters: PartFitting['parameters']): string[] {
+	return Object.entries(parameters).map(([name, value]) => LETTERS[name]?.(value) ?? `${name} ${value}`);
+}
+
+/** A part in words with the key of its symbol. */
+export function describePart(
+	part: PartFitting | PartEquipment,
+	units: UnitSystem = 'SI'
+): { readonly words: string; readonly picture: Picture } {
+	const words = 'loss' in part ? equipmentWords(part, units) : fittingWords(part);
+	if (part.toBeConfirmed) words.push('to be confirmed');
+	return { words: words.join(', '), picture: part.picture };
+}
+
+function equipmentWords(part: PartEquipment, units: UnitSystem): string[] {
+	const loss = `${formatPressure(part.loss, units)} ${unitOf('pressure', units)}`;
+	return part.exponent === 2 ? [part.name, loss] : [part.name, loss, `exponent ${part.exponent}`];
+}
+
+function fittingWords(part: PartFitting): string[] {
+	const name = part.count > 1 ? `${part.count} × ${part.name}` : part.name;
+	const known = part.coefficient === undefined ? 'from the catalogue' : `C ${signed(part.coefficient)}`;
+	return [name, ...parameterWords(part.parameters), known];
+}
+
+function signed(value: number): string {
+	return String(value).replace('-', '−');
+}

@@ -1,0 +1,109 @@
+import { fittingEntry, type CatalogueEntry, type FittingParameter, type Junction, type Size } from '$lib/engine';
+import { parameterWords } from './describe-part';
+import type { DocumentEquipment, DocumentFitting, DocumentParts, PartFitting, PartProblem, Parts } from './parts';
+
+/**
+ * The parts of a cell as the design document holds them. Kinds of elbows depend on the row's shape (an oval takes the
+ * rectangular ones); a part that does not suit it is left out and named among the problems.
+ */
+export function fittingsFor(parts: Parts, size: Size): DocumentParts {
+	const problems: PartProblem[] = [];
+	const fittings: DocumentFitting[] = [];
+	for (const part of parts.fittings) {
+		const found = part.kind === 'fixed' ? fixed(part) : fromCatalogue(part, size);
+		if ('message' in found) problems.push(found);
+		else fittings.push(found);
+	}
+	const equipment: DocumentEquipment[] = parts.equipment.map(({ name, loss, exponent, toBeConfirmed }) => ({
+		name,
+		loss,
+		exponent,
+		...(toBeConfirmed ? { toBeConfirmed } : {})
+	}));
+	return { junction: parts.junction === null ? null : junctionOf(parts.junction), fittings, equipment, problems };
+}
+
+function junctionOf(part: PartFitting): Junction {
+	const { coefficient, name, toBeConfirmed } = fixed(part);
+	return { kind: 'fixed', coefficient, name, ...(toBeConfirmed ? { toBeConfirmed } : {}) };
+}
+
+/** What was typed beside the coefficient goes into the name: the coefficient alone is computed with. */
+function fixed(part: PartFitting): DocumentFitting {
+	const name = [part.name, ...parameterWords(part.parameters)].join(', ');
+	return { kind: 'fixed', coefficient: part.coefficient ?? 0, ...common(part), name };
+}
+
+function common(part: PartFitting) {
+	return {
+		name: part.name,
+		...(part.count > 1 ? { count: part.count } : {}),
+		...(part.toBeConfirmed ? { toBeConfirmed: true } : {})
+	};
+}
+
+function fromCatalogue(part: PartFitting, size: Size): DocumentFitting | PartProblem {
+	const entry = entryFor(part, size);
+	if (entry === null) return unsuited(part, size);
+	const parameters: Record<string, number | string> = {};
+	for (const [name, value] of Object.entries(part.parameters)) {
+		const known = entry.parameters.find((parameter) => parameter.name === name);
+		if (known === undefined) {
+			// A vaned elbow is always one of 90°: saying so is no fault.
+			if (name === 'angle' && value === 90) continue;
+			return problem(part, `${entry.name} has no ${parameterWords({ [name]: value })[0]}`, takes(entry));
+		}
+		const fault = faultOf(known, value);
+		if (fault !== null) return problem(part, `${part.name}: ${known.label} ${value} ${fault}`, takes(entry));
+		parameters[name] = value;
+	}
+	return { kind: entry.key, ...common(part), ...parameters };
+}
+
+/** The entry for the row's shape: by its own key, by the shape's, or the first damper that suits. */
+function entryFor(part: PartFitting, size: Size): CatalogueEntry | null {
+	const shape = size.shape === 'round' ? 'round' : 'rectangular';
+	const keys =
+		part.kind === 'damper'
+			? ['damper-butterfly', 'damper-opposed-blades', 'damper-parallel-blades']
+			: [part.kind, `${shape}-${part.kind}`];
+	for (const key of keys) {
+		const entry = fittingEntry(key);
+		if (entry?.shapes.includes(size.shape)) return entry;
+	}
+	return null;
+}
+
+function unsuited(part: PartFitting, size: Size): PartProblem {
+	const others = ['round', 'rectangular', 'oval'].filter((shape) =>
+		[part.kind, `${shape}-${part.kind}`].some((key) =>
+			fittingEntry(key)?.shapes.some((known) => known === shape && known !== size.shape)
+		)
+	);
+	const message =
+		others.length > 0
+			? `${part.name} is made for ${others.join(' and ')} duct; this row is ${size.shape}`
+			: `${part.name} is not in the catalogue`;
+	return problem(part, message, 'another part, or its coefficient, such as C0.23');
+}
+
+function faultOf(parameter: FittingParameter, value: number | string): string | null {
+	if (parameter.options !== undefined) {
+		return parameter.options.includes(value) ? null : `is not one of ${parameter.options.join(', ')}`;
+	}
+	if (typeof value !== 'number') return 'is not a figure';
+	return value < parameter.min || value > parameter.max ? `is outside ${parameter.min} to ${parameter.max}` : null;
+}
+
+function takes(entry: CatalogueEntry): string {
+	const names = entry.parameters.map(
+		({ label, options, min, max }) => `${label} ${options?.join(', ') ?? `${min} to ${max}`}`
+	);
+	return names.length === 0
+		? 'no figures, or its coefficient, such as C0.23'
+		: `${names.join('; ')}, or C, such as C0.23`;
+}
+
+function problem(part: PartFitting, message: string, expected: string): PartProblem {
+	return { part: part.name, message, expected };
+}

@@ -1,0 +1,166 @@
+import type { Picture, UnitSystem } from '$lib/engine';
+import { takeAmounts, type Amounts } from './amounts';
+import { findWord, nearestWords, type Role, type Word } from './lexicon';
+import type { PartEquipment, PartFitting, PartWord } from './parts';
+
+export type PartReading =
+	| { readonly ok: true; readonly slot: 'junction' | 'fitting'; readonly part: PartFitting }
+	| { readonly ok: true; readonly slot: 'equipment'; readonly part: PartEquipment; readonly count: number }
+	| { readonly ok: false; readonly message: string; readonly expected: string };
+
+const TAG = /^[a-z]{1,4}-?\d{1,4}[a-z]?$/;
+const MOST = { fittings: 1000, equipment: 50, coefficient: 1_000_000 } as const;
+
+const GIVE_EITHER = 'its coefficient or its pressure, such as C0.6 or 12 Pa';
+
+/** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [?]`, in any order. Never throws. */
+export function readPart(plain: string, units: UnitSystem): PartReading {
+	const amounts = takeAmounts(plain, units);
+	const known: Word[] = [];
+	const tags: string[] = [];
+	for (const typed of amounts.rest.split(/[ +&]+/).filter((word) => word !== '' && word !== '-')) {
+		const bare = typed.replace(/^[.:-]+|[.:]+$/g, '');
+		const word = findWord(bare);
+		if (word) known.push(word);
+		else if (TAG.test(bare)) tags.push(bare.toUpperCase());
+		else return unknownWord(typed);
+	}
+	const roles = new Set(known.map((word) => word.role));
+	if (known.length === 0 && amounts.parameters['angle'] !== undefined) roles.add('elbow');
+	if (known.length === 0 && amounts.parameters['radiusRatio'] !== undefined) roles.add('elbow');
+	return assembled(plain, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
+}
+
+function unknownWord(typed: string): PartReading {
+	if (/\d/.test(typed)) return { ok: false, message: `“${typed}” is not understood`, expected: exampleOf('elbow') };
+	const message = `“${typed}” is not a known part`;
+	return { ok: false, message, expected: `known words nearest to it: ${nearestWords(typed).join(', ')}` };
+}
+
+function assembled(
+	plain: string,
+	amounts: Amounts,
+	roles: ReadonlySet<Role>,
+	name: string,
+	picture: Picture
+): PartReading {
+	const refuse = (message: string, expected: string): PartReading => ({
+		ok: false,
+		message: `“${plain}”: ${message}`,
+		expected
+	});
+	const { coefficient, pressure, count, parameters, toBeConfirmed } = amounts;
+	const word = wordOf(roles);
+	if (word === null) return refuse('what part it is is missing', 'a word such as elbow, damper or silencer');
+	if (coefficient !== null && pressure !== null)
+		return refuse('has both a coefficient and a pressure', 'one of the two');
+	if (count < 1) return refuse('a count is 1 or more', exampleOf(word));
+	if (coefficient !== null && Math.abs(coefficient) > MOST.coefficient)
+		return refuse('the coefficient is too great', 'C0.23');
+	if (word === 'junction') {
+		if (count > 1) return refuse('a row has one junction, at its fan end', 'the junction without a count');
+		if (coefficient === null) return refuse('a junction needs its coefficient', 'such as tee branch C0.8');
+		return { ok: true, slot: 'junction', part: fitting('fixed') };
+	}
+	if (pressure !== null) {
+		if (count > MOST.equipment) return refuse('the count is too great', `at most ${MOST.equipment}`);
+		if (amounts.exponent !== null && amounts.exponent > 4) return refuse('the exponent is too great', 'at most 4');
+		const part = { name, loss: pressure, exponent: amounts.exponent ?? 2, picture, toBeConfirmed };
+		return { ok: true, slot: 'equipment', part, count };
+	}
+	if (count > MOST.fittings) return refuse('the count is too great', `at most ${MOST.fittings}`);
+	if (coefficient !== null) return { ok: true, slot: 'fitting', part: fitting('fixed') };
+	const kind = kindOf(word, roles);
+	if (kind === null) return refuse(`${GIVE_EITHER.split(',')[0]} is missing`, missingHint(word));
+	return { ok: true, slot: 'fitting', part: fitting(kind) };
+
+	function fitting(kind: string): PartFitting {
+		const leg = roles.has('smaller') ? { leg: 'smaller' } : roles.has('larger') ? { leg: 'larger' } : {};
+		const base = {
+			word: word as PartWord,
+			kind,
+			count,
+			name,
+			parameters: { ...parameters, ...leg },
+			picture,
+			toBeConfirmed
+		};
+		return coefficient === null ? base : { ...base, coefficient };
+	}
+}
+
+/** A junction carries its reducer; a device that is also an entry is a device only if no entry is named. */
+function wordOf(roles: ReadonlySet<Role>): PartWord | null {
+	if (roles.has('junction')) return 'junction';
+	if (roles.has('special-damper')) return 'device';
+	if (roles.has('damper') || roles.has('butterfly')) return 'damper';
+	if (roles.has('elbow')) return 'elbow';
+	if (roles.has('transition') || roles.has('expansion') || roles.has('contraction')) return 'transition';
+	if (roles.has('entry') || roles.has('bellmouth')) return 'entry';
+	if (roles.has('exit')) return 'exit';
+	if (roles.has('device')) return 'device';
+	return roles.has('mitred') || roles.has('vaned') ? 'elbow' : null;
+}
+
+/** Kind of the catalogue without its shape, or null where only a coefficient or a pressure can tell. */
+function kindOf(word: PartWord, roles: ReadonlySet<Role>): string | null {
+	if (word === 'elbow') {
+		if (roles.has('vaned')) return 'elbow-vaned';
+		if (roles.has('mitred')) return 'elbow-mitred';
+		if (roles.has('segmented')) return 'elbow-segmented';
+		return roles.has('splitter') ? 'elbow-splitter' : 'elbow-smooth';
+	}
+	if (word === 'damper') {
+		if (roles.has('opposed')) return 'damper-opposed-blades';
+		if (roles.has('parallel')) return 'damper-parallel-blades';
+		return roles.has('butterfly') ? 'damper-butterfly' : 'damper';
+	}
+	if (word === 'entry') {
+		if (roles.has('bellmouth')) return roles.has('in-wall') ? 'entry-bellmouth-in-wall' : 'entry-bellmouth';
+		if (roles.has('projecting')) return 'entry-projecting';
+		if (roles.has('flush')) return 'entry-flush';
+		return roles.has('plain-end') ? 'entry-plain-end' : null;
+	}
+	if (word === 'exit') return roles.has('device') ? 'exit-diffuser' : 'exit-plain';
+	if (word === 'transition') {
+		const change = roles.has('expansion') ? 'expansion' : roles.has('contraction') ? 'contraction' : null;
+		if (change !== null && roles.has('sudden')) return `sudden-${change}`;
+		return change !== null && roles.has('gradual') ? `gradual-${change}` : null;
+	}
+	return null;
+}
+
+function missingHint(word: PartWord): string {
+	if (word === 'entry') return `add C, such as C0.5, or say which: flush entry, plain end entry, bellmouth r0.2`;
+	if (word === 'transition')
+		return 'add C, such as C0.1, or say which: gradual expansion a0.5 20°, sudden contraction a0.5';
+	return `add ${GIVE_EITHER}`;
+}
+
+function exampleOf(word: PartWord): string {
+	return word === 'elbow' ? 'such as 2 x elbow r1.0 or elbow C0.23' : 'such as damper C0.2 or silencer 25 Pa';
+}
+
+function nameOf(
+	known: readonly Word[],
+	tags: readonly string[],
+	roles: ReadonlySet<Role>,
+	note: string | null
+): string {
+	const printed = known.map((word) => word.print).filter((print) => print !== '');
+	if (printed.length === 0 && roles.has('elbow')) printed.push('elbow');
+	const name = [...printed, ...tags].join(' ');
+	const capital = name.startsWith('ahu') ? `AHU${name.slice(3)}` : name.charAt(0).toUpperCase() + name.slice(1);
+	return note === null ? capital : `${capital} (${note})`;
+}
+
+/** The picture of the word that names the part: the last of its kind, a fire damper before a damper. */
+function pictureOf(known: readonly Word[], roles: ReadonlySet<Role>): Picture {
+	const word = wordOf(roles);
+	const own = known.filter((entry) => entry.picture !== null && (word === 'device' || entry.role === word));
+	const special = known.find((entry) => entry.role === 'special-damper');
+	const shaped = own.find((entry) => entry.picture === 'shoe' || entry.picture === 'wye');
+	const device = word === 'device' ? own.find((entry) => entry.role === 'device') : undefined;
+	const fallback: Picture = word === 'elbow' ? 'elbow' : word === 'damper' ? 'damper' : 'transition';
+	return (special ?? shaped ?? device ?? own[0])?.picture ?? fallback;
+}
