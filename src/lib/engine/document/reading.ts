@@ -57,6 +57,7 @@ function problemsOf(issue: Issue, base: readonly Step[], document: unknown): Pro
 
 /** Of two ways to write a thing, the faults of the way that was meant: the one whose first key is there. */
 function ofUnion(ways: readonly Issue[][], path: readonly Step[], value: unknown, document: unknown): Problem[] {
+	if (value === undefined) return [fault('missing', path, 'is missing', 'an object')];
 	if (!isRecord(value)) return [fault('type', path, `is ${shown(value)}`, 'an object')];
 	const meant = 'density' in value ? 0 : 'temperature' in value ? 1 : null;
 	if (meant === null)
@@ -72,9 +73,10 @@ function described(issue: Issue, path: readonly Step[], value: unknown): Describ
 		return ['format', value === undefined ? 'is missing' : `is ${shown(value)}`, `"${DESIGN_FORMAT}"`];
 	switch (issue.code) {
 		case 'invalid_type': {
-			const expected = KINDS[issue.expected] ?? issue.expected;
+			const kind = KINDS[issue.expected] ?? issue.expected;
+			const expected = key === 'joins' ? 'the tag of a row, or null' : `${kind}${inUnit(key)}`;
 			if (value === undefined) return ['missing', 'is missing', expected];
-			return ['type', `is ${shown(value)}`, key === 'joins' ? 'the tag of a row, or null' : expected];
+			return ['type', `is ${shown(value)}`, expected];
 		}
 		case 'invalid_value':
 			return ofChoice(value, issue.values.map((one) => JSON.stringify(one)).join(', '));
@@ -122,8 +124,13 @@ function tooBig(origin: string, maximum: number, path: readonly Step[], value: u
 }
 
 function unitOf(key: Step): string {
-	const unit = UNITS[key];
+	const unit = Object.hasOwn(UNITS, key) ? UNITS[key] : undefined;
 	return unit === undefined ? '' : ` ${unit}`;
+}
+
+function inUnit(key: Step | undefined): string {
+	const unit = key === undefined ? '' : unitOf(key);
+	return unit === '' ? '' : ` in${unit}`;
 }
 
 function valueAt(document: unknown, path: readonly Step[]): unknown {

@@ -4,8 +4,15 @@ import type { Problem } from './types';
 
 const SIDES: readonly string[] = ['supply', 'return', 'exhaust', 'outdoor'];
 
-/** What keeps the rows from being trees that start at the fan. Reads rows of any kind; odd ones are the schema's business. */
-export function treeProblems(document: unknown): Problem[] {
+export interface Tree {
+	/** Place of the row that each one joins; -1 where it meets the fan, and where it cannot be told. */
+	readonly parents: Int32Array;
+	/** What keeps the rows from being trees that start at the fan. */
+	readonly problems: readonly Problem[];
+}
+
+/** Who joins whom. Reads rows of any kind; odd ones are the schema's business. */
+export function readTree(document: unknown): Tree {
 	const rows = rowsOf(document);
 	const problems: Problem[] = [];
 	const first = firstOf(rows, 'tag', problems);
@@ -15,7 +22,7 @@ export function treeProblems(document: unknown): Problem[] {
 	outletProblems(rows, parents, problems);
 	sideProblems(rows, parents, problems);
 	if (!rings) depthProblem(parents, problems);
-	return problems;
+	return { parents, problems };
 }
 
 /** Place of the first row that has each tag (or id). */
@@ -42,12 +49,14 @@ function parentsOf(rows: readonly unknown[], first: ReadonlyMap<string, number>,
 		const joins = textAt(row, 'joins');
 		if (joins === null) return;
 		const parent = first.get(joins);
+		if (joins !== textAt(row, 'tag') && parent !== undefined) {
+			parents[i] = parent;
+			return;
+		}
 		const path = ['rows', i, 'joins'];
-		if (joins === textAt(row, 'tag'))
-			problems.push(fault('joins-itself', path, 'joins itself', 'another row, or null'));
-		else if (parent === undefined)
+		if (parent === undefined)
 			problems.push(fault('joins-unknown', path, `no row has the tag ${shown(joins)}`, 'the tag of a row, or null'));
-		else parents[i] = parent;
+		else problems.push(fault('joins-itself', path, 'joins itself', 'another row, or null'));
 	});
 	return parents;
 }
@@ -82,12 +91,13 @@ function outletProblems(rows: readonly unknown[], parents: Int32Array, problems:
 	rows.forEach((row, i) => {
 		if (!isRecord(row)) return;
 		const child = joined[i] ?? -1;
+		if (child < 0 === (row.outlet !== undefined)) return;
 		const path = ['rows', i, 'outlet'];
-		if (child < 0 && row.outlet === undefined)
+		if (child < 0)
 			problems.push(
 				fault('outlet-missing', path, 'is missing: no row joins this one', 'an outlet, or a row that joins it')
 			);
-		if (child >= 0 && row.outlet !== undefined) {
+		else {
 			const message = `stands in the middle: ${shown(textAt(rows[child], 'tag'))} joins this row`;
 			problems.push(fault('outlet-in-middle', path, message, 'an outlet only where no row joins'));
 		}

@@ -2,7 +2,7 @@ import { locate } from './fault';
 import { partProblems } from './parts';
 import { plainCopy } from './plain';
 import { schemaProblems } from './reading';
-import { treeProblems } from './tree';
+import { readTree } from './tree';
 import type { DesignDocument, ValidateResult } from './types';
 
 /**
@@ -20,7 +20,7 @@ export function validateDocument(json: unknown): ValidateResult {
 		for (const problem of ofSchema) problems.push(problem);
 		// A list of more rows than may be is not read further.
 		if (!ofSchema.some((problem) => problem.code === 'too-many-rows')) {
-			for (const problem of treeProblems(copy.value)) problems.push(problem);
+			for (const problem of readTree(copy.value).problems) problems.push(problem);
 			for (const problem of partProblems(copy.value)) problems.push(problem);
 		}
 	}

@@ -1,4 +1,5 @@
 import type { DesignDocument, Flag } from '../document/types';
+import type { RangeNote } from './items';
 import type { Network } from './network';
 import { unreadKeyFlags } from './unread-keys';
 import { rowFlags } from './row-flags';
@@ -8,12 +9,14 @@ import { serviceFlags } from './service-flags';
 
 /** Difference of the sums of supply and of the other side that is worth a word: common practice. */
 const FLOWS_DIFFER = 0.005;
+const NO_NOTES: readonly RangeNote[] = [];
 
 /** What an engineer should look at, in the order of the rows; what concerns the whole design comes first. */
 export function flagsOf(
 	document: DesignDocument,
 	network: Network,
 	losses: readonly RowLoss[],
+	notes: ReadonlyMap<string, readonly RangeNote[]>,
 	totals: { readonly supplyFlow: number; readonly returnFlow: number }
 ): readonly Flag[] {
 	const flags: Flag[] = [...serviceFlags(document), ...fanFlowFlags(totals)];
@@ -23,7 +26,7 @@ export function flagsOf(
 		if (solved === undefined) return;
 		const joined = network.joined[place] === 1;
 		rowFlags(row, solved, joined, document.criteria, flags);
-		partFlags(row, solved, document.criteria, flags);
+		partFlags(row, solved, notes.get(row.tag) ?? NO_NOTES, document.criteria, flags);
 	});
 	return flags;
 }

@@ -1,5 +1,6 @@
 import type { DesignRow, Equipment, Fitting, Item, Junction, Outlet } from '../document/types';
 import { coefficientOf, fittingEntry, ratedLoss } from '../fitting';
+import { COLEBROOK_ROUGHNESS } from '../friction';
 import type { Hydraulics } from './hydraulics';
 
 const BY_HAND = 'entered by hand';
@@ -13,7 +14,10 @@ export interface RangeNote {
 	readonly note: string;
 }
 
-export function ductItem(length: number, { frictionRate }: Hydraulics): Item {
+export function ductItem(length: number, hydraulics: Hydraulics, notes: RangeNote[]): Item {
+	const { frictionRate, relativeRoughness } = hydraulics;
+	if (relativeRoughness > COLEBROOK_ROUGHNESS.max)
+		notes.push({ name: 'Duct', inRange: false, note: 'the relative roughness is above the range of Colebrook–White' });
 	return item('duct', 'Duct', frictionRate * length, { source: 'Darcy–Weisbach, Colebrook–White' });
 }
 

@@ -1,5 +1,5 @@
 import type { DesignDocument, DesignRow, Problem } from '../document/types';
-import { treeProblems } from '../document/tree';
+import { readTree } from '../document/tree';
 import { locate } from '../document/fault';
 
 /** Rows as trees: places in the document's list of rows stand for the rows. */
@@ -18,33 +18,34 @@ export type BuildResult =
 
 /** Rows -> network. Rows that are no trees from the fan become problems; nothing is written into the document. */
 export function buildNetwork(document: DesignDocument): BuildResult {
-	const problems = treeProblems(document);
+	const { parents, problems } = readTree(document);
 	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
 	const { rows } = document;
-	const places = new Map(rows.map((row, i) => [row.tag, i]));
-	const parents = new Int32Array(rows.length).fill(-1);
 	const joined = new Uint8Array(rows.length);
-	rows.forEach((row, i) => {
-		const parent = row.joins === null ? -1 : (places.get(row.joins) ?? -1);
-		parents[i] = parent;
-		if (parent >= 0) joined[parent] = 1;
-	});
+	for (const parent of parents) if (parent >= 0) joined[parent] = 1;
 	return { ok: true, network: { rows, parents, order: orderOf(rows, parents), joined } };
 }
 
 /** From the fan outward, rows that join the same one by their tags: sums then run alike for any order of rows. */
 function orderOf(rows: readonly DesignRow[], parents: Int32Array): Int32Array {
-	const children: number[][] = rows.map(() => []);
-	const roots: number[] = [];
-	parents.forEach((parent, i) => (parent < 0 ? roots : (children[parent] ?? roots)).push(i));
+	const fan = rows.length;
+	const firstChild = new Int32Array(rows.length + 1).fill(-1);
+	const nextChild = new Int32Array(rows.length).fill(-1);
+	for (let i = rows.length - 1; i >= 0; i -= 1) {
+		const parent = parents[i] ?? -1;
+		const under = parent < 0 ? fan : parent;
+		nextChild[i] = firstChild[under] ?? -1;
+		firstChild[under] = i;
+	}
 	const byTag = (a: number, b: number) => ((rows[a]?.tag ?? '') < (rows[b]?.tag ?? '') ? -1 : 1);
 	const order = new Int32Array(rows.length);
 	let filled = 0;
-	const append = (places: number[]) => {
-		if (places.length > 1) places.sort(byTag);
-		for (const place of places) order[filled++] = place;
+	const append = (parent: number) => {
+		const start = filled;
+		for (let child = firstChild[parent] ?? -1; child >= 0; child = nextChild[child] ?? -1) order[filled++] = child;
+		if (filled - start > 1) order.subarray(start, filled).sort(byTag);
 	};
-	append(roots);
-	for (let next = 0; next < filled; next += 1) append(children[order[next] ?? 0] ?? []);
+	append(fan);
+	for (let next = 0; next < filled; next += 1) append(order[next] ?? 0);
 	return order;
 }

@@ -1,13 +1,20 @@
 import type { Criteria, DesignRow, Flag } from '../document/types';
 import { fittingEntry } from '../fitting';
+import type { RangeNote } from './items';
 import type { RowLoss } from './row-loss';
 
 const DAMPER = /damper|\bvcd\b/i;
 const FIRE = /\b(fire|smoke)\b/i;
 
 /** Fittings, equipment and outlet of one row: what is not settled, out of range, missing or needs a caution. */
-export function partFlags(row: DesignRow, solved: RowLoss, criteria: Criteria | undefined, flags: Flag[]): void {
-	for (const { name, inRange, note } of solved.rangeNotes)
+export function partFlags(
+	row: DesignRow,
+	solved: RowLoss,
+	notes: readonly RangeNote[],
+	criteria: Criteria | undefined,
+	flags: Flag[]
+): void {
+	for (const { name, inRange, note } of notes)
 		flags.push({
 			rule: 'coefficient-range',
 			row: row.tag,
@@ -16,8 +23,8 @@ export function partFlags(row: DesignRow, solved: RowLoss, criteria: Criteria | 
 			basis: 'range of the source of the coefficient'
 		});
 
-	const open = solved.items.filter((item) => item.toBeConfirmed).map((item) => item.name);
-	if (open.length > 0)
+	if (solved.items.some((item) => item.toBeConfirmed)) {
+		const open = solved.items.filter((item) => item.toBeConfirmed).map((item) => item.name);
 		flags.push({
 			rule: 'to-be-confirmed',
 			row: row.tag,
@@ -26,6 +33,7 @@ export function partFlags(row: DesignRow, solved: RowLoss, criteria: Criteria | 
 			value: open.length,
 			basis: 'marked so in the design'
 		});
+	}
 
 	const names = [...(row.fittings ?? []).map((one) => one.name ?? ''), ...(row.equipment ?? []).map((one) => one.name)];
 	if (names.some((name) => FIRE.test(name) && DAMPER.test(name)))

@@ -1,10 +1,15 @@
 import type { Path } from '../document/types';
 import type { Network } from './network';
 
+/** Greatest requirement of each side of the fan [Pa]; null without a path. `return` is all that is not supply. */
+export interface Required {
+	readonly supply: number | null;
+	readonly return: number | null;
+}
+
 export interface PathsResult {
 	readonly paths: readonly Path[];
-	/** Greatest requirement of each side of the fan [Pa]; null without a path. */
-	readonly required: { readonly supply: number | null; readonly return: number | null };
+	readonly required: Required;
 	readonly index: { readonly supply: string | null; readonly return: string | null };
 	/** Of each row: the least spare of all paths through it [Pa]. */
 	readonly spares: Float64Array;
@@ -12,10 +17,13 @@ export interface PathsResult {
 
 type HalfKey = 'supply' | 'return';
 
-/** What each path asks of the fan, the index path of each side, and what the others have to spare. */
-export function pathsOf(network: Network, losses: Float64Array): PathsResult {
+/**
+ * What each path asks of the fan, the index path of each side, and what the others have to spare.
+ *
+ * @param along sum of the losses from the fan to the far end of each row [Pa]
+ */
+export function pathsOf(network: Network, along: Float64Array): PathsResult {
 	const { rows, parents, order, joined } = network;
-	const along = lossesFromFan(network, losses);
 	const required: Record<HalfKey, number | null> = { supply: null, return: null };
 	const index: Record<HalfKey, string | null> = { supply: null, return: null };
 	// In the order of the tree, so that of equal paths the same one governs for any order of rows.
@@ -55,7 +63,7 @@ export function pathsOf(network: Network, losses: Float64Array): PathsResult {
 }
 
 /** Sum of the losses from the fan to the far end of each row [Pa]. */
-function lossesFromFan({ parents, order }: Network, losses: Float64Array): Float64Array {
+export function lossesFromFan({ parents, order }: Network, losses: Float64Array): Float64Array {
 	const along = new Float64Array(losses.length);
 	for (const place of order) {
 		const parent = parents[place] ?? -1;
@@ -72,7 +80,9 @@ function requirementOf({ rows }: Network, along: Float64Array, place: number): n
 }
 
 function tagsFromFan({ rows, parents }: Network, place: number): string[] {
-	const tags: string[] = [];
-	for (let at = place; at >= 0; at = parents[at] ?? -1) tags.push(rows[at]?.tag ?? '');
-	return tags.reverse();
+	let depth = 0;
+	for (let at = place; at >= 0; at = parents[at] ?? -1) depth += 1;
+	const tags = new Array<string>(depth);
+	for (let at = place; at >= 0; at = parents[at] ?? -1) tags[(depth -= 1)] = rows[at]?.tag ?? '';
+	return tags;
 }

@@ -1,5 +1,5 @@
 import type { Criteria, DesignRow, Flag } from '../document/types';
-import { COLEBROOK_ROUGHNESS, regime } from '../friction';
+import { regime } from '../friction';
 import type { RowLoss } from './row-loss';
 
 const CRITERIA = 'criteria of the design';
@@ -14,7 +14,7 @@ export function rowFlags(
 	criteria: Criteria | undefined,
 	flags: Flag[]
 ): void {
-	const { reynolds, relativeRoughness, velocity, frictionRate } = solved.hydraulics;
+	const { reynolds, velocity, frictionRate } = solved;
 	if (regime(reynolds) === 'transition')
 		flags.push({
 			rule: 'reynolds-transition',
@@ -24,16 +24,6 @@ export function rowFlags(
 			value: reynolds,
 			threshold: 4000,
 			basis: 'Colebrook–White holds above a Reynolds number of 4000, the laminar law below 2000'
-		});
-	if (relativeRoughness > COLEBROOK_ROUGHNESS.max)
-		flags.push({
-			rule: 'coefficient-range',
-			row: row.tag,
-			severity: 'caution',
-			message: 'The relative roughness is above the published range of the friction factor.',
-			value: relativeRoughness,
-			threshold: COLEBROOK_ROUGHNESS.max,
-			basis: 'range of Colebrook–White'
 		});
 	if (joined)
 		above('velocity-main', row, velocity, criteria?.mainVelocity, 'The velocity is above that of a main.', flags);

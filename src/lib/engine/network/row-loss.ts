@@ -1,5 +1,5 @@
-import type { DesignRow, Item } from '../document/types';
-import { hydraulicsOf, type Hydraulics } from './hydraulics';
+import type { DesignRow, Item, SolvedRow } from '../document/types';
+import { hydraulicsOf } from './hydraulics';
 import {
 	ductItem,
 	equipmentItem,
@@ -13,21 +13,12 @@ import {
 import type { Settings } from './settings';
 import { thermalGravity } from './thermal-gravity';
 
-/** What a row loses, part by part [Pa]. */
-export interface RowLoss {
-	readonly hydraulics: Hydraulics;
-	readonly frictionLoss: number;
-	readonly flexibleLoss: number;
-	readonly fittingLoss: number;
-	readonly junctionLoss: number;
-	readonly equipmentLoss: number;
-	readonly outletLoss: number;
-	/** Gain in the direction of flow. */
-	readonly thermalGravity: number;
-	readonly loss: number;
-	readonly items: readonly Item[];
-	readonly rangeNotes: readonly RangeNote[];
-}
+/** A row solved but for its place in the network: `placePressures` fills in what depends on the others. */
+export type RowLoss = Omit<SolvedRow, 'totalPressure' | 'staticPressure' | 'spare'> & {
+	totalPressure: readonly [number, number];
+	staticPressure: readonly [number, number];
+	spare: number;
+};
 
 /**
  * Loss of total pressure along a row, in the direction of flow.
@@ -37,14 +28,14 @@ export interface RowLoss {
  * @param row the row, SI units
  * @param flow design flow [m3/s], above 0
  * @param settings air and roughness
- * @returns losses [Pa], and the items whose sum is the loss
+ * @param notes takes what lies outside the range of a coefficient's source
+ * @returns losses [Pa], and the items whose sum is the loss; pressures and spare still 0
  * @throws {OutOfRangeError} when a formula is asked outside its range
  * @source Darcy-Weisbach, and loss coefficients on the velocity pressure of the row
  * @check fixtures/networks/hood-exhaust.json
  */
-export function rowLoss(row: DesignRow, flow: number, settings: Settings): RowLoss {
+export function rowLoss(row: DesignRow, flow: number, settings: Settings, notes: RangeNote[]): RowLoss {
 	const hydraulics = hydraulicsOf(row, flow, settings);
-	const rangeNotes: RangeNote[] = [];
 	const items: Item[] = [];
 	/** Adds the item, and gives its loss. */
 	const lossOf = (item: Item): number => {
@@ -52,11 +43,11 @@ export function rowLoss(row: DesignRow, flow: number, settings: Settings): RowLo
 		return item.loss;
 	};
 
-	const frictionLoss = lossOf(ductItem(row.length, hydraulics));
+	const frictionLoss = lossOf(ductItem(row.length, hydraulics, notes));
 	const flexibleLoss = row.flexible === undefined ? 0 : lossOf(flexibleItem(row.flexible, hydraulics));
 	const junctionLoss = row.junction === undefined ? 0 : lossOf(junctionItem(row.junction, hydraulics));
 	let fittingLoss = 0;
-	for (const fitting of row.fittings ?? []) fittingLoss += lossOf(fittingItem(fitting, row, hydraulics, rangeNotes));
+	for (const fitting of row.fittings ?? []) fittingLoss += lossOf(fittingItem(fitting, row, hydraulics, notes));
 	let equipmentLoss = 0;
 	for (const equipment of row.equipment ?? []) equipmentLoss += lossOf(equipmentItem(equipment, flow));
 	const outletLoss = row.outlet === undefined ? 0 : lossOf(outletItem(row.outlet, row.side, hydraulics));
@@ -65,7 +56,15 @@ export function rowLoss(row: DesignRow, flow: number, settings: Settings): RowLo
 
 	const losses = frictionLoss + flexibleLoss + fittingLoss + junctionLoss + equipmentLoss + outletLoss;
 	return {
-		hydraulics,
+		side: row.side,
+		flow,
+		area: hydraulics.area,
+		hydraulicDiameter: hydraulics.hydraulicDiameter,
+		velocity: hydraulics.velocity,
+		velocityPressure: hydraulics.velocityPressure,
+		reynolds: hydraulics.reynolds,
+		frictionFactor: hydraulics.frictionFactor,
+		frictionRate: hydraulics.frictionRate,
 		frictionLoss,
 		flexibleLoss,
 		fittingLoss,
@@ -74,10 +73,14 @@ export function rowLoss(row: DesignRow, flow: number, settings: Settings): RowLo
 		outletLoss,
 		thermalGravity: gain,
 		loss: losses - gain + 0,
-		items,
-		rangeNotes
+		totalPressure: UNPLACED,
+		staticPressure: UNPLACED,
+		spare: 0,
+		items: items.slice() // a list of just its length
 	};
 }
+
+const UNPLACED = [0, 0] as const;
 
 /** Supply air runs toward the far end, all other air away from it. */
 function gainOf({ rise = 0, side }: DesignRow, { air, surroundings }: Settings): number {

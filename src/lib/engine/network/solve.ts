@@ -1,12 +1,14 @@
-import type { DesignDocument, Problem, SolvedRow, SolveResult } from '../document/types';
+import type { DesignDocument, DesignRow, Problem, Solution, SolvedRow, SolveResult } from '../document/types';
 import { fault, locate } from '../document/fault';
 import { OutOfRangeError } from '../errors';
 import { ENGINE_VERSION } from '../version';
 import { flagsOf } from './flags';
 import { designFlows } from './flows';
-import { buildNetwork, type Network } from './network';
-import { pathsOf } from './paths';
-import { pressuresOf, type Pressures } from './pressures';
+import { buildNetwork } from './network';
+import { lossesFromFan, pathsOf } from './paths';
+import { fanDuty, totalsOf } from './fan-duty';
+import type { RangeNote } from './items';
+import { placePressures } from './pressures';
 import { rowLoss, type RowLoss } from './row-loss';
 import { settingsOf, type Settings } from './settings';
 
@@ -25,26 +27,26 @@ export function solveDesign(document: DesignDocument): SolveResult {
 	if ('code' in settings) return { ok: false, problems: [settings] };
 
 	const flows = designFlows(network);
+	const notes = new Map<string, readonly RangeNote[]>();
 	const rowLosses: RowLoss[] = [];
 	const problems: Problem[] = [];
 	network.rows.forEach((row, place) => {
-		const solved = lossOrProblem(() => rowLoss(row, flows[place] ?? 0, settings), place);
+		const ofRow: RangeNote[] = [];
+		const solved = lossOrProblem(() => rowLoss(row, flows[place] ?? 0, settings, ofRow), place);
 		if ('code' in solved) problems.push(solved);
 		else rowLosses.push(solved);
+		if (ofRow.length > 0) notes.set(row.tag, ofRow);
 	});
 	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
 
-	const losses = Float64Array.from(rowLosses, (one) => one.loss);
-	const { paths, required, index, spares } = pathsOf(network, losses);
-	const pressures = pressuresOf(network, losses, required);
-	const totals = totalsOf(network, flows);
-	const supplyPressure = (required.supply ?? 0) + 0;
-	const returnPressure = (required.return ?? 0) + 0;
-	const totalPressure = supplyPressure + returnPressure;
-	const outletPressure = velocityPressureAtFan(network, rowLosses);
-	const entries = network.rows.map(
-		(row, place) => [row.tag, solvedRow(network, rowLosses, pressures, spares, place)] as const
+	const along = lossesFromFan(
+		network,
+		Float64Array.from(rowLosses, (one) => one.loss)
 	);
+	const { paths, required, index, spares } = pathsOf(network, along);
+	placePressures(network, along, required, spares, rowLosses);
+	const totals = totalsOf(network, flows);
+	const flags = flagsOf(document, network, rowLosses, notes, totals);
 	return {
 		ok: true,
 		solution: {
@@ -52,18 +54,12 @@ export function solveDesign(document: DesignDocument): SolveResult {
 			engineVersion: ENGINE_VERSION,
 			mode: 'design',
 			air: { density: settings.air.density, viscosity: settings.air.viscosity },
-			rows: Object.fromEntries(entries),
+			rows: byTag(network.rows, rowLosses),
 			paths,
 			index,
-			fan: {
-				flow: Math.max(totals.supplyFlow, totals.returnFlow),
-				totalPressure,
-				supplyPressure,
-				returnPressure,
-				staticPressure: outletPressure === null ? null : totalPressure - outletPressure
-			},
+			fan: fanDuty(network, rowLosses, required, totals),
 			totals,
-			flags: flagsOf(document, network, rowLosses, totals)
+			flags
 		}
 	};
 }
@@ -94,64 +90,13 @@ function outsideProblem(error: unknown, path: readonly (string | number)[]): Pro
 	return fault('outside-formula', path, message, `${symbol} from ${range.min} to ${range.max}`);
 }
 
-function totalsOf({ rows, parents, order }: Network, flows: Float64Array) {
-	let supplyFlow = 0;
-	let returnFlow = 0;
-	for (const place of order) {
-		if ((parents[place] ?? -1) >= 0) continue;
-		if (rows[place]?.side === 'supply') supplyFlow += flows[place] ?? 0;
-		else returnFlow += flows[place] ?? 0;
-	}
-	return { supplyFlow, returnFlow };
-}
-
-/** Velocity pressure where the supply leaves the fan [Pa], weighted by flow; null without a supply row. */
-function velocityPressureAtFan({ rows, parents, order }: Network, rowLosses: readonly RowLoss[]): number | null {
-	let flow = 0;
-	let sum = 0;
-	for (const place of order) {
-		const solved = rowLosses[place];
-		if (solved === undefined || (parents[place] ?? -1) >= 0 || rows[place]?.side !== 'supply') continue;
-		flow += solved.hydraulics.flow;
-		sum += solved.hydraulics.flow * solved.hydraulics.velocityPressure;
-	}
-	return flow > 0 ? sum / flow : null;
-}
-
-function solvedRow(
-	{ rows }: Network,
-	rowLosses: readonly RowLoss[],
-	pressures: Pressures,
-	spares: Float64Array,
-	place: number
-): SolvedRow {
-	const row = rows[place];
-	const solved = rowLosses[place];
-	if (row === undefined || solved === undefined) throw new Error(`no row at ${place}`);
-	const { flow, area, hydraulicDiameter, velocity, velocityPressure: pv, reynolds } = solved.hydraulics;
-	const fanEnd = (pressures.fanEnd[place] ?? 0) + 0;
-	const farEnd = (pressures.farEnd[place] ?? 0) + 0;
-	return {
-		side: row.side,
-		flow,
-		area,
-		hydraulicDiameter,
-		velocity,
-		velocityPressure: pv,
-		reynolds,
-		frictionFactor: solved.hydraulics.frictionFactor,
-		frictionRate: solved.hydraulics.frictionRate,
-		frictionLoss: solved.frictionLoss,
-		flexibleLoss: solved.flexibleLoss,
-		fittingLoss: solved.fittingLoss + 0,
-		junctionLoss: solved.junctionLoss + 0,
-		equipmentLoss: solved.equipmentLoss,
-		outletLoss: solved.outletLoss,
-		thermalGravity: solved.thermalGravity,
-		loss: solved.loss,
-		totalPressure: [fanEnd, farEnd],
-		staticPressure: [fanEnd - pv, farEnd - pv],
-		spare: spares[place] ?? 0,
-		items: solved.items
-	};
+/** Rows by their tags, `__proto__` being a tag like any other. */
+function byTag(rows: readonly DesignRow[], rowLosses: readonly RowLoss[]): Solution['rows'] {
+	const result: Record<string, SolvedRow> = {};
+	rowLosses.forEach((value, place) => {
+		const tag = rows[place]?.tag ?? '';
+		if (tag !== '__proto__') result[tag] = value;
+		else Object.defineProperty(result, tag, { value, enumerable: true, configurable: true, writable: true });
+	});
+	return result;
 }
