@@ -58,13 +58,14 @@ export async function live(main, how) {
 		life.end(1);
 	};
 	// A second Ctrl-C changes nothing: npm passes the terminal's signal on, so each arrives twice.
-	for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']))
-		process.on(signal, () => {
-			if (life.stopping) return;
-			life.signalled = true;
-			how.onSignal?.();
-			life.end(how.signalCode(signal));
-		});
+	const stop = (/** @type {NodeJS.Signals} */ signal) => {
+		if (life.stopping) return;
+		life.signalled = true;
+		how.onSignal?.();
+		life.end(how.signalCode(signal));
+	};
+	for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) process.on(signal, () => stop(signal));
+	watchNpm(() => stop('SIGTERM'));
 	process.on('uncaughtException', fail);
 	process.on('unhandledRejection', fail);
 
@@ -80,4 +81,19 @@ export async function live(main, how) {
 		}
 	}
 	process.exit(code);
+}
+
+/**
+ * npm hands a SIGTERM to the shell between it and us, which dies of it and tells nobody: its end is taken for the signal.
+ * @param {() => void} gone
+ */
+function watchNpm(gone) {
+	if (!process.env.npm_lifecycle_event) return;
+	const shell = process.ppid;
+	const watch = setInterval(() => {
+		if (process.ppid === shell) return;
+		clearInterval(watch);
+		gone();
+	}, 250);
+	watch.unref();
 }

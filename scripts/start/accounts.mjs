@@ -23,5 +23,8 @@ export function welcome(address, accounts) {
 			`    ${email.padEnd(width('email'))}${paint('dim', role.padEnd(width('role')))}${password}`
 	);
 	const demo = rows.length ? ['', '  Demo accounts (e-mail, role, password)', ...rows] : [];
-	return ['', `  Evendraft is ready at ${paint('bold', address)}`, ...demo, '', '  Ctrl-C stops it.', ''].join('\n');
+	const mail = `  Letters it sends are kept at ${address}/dev/inbox`;
+	return ['', `  Evendraft is ready at ${paint('bold', address)}`, mail, ...demo, '', '  Ctrl-C stops it.', ''].join(
+		'\n'
+	);
 }

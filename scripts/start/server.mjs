@@ -1,6 +1,7 @@
 /** The web server: the production build as a process of its own, its words kept in .evendraft/log/server.log. */
 import { spawn } from 'node:child_process';
 import { createWriteStream, existsSync, renameSync, statSync } from 'node:fs';
+import { get } from 'node:http';
 import { join } from 'node:path';
 import { createInterface } from 'node:readline';
 import { setTimeout as delay } from 'node:timers/promises';
@@ -79,17 +80,22 @@ async function untilItAnswers(port, checkpoint) {
 	let last = 'no answer';
 	while (performance.now() < until) {
 		checkpoint();
-		try {
-			const { status } = await fetch(`http://127.0.0.1:${port}/`, {
-				redirect: 'manual',
-				signal: AbortSignal.timeout(5000)
-			});
-			if (status < 500) return;
-			last = `status ${status}`;
-		} catch {
-			last = 'no answer';
-		}
+		const status = await frontPageStatus(port);
+		if (status !== null && status < 500) return;
+		last = status === null ? 'no answer' : `status ${status}`;
 		await delay(100);
 	}
 	throw new Refusal(`The server does not serve its front page (${last}): see .evendraft/log/server.log.`);
+}
+
+/** @param {number} port any, also one that fetch refuses @returns {Promise<number | null>} null when there is no answer */
+function frontPageStatus(port) {
+	return new Promise((resolve) => {
+		const request = get({ host: '127.0.0.1', port, path: '/', timeout: 5000 }, (response) => {
+			response.resume();
+			resolve(response.statusCode ?? null);
+		});
+		request.once('timeout', () => request.destroy());
+		request.once('error', () => resolve(null));
+	});
 }
