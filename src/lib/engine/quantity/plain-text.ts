@@ -24,11 +24,16 @@ const SIGNS: readonly (readonly [RegExp, string])[] = [
 	[/⅞/g, ' 7/8']
 ];
 
-/** A typed text with one sign for each thing: plain blanks, quotes, hyphens, `ø`, `x`; small letters. */
-export function plainText(text: string): string {
+/** A typed text with one sign for each thing: plain blanks, quotes, hyphens, `ø`, `x`. */
+export function plainSigns(text: string): string {
 	let plain = text;
 	for (const [from, to] of SIGNS) plain = plain.replace(from, to);
-	return plain.toLowerCase().trim();
+	return plain.trim();
+}
+
+/** The same in small letters. */
+export function plainText(text: string): string {
+	return plainSigns(text).toLowerCase().trim();
 }
 
 /** What was typed, as quoted back in a message; long texts are cut. */

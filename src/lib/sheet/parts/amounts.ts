@@ -1,11 +1,11 @@
-import { readPressure, type UnitSystem } from '$lib/engine';
+import { readPressure, type Pascal, type Reading, type UnitSystem } from '$lib/engine';
 
 /** The figures of one part, taken out of its text. */
 export interface Amounts {
 	readonly count: number;
 	readonly coefficient: number | null;
-	/** Pa */
-	readonly pressure: number | null;
+	/** Pa; refused where it is not believable. */
+	readonly pressure: Reading<Pascal> | null;
 	readonly exponent: number | null;
 	readonly parameters: Readonly<Record<string, number | string>>;
 	/** What stood in brackets and is no figure. */
@@ -20,8 +20,9 @@ const DECIMAL = '(\\d*[.,]\\d+)';
 const START = '(?<![a-z0-9])';
 
 const COEFFICIENT = new RegExp(`${START}(?:c|zeta|ζ) ?[=:]? ?${N}(?![\\d.,]*\\d)`);
+// A lone inch mark is a pressure only behind a decimal figure below ten: `12" damper` tells a size.
 const PRESSURE =
-	/(\d*[.,]?\d+) ?(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o|in\b\.?|")/;
+	/\d*[.,]?\d+ ?(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o)|(?<![\d.,])\d?[.,]\d+ ?(?:in\b\.?|")/;
 const PARAMETERS: readonly (readonly [string, RegExp])[] = [
 	['radiusRatio', new RegExp(`${START}r(?: ?/ ?[dwh])? ?=? ?${N}`)],
 	['pieces', /(?<![\d.,])(\d+)[ -]?(?=(?:pieces?|pc|gores?|segments?)\b)/],
@@ -52,10 +53,9 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 		return found[1] ?? found[0];
 	};
 	const toBeConfirmed = take(/\?+/) !== null;
-	const pressureText = PRESSURE.exec(rest)?.[0] ?? null;
 	const coefficient = take(COEFFICIENT);
-	const pressure = pressureText === null || !rest.includes(pressureText) ? null : pressureOf(pressureText, units);
-	if (pressure !== null) take(PRESSURE);
+	const pressureText = take(PRESSURE);
+	const pressure = pressureText === null ? null : readPressure(pressureText, units);
 	const parameters: Record<string, number | string> = {};
 	for (const [name, pattern] of PARAMETERS) {
 		const typed = take(pattern);
@@ -84,9 +84,4 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 		toBeConfirmed,
 		rest
 	};
-}
-
-function pressureOf(text: string, units: UnitSystem): number | null {
-	const reading = readPressure(text, units);
-	return reading.ok ? reading.value : null;
 }

@@ -1,18 +1,21 @@
-import { fittingEntry, type CatalogueEntry, type FittingParameter, type Junction, type Size } from '$lib/engine';
+import { fittingEntry, type CatalogueEntry, type FittingParameter, type Junction, type RowSize } from '$lib/engine';
 import { parameterWords } from './describe-part';
 import type { DocumentEquipment, DocumentFitting, DocumentParts, PartFitting, PartProblem, Parts } from './parts';
+
+type Suited =
+	{ readonly ok: true; readonly fitting: DocumentFitting } | { readonly ok: false; readonly problem: PartProblem };
 
 /**
  * The parts of a cell as the design document holds them. Kinds of elbows depend on the row's shape (an oval takes the
  * rectangular ones); a part that does not suit it is left out and named among the problems.
  */
-export function fittingsFor(parts: Parts, size: Size): DocumentParts {
+export function fittingsFor(parts: Parts, size: RowSize): DocumentParts {
 	const problems: PartProblem[] = [];
 	const fittings: DocumentFitting[] = [];
 	for (const part of parts.fittings) {
-		const found = part.kind === 'fixed' ? fixed(part) : fromCatalogue(part, size);
-		if ('message' in found) problems.push(found);
-		else fittings.push(found);
+		const found: Suited = part.kind === 'fixed' ? { ok: true, fitting: fixed(part) } : fromCatalogue(part, size);
+		if (found.ok) fittings.push(found.fitting);
+		else problems.push(found.problem);
 	}
 	const equipment: DocumentEquipment[] = parts.equipment.map(({ name, loss, exponent, toBeConfirmed }) => ({
 		name,
@@ -42,7 +45,7 @@ function common(part: PartFitting) {
 	};
 }
 
-function fromCatalogue(part: PartFitting, size: Size): DocumentFitting | PartProblem {
+function fromCatalogue(part: PartFitting, size: RowSize): Suited {
 	const entry = entryFor(part, size);
 	if (entry === null) return unsuited(part, size);
 	const parameters: Record<string, number | string> = {};
@@ -57,11 +60,11 @@ function fromCatalogue(part: PartFitting, size: Size): DocumentFitting | PartPro
 		if (fault !== null) return problem(part, `${part.name}: ${known.label} ${value} ${fault}`, takes(entry));
 		parameters[name] = value;
 	}
-	return { kind: entry.key, ...common(part), ...parameters };
+	return { ok: true, fitting: { kind: entry.key, ...common(part), ...parameters } };
 }
 
 /** The entry for the row's shape: by its own key, by the shape's, or the first damper that suits. */
-function entryFor(part: PartFitting, size: Size): CatalogueEntry | null {
+function entryFor(part: PartFitting, size: RowSize): CatalogueEntry | null {
 	const shape = size.shape === 'round' ? 'round' : 'rectangular';
 	const keys =
 		part.kind === 'damper'
@@ -74,7 +77,7 @@ function entryFor(part: PartFitting, size: Size): CatalogueEntry | null {
 	return null;
 }
 
-function unsuited(part: PartFitting, size: Size): PartProblem {
+function unsuited(part: PartFitting, size: RowSize): Suited {
 	const others = ['round', 'rectangular', 'oval'].filter((shape) =>
 		[part.kind, `${shape}-${part.kind}`].some((key) =>
 			fittingEntry(key)?.shapes.some((known) => known === shape && known !== size.shape)
@@ -104,6 +107,6 @@ function takes(entry: CatalogueEntry): string {
 		: `${names.join('; ')}, or C, such as C0.23`;
 }
 
-function problem(part: PartFitting, message: string, expected: string): PartProblem {
-	return { part: part.name, message, expected };
+function problem(part: PartFitting, message: string, expected: string): Suited {
+	return { ok: false, problem: { part: part.name, message, expected } };
 }

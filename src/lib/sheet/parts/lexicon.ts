@@ -4,6 +4,7 @@ import type { Picture } from '$lib/engine';
 export type Role =
 	| 'elbow'
 	| 'junction'
+	| 'leg'
 	| 'damper'
 	| 'special-damper'
 	| 'transition'
@@ -47,9 +48,10 @@ function add(role: Role, picture: Picture | null, list: string) {
 	}
 }
 
-// A word, or `abbreviation=what_is_printed`; nothing after `=` prints nothing. Common practice; spellings of both shores.
+// A word, or `abbreviation=what_is_printed` (nothing after `=` prints nothing). Common practice, spellings of both shores.
 add('elbow', 'elbow', 'elbow elbows=elbow bend bends=bend ell=elbow ells=elbow e=elbow el=elbow');
-add('junction', 'tee', 'tee tees=tee t=tee branch br=branch straight through junction split s=straight b=branch');
+add('junction', 'tee', 'tee tees=tee t=tee junction split');
+add('leg', 'tee', 'branch br=branch straight through s=straight b=branch');
 add('junction', 'shoe', 'shoe take-off takeoff=take-off tap');
 add('junction', 'wye', 'wye y=wye');
 add('damper', 'damper', 'damper dampers=damper d=damper vcd=volume_damper vd=volume_damper mvd=volume_damper');
@@ -93,19 +95,15 @@ add('plain-end', null, 'end');
 add('projecting', null, 'projecting');
 add('bellmouth', 'transition', 'bellmouth bell-mouth=bellmouth');
 add('in-wall', null, 'wall');
-add('smaller', null, 'smaller');
-add('larger', null, 'larger');
+add('smaller', null, 'smaller=');
+add('larger', null, 'larger=');
 add(
 	'plain',
 	null,
-	`way volume control balancing manual motorised motorized=motorised open single double single-thickness
-	double-thickness blade blades=blade past main converging diverging long short plenum weather roof exhaust supply return intake
-	inlet outlet outdoor discharge suction ahu heating cooling heat recovery bag panel carbon duct air room wire bird insect
-	terminal flow leg plain round rectangular rect=rectangular oval to= and= with= of= the= in= at= a= for= + - / & hepa sound
-	linear slot swirl disc spill`
-		.split(/\s+/)
-		.filter((word) => word !== '+' && word !== '-' && word !== '/' && word !== '&')
-		.join(' ')
+	'way volume control balancing manual motorised motorized=motorised open single double single-thickness double-thickness ' +
+		'blade blades past main converging diverging long short plenum weather roof exhaust supply return intake inlet outlet ' +
+		'outdoor discharge suction ahu heating cooling heat recovery bag panel carbon duct air room wire bird insect terminal ' +
+		'flow leg plain round rectangular rect=rectangular oval hepa sound linear slot swirl disc spill and with of the in at for to + &'
 );
 
 export function findWord(typed: string): Word | null {
@@ -115,7 +113,7 @@ export function findWord(typed: string): Word | null {
 /** Known words nearest to one that is not known, best first. */
 export function nearestWords(typed: string, most = 3): string[] {
 	return [...words.keys()]
-		.filter((word) => word.length > 2)
+		.filter((word) => word.length > 2 && words.get(word)?.role !== 'plain')
 		.map((word) => ({ word, distance: distanceOf(typed.slice(0, 30), word) }))
 		.sort((a, b) => a.distance - b.distance || (a.word < b.word ? -1 : 1))
 		.slice(0, most)

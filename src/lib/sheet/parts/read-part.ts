@@ -11,24 +11,22 @@ export type PartReading =
 const TAG = /^[a-z]{1,4}-?\d{1,4}[a-z]?$/;
 const MOST = { fittings: 1000, equipment: 50, coefficient: 1_000_000 } as const;
 
-const GIVE_EITHER = 'its coefficient or its pressure, such as C0.6 or 12 Pa';
-
 /** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [?]`, in any order. Never throws. */
-export function readPart(plain: string, units: UnitSystem): PartReading {
-	const amounts = takeAmounts(plain, units);
+export function readPart(typed: string, units: UnitSystem): PartReading {
+	const amounts = takeAmounts(typed.toLowerCase(), units);
 	const known: Word[] = [];
 	const tags: string[] = [];
-	for (const typed of amounts.rest.split(/[ +&]+/).filter((word) => word !== '' && word !== '-')) {
-		const bare = typed.replace(/^[.:-]+|[.:]+$/g, '');
+	for (const written of amounts.rest.split(/ +|(?=\+)|(?<=\+)/)) {
+		const bare = written.replace(/^[.:]+|[.:]+$/g, '');
 		const word = findWord(bare);
 		if (word) known.push(word);
 		else if (TAG.test(bare)) tags.push(bare.toUpperCase());
-		else return unknownWord(typed);
+		else if (bare !== '' && bare !== '-') return unknownWord(written);
 	}
 	const roles = new Set(known.map((word) => word.role));
 	if (known.length === 0 && amounts.parameters['angle'] !== undefined) roles.add('elbow');
 	if (known.length === 0 && amounts.parameters['radiusRatio'] !== undefined) roles.add('elbow');
-	return assembled(plain, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
+	return assembled(typed, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
 }
 
 function unknownWord(typed: string): PartReading {
@@ -38,7 +36,7 @@ function unknownWord(typed: string): PartReading {
 }
 
 function assembled(
-	plain: string,
+	typed: string,
 	amounts: Amounts,
 	roles: ReadonlySet<Role>,
 	name: string,
@@ -46,12 +44,12 @@ function assembled(
 ): PartReading {
 	const refuse = (message: string, expected: string): PartReading => ({
 		ok: false,
-		message: `“${plain}”: ${message}`,
+		message: `“${typed}”: ${message}`,
 		expected
 	});
 	const { coefficient, pressure, count, parameters, toBeConfirmed } = amounts;
 	const word = wordOf(roles);
-	if (word === null) return refuse('what part it is is missing', 'a word such as elbow, damper or silencer');
+	if (word === null) return refuse('no word says what it is', 'a word such as elbow, damper or silencer');
 	if (coefficient !== null && pressure !== null)
 		return refuse('has both a coefficient and a pressure', 'one of the two');
 	if (count < 1) return refuse('a count is 1 or more', exampleOf(word));
@@ -59,29 +57,30 @@ function assembled(
 		return refuse('the coefficient is too great', 'C0.23');
 	if (word === 'junction') {
 		if (count > 1) return refuse('a row has one junction, at its fan end', 'the junction without a count');
-		if (coefficient === null) return refuse('a junction needs its coefficient', 'such as tee branch C0.8');
+		if (coefficient === null) return refuse('a junction needs its coefficient', 'add it, such as tee branch C0.8');
 		return { ok: true, slot: 'junction', part: fitting('fixed') };
 	}
 	if (pressure !== null) {
+		if (!pressure.ok) return refuse(pressure.message, pressure.expected);
 		if (count > MOST.equipment) return refuse('the count is too great', `at most ${MOST.equipment}`);
 		if (amounts.exponent !== null && amounts.exponent > 4) return refuse('the exponent is too great', 'at most 4');
-		const part = { name, loss: pressure, exponent: amounts.exponent ?? 2, picture, toBeConfirmed };
+		const part = { name, loss: pressure.value, exponent: amounts.exponent ?? 2, picture, toBeConfirmed };
 		return { ok: true, slot: 'equipment', part, count };
 	}
 	if (count > MOST.fittings) return refuse('the count is too great', `at most ${MOST.fittings}`);
 	if (coefficient !== null) return { ok: true, slot: 'fitting', part: fitting('fixed') };
 	const kind = kindOf(word, roles);
-	if (kind === null) return refuse(`${GIVE_EITHER.split(',')[0]} is missing`, missingHint(word));
+	if (kind === null) return refuse('its coefficient or its pressure is missing', missingHint(word));
 	return { ok: true, slot: 'fitting', part: fitting(kind) };
 
 	function fitting(kind: string): PartFitting {
-		const leg = roles.has('smaller') ? { leg: 'smaller' } : roles.has('larger') ? { leg: 'larger' } : {};
-		const base = {
+		const leg = roles.has('smaller') ? 'smaller' : roles.has('larger') ? 'larger' : null;
+		const base: PartFitting = {
 			word: word as PartWord,
 			kind,
 			count,
 			name,
-			parameters: { ...parameters, ...leg },
+			parameters: leg === null ? parameters : { ...parameters, leg },
 			picture,
 			toBeConfirmed
 		};
@@ -89,9 +88,11 @@ function assembled(
 	}
 }
 
-/** A junction carries its reducer; a device that is also an entry is a device only if no entry is named. */
+/** A junction takes what is named beside it; `branch` and `straight` alone are one, `branch damper` is a damper. */
 function wordOf(roles: ReadonlySet<Role>): PartWord | null {
 	if (roles.has('junction')) return 'junction';
+	const legAlone = [...roles].every((role) => role === 'leg' || role === 'plain' || role === 'transition');
+	if (roles.has('leg') && legAlone) return 'junction';
 	if (roles.has('special-damper')) return 'device';
 	if (roles.has('damper') || roles.has('butterfly')) return 'damper';
 	if (roles.has('elbow')) return 'elbow';
@@ -134,7 +135,7 @@ function missingHint(word: PartWord): string {
 	if (word === 'entry') return `add C, such as C0.5, or say which: flush entry, plain end entry, bellmouth r0.2`;
 	if (word === 'transition')
 		return 'add C, such as C0.1, or say which: gradual expansion a0.5 20°, sudden contraction a0.5';
-	return `add ${GIVE_EITHER}`;
+	return 'add its coefficient or its pressure, such as C0.6 or 12 Pa';
 }
 
 function exampleOf(word: PartWord): string {
@@ -157,7 +158,11 @@ function nameOf(
 /** The picture of the word that names the part: the last of its kind, a fire damper before a damper. */
 function pictureOf(known: readonly Word[], roles: ReadonlySet<Role>): Picture {
 	const word = wordOf(roles);
-	const own = known.filter((entry) => entry.picture !== null && (word === 'device' || entry.role === word));
+	const own = known.filter(
+		(entry) =>
+			entry.picture !== null &&
+			(word === 'device' || entry.role === word || (word === 'junction' && entry.role === 'leg'))
+	);
 	const special = known.find((entry) => entry.role === 'special-damper');
 	const shaped = own.find((entry) => entry.picture === 'shoe' || entry.picture === 'wye');
 	const device = word === 'device' ? own.find((entry) => entry.role === 'device') : undefined;

@@ -1,4 +1,4 @@
-import { plainText, type Reading, type UnitSystem } from '$lib/engine';
+import { plainSigns, type Reading, type UnitSystem } from '$lib/engine';
 import { describePart } from './describe-part';
 import type { PartEquipment, PartFitting, Parts } from './parts';
 import { readPart } from './read-part';
@@ -14,7 +14,7 @@ const EXPECTED = 'expected parts between commas, such as 2x elbow r1.0 C0.23, si
  */
 export function readParts(text: string, units: UnitSystem): Reading<Parts> {
 	if (text.length > LONGEST) return { ok: false, message: 'the text is too long for one row', expected: EXPECTED };
-	const pieces = splitParts(plainText(text.replace(/[\r\n]+/g, ';')));
+	const pieces = splitParts(plainSigns(text.replace(/[\r\n]+/g, ';')));
 	if (pieces.length > MOST) return { ok: false, message: `more than ${MOST} parts in one row`, expected: EXPECTED };
 	let junction: PartFitting | null = null;
 	const fittings: PartFitting[] = [];
