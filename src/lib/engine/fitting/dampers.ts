@@ -1,8 +1,9 @@
+import type { Range } from '../errors';
 import { BLADES_ANGLE, BUTTERFLY_ANGLE, bladeDamper, butterflyDamper } from './damper-tables';
 import type { FittingDefinition } from './definition';
-import { heldWithin, numberParameter } from './parameters';
+import { numberParameter } from './parameters';
 
-const openAngle = (max: number) => numberParameter('angle', 'Blade angle from open', '°', 0, { min: 0, max });
+const openAngle = (limits: Range) => numberParameter('angle', 'Blade angle from open', '°', 0, limits);
 const CAUTION = 'A value from memory; it rises steeply as the blade closes, so the setting is found by measuring.';
 
 const butterfly: FittingDefinition = {
@@ -11,9 +12,9 @@ const butterfly: FittingDefinition = {
 		name: 'Butterfly damper',
 		family: 'dampers',
 		shapes: ['round', 'rectangular', 'oval'],
-		parameters: [openAngle(80)],
+		parameters: [openAngle(BUTTERFLY_ANGLE)],
 		reference: 'row',
-		range: '0 to 60° from open; beyond, the last value',
+		range: '0 to 60° from open',
 		method: 'Table of the angle, log-linear between',
 		source: 'SMACNA, HVAC Systems Duct Design, after Idelchik, from memory',
 		known: 'from memory',
@@ -23,8 +24,7 @@ const butterfly: FittingDefinition = {
 	},
 	coefficient(values, { size }, note) {
 		if (size.shape === 'oval') note('the table for rectangles stands in for a flat oval');
-		const angle = heldWithin(values.number('angle'), BUTTERFLY_ANGLE, 'angle', note);
-		return butterflyDamper(angle, size.shape === 'round' ? 'round' : 'rectangular');
+		return butterflyDamper(values.number('angle'), size.shape === 'round' ? 'round' : 'rectangular');
 	}
 };
 
@@ -35,7 +35,7 @@ function bladed(blades: 'parallel' | 'opposed'): FittingDefinition {
 			name: `Damper, ${blades} blades`,
 			family: 'dampers',
 			shapes: ['rectangular'],
-			parameters: [openAngle(80)],
+			parameters: [openAngle(BLADES_ANGLE)],
 			reference: 'row',
 			range: '0 to 80° from open, total blade length over perimeter of 0.3',
 			method: 'Table of the angle, log-linear between',
@@ -45,8 +45,7 @@ function bladed(blades: 'parallel' | 'opposed'): FittingDefinition {
 			picture: 'damper',
 			caution: CAUTION
 		},
-		coefficient: (values, _context, note) =>
-			bladeDamper(heldWithin(values.number('angle'), BLADES_ANGLE, 'angle', note), blades)
+		coefficient: (values) => bladeDamper(values.number('angle'), blades)
 	};
 }
 

@@ -1,0 +1,107 @@
+import fc from 'fast-check';
+import psychrolib from 'psychrolib';
+import { beforeAll, describe, expect, it } from 'vitest';
+import published from '../../../../fixtures/published/air.json';
+import { describePublished } from '../../../../fixtures/published/published-checks';
+import { OutOfRangeError } from '../errors';
+import {
+	airState,
+	humidAirDensity,
+	saturationPressure,
+	standardPressure,
+	standardTemperature,
+	sutherlandViscosity,
+	velocityPressure
+} from '.';
+
+const GAS_CONSTANT = 287.05287; // J/(kg K), dry air of the standard atmosphere
+
+describePublished('air against published values', published, {
+	'air.density': (given) => humidAirDensity(given.number('t_C'), given.number('rh'), given.number('p_Pa')),
+	'air.saturation-pressure': (given) => saturationPressure(given.number('t_C')),
+	'air.standard-atmosphere': (given) => {
+		if (given.has('elevation_m')) return standardPressure(given.number('elevation_m'));
+		const z = given.number('geometric_elevation_m');
+		const t = standardTemperature(z);
+		const p = standardPressure(z);
+		const rho = p / (GAS_CONSTANT * (t + 273.15));
+		return { T_K: t + 273.15, p_Pa: p, rho_kg_m3: rho, mu_Pa_s: sutherlandViscosity(t) };
+	},
+	'air.viscosity': (given) => sutherlandViscosity(given.number('t_C')),
+	'air.velocity-pressure': (given) => {
+		if (given.has('V_m_s')) return velocityPressure(given.number('rho_kg_m3'), given.number('V_m_s'));
+		const V = (given.number('V_fpm') * 0.3048) / 60;
+		const rho = (given.number('rho_lb_ft3') * 0.45359237) / (0.3048 * 0.3048 * 0.3048);
+		return velocityPressure(rho, V) / 249.089;
+	}
+});
+
+describe('air against a second implementation (psychrolib 1.1.1)', () => {
+	beforeAll(() => psychrolib.SetUnitSystem(psychrolib.SI));
+
+	it('has the same saturation pressure from -100 to 200 °C', () => {
+		for (let t = -100; t <= 200; t += 0.5)
+			expect(saturationPressure(t) / psychrolib.GetSatVapPres(t), `${t} °C`).toBeCloseTo(1, 12);
+	});
+
+	it('has the same standard pressure from -5000 to 11 000 m', () => {
+		for (let z = -5000; z <= 11_000; z += 100)
+			expect(standardPressure(z) / psychrolib.GetStandardAtmPressure(z), `${z} m`).toBeCloseTo(1, 12);
+	});
+
+	it('has the same density over temperature, humidity and pressure', () => {
+		for (let t = -50; t <= 60; t += 5)
+			for (let phi = 0; phi <= 1; phi += 0.25)
+				for (const p of [60_000, 80_000, 101_325, 110_000]) {
+					const W = psychrolib.GetHumRatioFromRelHum(t, phi, p);
+					const reference = psychrolib.GetMoistAirDensity(t, W, p);
+					// The reference rounds its gas constants to six figures, and keeps at least 1e-7 of humidity.
+					expect(humidAirDensity(t, phi, p) / reference, `${t} °C, ${phi}, ${p} Pa`).toBeCloseTo(1, 5);
+				}
+	});
+});
+
+describe('the state of the air', () => {
+	it('is dry air at sea level when only the temperature is given', () => {
+		expect(airState({ temperature: 20 }).density).toBe(humidAirDensity(20, 0, 101_325));
+	});
+
+	it('takes the pressure of the elevation, unless the pressure is given', () => {
+		expect(airState({ temperature: 20, elevation: 1500 }).density).toBe(humidAirDensity(20, 0, standardPressure(1500)));
+		const given = airState({ temperature: 20, elevation: 1500, pressure: 101_325 });
+		expect(given.density).toBe(humidAirDensity(20, 0, 101_325));
+	});
+
+	it('keeps a given density and viscosity, and takes the viscosity of 20 °C without one', () => {
+		expect(airState({ density: 1.2, viscosity: 2e-5 })).toEqual({ density: 1.2, viscosity: 2e-5 });
+		expect(airState({ density: 1.2 })).toEqual({ density: 1.2, viscosity: sutherlandViscosity(20) });
+	});
+
+	it('is lighter when warmer, more humid or higher', () => {
+		fc.assert(
+			fc.property(
+				fc.double({ min: -40, max: 70, noNaN: true }),
+				fc.double({ min: 0, max: 0.9, noNaN: true }),
+				fc.double({ min: 0, max: 4000, noNaN: true }),
+				(temperature, relativeHumidity, elevation) => {
+					const { density } = airState({ temperature, relativeHumidity, elevation });
+					expect(airState({ temperature: temperature + 5, relativeHumidity, elevation }).density).toBeLessThan(density);
+					expect(airState({ temperature, relativeHumidity: relativeHumidity + 0.1, elevation }).density).toBeLessThan(
+						density
+					);
+					expect(airState({ temperature, relativeHumidity, elevation: elevation + 50 }).density).toBeLessThan(density);
+				}
+			)
+		);
+	});
+
+	it.each([
+		() => airState({ temperature: 81 }),
+		() => airState({ temperature: -51 }),
+		() => airState({ temperature: 20, relativeHumidity: 1.01 }),
+		() => airState({ temperature: 20, elevation: 11_001 }),
+		() => airState({ temperature: NaN })
+	])('refuses what leaves the range of a formula (%#)', (ask) => {
+		expect(ask).toThrow(OutOfRangeError);
+	});
+});

@@ -1,0 +1,88 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { describePublished } from '../../../../fixtures/published/published-checks';
+import published from '../../../../fixtures/published/shape.json';
+import { equivalentDiameter, laminarRectangle, sectionOf } from '.';
+
+const INCH = 0.0254;
+
+describePublished('shapes against published values', published, {
+	'geometry.rect-equivalent': (given) => {
+		const width = given.number('a_in') * INCH;
+		return equivalentDiameter({ shape: 'rectangular', width, height: given.number('b_in') * INCH }) / INCH;
+	},
+	'geometry.flat-oval': (given) => {
+		const height = given.number('minor_mm') / 1000;
+		const size = { shape: 'oval', width: given.number('major_mm') / 1000, height } as const;
+		const { area, perimeter, hydraulicDiameter } = sectionOf(size);
+		return {
+			A_mm2: area * 1e6,
+			P_mm: perimeter * 1000,
+			De_mm: equivalentDiameter(size) * 1000,
+			Dh_mm: hydraulicDiameter * 1000
+		};
+	},
+	'friction.rect-laminar': (given) => laminarRectangle(1, given.number('aspect_b_over_a'))
+});
+
+const side = fc.double({ min: 0.05, max: 3, noNaN: true });
+
+describe('a section', () => {
+	it('has the same figures with width and height exchanged', () => {
+		fc.assert(
+			fc.property(side, side, fc.constantFrom('rectangular', 'oval'), (a, b, shape) => {
+				expect(sectionOf({ shape, width: a, height: b })).toEqual(sectionOf({ shape, width: b, height: a }));
+				expect(equivalentDiameter({ shape, width: a, height: b })).toBe(
+					equivalentDiameter({ shape, width: b, height: a })
+				);
+			})
+		);
+	});
+
+	it('is a circle when the sides of an oval are equal', () => {
+		fc.assert(
+			fc.property(side, (D) => {
+				const oval = sectionOf({ shape: 'oval', width: D, height: D });
+				const round = sectionOf({ shape: 'round', diameter: D });
+				expect(oval.area / round.area).toBeCloseTo(1, 14);
+				expect(oval.hydraulicDiameter / D).toBeCloseTo(1, 14);
+			})
+		);
+	});
+
+	it('grows in proportion', () => {
+		fc.assert(
+			fc.property(side, side, fc.constantFrom('rectangular', 'oval'), (width, height, shape) => {
+				const one = sectionOf({ shape, width, height });
+				const two = sectionOf({ shape, width: 2 * width, height: 2 * height });
+				expect(two.area / one.area).toBeCloseTo(4, 12);
+				expect(two.hydraulicDiameter / one.hydraulicDiameter).toBeCloseTo(2, 12);
+				const equivalent = equivalentDiameter({ shape, width: 2 * width, height: 2 * height });
+				expect(equivalent / equivalentDiameter({ shape, width, height })).toBeCloseTo(2, 12);
+			})
+		);
+	});
+
+	it('has a hydraulic diameter between the lesser side and twice it', () => {
+		fc.assert(
+			fc.property(side, side, (width, height) => {
+				const { hydraulicDiameter } = sectionOf({ shape: 'rectangular', width, height });
+				const least = Math.min(width, height);
+				expect(hydraulicDiameter).toBeGreaterThanOrEqual(least * (1 - 1e-12));
+				expect(hydraulicDiameter).toBeLessThan(2 * least);
+			})
+		);
+	});
+});
+
+describe('laminar friction of a rectangle', () => {
+	// Shah & London (1978), exact series; f Re of Darcy, from memory
+	it.each([
+		[1, 56.91],
+		[2, 62.19],
+		[4, 72.93],
+		[10, 84.68]
+	])('agrees with the exact series at %d to 1 (Shah & London 1978)', (aspect, exact) => {
+		expect(Math.abs(laminarRectangle(aspect, 1) / exact - 1)).toBeLessThan(0.001);
+	});
+});
