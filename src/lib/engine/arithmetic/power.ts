@@ -15,15 +15,11 @@ function powerOfLimit(size: number, y: number): number {
 function powerOfPositive(x: number, y: number): number {
 	if (x === 1) return 1;
 	const l = logParts(x);
-	if (Math.abs(y) > 1e15 || Math.abs(y * l.hi) > 800) return y > 0 === l.hi > 0 ? largeOrExact(y, l.hi) : 0;
+	const size = y * l.hi;
+	if (Math.abs(size) > 800) return size > 0 ? Infinity : 0;
 	const p = exactProduct(y, l.hi);
 	const e = exactSum(p.hi, p.lo + y * l.lo);
 	return expOfParts(e.hi, e.lo);
-}
-
-/** With exponents beyond 1e15 an x next to 1 may still give a finite power. */
-function largeOrExact(y: number, l: number): number {
-	return Math.abs(y * l) > 800 ? Infinity : expOfParts(y * l, 0);
 }
 
 /**
