@@ -42,7 +42,7 @@ export default {
 		fontWeight: { text: '400', entered: '500', strong: '600', head: '700' },
 		borderRadius: { none: '0' },
 		boxShadow: { none: 'none', lift: token('shadow-lift') },
-		borderWidth: { DEFAULT: '1px', 0: '0', hair: token('w-hair'), frame: token('w-frame'), 2: '2px', 3: '3px' },
+		borderWidth: { DEFAULT: '1px', 0: '0', hair: token('w-hair'), heavy: token('w-frame'), 2: '2px', 3: '3px' },
 		transitionTimingFunction: { DEFAULT: token('ease') },
 		transitionDuration: { DEFAULT: token('quick'), quick: token('quick'), settle: token('settle') },
 		screens: { tablet: '700px', desk: '900px', wide: '1200px' },

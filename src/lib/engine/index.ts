@@ -43,5 +43,5 @@ export {
 } from './fitting';
 export { airState, type AirState } from './air';
 export { findMaterial, materials, regime, type Material } from './friction';
-export { equivalentDiameter, sectionOf, type Section } from './shape';
+export { equivalentDiameter, sectionOf, type Section, type Size } from './shape';
 export { OutOfRangeError } from './errors';

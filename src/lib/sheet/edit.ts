@@ -4,7 +4,11 @@ import { MOST_ROWS } from './sheet';
 
 const rowId = z.uuid();
 const units = z.enum(['SI', 'IP']);
-const typed = z.string().max(2_000);
+/** PostgreSQL's JSON takes neither NUL nor half of a surrogate pair; nobody types them on purpose. */
+const typed = z
+	.string()
+	.max(2_000)
+	.transform((text) => text.replaceAll('\0', '').replace(/\p{Surrogate}/gu, '\ufffd'));
 const cell = z.object({ typed, units });
 const field = z.string().max(40);
 

@@ -1,0 +1,188 @@
+import { applyEntry, applyMany } from './apply';
+import type { Edit, SentEdit } from './edit';
+import { entryOf, type Entry } from './entry';
+import { inverseOf } from './invert';
+import { readKept } from './kept-edits';
+import { newId } from './new-id';
+import { Outbox } from './outbox.svelte';
+import type { FromWorker, ToWorker } from './preview';
+import type { EditsReply, ServerFigures } from './server-reply';
+import { unitsOf, type Sheet } from './sheet';
+import { solveSheet, type SolvedSheet } from './solve-sheet';
+
+interface Opened {
+	readonly designId: string;
+	readonly sheet: Sheet;
+	readonly seq: number;
+}
+
+/** Steps kept for undo. */
+const MOST_STEPS = 1_000;
+
+/**
+ * The sheet of one design, open in this browser: what is on the screen, its figures, the way of each edit to the
+ * server, and the way back. The engine runs in a worker; the server's figures are the ones that count.
+ */
+export class OpenSheet {
+	readonly designId: string;
+	readonly outbox: Outbox;
+	#confirmed: Sheet;
+	#base: number;
+	#sheet = $state.raw<Sheet>() as Sheet;
+	#solved = $state.raw<SolvedSheet>() as SolvedSheet;
+	#whatIf = $state.raw<SolvedSheet | null>(null);
+	#server = $state.raw<ServerFigures | null>(null);
+	#undo = $state.raw<readonly Edit[]>([]);
+	#redo = $state.raw<readonly Edit[]>([]);
+	#turn = $state(0);
+	#solvedTurn = $state(0);
+	#whatIfTurn = 0;
+	#worker: Worker | null = null;
+	/** Time that the engine took for the last figures [ms]. */
+	took = $state(0);
+
+	constructor(opened: Opened) {
+		this.designId = opened.designId;
+		this.#confirmed = this.#sheet = opened.sheet;
+		this.#base = opened.seq;
+		this.#solved = solveSheet(opened.sheet);
+		this.outbox = new Outbox({
+			designId: opened.designId,
+			base: () => this.#base,
+			onreply: (reply, sent) => this.#take(reply, sent)
+		});
+	}
+
+	get sheet() {
+		return this.#sheet;
+	}
+	get units() {
+		return unitsOf(this.#sheet);
+	}
+	get solved() {
+		return this.#solved;
+	}
+	/** Figures of the text that is being typed, while it is. */
+	get whatIf() {
+		return this.#whatIf;
+	}
+	get mayUndo() {
+		return this.#undo.length > 0;
+	}
+	get mayRedo() {
+		return this.#redo.length > 0;
+	}
+	/** The last entry of the log that this browser has. */
+	get seq() {
+		return this.#base;
+	}
+	/** Whether the server has computed the same duty from the same edits. */
+	get isConfirmed(): boolean {
+		if (this.outbox.unsent.length || this.#turn !== this.#solvedTurn) return false;
+		const mine = this.#solved.solution?.fan;
+		const theirs = this.#server?.fan;
+		return !this.#server || (mine?.totalPressure === theirs?.totalPressure && mine?.flow === theirs?.flow);
+	}
+
+	/** Starts the worker and sends what an earlier visit kept. In the browser only. Returns the end of it. */
+	start(): () => void {
+		this.#worker = new Worker(new URL('./preview.worker.ts', import.meta.url), { type: 'module' });
+		this.#worker.onmessage = ({ data }: MessageEvent<FromWorker>) => this.#hear(data);
+		const kept = readKept(this.designId);
+		for (const { edit } of kept) {
+			const entry = entryOf(edit);
+			if (entry) this.#sheet = applyEntry(this.#sheet, entry);
+		}
+		this.#tell({ kind: 'sheet', turn: ++this.#turn, sheet: this.#sheet });
+		if (kept.length) this.outbox.fill(kept);
+		const online = () => void this.outbox.flush();
+		addEventListener('online', online);
+		return () => {
+			removeEventListener('online', online);
+			this.outbox.stop();
+			this.#worker?.terminate();
+			this.#worker = null;
+		};
+	}
+
+	/** Does an edit: at once on the screen, then to the server. */
+	do(edit: Edit): void {
+		this.#undo = [...this.#undo, inverseOf(this.#sheet, edit)].slice(-MOST_STEPS);
+		this.#redo = [];
+		this.#apply(edit);
+	}
+
+	undo(): void {
+		const edit = this.#undo.at(-1);
+		if (!edit) return;
+		this.#undo = this.#undo.slice(0, -1);
+		this.#redo = [...this.#redo, inverseOf(this.#sheet, edit)];
+		this.#apply(edit);
+	}
+
+	redo(): void {
+		const edit = this.#redo.at(-1);
+		if (!edit) return;
+		this.#redo = this.#redo.slice(0, -1);
+		this.#undo = [...this.#undo, inverseOf(this.#sheet, edit)];
+		this.#apply(edit);
+	}
+
+	/** Computes what an edit would do, without doing it; null ends it. */
+	tryOut(edit: Edit | null): void {
+		const entry = edit && entryOf(edit);
+		if (!entry) {
+			this.#whatIfTurn++;
+			this.#whatIf = null;
+			return;
+		}
+		this.#tell({ kind: 'what-if', turn: ++this.#whatIfTurn, entry });
+	}
+
+	#apply(edit: Edit): void {
+		const entry = entryOf(edit);
+		if (!entry) return;
+		this.#sheet = applyEntry(this.#sheet, entry);
+		this.tryOut(null);
+		this.#tell({ kind: 'entry', turn: ++this.#turn, entry });
+		this.outbox.put({ id: newId(), edit });
+	}
+
+	#tell(message: ToWorker): void {
+		if (this.#worker) this.#worker.postMessage(message);
+		else if (message.kind !== 'what-if') {
+			this.#solved = solveSheet(this.#sheet);
+			this.#solvedTurn = message.turn;
+		}
+	}
+
+	#hear({ kind, turn, solved, took }: FromWorker): void {
+		if (kind === 'what-if') {
+			if (turn === this.#whatIfTurn) this.#whatIf = solved;
+			return;
+		}
+		this.#solvedTurn = turn;
+		this.#solved = solved;
+		this.took = took;
+	}
+
+	/** Brings in the server's order. Where others were faster, the screen is rebuilt from it and the unsent edits. */
+	#take(reply: EditsReply, sent: readonly SentEdit[]): void {
+		this.#confirmed = applyMany(
+			this.#confirmed,
+			reply.entries.map(({ entry }) => entry)
+		);
+		this.#base = reply.seq;
+		this.#server = reply.figures;
+		const asSent = !reply.refused.length && sameIds(reply.entries, sent);
+		if (asSent) return;
+		const gone = new Set(sent.map(({ id }) => id));
+		const waiting = this.outbox.unsent.filter(({ id }) => !gone.has(id));
+		const entries = waiting.flatMap(({ edit }) => (entryOf(edit) ?? []) as Entry | []);
+		this.#sheet = applyMany(this.#confirmed, entries);
+		this.#tell({ kind: 'sheet', turn: ++this.#turn, sheet: this.#sheet });
+	}
+}
+
+const sameIds = (entries: readonly { id: string }[], sent: readonly { id: string }[]) =>
+	entries.length === sent.length && entries.every(({ id }, at) => id === sent[at]?.id);

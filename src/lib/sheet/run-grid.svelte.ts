@@ -1,0 +1,234 @@
+import type { Flag, Reading } from '$lib/engine';
+import { readBlock, writeBlock } from './clipboard';
+import { textToCopy, textToEdit } from './cell-text';
+import { COLUMNS, type Column } from './columns';
+import * as commands from './commands';
+import type { SheetProblem } from './design-document';
+import type { Edit } from './edit';
+import { isRowField, ROW_READERS } from './fields';
+import type { OpenSheet } from './open-sheet.svelte';
+import { Selection } from './selection.svelte';
+import { MOST_ROWS, valueOf, type RowField, type SheetRow } from './sheet';
+
+export interface Editing {
+	readonly row: number;
+	readonly field: RowField;
+	readonly text: string;
+	/** `replace`: typed over the cell, arrows leave it; `amend`: arrows move in the text. */
+	readonly mode: 'replace' | 'amend';
+}
+
+/** The run sheet under a person's hands: selection, editing, clipboard, and what each row has to say. */
+export class RunGrid {
+	readonly open: OpenSheet;
+	readonly selection: Selection;
+	readonly mayEdit: boolean;
+	#editing = $state.raw<Editing | null>(null);
+	#optional = $state.raw<ReadonlySet<string>>(new Set());
+	/** Told to the person: a refused paste and the like. */
+	notice = $state('');
+
+	constructor(open: OpenSheet, mayEdit: boolean) {
+		this.open = open;
+		this.mayEdit = mayEdit;
+		this.selection = new Selection({ rows: () => this.rows.length - (mayEdit ? 0 : 1), columns: () => this.columns });
+	}
+
+	get rows(): readonly SheetRow[] {
+		return this.open.sheet.rows;
+	}
+	get columns(): readonly Column[] {
+		return COLUMNS.filter(({ key, optional }) => !optional || this.#optional.has(key));
+	}
+	get optional() {
+		return this.#optional;
+	}
+	get editing() {
+		return this.#editing;
+	}
+	/** The active row; undefined on the blank line. */
+	get activeRow(): SheetRow | undefined {
+		return this.rows[this.selection.active.row];
+	}
+	get activeField(): RowField | null {
+		const key = this.columns[this.selection.active.column]?.key ?? '';
+		return isRowField(key) ? key : null;
+	}
+
+	readonly problemsOf = $derived.by(() => groupBy(this.open.solved.problems, ({ row }) => row ?? ''));
+	readonly flagsOf = $derived.by(() => groupBy(this.open.solved.solution?.flags ?? [], ({ row }) => row ?? ''));
+	readonly onIndex = $derived.by(() => {
+		const solution = this.open.solved.solution;
+		const ends = [solution?.index.supply, solution?.index.return];
+		return new Set(solution?.paths.filter(({ outlet }) => ends.includes(outlet)).flatMap(({ rows }) => rows));
+	});
+
+	/** What is to be mended in a row. */
+	problems(row: SheetRow): readonly SheetProblem[] {
+		return this.problemsOf.get(row.id) ?? [];
+	}
+	/** What is to be looked at in a row, gravest first. */
+	flags(row: SheetRow): readonly Flag[] {
+		return this.flagsOf.get(valueOf(row, 'tag') ?? '') ?? [];
+	}
+
+	showColumn(key: string, shown: boolean): void {
+		const next = new Set(this.#optional);
+		if (shown) next.add(key);
+		else next.delete(key);
+		this.#optional = next;
+	}
+
+	/** Opens the editor on the active cell. */
+	edit(text: string | null): void {
+		const field = this.activeField;
+		if (!this.mayEdit || !field || !this.isWritable(this.activeRow, field)) return;
+		const row = this.activeRow;
+		const kept = row ? textToEdit(row, field, this.open.units) : '';
+		this.#editing = {
+			row: this.selection.active.row,
+			field,
+			text: text ?? kept,
+			mode: text === null ? 'amend' : 'replace'
+		};
+		this.type(this.#editing.text);
+	}
+
+	/** A flow is typed at outlets only; where rows join, it is their sum. A flow that stands there can still be taken out. */
+	isWritable(row: SheetRow | undefined, field: RowField): boolean {
+		if (field !== 'flow' || !row || row.cells.flow) return true;
+		const tag = valueOf(row, 'tag');
+		return tag === null || !this.joined.has(tag);
+	}
+	readonly joined = $derived.by(() => new Set(this.rows.map((row) => valueOf(row, 'joins'))));
+
+	/** Takes the text of the editor and computes what it would do. */
+	type(text: string): void {
+		if (!this.#editing) return;
+		this.#editing = { ...this.#editing, text };
+		const edit = this.reading?.ok ? this.#editOf(this.#editing) : null;
+		this.open.tryOut(edit);
+	}
+
+	/** How the text in the editor is read; null while it is blank. */
+	get reading(): Reading<unknown> | null {
+		const now = this.#editing;
+		return now && now.text.trim() ? ROW_READERS[now.field](now.text, this.open.units) : null;
+	}
+
+	/** Writes the text into its cell, if it differs, and closes the editor. */
+	accept(): void {
+		const now = this.#editing;
+		this.#editing = null;
+		this.open.tryOut(null);
+		if (!now) return;
+		const row = this.rows[now.row];
+		const before = row ? textToEdit(row, now.field, this.open.units) : '';
+		if (now.text !== before) this.#do(this.#editOf(now));
+	}
+
+	/** Closes the editor and leaves the cell as it was. */
+	leave(): void {
+		this.#editing = null;
+		this.open.tryOut(null);
+	}
+
+	clear(): void {
+		this.#do(commands.clearCells(this.#rangeRows(), this.#rangeFields(), this.open.units));
+	}
+
+	fillDown(): void {
+		this.#do(commands.fillDown(this.#rangeRows(), this.#rangeFields(), this.open.units));
+	}
+
+	insertRow(): void {
+		if (!this.mayEdit) return;
+		const { row } = this.selection.active;
+		this.open.do(commands.newRow({}, this.open.units, this.rows[row]?.id ?? null).edit);
+		this.selection.go({ row, column: 0 });
+	}
+
+	deleteRows(): void {
+		const rows = this.#rangeRows();
+		if (rows.length) this.#do({ kind: 'delete', rows: rows.map(({ id }) => id) });
+	}
+
+	moveRows(by: 1 | -1): void {
+		const edit = commands.moveRows(this.open.sheet, this.#rangeRows(), by);
+		if (!edit) return;
+		const { top, bottom, left, right } = this.selection.range;
+		this.#do(edit);
+		this.selection.go({ row: top + by, column: left });
+		this.selection.go({ row: bottom + by, column: right }, true);
+	}
+
+	arrange(): void {
+		this.#do(commands.arrangeFromFan(this.open.sheet));
+	}
+
+	/** The range as text for the clipboard. */
+	copy(): string {
+		const fields = this.#rangeFields();
+		return writeBlock(this.#rangeRows().map((row) => fields.map((field) => textToCopy(row, field, this.open.units))));
+	}
+
+	/** Pastes text of the clipboard at the active cell; one cell fills the whole range. */
+	paste(text: string): void {
+		if (!this.mayEdit) return;
+		const { top, left } = this.selection.range;
+		const block = readBlock(text, MOST_ROWS - top);
+		if (!block.ok) {
+			this.notice = block.message;
+			return;
+		}
+		const fields = this.columns.slice(left).flatMap(({ key }) => (isRowField(key) ? [key] : []));
+		const [[single = ''] = []] = block.cells;
+		const fills = block.cells.length === 1 && block.cells[0]?.length === 1 && this.selection.isRange;
+		const cells = fills ? this.#rangeRows().map(() => this.#rangeFields().map(() => single)) : block.cells;
+		this.#do(commands.pasteBlock(this.open.sheet, { row: top, fields }, cells, this.open.units));
+	}
+
+	/** Goes to the row with a tag. */
+	goToTag(tag: string): void {
+		const row = this.rows.findIndex((one) => valueOf(one, 'tag') === tag);
+		if (row >= 0) this.selection.go({ row, column: this.selection.active.column });
+	}
+
+	/** Goes to a cell by row id and column. */
+	goToCell(id: string | null, field: string): void {
+		const row = this.rows.findIndex((one) => one.id === id);
+		const column = this.columns.findIndex(({ key }) => key === field);
+		if (row >= 0) this.selection.go({ row, column: Math.max(0, column) });
+	}
+
+	#editOf({ row: at, field, text }: Editing): Edit | null {
+		const row = this.rows[at];
+		if (row) return commands.writeCell(this.open.sheet, row, field, text, this.open.units);
+		return text.trim() ? commands.newRow({ [field]: text }, this.open.units, null).edit : null;
+	}
+
+	#do(edit: Edit | null): void {
+		this.notice = '';
+		if (edit && this.mayEdit) this.open.do(edit);
+	}
+
+	#rangeRows(): SheetRow[] {
+		const { top, bottom } = this.selection.range;
+		return this.rows.slice(top, bottom + 1);
+	}
+
+	#rangeFields(): RowField[] {
+		const { left, right } = this.selection.range;
+		return this.columns.slice(left, right + 1).flatMap(({ key }) => (isRowField(key) ? [key] : []));
+	}
+}
+
+function groupBy<T>(items: readonly T[], key: (item: T) => string): Map<string, T[]> {
+	const groups = new Map<string, T[]>();
+	for (const item of items) {
+		const group = groups.get(key(item));
+		if (group) group.push(item);
+		else groups.set(key(item), [item]);
+	}
+	return groups;
+}
