@@ -26,7 +26,6 @@ export function basisOf({ document, solution, units, heading }: ReportInput): La
 		{ label: 'Roughness', value: roughnessWords(document, units) },
 		{ label: 'Losses', value: 'coefficient × own velocity pressure' },
 		{ label: 'Flexible duct', value: flexibleWords(document) },
-		{ label: 'Pressures', value: 'total pressure, gauge' },
 		{ label: 'Leakage, margin', value: 'none included' },
 		{ label: 'Engine', value: `Evendraft ${solution.engineVersion}` }
 	];

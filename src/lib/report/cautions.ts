@@ -2,8 +2,7 @@ import type { ReportInput } from './input';
 import type { Caution } from './model';
 import { SERVICE } from './wording';
 
-export const CALCULATION_AID =
-	'Calculation aid. Results need review by a licensed professional; local codes govern.';
+export const CALCULATION_AID = 'Calculation aid. Results need review by a licensed professional; local codes govern.';
 
 /** What the report is not, and the cautions of the matters that it touches. Each is said once. */
 export function cautionsOf({ document, solution }: ReportInput): Caution[] {

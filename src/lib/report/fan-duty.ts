@@ -35,7 +35,9 @@ export function fanDutyOf({ document, solution, units }: ReportInput): FanDuty {
 	if (index.supply !== null)
 		lines.push(pressure('Supply part', fan.supplyPressure, `asked by the index path to ${index.supply}`));
 	if (index.return !== null)
-		lines.push(pressure('Suction part', fan.returnPressure, `asked by the index path from ${index.return}, ${drawing}`));
+		lines.push(
+			pressure('Suction part', fan.returnPressure, `asked by the index path from ${index.return}, ${drawing}`)
+		);
 	if (outletPressure !== null)
 		lines.push(
 			pressure('Velocity pressure at the fan outlet', outletPressure, outletNote(outlet?.tag, atFan.length)),
@@ -72,5 +74,7 @@ export function fanDutyOf({ document, solution, units }: ReportInput): FanDuty {
 }
 
 function outletNote(tag: string | undefined, count: number): string {
-	return count === 1 ? `in ${tag ?? ''}, the first supply section` : `mean of ${count} supply sections, weighted by flow`;
+	return count === 1
+		? `in ${tag ?? ''}, the first supply section`
+		: `mean of ${count} supply sections, weighted by flow`;
 }

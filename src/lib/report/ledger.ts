@@ -1,4 +1,12 @@
-import { formatFlow, formatPressure, formatSize, unitOf, type DesignRow, type Path, type UnitSystem } from '$lib/engine';
+import {
+	formatFlow,
+	formatPressure,
+	formatSize,
+	unitOf,
+	type DesignRow,
+	type Path,
+	type UnitSystem
+} from '$lib/engine';
 import type { ReportInput } from './input';
 import type { Account, AccountLine, Column, Ledger } from './model';
 import { requirementOf, servesOf } from './network-order';
@@ -59,8 +67,7 @@ function figuresShown(gravity: boolean): readonly Figure[] {
 		{
 			key: 'fittings',
 			head: 'Fittings',
-			of: (solved, row) =>
-				row?.fittings?.length || row?.junction ? solved.fittingLoss + solved.junctionLoss : null
+			of: (solved, row) => (row?.fittings?.length || row?.junction ? solved.fittingLoss + solved.junctionLoss : null)
 		},
 		{ key: 'equipment', head: 'Equip.', of: (solved, row) => (row?.equipment?.length ? solved.equipmentLoss : null) },
 		{ key: 'outlet', head: 'Outlet', of: (solved, row) => (row?.outlet ? solved.outletLoss : null) }

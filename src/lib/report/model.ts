@@ -3,6 +3,8 @@ import type { FlagRule, Side, UnitSystem } from '$lib/engine';
 /** The report of one design as plain data: text is ready to print, figures of the accounts stand beside it unrounded. */
 export interface Report {
 	readonly paper: Paper;
+	/** ISO. */
+	readonly printedAt: string;
 	readonly units: UnitSystem;
 	readonly heading: HeadingBlock;
 	readonly titleBlock: TitleBlock;

@@ -9,7 +9,10 @@ export function openItemsOf({ document, solution, units }: ReportInput): OpenIte
 	const items = rowsFromFan(document).flatMap(({ tag }) =>
 		(solution.rows[tag]?.items ?? [])
 			.filter(({ toBeConfirmed }) => toBeConfirmed)
-			.map((item): OpenItem => ({ row: tag, text: `${figureOf(item, units)} of ${nameOf(item)} in ${tag}${sourceOf(item)}.` }))
+			.map((item): OpenItem => ({
+				row: tag,
+				text: `${figureOf(item, units)} of ${nameOf(item)} in ${tag}${sourceOf(item)}.`
+			}))
 	);
 	const told = new Set(items.map(({ row }) => row));
 	const others = solution.flags

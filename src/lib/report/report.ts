@@ -24,6 +24,7 @@ export function reportOf(input: ReportInput): Report {
 	const sources = sourcesOf(input);
 	return {
 		paper: input.paper,
+		printedAt: input.printedAt,
 		units: input.units,
 		heading: headingOf(input),
 		titleBlock: titleBlockOf(input),
@@ -43,7 +44,7 @@ export function reportOf(input: ReportInput): Report {
 	};
 }
 
-function headingOf({ heading, revision, status, preparedBy, savedAt, printedAt, note }: ReportInput): HeadingBlock {
+function headingOf({ heading, revision, status, preparedBy, savedAt, printedAt }: ReportInput): HeadingBlock {
 	const calculation = [heading.projectNumber, heading.system, revision ?? 'working sheet']
 		.map((part) => part.trim())
 		.filter((part) => part !== '')
@@ -55,14 +56,12 @@ function headingOf({ heading, revision, status, preparedBy, savedAt, printedAt, 
 		identity: [
 			{ label: 'Firm', value: orNothing(heading.firm) },
 			{ label: 'Client', value: orNothing(heading.client) },
-			{ label: 'Project no.', value: orNothing(heading.projectNumber) },
-			{ label: 'Project', value: orNothing(heading.projectName) },
+			{ label: 'Project', value: orNothing(`${heading.projectNumber} ${heading.projectName}`) },
 			{ label: 'Calculation', value: orNothing(calculation) },
 			{ label: 'Prepared', value: orNothing(preparedBy) },
 			{ label: 'Saved', value: savedAt === null ? 'not saved: the working sheet' : momentOf(savedAt) },
 			{ label: 'Printed', value: momentOf(printedAt) },
-			{ label: 'Checked', value: NOTHING },
-			...(note?.trim() ? [{ label: 'Note', value: note.trim() }] : [])
+			{ label: 'Checked', value: NOTHING }
 		],
 		stamp: {
 			lines: [STATUS[status].toUpperCase(), 'NOT FOR CONSTRUCTION'],

@@ -83,11 +83,36 @@ function columnsOf(
 		loss('velocityPressure', 'Vel. pr.', always, ({ velocityPressure }) => velocityPressure),
 		computed('rate', 'Rate', unitOf('rate', units), (_row, { frictionRate }) => formatRate(frictionRate, units)),
 		loss('duct', 'Duct', always, ({ frictionLoss }) => frictionLoss),
-		loss('flexibleLoss', 'Flex.', (row) => row.flexible !== undefined, ({ flexibleLoss }) => flexibleLoss),
-		loss('junction', 'Junct.', (row) => row.junction !== undefined, ({ junctionLoss }) => junctionLoss),
-		loss('fittings', 'Fittings', (row) => Boolean(row.fittings?.length), ({ fittingLoss }) => fittingLoss),
-		loss('equipment', 'Equip.', (row) => Boolean(row.equipment?.length), ({ equipmentLoss }) => equipmentLoss),
-		loss('outlet', 'Outlet', (row) => row.outlet !== undefined, ({ outletLoss }) => outletLoss),
+		loss(
+			'flexibleLoss',
+			'Flex.',
+			(row) => row.flexible !== undefined,
+			({ flexibleLoss }) => flexibleLoss
+		),
+		loss(
+			'junction',
+			'Junct.',
+			(row) => row.junction !== undefined,
+			({ junctionLoss }) => junctionLoss
+		),
+		loss(
+			'fittings',
+			'Fittings',
+			(row) => Boolean(row.fittings?.length),
+			({ fittingLoss }) => fittingLoss
+		),
+		loss(
+			'equipment',
+			'Equip.',
+			(row) => Boolean(row.equipment?.length),
+			({ equipmentLoss }) => equipmentLoss
+		),
+		loss(
+			'outlet',
+			'Outlet',
+			(row) => row.outlet !== undefined,
+			({ outletLoss }) => outletLoss
+		),
 		...(also.gravity ? [loss('gravity', 'Gravity', always, ({ thermalGravity }) => 0 - thermalGravity)] : []),
 		loss('total', 'Total', always, ({ loss: all }) => all),
 		computed('spare', 'Spare', pressure, (row, { spare }) =>

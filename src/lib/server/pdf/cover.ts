@@ -1,0 +1,173 @@
+import type { Content, TableCell } from 'pdfmake/interfaces';
+import type { Labelled, Report } from '$lib/report';
+import { cell, grid, RULE } from './grid';
+import { heading, notes } from './page-head';
+import type { Sheet } from './paper';
+import { narrow, sans } from './printable';
+import { resultBand } from './result-band';
+import { COVER_REVISIONS, revisionTable } from './revision-table';
+import { stamp } from './stamp';
+
+/** Open items told on the cover; all stand on the page of the checks. */
+const COVER_ITEMS = 4;
+const GAP = 19.5;
+const WIDE_GAP = 34;
+
+/** The pages that follow, with the ids of their heads. */
+const PAGES: readonly (readonly [string, string])[] = [
+	['Checks, to be confirmed', 'checks'],
+	['Duct schedule', 'schedule'],
+	['Paths and ledger', 'ledger'],
+	['Parts of each section', 'parts'],
+	['Fan duty, cautions', 'fan'],
+	['Sources and methods', 'sources']
+];
+
+/** The cover: whose it is, what it rests on, what came out and what is still open. */
+export function coverPages(report: Report, sheet: Sheet): Content[] {
+	const width = sheet.wide ? (sheet.content.width - WIDE_GAP) / 2 : sheet.content.width;
+	const first = [...headOf(report, width), ...resultOf(report, width)];
+	const second = [...openOf(report, width), ...recordOf(report, width)];
+	if (!sheet.wide) return [...first, ...second];
+	return [
+		{
+			columns: [
+				{ width, stack: first },
+				{ width, stack: second }
+			],
+			columnGap: WIDE_GAP
+		}
+	];
+}
+
+function headOf({ heading: { kind, title, place, identity, stamp: status }, basis }: Report, width: number): Content[] {
+	const half = (width - GAP) / 2;
+	return [
+		{
+			columns: [
+				{
+					width: '*',
+					stack: [
+						sans(kind, { fontSize: 9.75, color: '#333333' }),
+						sans(title, { fontSize: 21.75, bold: true, lineHeight: 0.98 }),
+						sans(place, { fontSize: 11.25, margin: [0, 2, 0, 0] })
+					]
+				},
+				stamp(status)
+			],
+			columnGap: 16
+		},
+		{ columns: [pairs(identity, half), pairs(basis, half)], columnGap: GAP, margin: [0, 14, 0, 0] }
+	];
+}
+
+function pairs(lines: readonly Labelled[], width: number): Content {
+	const label = 66;
+	return {
+		width,
+		table: {
+			widths: [label, width - label],
+			body: lines.map(({ label: name, value }): TableCell[] => [
+				narrow(name, { fontSize: 9, color: '#333333', margin: [0, 0.6, 0, 0] }),
+				sans(value, { fontSize: 9.6, fontFeatures: ['tnum'] })
+			])
+		},
+		layout: {
+			hLineWidth: (i) => (i === 0 ? 0.75 : 0.4),
+			hLineColor: (i) => (i === 0 ? '#000000' : RULE),
+			vLineWidth: () => 0,
+			paddingLeft: () => 0,
+			paddingRight: () => 0,
+			paddingTop: () => 1.5,
+			paddingBottom: () => 1.5
+		}
+	} as Content;
+}
+
+function resultOf({ result }: Report, width: number): Content[] {
+	return [heading('Result'), resultBand(result, width), notes(result.notes)];
+}
+
+function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Content[] {
+	const half = (width - GAP) / 2;
+	const told = toBeConfirmed.slice(0, COVER_ITEMS);
+	const more = toBeConfirmed.length - told.length;
+	const items: Content[] = told.map(
+		({ text }, place) =>
+			({
+				columns: [sans(`${place + 1}.`, { width: 12 } as object), sans(text, { width: half - 16 } as object)],
+				columnGap: 4,
+				fontSize: 9.6,
+				margin: [0, 0, 0, 2.5]
+			}) as Content
+	);
+	if (more > 0) items.push(reference(`and ${more} more, on page `, 'checks'));
+	if (toBeConfirmed.length === 0) items.push(sans('Nothing is marked as to be confirmed.', { fontSize: 9.6 }));
+
+	const found = checks.reduce((sum, { findings }) => sum + findings.length, 0);
+	const limits: TableCell[][] = criteria.map(({ label, found: worst, verdict }) => [
+		cell(label, 'entered', { fontSize: 9.4 }),
+		cell(worst, 'computed', { fontSize: 9.4, alignment: 'right' }),
+		cell(verdict, 'entered', { fontSize: 9.4, alignment: 'right', bold: verdict !== 'met' })
+	]);
+	const columns = [
+		{ width: half - 48 - 46, head: 'Limit of the design', kind: 'entered', align: 'left' },
+		{ width: 48, head: 'Worst', kind: 'computed', align: 'right' },
+		{ width: 46, head: '', kind: 'entered', align: 'right' }
+	] as const;
+	const right: Content[] = [heading('Checks')];
+	if (limits.length > 0) right.push(grid(columns, limits, { fontSize: 8.8, heavy: false, pad: 1.8 }));
+	else right.push(sans('The design names no limits of its own.', { fontSize: 9.6 }));
+	right.push(
+		found === 0
+			? notes(['The engine flagged nothing.'])
+			: reference(`${found} flagged by the engine, on page `, 'checks', 4)
+	);
+	return [
+		{
+			columns: [
+				{ width: half, stack: [heading('To be confirmed'), ...items] },
+				{ width: half, stack: right }
+			],
+			columnGap: GAP
+		}
+	];
+}
+
+function recordOf({ revisions }: Report, width: number): Content[] {
+	const latest = revisions.slice(0, COVER_REVISIONS);
+	const table: Content[] =
+		latest.length > 0
+			? [revisionTable(latest, width)]
+			: [sans('None: this sheet was not saved as a version.', { fontSize: 9.6 })];
+	if (revisions.length > latest.length)
+		table.push(reference(`and ${revisions.length - latest.length} earlier, on page `, 'checks', 3));
+	return [heading('Revisions'), ...table, heading('Pages'), pageList(width)];
+}
+
+function pageList(width: number): Content {
+	const entry = (place: number): TableCell[] => {
+		const [name, id] = PAGES[place] ?? ['', ''];
+		return [{ pageReference: id, fontSize: 9.6, alignment: 'right' }, sans(name, { fontSize: 9.6 })];
+	};
+	const third = width / 3;
+	return {
+		table: {
+			widths: [14, third - 24, 14, third - 24, 14, third - 24],
+			body: [0, 3].map((start) => [...entry(start), ...entry(start + 1), ...entry(start + 2)])
+		},
+		layout: {
+			hLineWidth: (i) => (i === 0 ? 0.75 : 0.4),
+			hLineColor: (i) => (i === 0 ? '#000000' : RULE),
+			vLineWidth: () => 0,
+			paddingLeft: (i) => (i % 2 === 0 ? 0 : 7),
+			paddingRight: () => 1.5,
+			paddingTop: () => 1.8,
+			paddingBottom: () => 1.8
+		}
+	};
+}
+
+function reference(text: string, id: string, top = 0): Content {
+	return { text: [sans(text), { pageReference: id }, '.'], fontSize: 9, color: '#333333', margin: [0, top, 0, 0] };
+}

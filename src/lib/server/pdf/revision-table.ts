@@ -1,0 +1,24 @@
+import type { ContentTable } from 'pdfmake/interfaces';
+import type { RevisionLine } from '$lib/report';
+import { cell, grid, type GridColumn } from './grid';
+
+/** Revisions on the cover; where there are more, all stand on the page of the checks. */
+export const COVER_REVISIONS = 3;
+const SIZE = 9.4;
+
+export function revisionTable(revisions: readonly RevisionLine[], width: number): ContentTable {
+	const column = (head: string, wide: number): GridColumn => ({ width: wide, head, kind: 'entered', align: 'left' });
+	const columns = [
+		column('Rev.', 36),
+		column('Date', 66),
+		column('Status', 84),
+		column('What changed', width - 36 - 66 - 84 - 96),
+		column('Prepared', 96)
+	];
+	const body = revisions.map(({ revision, date, status, note, by, current }) =>
+		[revision, date, status, note, by].map((text, place) =>
+			cell(text, 'entered', { fontSize: SIZE, bold: current && place === 0 })
+		)
+	);
+	return grid(columns, body, { fontSize: 8.8, heavy: false });
+}
