@@ -69,8 +69,7 @@ function smtpServer(inbox) {
 		},
 		async onData(stream, session, callback) {
 			try {
-				const mail = await simpleParser(stream);
-				if (stream.sizeExceeded) throw Object.assign(new Error('Message too large'), { responseCode: 552 });
+				const mail = await simpleParser(await wholeMessage(stream));
 				inbox.add({
 					from: session.envelope.mailFrom ? session.envelope.mailFrom.address : '',
 					to: session.envelope.rcptTo.map(({ address }) => address),
@@ -91,6 +90,19 @@ function smtpServer(inbox) {
 			}
 		}
 	});
+}
+
+/** @param {import('smtp-server').SMTPServerDataStream} stream @returns {Promise<Buffer>} read to its end, kept to its limit */
+async function wholeMessage(stream) {
+	/** @type {Buffer[]} */
+	const chunks = [];
+	let size = 0;
+	for await (const chunk of stream) {
+		size += chunk.length;
+		if (size <= SIZE_LIMIT) chunks.push(chunk);
+	}
+	if (size > SIZE_LIMIT) throw Object.assign(new Error('Message too large'), { responseCode: 552 });
+	return Buffer.concat(chunks);
 }
 
 /**

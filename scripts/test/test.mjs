@@ -16,8 +16,11 @@ const SIGNALS = /** @type {Record<string, number>} */ ({ SIGHUP: 129, SIGINT: 13
 
 /** @param {string[]} words of the command line: a part, and what vitest is to be told */
 export function test([part, ...only]) {
-	if (process.env.CI) Object.assign(process.env, { NO_COLOR: '1', FORCE_COLOR: '0' });
-	else if (process.stdout.isTTY) process.env.FORCE_COLOR ??= '1';
+	if (process.stdout.isTTY && !process.env.CI) process.env.FORCE_COLOR ??= '1';
+	else {
+		delete process.env.FORCE_COLOR;
+		process.env.NO_COLOR = '1';
+	}
 	// Tests never reach a database that somebody works with.
 	for (const name of ['DATABASE_URL', 'DATABASE_ADMIN_URL', 'DATABASE_APP_PASSWORD']) delete process.env[name];
 	return live((life) => runTests(life, part, only), { signalCode: (signal) => SIGNALS[signal] ?? 1 });
