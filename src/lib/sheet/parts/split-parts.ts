@@ -3,7 +3,7 @@ const JUNCTION = /\b(?:tee|wye|take-?off|shoe|split|junction)\b/i;
 const FIGURES = /(?<![a-z])c ?[=:]? ?-?\d|\d ?(?:k?pa|in|")/i;
 const LEG = /^(?:branch|straight|through|main)\b/i;
 /** Counts and short letters without separators, as in `2E 1T 1D`. */
-const SHORT = /^(?:\d+ ?[a-z]{1,3} ?){2,}$/i;
+const SHORT = /^(?:\d+ ?(?!k?pa|in|mm)[a-z]{1,3} ?){2,}$/i;
 
 /**
  * The parts of a cell. A semicolon, a line and a comma part them, but not a comma between two digits; what follows a
