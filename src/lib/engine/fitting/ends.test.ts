@@ -1,0 +1,46 @@
+// Entries and exits.
+import { describe, expect, it } from 'vitest';
+import entries from '../../../../fixtures/published/entries.json';
+import exits from '../../../../fixtures/published/exits.json';
+import { describePublished } from '../../../../fixtures/published/published-checks';
+import {
+	angledEntryIdelchik,
+	freeBellmouthIdelchik,
+	projectingEntryIdelchik,
+	roundedEntryIdelchik,
+	roundedEntryRennels2012
+} from './entry-formulas';
+import { plainExit } from './exits';
+
+describePublished('entries against published values', entries, {
+	'fitting.entry-bellmouth-free': (given) => freeBellmouthIdelchik(given.number('r_over_D')),
+	'fitting.entry-duct-through-wall': (given) =>
+		projectingEntryIdelchik(given.number('t_over_D'), given.number('L_over_D')),
+	'fitting.entry-rounded-flush': (given) => {
+		const r = given.number('r_over_D');
+		return { rennels: roundedEntryRennels2012(r), idelchik: roundedEntryIdelchik(r) };
+	},
+	'fitting.entry-angled': (given) => angledEntryIdelchik(given.number('angle_to_wall_deg'))
+});
+
+describePublished('exits against published values', exits, {
+	// A uniform profile has a kinetic energy factor of 1.
+	'fitting.exit': (given) => plainExit(given.text('profile') === 'uniform' ? 1 : NaN)
+});
+
+describe('entries', () => {
+	it('lose less the rounder the edge', () => {
+		for (let r = 0; r < 0.2; r += 0.005) {
+			expect(freeBellmouthIdelchik(r + 0.005)).toBeLessThan(freeBellmouthIdelchik(r));
+			expect(roundedEntryIdelchik(r + 0.005)).toBeLessThan(roundedEntryIdelchik(r));
+			expect(roundedEntryRennels2012(r + 0.005)).toBeLessThan(roundedEntryRennels2012(r));
+		}
+	});
+
+	it('are worse with a longer projection and better with a thicker edge', () => {
+		for (const L of [0.001, 0.005, 0.03, 0.1, 0.4]) {
+			expect(projectingEntryIdelchik(0.01, L * 1.1)).toBeGreaterThan(projectingEntryIdelchik(0.01, L));
+			expect(projectingEntryIdelchik(0.03, L)).toBeLessThan(projectingEntryIdelchik(0.01, L));
+		}
+	});
+});

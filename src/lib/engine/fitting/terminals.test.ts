@@ -1,0 +1,27 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { describePublished } from '../../../../fixtures/published/published-checks';
+import published from '../../../../fixtures/published/terminals.json';
+import { lossAtDensity, meanFilterLoss, ratedLoss } from './rated-loss';
+
+describePublished('terminals against published values', published, {
+	'terminal.power-law': (given) =>
+		ratedLoss(given.number('dp_rated'), given.number('Q_rated'), given.number('Q'), given.number('n')),
+	'terminal.filter': (given) => meanFilterLoss(given.number('dp_clean'), given.number('dp_dirty')),
+	'terminal.density': (given) => lossAtDensity(given.number('dp_catalogue_1.2'), 1.2, given.number('rho'))
+});
+
+describe('the loss of a terminal', () => {
+	it('is the rated one at the rated flow, whatever the exponent', () => {
+		fc.assert(
+			fc.property(fc.double({ min: 0.01, max: 5, noNaN: true }), fc.double({ min: 1, max: 2, noNaN: true }), (Q, n) => {
+				expect(ratedLoss(40, Q, Q, n)).toBe(40);
+			})
+		);
+	});
+
+	it('takes the short way of a square to the same result', () => {
+		expect(ratedLoss(30, 0.1, 0.07, 2)).toBeCloseTo(ratedLoss(30, 0.1, 0.07, 2 + 1e-12), 9);
+		expect(ratedLoss(30, 0.1, 0, 1.4)).toBe(0);
+	});
+});
