@@ -56,7 +56,12 @@ describe('tables', () => {
 			from pg_class c where relkind = 'r' and relnamespace = 'public'::regnamespace`;
 		const guarded = rows.filter((row) => row.relrowsecurity && row.relforcerowsecurity);
 		expect(guarded.map((row) => row.relname).sort()).toEqual(Object.keys(TENANT).sort());
-		expect(rows.filter((row) => !guarded.includes(row)).map((row) => row.relname).sort()).toEqual(SIGN_IN);
+		expect(
+			rows
+				.filter((row) => !guarded.includes(row))
+				.map((row) => row.relname)
+				.sort()
+		).toEqual(SIGN_IN);
 		for (const { relname, policies } of guarded)
 			expect(
 				policies.some((text: string) => text.startsWith('*:') && text.includes("current_setting('app.firm_id'")),
@@ -79,10 +84,14 @@ describe("the application's role", () => {
 	it('owns nothing and can neither bypass the policies nor make roles or databases', async () => {
 		const [role] = await owner`select * from pg_roles where rolname = 'evendraft_app'`;
 		expect(role).toMatchObject({ rolsuper: false, rolbypassrls: false, rolcreatedb: false, rolcreaterole: false });
-		expect(await owner`select 1 from pg_shdepend d join pg_roles r on r.oid = d.refobjid
-			where r.rolname = 'evendraft_app' and d.deptype = 'o'`).toHaveLength(0);
-		expect(await owner`select 1 from pg_auth_members m join pg_roles r on r.oid = m.member
-			where r.rolname = 'evendraft_app'`).toHaveLength(0);
+		expect(
+			await owner`select 1 from pg_shdepend d join pg_roles r on r.oid = d.refobjid
+			where r.rolname = 'evendraft_app' and d.deptype = 'o'`
+		).toHaveLength(0);
+		expect(
+			await owner`select 1 from pg_auth_members m join pg_roles r on r.oid = m.member
+			where r.rolname = 'evendraft_app'`
+		).toHaveLength(0);
 		const [privilege] = await owner`select has_schema_privilege('evendraft_app', 'public', 'create') as may`;
 		expect(privilege?.may).toBe(false);
 	});

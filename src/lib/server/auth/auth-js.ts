@@ -6,7 +6,6 @@ import { passwordSignInSchema } from '$lib/schemas/sign-in';
 import { log } from '../http/log';
 import { origin } from '../http/origin';
 import { sendSignInLink } from '../mail/letters';
-import { sender, smtpUrl } from '../mail/post';
 import { adapter } from './adapter';
 import { isPassword } from './password';
 import { returnPath } from './return-path';
@@ -35,13 +34,21 @@ const byPassword = Credentials({
 const byLink = () =>
 	Nodemailer({
 		id: 'email',
-		server: smtpUrl(),
-		from: sender(),
+		// Asked for but not used: our own letter is posted.
+		server: 'smtp://127.0.0.1',
 		maxAge: LINK_LIFE_s,
 		// Its own address is built from the request; the letter's is built from the configured origin.
 		sendVerificationRequest: ({ identifier, token, url }) =>
 			sendSignInLink(identifier, token, returnPath(pathOf(new URL(url).searchParams.get('callbackUrl'))))
 	});
+
+/** Names of errors that tell of a wrong password or an old link, not of a fault. */
+const REFUSALS: ReadonlySet<string> = new Set([
+	'CredentialsSignin',
+	'AddressNotVerified',
+	'Verification',
+	'AccessDenied'
+]);
 
 /** The path of an address of ours. */
 function pathOf(url: string | null): string | null {
@@ -77,7 +84,10 @@ async function config(event: RequestEvent): Promise<SvelteKitAuthConfig> {
 			}
 		},
 		logger: {
-			error: (cause) => log.info({ err: cause }, 'sign-in was refused'),
+			error: (cause) =>
+				REFUSALS.has(cause.name)
+					? log.info({ reason: cause.name }, 'sign-in was refused')
+					: log.error({ err: cause }, 'sign-in failed'),
 			warn: (code) => log.debug({ code }, 'sign-in'),
 			debug: () => undefined
 		}

@@ -5,12 +5,14 @@ const YEAR_s = 31_536_000;
  * `same-origin` keeps the tokens of letters, which stand in addresses, from other sites, and lets forms send their origin.
  */
 export function withSecurityHeaders(url: URL, response: Response): Response {
-	const { headers } = response;
+	// A copy: the headers of a redirect cannot be written.
+	const guarded = new Response(response.body, response);
+	const { headers } = guarded;
 	headers.set('x-content-type-options', 'nosniff');
 	headers.set('x-frame-options', 'DENY');
 	headers.set('referrer-policy', 'same-origin');
 	headers.set('permissions-policy', 'camera=(), geolocation=(), microphone=(), payment=(), usb=()');
 	headers.set('cross-origin-opener-policy', 'same-origin');
 	if (url.protocol === 'https:') headers.set('strict-transport-security', `max-age=${YEAR_s}; includeSubDomains`);
-	return response;
+	return guarded;
 }

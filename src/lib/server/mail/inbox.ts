@@ -2,12 +2,13 @@ import { z } from 'zod';
 
 const messageSchema = z.object({
 	id: z.string(),
-	to: z.string(),
+	to: z.array(z.string()),
 	from: z.string(),
 	subject: z.string(),
-	date: z.string(),
+	/** When the fake took it, as ISO 8601. */
+	received: z.string(),
 	text: z.string(),
-	html: z.string()
+	html: z.string().nullable()
 });
 
 export type InboxMessage = z.infer<typeof messageSchema>;

@@ -10,14 +10,14 @@ export interface Letter {
 }
 
 /** Address of the mail server, as smtp://127.0.0.1:1025. */
-export function smtpUrl(): string {
+function smtpUrl(): string {
 	const url = process.env.SMTP_URL;
 	if (!url) throw new Error('SMTP_URL is not set');
 	return url;
 }
 
 /** Who the letters are from. */
-export const sender = (): string => process.env.MAIL_FROM ?? `Evendraft <no-reply@${new URL(origin()).hostname}>`;
+const sender = (): string => process.env.MAIL_FROM ?? `Evendraft <no-reply@${new URL(origin()).hostname}>`;
 
 /** Hands one letter to the mail server. */
 export async function post(letter: Letter): Promise<void> {

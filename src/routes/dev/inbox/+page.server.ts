@@ -6,5 +6,5 @@ import type { PageServerLoad } from './$types';
 export const load: PageServerLoad = async () => {
 	if (!inboxUrl()) error(404, 'Not found');
 	const messages = await listMessages();
-	return { messages: messages.map(({ id, to, subject, date }) => ({ id, to, subject, date })) };
+	return { messages: messages.map(({ id, to, subject, received }) => ({ id, to, subject, received })) };
 };
