@@ -16,12 +16,12 @@ import { NOTHING, RULE } from './wording';
 /** How the figure of a rule is shown. */
 function shownBy(rule: FlagRule, units: UnitSystem): (value: number) => string {
 	if (rule === 'velocity-main' || rule === 'velocity-run-out')
-		return (value) => `${formatVelocity(value, units)} ${unitOf('velocity', units)}`;
-	if (rule === 'friction-rate') return (value) => `${formatRate(value, units)} ${unitOf('rate', units)}`;
+		return (value) => `${formatVelocity(value, units)}\u00a0${unitOf('velocity', units)}`;
+	if (rule === 'friction-rate') return (value) => `${formatRate(value, units)}\u00a0${unitOf('rate', units)}`;
 	if (rule === 'flexible-length' || rule === 'rise-exceeds-length')
-		return (value) => `${formatLength(value, units)} ${unitOf('length', units)}`;
-	if (rule === 'negative-loss') return (value) => `${formatPressure(value, units)} ${unitOf('pressure', units)}`;
-	if (rule === 'fan-flows-differ') return (value) => `${(value * 100).toFixed(1)} %`;
+		return (value) => `${formatLength(value, units)}\u00a0${unitOf('length', units)}`;
+	if (rule === 'negative-loss') return (value) => `${formatPressure(value, units)}\u00a0${unitOf('pressure', units)}`;
+	if (rule === 'fan-flows-differ') return (value) => `${(value * 100).toFixed(1)}\u00a0%`;
 	if (rule === 'aspect-ratio') return (value) => formatCoefficient(value);
 	if (rule === 'coefficient-range') return (value) => value.toPrecision(2);
 	return (value) => String(Math.round(value));
@@ -79,7 +79,7 @@ export function criteriaOf({ document, solution, units }: ReportInput): Criterio
 	const rates = solved.map(({ figures }) => figures.frictionRate);
 	most('friction-rate', 'Friction rate', criteria.frictionRate, rates);
 	const lengths = solved.flatMap(({ row }) => (row.flexible ? [row.flexible.length] : []));
-	most('flexible-length', 'Flexible duct per section', criteria.flexibleLength, lengths);
+	most('flexible-length', 'Flexible duct', criteria.flexibleLength, lengths);
 	const ratios = document.rows.flatMap(({ size }) =>
 		size.shape === 'round' ? [] : [Math.max(size.width, size.height) / Math.min(size.width, size.height)]
 	);
@@ -94,4 +94,4 @@ export function criteriaOf({ document, solution, units }: ReportInput): Criterio
 }
 
 /** The unit stands with the limit already. */
-const figureAlone = (shown: string) => shown.split(' ')[0] ?? shown;
+const figureAlone = (shown: string) => shown.split('\u00a0')[0] ?? shown;

@@ -12,6 +12,9 @@ import type { Account, AccountLine, Column, Ledger } from './model';
 import { requirementOf, servesOf } from './network-order';
 import { NOTHING } from './wording';
 
+/** Rows of all accounts together, above which sections already told are carried forward in one line. */
+const LONG = 1200;
+
 type Figures = ReportInput['solution']['rows'][string];
 
 /** Every stream as an account of total pressure: the index path first, then by what each asks of the fan. */
@@ -26,6 +29,8 @@ export function ledgerOf({ document, solution, units }: ReportInput): Ledger {
 			Number(indexes.includes(b.outlet)) - Number(indexes.includes(a.outlet)) ||
 			a.spare - b.spare
 	);
+	const short = ranked.reduce((sum, path) => sum + path.rows.length, 0) > LONG;
+	const told = new Map<string, string>();
 	const accounts = ranked.map((path, place): Account => {
 		const index = indexes.includes(path.outlet);
 		const requirement = requirementOf(path);
@@ -39,7 +44,7 @@ export function ledgerOf({ document, solution, units }: ReportInput): Ledger {
 			requirementText: formatPressure(requirement, units),
 			spare: path.spare,
 			spareText: index ? 'index' : formatPressure(path.spare, units),
-			lines: linesOf(path, solution.rows, rows, figures, units)
+			lines: linesOf(path, shared(path, place + 1, short, told), solution.rows, rows, figures, units)
 		};
 	});
 	return {
@@ -48,9 +53,26 @@ export function ledgerOf({ document, solution, units }: ReportInput): Ledger {
 		notes: [
 			'Calculated unrounded, shown rounded; each total pressure is carried on unrounded.',
 			'Each account runs in the direction of flow. Spare pressure is what a damper at the outlet must take for the flows to be as designed.',
+			...(short
+				? ['Sections told in an earlier account are carried forward in one line, which names that account.']
+				: []),
 			...(gravity ? ['A gain by thermal gravity is a negative loss.'] : [])
 		]
 	};
+}
+
+/** The sections next to the fan that an earlier account has told, and which; none while every account is told whole. */
+interface Shared {
+	readonly rows: readonly string[];
+	readonly account: string;
+}
+
+function shared(path: Path, rank: number, short: boolean, told: Map<string, string>): Shared | null {
+	const first = path.rows.findIndex((tag) => !told.has(tag));
+	const rows = path.rows.slice(0, first === -1 ? path.rows.length : first);
+	const account = told.get(rows.at(-1) ?? '');
+	for (const tag of path.rows.slice(rows.length)) told.set(tag, String(rank));
+	return short && rows.length > 1 && account !== undefined ? { rows, account } : null;
 }
 
 /** A figure of a row that makes up its loss [Pa]; null prints as nothing. */
@@ -102,6 +124,7 @@ function columnsOf(units: UnitSystem, figures: readonly Figure[]): Column[] {
 
 function linesOf(
 	path: Path,
+	forward: Shared | null,
 	solved: ReportInput['solution']['rows'],
 	rows: ReadonlyMap<string, DesignRow>,
 	figures: readonly Figure[],
@@ -129,7 +152,15 @@ function linesOf(
 
 	line('start', supply ? 'At the fan' : roomName(path), null);
 	if (!supply) damper();
-	for (const tag of supply ? path.rows : [...path.rows].reverse()) {
+	const carry = () => {
+		if (forward === null) return;
+		const loss = forward.rows.reduce((sum, tag) => sum + (solved[tag]?.loss ?? 0), 0);
+		const last = forward.rows.at(-1) ?? '';
+		line('forward', `As account ${forward.account}, ${supply ? `to ${last}` : `from ${last}`}`, loss);
+	};
+	const own = path.rows.slice(forward?.rows.length ?? 0);
+	if (supply) carry();
+	for (const tag of supply ? own : own.reverse()) {
 		const row = rows.get(tag);
 		const figuresOfRow = solved[tag];
 		if (figuresOfRow === undefined) continue;
@@ -140,6 +171,7 @@ function linesOf(
 		const size = row === undefined ? NOTHING : formatSize(row.size, units);
 		line('row', tag, figuresOfRow.loss, [size, formatFlow(figuresOfRow.flow, units), ...shown]);
 	}
+	if (!supply) carry();
 	if (supply) damper();
 	line('end', supply ? roomName(path) : 'At the fan', null);
 	return lines;

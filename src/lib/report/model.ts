@@ -114,7 +114,8 @@ export interface Schedule {
 
 /** One step of an account. */
 export interface AccountLine {
-	readonly kind: 'start' | 'row' | 'spare' | 'end';
+	/** `forward`: sections already told in an earlier account, together. */
+	readonly kind: 'start' | 'forward' | 'row' | 'spare' | 'end';
 	readonly name: string;
 	readonly cells: readonly string[];
 	/** Taken from the total pressure, unrounded [Pa]; null for start and end. */

@@ -32,7 +32,14 @@ export const library: DesignDocument = {
 				{ name: 'Fire damper FD-01', loss: 8 }
 			]
 		},
-		{ tag: 'S02', joins: 'S01', side: 'supply', size: rectangular(0.45, 0.35), length: 5, junction: split('Split, straight way', 0.1) },
+		{
+			tag: 'S02',
+			joins: 'S01',
+			side: 'supply',
+			size: rectangular(0.45, 0.35),
+			length: 5,
+			junction: split('Split, straight way', 0.1)
+		},
 		{
 			tag: 'S03',
 			joins: 'S02',

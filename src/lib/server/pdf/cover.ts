@@ -57,7 +57,7 @@ function headOf({ heading: { kind, title, place, identity, stamp: status }, basi
 			],
 			columnGap: 16
 		},
-		{ columns: [pairs(identity, half), pairs(basis, half)], columnGap: GAP, margin: [0, 14, 0, 0] }
+		{ columns: [pairs(identity, half), pairs(basis, half)], columnGap: GAP, margin: [0, 12, 0, 0] }
 	];
 }
 
@@ -78,8 +78,8 @@ function pairs(lines: readonly Labelled[], width: number): Content {
 			vLineWidth: () => 0,
 			paddingLeft: () => 0,
 			paddingRight: () => 0,
-			paddingTop: () => 1.5,
-			paddingBottom: () => 1.5
+			paddingTop: () => 1,
+			paddingBottom: () => 1
 		}
 	} as Content;
 }
@@ -111,9 +111,9 @@ function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Con
 		cell(verdict, 'entered', { fontSize: 9.4, alignment: 'right', bold: verdict !== 'met' })
 	]);
 	const columns = [
-		{ width: half - 48 - 46, head: 'Limit of the design', kind: 'entered', align: 'left' },
-		{ width: 48, head: 'Worst', kind: 'computed', align: 'right' },
-		{ width: 46, head: '', kind: 'entered', align: 'right' }
+		{ width: half - 44 - 40, head: 'Limit of the design', kind: 'entered', align: 'left' },
+		{ width: 44, head: 'Worst', kind: 'computed', align: 'right' },
+		{ width: 40, head: '', kind: 'entered', align: 'right' }
 	] as const;
 	const right: Content[] = [heading('Checks')];
 	if (limits.length > 0) right.push(grid(columns, limits, { fontSize: 8.8, heavy: false, pad: 1.8 }));
@@ -148,7 +148,7 @@ function recordOf({ revisions }: Report, width: number): Content[] {
 function pageList(width: number): Content {
 	const entry = (place: number): TableCell[] => {
 		const [name, id] = PAGES[place] ?? ['', ''];
-		return [{ pageReference: id, fontSize: 9.6, alignment: 'right' }, sans(name, { fontSize: 9.6 })];
+		return [{ pageReference: id, fontSize: 9.6, noWrap: true }, sans(name, { fontSize: 9.6 })];
 	};
 	const third = width / 3;
 	return {
@@ -169,5 +169,10 @@ function pageList(width: number): Content {
 }
 
 function reference(text: string, id: string, top = 0): Content {
-	return { text: [sans(text), { pageReference: id }, '.'], fontSize: 9, color: '#333333', margin: [0, top, 0, 0] };
+	return {
+		text: [sans(text), { pageReference: id, noWrap: true }],
+		fontSize: 9,
+		color: '#333333',
+		margin: [0, top, 0, 0]
+	};
 }

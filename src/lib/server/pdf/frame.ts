@@ -1,7 +1,7 @@
 import type { CanvasElement, Content } from 'pdfmake/interfaces';
 import type { TitleBlock } from '$lib/report';
 import { NARROW, SANS, STRONG, type Family, type Weight } from './fonts';
-import type { Sheet } from './paper';
+import { footOrigin, type Sheet } from './paper';
 import { fitted, narrow, sans, type TextStyle } from './printable';
 
 const LINE = 1.125; // 1.5 px, the frame of the sheet
@@ -22,7 +22,7 @@ export function frameLines(sheet: Sheet): Content {
 
 /** The text of the title block, at the foot of every page. */
 export function blockText(sheet: Sheet, block: TitleBlock, name: string, page: number, pages: number): Content {
-	const top = sheet.blockTop + 3;
+	const top = sheet.blockTop + 3 - footOrigin(sheet);
 	const cells = cellsOf(sheet);
 	const placed: Content[] = [];
 	const put = (cell: number, y: number, content: object) => {
@@ -71,18 +71,19 @@ export function blockText(sheet: Sheet, block: TitleBlock, name: string, page: n
 }
 
 function one(text: string, font: Family, weight: Weight, size: number, width: number, style: TextStyle = {}) {
-	const cut = fitted(text, font, weight, size, width);
 	const all: TextStyle = { ...style, fontSize: size, bold: weight === 'bold', noWrap: true };
-	return font === NARROW ? narrow(cut, all) : sans(cut, { ...all, font });
+	const whole = fitted(text, font, weight, size, width);
+	if (font !== NARROW && !whole.endsWith('…')) return sans(whole, { ...all, font });
+	return narrow(fitted(text, NARROW, weight, size, width), all);
 }
 
 /** Cells of the block, left to right; identity takes what the record leaves. */
 function cellsOf(sheet: Sheet): { x: number; width: number }[] {
 	const { left, right } = sheet.frame;
 	const whole = right - left;
-	const record = [78, 48, 88, 54]; // system, revision, status, page
+	const record = [80, 46, 86, 50]; // system, revision, status, page
 	const rest = whole - record.reduce((sum, width) => sum + width, 0);
-	const widths = [Math.min(rest * 0.46, 190), 0, ...record];
+	const widths = [Math.min(rest * 0.43, 190), 0, ...record];
 	widths[1] = rest - (widths[0] ?? 0);
 	let x = left;
 	return widths.map((width) => {

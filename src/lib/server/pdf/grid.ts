@@ -26,6 +26,7 @@ export interface GridOptions {
 }
 
 const SIDE = 2.8; // padding left and right [pt]
+const BAR = 7; // room for the bar of the index path [pt]
 
 /** A table with the house's rules: horizontal lines only, units in the head, tint where the engine answers. */
 export function grid(columns: readonly GridColumn[], body: readonly TableCell[][], options: GridOptions): ContentTable {
@@ -90,9 +91,8 @@ export function tagCell(
 	fontSize: number,
 	kind: CellKind = 'entered'
 ): TableCell {
-	const bar: Column = index
-		? { width: 7, canvas: [{ type: 'rect', x: 0, y: 1.5, w: 3, h: fontSize, color: BLACK }] }
-		: { width: 7, text: '' };
-	const text = sans(tag, { bold: true, fontSize, fontFeatures: ['tnum', 'case'] });
-	return { columns: [bar, { width: width - 2 * SIDE - 7, ...text }], ...tint(kind) } as TableCell;
+	const style: TextStyle = { bold: true, fontSize, fontFeatures: ['tnum', 'case'] };
+	if (!index) return { ...sans(tag, { ...style, margin: [BAR, 0, 0, 0] }), ...tint(kind) };
+	const bar: Column = { width: BAR, canvas: [{ type: 'rect', x: 0, y: 1, w: 3, h: fontSize, color: BLACK }] };
+	return { columns: [bar, { ...sans(tag, style), width: width - 2 * SIDE - BAR }], columnGap: 0, ...tint(kind) };
 }

@@ -64,7 +64,7 @@ function accountTable(account: Account, { columns }: Ledger, grids: readonly Gri
 			{
 				width: 'auto',
 				text: [
-					sans(`asks ${requirementText} ${unit}`, { bold: true }),
+					sans(`requires ${requirementText} ${unit}`, { bold: true }),
 					sans(index ? '\u00a0\u00a0\u00a0index path' : `\u00a0\u00a0\u00a0spare ${spareText} ${unit}`, { bold: index })
 				],
 				fontSize: 9.4
@@ -92,6 +92,6 @@ function rowOf(line: AccountLine, index: boolean, columns: readonly GridColumn[]
 		first,
 		...middle,
 		figure(lossText, columns.length - 2),
-		figure(totalText, columns.length - 1, kind !== 'row' && kind !== 'spare')
+		figure(totalText, columns.length - 1, kind === 'start' || kind === 'end')
 	];
 }

@@ -14,6 +14,11 @@ export interface Sheet {
 	readonly wide: boolean;
 }
 
+/** Where the foot of a page begins: what stands in it is placed from there [pt]. */
+export function footOrigin(sheet: Sheet): number {
+	return sheet.height - sheet.margins[3];
+}
+
 /** Upright: width, height [pt]. */
 const SIZES: Readonly<Record<Paper, readonly [number, number]>> = {
 	A4: [595.28, 841.89],

@@ -45,7 +45,7 @@ function bandOf(cells: readonly ResultCell[], natural: readonly number[], width:
 	}));
 	return {
 		table: {
-			widths: natural.map((one) => one * scale * fits - 2 * PAD),
+			widths: natural.map((one) => one * scale * fits - 2 * (PAD - 1) - 0.7),
 			body: [body]
 		},
 		layout: {

@@ -1,19 +1,19 @@
 import type { Content } from 'pdfmake/interfaces';
 import type { Verification } from '$lib/report';
 import { STRONG } from './fonts';
-import type { Sheet } from './paper';
+import { footOrigin, type Sheet } from './paper';
 import { narrow, sans } from './printable';
 
-const HEIGHT = 112;
+const HEIGHT = 100;
 /** Height that the foot of the cover takes above the title block [pt]. */
-export const COVER_FOOT = HEIGHT + 16;
+export const COVER_FOOT = HEIGHT + 8;
 const SEAL = 240;
 const GAP = 20;
 
 /** At the foot of the cover: the hash of what was saved, and an empty box for a professional's own seal. */
 export function coverFoot(sheet: Sheet, { title, text, code, line }: Verification): Content {
 	const { left, width } = sheet.content;
-	const top = sheet.blockTop - HEIGHT - 9;
+	const top = sheet.blockTop - HEIGHT - 9 - footOrigin(sheet);
 	const sealLeft = left + width - SEAL;
 	const start = sheet.wide ? left + (width + 34) / 2 : left;
 	const room = sealLeft - GAP - start;
