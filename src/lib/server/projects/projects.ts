@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, isNull, sql } from 'drizzle-orm';
 import type { FirmScope } from '../auth/scope';
 import { inFirm } from '../db';
 import { isDuplicate } from '../db/is-duplicate';
@@ -60,6 +60,21 @@ export function findProject(scope: FirmScope, projectId: string) {
 			.from(project)
 			.where(and(eq(project.firmId, scope.firmId), eq(project.projectId, projectId)));
 		return row ?? null;
+	});
+}
+
+/** The designs of a project, archived ones last. */
+export function listDesigns(scope: FirmScope, projectId: string) {
+	return inFirm(scope, async (tx) => {
+		const rows = await tx
+			.select()
+			.from(design)
+			.where(and(eq(design.firmId, scope.firmId), eq(design.projectId, projectId)))
+			.orderBy(sql`${design.archivedAt} is not null`, asc(design.createdAt));
+		return rows.map(({ designId, name, service, archivedAt, figures }) => ({
+			...{ designId, name, service, archivedAt },
+			figures: figures as DesignFigures | null
+		}));
 	});
 }
 

@@ -1,0 +1,34 @@
+import type { Side, UnitSystem } from '$lib/engine';
+
+/** A project as the register shows it. */
+export interface RegisterProject {
+	readonly projectId: string;
+	readonly number: string;
+	readonly name: string;
+	readonly client: string;
+	readonly place: string;
+	readonly elevation_m: number;
+	readonly units: UnitSystem;
+	readonly archivedAt: Date | null;
+	readonly designs: readonly RegisterDesign[];
+}
+
+export interface RegisterDesign {
+	readonly designId: string;
+	readonly name: string;
+	readonly service: string;
+	readonly figures: {
+		readonly rows: number;
+		readonly side: Side | null;
+		readonly flow: number | null;
+		readonly totalPressure: number | null;
+		readonly index: string | null;
+		readonly problems: number;
+		readonly checks: number;
+	} | null;
+	readonly revisions: readonly {
+		readonly revision: string;
+		readonly status: 'work-in-progress' | 'issued-for-review';
+		readonly savedAt: Date;
+	}[];
+}
