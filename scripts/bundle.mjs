@@ -1,17 +1,20 @@
 /**
  * Builds scripts/programs/NAME.ts, with all it imports from src, into one module for Node: .evendraft/programs/NAME.mjs.
- * Packages stay outside. It builds only when a source is newer than the module, and writes nothing to standard output.
+ * Packages stay outside. It builds only when a file that went into the module has changed since, and writes nothing to
+ * standard output.
  */
-import { mkdirSync, readdirSync, readFileSync, renameSync, statSync, writeFileSync } from 'node:fs';
+import { mkdirSync, readFileSync, renameSync, statSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 
 const ROOT = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
 const OUT = path.join(ROOT, '.evendraft', 'programs');
+/** What every program depends on beside its own sources. */
+const ALWAYS = ['package-lock.json', 'scripts/bundle.mjs'];
 
 /** Whether the packages are installed. */
 export function installed() {
-	return exists(path.join(ROOT, 'node_modules', 'vite', 'package.json'));
+	return statOf('node_modules/vite/package.json') !== undefined;
 }
 
 /**
@@ -19,13 +22,24 @@ export function installed() {
  * @returns {Promise<string>} the path of the module
  */
 export async function bundle(name) {
-	const entry = path.join(ROOT, 'scripts', 'programs', `${name}.ts`);
 	const module = path.join(OUT, `${name}.mjs`);
-	if (isFresh(module)) return module;
+	if (isFresh(name)) return module;
 	if (!installed()) {
 		process.stderr.write('The packages are not installed: run `npm ci` first.\n');
 		process.exit(1);
 	}
+	const started = Date.now();
+	const chunk = await built(path.join(ROOT, 'scripts', 'programs', `${name}.ts`));
+	const sources = chunk.moduleIds
+		.filter((id) => path.isAbsolute(id))
+		.map((id) => path.relative(ROOT, id.split('?')[0]));
+	mkdirSync(OUT, { recursive: true });
+	put(module, chunk.code);
+	put(listOf(name), JSON.stringify(statesOf([...ALWAYS, ...sources], started)));
+	return module;
+}
+
+async function built(entry) {
 	const { build } = await import('vite');
 	const result = await build({
 		root: ROOT,
@@ -44,43 +58,43 @@ export async function bundle(name) {
 		}
 	});
 	const { output } = Array.isArray(result) ? result[0] : result;
-	const chunk = output.find((part) => part.type === 'chunk' && part.isEntry);
-	mkdirSync(OUT, { recursive: true });
-	// Written aside and renamed: another process never reads half a module.
-	const draft = path.join(OUT, `.${name}-${process.pid}.mjs`);
-	writeFileSync(draft, chunk.code);
-	renameSync(draft, module);
-	return module;
+	return output.find((part) => part.type === 'chunk' && part.isEntry);
 }
 
 function isPackage(id) {
-	if (id.startsWith('.') || id.startsWith('$lib') || path.isAbsolute(id) || id.startsWith('\0')) return false;
-	return true;
+	return !(id.startsWith('.') || id.startsWith('$lib') || id.startsWith('\0') || path.isAbsolute(id));
 }
 
-/** Newer than every source, and than the packages. */
-function isFresh(module) {
-	const built = changed(module);
-	if (built === 0 || readFileSync(module).length === 0) return false;
-	const places = ['package-lock.json', 'scripts/bundle.mjs', 'scripts/programs', 'src', 'tests/bench'];
-	return places.every((place) => latest(path.join(ROOT, place)) < built);
+/** @returns {boolean} whether the module is there and made of the files as they are now */
+function isFresh(name) {
+	if (statOf(path.join(OUT, `${name}.mjs`)) === undefined || statOf(listOf(name)) === undefined) return false;
+	const states = JSON.parse(readFileSync(listOf(name), 'utf8'));
+	return Object.entries(states).every(([file, state]) => state === stateOf(file));
 }
 
-/** Latest change of a file, or of anything below a folder; a removed file shows as a change of its folder. */
-function latest(place) {
-	let time = changed(place);
-	if (!statSync(place, { throwIfNoEntry: false })?.isDirectory()) return time;
-	for (const entry of readdirSync(place, { withFileTypes: true })) {
-		const inner = path.join(place, entry.name);
-		time = Math.max(time, entry.isDirectory() ? latest(inner) : changed(inner));
-	}
-	return time;
+function listOf(name) {
+	return path.join(OUT, `${name}.json`);
 }
 
-function changed(file) {
-	return statSync(file, { throwIfNoEntry: false })?.mtimeMs ?? 0;
+/** Time and size of each file; one that changed while the module was made counts as changed after it. */
+function statesOf(files, started) {
+	return Object.fromEntries(
+		files.map((file) => [file, (statOf(file)?.mtimeMs ?? started) >= started ? '' : stateOf(file)])
+	);
 }
 
-function exists(file) {
-	return changed(file) > 0;
+function stateOf(file) {
+	const stat = statOf(file);
+	return stat === undefined ? 'absent' : `${stat.mtimeMs} ${stat.size}`;
+}
+
+function statOf(file) {
+	return statSync(path.resolve(ROOT, file), { throwIfNoEntry: false });
+}
+
+/** Written aside and renamed: another process never reads half a file. */
+function put(file, text) {
+	const draft = `${file}.${process.pid}`;
+	writeFileSync(draft, text);
+	renameSync(draft, file);
 }

@@ -1,8 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { designJsonSchema, solveDesign, validateDocument, type Problem } from '$lib/engine';
-import { csvOf } from './solution-csv';
-import { whereJsonBreaks } from './json-fault';
-import { write } from './write';
+import { csvOf } from './calc/solution-csv';
+import { whereJsonBreaks } from './calc/json-fault';
+import { write } from './calc/write';
 
 const USAGE = 'usage: npm run --silent calc -- FILE [--csv] [--installed] | --schema   (FILE - is standard input)';
 const FLAGS: readonly string[] = ['--csv', '--installed', '--schema'];

@@ -7,7 +7,9 @@ import type { Problem } from './types';
  * a problem, so that all later steps may read freely. Keys with the value undefined are left out, -0 becomes 0.
  */
 export interface PlainCopy {
+	/** null when the input could not be read to its end */
 	readonly value: unknown;
+	readonly whole: boolean;
 	readonly problems: readonly Problem[];
 }
 
@@ -23,8 +25,7 @@ export function plainCopy(input: unknown): PlainCopy {
 		return copyOf(input);
 	} catch {
 		// A getter or a proxy of the caller's threw.
-		const problem = fault('unreadable', [], 'the document cannot be read as plain data', 'plain JSON');
-		return { value: null, problems: [problem] };
+		return broken(fault('unreadable', [], 'the document cannot be read as plain data', 'plain JSON'));
 	}
 }
 
@@ -44,10 +45,6 @@ function copyOf(input: unknown): PlainCopy {
 			problems.push(fault('type', path, `is a ${typeof value}`, 'plain JSON'));
 			return null;
 		}
-		if (path.length >= LIMITS.depth) {
-			problems.push(fault('too-deep', path, 'is nested too deeply', `at most ${LIMITS.depth} levels`));
-			return null;
-		}
 		const to: Holder = Array.isArray(value) ? [] : {};
 		waiting.push({ from: value, to, path });
 		return to;
@@ -56,6 +53,8 @@ function copyOf(input: unknown): PlainCopy {
 	const value = place(input, []);
 	for (let visit = waiting.pop(); visit !== undefined; visit = waiting.pop()) {
 		const { from, to, path } = visit;
+		if (path.length >= LIMITS.depth)
+			return broken(fault('too-deep', path, 'is nested too deeply', `at most ${LIMITS.depth} levels`));
 		if (Array.isArray(from)) {
 			if (values + from.length > LIMITS.values) return tooLarge();
 			for (let i = 0; i < from.length; i += 1) (to as unknown[]).push(place(from[i] ?? null, [...path, i]));
@@ -70,10 +69,13 @@ function copyOf(input: unknown): PlainCopy {
 			}
 		}
 	}
-	return { value, problems };
+	return { value, whole: true, problems };
 }
 
 function tooLarge(): PlainCopy {
-	const problem = fault('too-large', [], 'the document is too large', `at most ${LIMITS.values} values`);
-	return { value: null, problems: [problem] };
+	return broken(fault('too-large', [], 'the document is too large', `at most ${LIMITS.values} values`));
+}
+
+function broken(problem: Problem): PlainCopy {
+	return { value: null, whole: false, problems: [problem] };
 }

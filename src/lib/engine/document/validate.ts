@@ -13,7 +13,7 @@ import type { DesignDocument, ValidateResult } from './types';
 export function validateDocument(json: unknown): ValidateResult {
 	const copy = plainCopy(json);
 	const problems = [...copy.problems];
-	if (!problems.some((problem) => problem.path === '$')) {
+	if (copy.whole) {
 		// Where the copy found no JSON it left null: told once.
 		const told = new Set(copy.problems.map((problem) => problem.path));
 		const ofSchema = schemaProblems(copy.value).filter((problem) => !told.has(problem.path));

@@ -1,0 +1,91 @@
+import { describe, expect, it } from 'vitest';
+import { solutionOf } from '../../../../tests/engine/any-design';
+import type { Flag } from '../document/types';
+
+type Json = Record<string, unknown>;
+
+const main: Json = { tag: 'M', joins: null, side: 'supply', size: { shape: 'round', diameter: 0.3 }, length: 10 };
+const end: Json = {
+	tag: 'E',
+	joins: 'M',
+	side: 'supply',
+	size: { shape: 'round', diameter: 0.2 },
+	length: 5,
+	junction: { kind: 'fixed', coefficient: 0.2 },
+	outlet: { flow: 0.1, loss: 20 }
+};
+
+function flagsOf(keysOfMain: Json, keysOfEnd: Json = {}, keys: Json = {}): readonly Flag[] {
+	const rows = [
+		{ ...main, ...keysOfMain },
+		{ ...end, ...keysOfEnd }
+	];
+	return solutionOf({ format: 'evendraft/design@1', air: { density: 1.2 }, ...keys, rows }).flags;
+}
+
+const brief = (flags: readonly Flag[]) => flags.map((flag) => `${flag.rule} ${flag.row}`);
+
+describe('flags', () => {
+	it('are none for a sound small design', () => expect(flagsOf({})).toEqual([]));
+
+	// Velocities: M 1.415 m/s, E 3.183 m/s.
+	it.each<[string, Json, Json, Json]>([
+		['reynolds-transition E', {}, { outlet: { flow: 0.0055 } }, {}],
+		['no-junction-loss E', {}, { junction: undefined }, {}],
+		['velocity-main M', {}, {}, { criteria: { mainVelocity: 1.4 } }],
+		['velocity-run-out E', {}, {}, { criteria: { runOutVelocity: 3.1 } }],
+		['friction-rate E', {}, {}, { criteria: { frictionRate: 0.3 } }],
+		['flexible-length E', {}, { flexible: { length: 2 } }, { criteria: { flexibleLength: 1.5 } }],
+		['aspect-ratio M', { size: { shape: 'rectangular', width: 0.9, height: 0.2 } }, {}, {}],
+		['aspect-ratio M', { size: { shape: 'oval', width: 0.2, height: 0.5 } }, {}, { criteria: { aspectRatio: 2 } }],
+		['damper-missing E', {}, {}, { criteria: { damperAtOutlet: true } }],
+		['coefficient-range E', {}, { roughness: 0.02 }, {}],
+		['coefficient-range M', { fittings: [{ kind: 'rectangular-elbow-smooth' }] }, {}, {}],
+		['to-be-confirmed M', { equipment: [{ name: 'Coil', loss: 5, toBeConfirmed: true }] }, {}, {}],
+		['service-caution null', {}, {}, { service: 'kitchen-grease' }],
+		['service-caution E', {}, { serves: 'Kitchen hood' }, {}],
+		['fire-damper-caution M', { equipment: [{ name: 'Fire damper FD-01', loss: 6 }] }, {}, {}],
+		['negative-loss M', { length: 0, fittings: [{ kind: 'fixed', coefficient: -0.4 }] }, {}, {}],
+		['rise-exceeds-length M', { rise: -11 }, {}, {}],
+		['key-not-read M', { lenght: 3 }, {}, {}],
+		['key-not-read null', {}, {}, { air: { density: 1.2, temperature: 20 } }]
+	])('%s', (expected, keysOfMain, keysOfEnd, keys) => {
+		expect(brief(flagsOf(keysOfMain, keysOfEnd, keys))).toEqual([expected]);
+	});
+
+	it('carry the value and its threshold', () => {
+		const [flag] = flagsOf({}, {}, { criteria: { runOutVelocity: 3.1 } });
+		expect(flag?.value).toBeCloseTo(0.1 / (0.01 * Math.PI), 9);
+		expect(flag).toMatchObject({ threshold: 3.1, severity: 'caution', basis: 'criteria of the design' });
+	});
+
+	it.each([
+		['a butterfly damper of the catalogue', { fittings: [{ kind: 'damper-butterfly' }] }],
+		['a damper by its name', { fittings: [{ kind: 'fixed', coefficient: 0.2, name: 'VCD open' }] }],
+		['a damper among the equipment', { equipment: [{ name: 'Volume damper', loss: 4 }] }]
+	])('take %s for the damper of a run-out', (_name, keys) =>
+		expect(brief(flagsOf({}, keys, { criteria: { damperAtOutlet: true } }))).toEqual([])
+	);
+
+	it('do not take a fire damper for one that balances', () => {
+		const fire = { equipment: [{ name: 'Fire damper', loss: 4 }] };
+		expect(brief(flagsOf({}, fire, { criteria: { damperAtOutlet: true } }))).toContain('damper-missing E');
+	});
+
+	it('leave out the hint of a kitchen once the service is named', () =>
+		expect(flagsOf({}, { serves: 'Kitchen hood' }, { service: 'general' })).toEqual([]));
+
+	it('tell when the two sides of the fan differ by more than 0.5 %', () => {
+		const inlet = (flow: number) => ({ ...main, tag: 'R', side: 'return', outlet: { flow, loss: 10 } });
+		const flagsAt = (flow: number) =>
+			solutionOf({ format: 'evendraft/design@1', air: { density: 1.2 }, rows: [main, end, inlet(flow)] }).flags;
+		expect(brief(flagsAt(0.1004))).toEqual([]);
+		expect(brief(flagsAt(0.101))).toEqual(['fan-flows-differ null']);
+	});
+
+	it('tell that a static loss at an inlet is taken like one at an outlet', () => {
+		const inlet = { ...main, tag: 'R', side: 'exhaust', outlet: { flow: 0.1, loss: 10, lossIs: 'static' } };
+		const { flags } = solutionOf({ format: 'evendraft/design@1', air: { density: 1.2 }, rows: [inlet] });
+		expect(brief(flags)).toEqual(['static-loss-at-inlet R']);
+	});
+});

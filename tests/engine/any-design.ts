@@ -1,0 +1,101 @@
+import fc from 'fast-check';
+import {
+	solveDesign,
+	validateDocument,
+	type DesignDocument,
+	type DesignRow,
+	type Fitting,
+	type Solution
+} from '$lib/engine';
+
+/** A design for the tests of laws: any tree of rows on both sides of a fan, within what a building has. */
+export const anyDesign: fc.Arbitrary<DesignDocument> = fc
+	.record({
+		supply: fc.array(anySeed(), { minLength: 1, maxLength: 25 }),
+		other: fc.array(anySeed(), { maxLength: 12 }),
+		temperature: fc.double({ min: -10, max: 45, noNaN: true }),
+		surroundings: fc.double({ min: -20, max: 40, noNaN: true })
+	})
+	.map(({ supply, other, temperature, surroundings }) => ({
+		format: 'evendraft/design@1',
+		air: { temperature },
+		surroundings: { temperature: surroundings },
+		rows: [...treeOf('S', supply, ['supply']), ...treeOf('R', other, ['return', 'exhaust', 'outdoor'])]
+	}));
+
+interface Seed {
+	readonly parent: number;
+	readonly row: Omit<DesignRow, 'tag' | 'joins' | 'side'>;
+	readonly outlet: NonNullable<DesignRow['outlet']>;
+}
+
+function between(min: number, max: number): fc.Arbitrary<number> {
+	return fc.double({ min, max, noNaN: true });
+}
+
+function anySeed(): fc.Arbitrary<Seed> {
+	const side = between(0.1, 1.2);
+	const size = fc.oneof(
+		fc.record({ shape: fc.constant('round' as const), diameter: side }),
+		fc.record({ shape: fc.constantFrom('rectangular' as const, 'oval' as const), width: side, height: side })
+	);
+	const fitting: fc.Arbitrary<Fitting> = fc.oneof(
+		fc.record({ kind: fc.constant('fixed'), coefficient: between(-0.2, 2), count: fc.integer({ min: 1, max: 4 }) }),
+		fc.constant({ kind: 'round-elbow-smooth' })
+	);
+	const row = fc.record(
+		{
+			size,
+			length: between(0, 30),
+			rise: between(-10, 10),
+			junction: fc.record({ kind: fc.constant('fixed'), coefficient: between(-0.3, 1.5) }),
+			flexible: fc.record({ length: between(0, 3) }),
+			fittings: fc.array(fitting, { maxLength: 3 }),
+			equipment: fc.array(
+				fc.record({
+					name: fc.string({ maxLength: 8 }),
+					loss: between(0, 80),
+					atFlow: between(0.05, 2),
+					exponent: fc.constantFrom(1, 1.7, 2)
+				}),
+				{ maxLength: 2 }
+			)
+		},
+		{ requiredKeys: ['size', 'length'] }
+	);
+	const outlet = fc.record(
+		{
+			flow: between(0.01, 1),
+			loss: between(0, 60),
+			lossIs: fc.constantFrom('total' as const, 'static' as const),
+			pressure: between(-20, 20)
+		},
+		{ requiredKeys: ['flow'] }
+	);
+	return fc.record({ parent: fc.nat(1_000), row, outlet });
+}
+
+/** Each row joins an earlier one, or the fan; rows that nothing joins have the outlet. */
+function treeOf(letter: string, seeds: readonly Seed[], sides: readonly DesignRow['side'][]): DesignRow[] {
+	const parents = seeds.map((seed, i) => (i === 0 ? -1 : (seed.parent % (i + 1)) - 1));
+	return seeds.map((seed, i) => {
+		const parent = parents[i] ?? -1;
+		const ends = !parents.includes(i);
+		return {
+			...seed.row,
+			tag: `${letter}${i}`,
+			joins: parent < 0 ? null : `${letter}${parent}`,
+			side: sides[i % sides.length] ?? 'supply',
+			...(ends ? { outlet: seed.outlet } : {})
+		};
+	});
+}
+
+/** The solution of a document that must be sound. */
+export function solutionOf(document: unknown): Solution {
+	const validated = validateDocument(document);
+	if (!validated.ok) throw new Error(JSON.stringify(validated.problems));
+	const solved = solveDesign(validated.document);
+	if (!solved.ok) throw new Error(JSON.stringify(solved.problems));
+	return solved.solution;
+}
