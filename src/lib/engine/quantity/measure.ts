@@ -27,6 +27,8 @@ export interface Measure extends TermGrammar {
 	readonly max: number;
 	readonly example: Readonly<Record<UnitSystem, string>>;
 	readonly bareRule?: (sum: Sum, units: UnitSystem) => BareRule | null;
+	/** A sign that says nothing of the unit: the degree of a temperature. */
+	readonly idle?: RegExp;
 	/** Said of a unit whatever the figure. */
 	readonly caution?: (unit: Unit) => string | null;
 }
@@ -41,7 +43,8 @@ export function readMeasure(measure: Measure, text: string, units: UnitSystem): 
 	const plain = plainText(text);
 	if (plain === '') return { ok: false, message: 'nothing is typed', expected };
 	if (plain.length > LONGEST) return refuse('too long for a figure');
-	const result = readSum(plain, measure, units);
+	const bare = plain.replace(/ ?\bper\b ?/, '/').replace(measure.idle ?? /$^/, '');
+	const result = readSum(bare, measure, units);
 	if (!result.ok) return refuse(foreignUnit(plain, measure, units) ?? result.message);
 
 	const { sum } = result;

@@ -18,7 +18,15 @@ function lengthRule(sum: Sum, units: UnitSystem) {
 
 export const FLOW: Measure = {
 	noun: 'a flow',
-	units: [U.litrePerSecond, U.cubicMetrePerSecond, U.cubicMetrePerHour, U.cubicMetrePerMinute, U.cfm, U.standardCfm],
+	units: [
+		U.litrePerSecond,
+		U.litrePerMinute,
+		U.cubicMetrePerSecond,
+		U.cubicMetrePerHour,
+		U.cubicMetrePerMinute,
+		U.cfm,
+		U.standardCfm
+	],
 	bare: { SI: U.litrePerSecond, IP: U.cfm },
 	aside: { SI: U.cubicMetrePerSecond, IP: U.litrePerSecond },
 	thousands: true,
@@ -128,7 +136,8 @@ export const TEMPERATURE: Measure = {
 	aside: { SI: null, IP: U.celsius },
 	min: -100,
 	max: 1_000,
-	example: { SI: '20 or 20 °C', IP: '70 or 70 °F' }
+	example: { SI: '20 or 20 °C', IP: '70 or 70 °F' },
+	idle: / ?(?:°|deg(?:rees?)?)$/
 };
 
 export const DENSITY: Measure = {

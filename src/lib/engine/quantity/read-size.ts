@@ -65,7 +65,9 @@ export function readSize(text: string, units: UnitSystem): Reading<Size> {
 function sidesOf(text: string, units: UnitSystem): Sides | string {
 	if (text.startsWith('=')) return roundOf(sideOf(text, units), null, BARE[units]);
 	const oval = OVAL.test(text);
-	const plain = text.replace(OVAL, '').trim();
+	const plain = inOrder(text.replace(OVAL, '').trim());
+	const square = / ?(?:sq|square)\b\.?$/;
+	if (!oval && square.test(plain)) return squareOf(plain.replace(square, ''), units);
 	const pair = oval ? plain : plain.replace(/^rect(?:angular)?\.? ?/, '');
 	const whole = sideOf(pair, units);
 	const parts = pair.split(BETWEEN);
@@ -78,6 +80,19 @@ function sidesOf(text: string, units: UnitSystem): Sides | string {
 	const marked = roundText(plain);
 	const unit = /^dn/.test(plain) ? UNITS.millimetre : BARE[units];
 	return roundOf(sideOf(marked, units), marked === plain ? 'one figure' : null, unit);
+}
+
+function squareOf(side: string, units: UnitSystem): Sides | string {
+	return pairOf('rectangular', side, [side, side], units);
+}
+
+/** Sides that are named stand in the order width, height: `12"H x 24"W` is `24" x 12"`. */
+function inOrder(text: string): string {
+	const named =
+		/^([^a-z]*\d[^a-z]*(?:mm|cm|m|in)?) ?([wh]) ?(?:x|\*|\/|by) ?([^a-z]*\d[^a-z]*(?:mm|cm|m|in)?) ?([wh])$/.exec(text);
+	const [, first, side, second, last] = named ?? [];
+	if (side === undefined || side === last) return text;
+	return side === 'w' ? `${first} x ${second}` : `${second} x ${first}`;
 }
 
 /** A round size without its mark. */

@@ -93,6 +93,10 @@ const typed: [Kind, string, UnitSystem, number][] = [
 	['temperature', '68', 'IP', 20],
 	['temperature', '20 °C', 'IP', 20],
 	['temperature', '−5', 'SI', -5],
+	['temperature', '68°', 'IP', 20],
+	['temperature', '20°', 'SI', 20],
+	['rate', '.08 in. w.g. per 100 ft', 'SI', 19.9271128 / 30.48],
+	['flow', '0.57 m^3/s', 'IP', 0.57],
 	['density', '1.2', 'SI', 1.2],
 	['density', '1 lb/ft³', 'SI', 16.018463373960138],
 	['humidity', '50', 'SI', 0.5],
@@ -200,9 +204,9 @@ describe('what is no figure', () => {
 				if (reading.ok) expect(Number.isFinite(reading.value) && !Object.is(reading.value, -0)).toBe(true);
 				else expect(reading.message.length * reading.expected.length).toBeGreaterThan(0);
 			}),
-			{ numRuns: 4000 }
+			{ numRuns: 1000 }
 		);
-	});
+	}, 30_000);
 });
 
 describe('sums', () => {

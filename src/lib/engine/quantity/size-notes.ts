@@ -1,7 +1,7 @@
 /** What people write beside a size that is no part of it. */
 const NOTES: readonly (readonly [RegExp, string])[] = [
 	[/\(\s*e\s*\)|(?<![a-z])exist(?:ing)?\b\.?|(?<![a-z])ex\b\.?/, 'existing'],
-	[/(\d+(?:[.,]\d+)?) ?("|in\b\.?|mm) ?\(?(?:lined|lining|liner)\)?/, 'lined $1 $2'],
+	[/(\d+(?:[.,]\d+)?) ?("|in\b\.?|mm) ?\(?(?:lined|lining|liner|l)\b\)?/, 'lined $1 $2'],
 	[/\(?(?<![a-z])(?:lined|lining|liner)\b\)?/, 'lined'],
 	[/(?<=[\d"a-z]) l$|\(\s*l\s*\)/, 'lined'],
 	[/(?<![a-z])flex(?:i|ible)?\b/, 'flexible'],

@@ -41,6 +41,7 @@ export const UNITS = {
 	foot: unit('ft', "ft foot feet '", '0.3048'),
 
 	litrePerSecond: unit('L/s', 'l/s l/sec lps ls litre/s litres/s liter/s liters/s dm3/s', '0.001'),
+	litrePerMinute: unit('L/min', 'l/min lpm litre/min litres/min', '0.001', '60'),
 	cubicMetrePerSecond: unit('m³/s', 'm3/s m3/sec cumecs', '1'),
 	cubicMetrePerHour: unit('m³/h', 'm3/h m3/hr m3h cmh', '1', '3600'),
 	cubicMetrePerMinute: unit('m³/min', 'm3/min cmm', '1', '60'),
@@ -68,7 +69,7 @@ export const UNITS = {
 	kilogramPerCubicMetre: unit('kg/m³', 'kg/m3', '1'),
 	poundPerCubicFoot: unit('lb/ft³', 'lb/ft3 lbm/ft3 lb/cuft lbs/ft3 pcf', POUND, CUBIC_FOOT),
 
-	celsius: unit('°C', '°c c degc deg °', '1'),
+	celsius: unit('°C', '°c c degc', '1'),
 	fahrenheit: unit('°F', '°f f degf', '5', '9', '32'),
 	kelvin: unit('K', 'k', '1', '1', '273.15'),
 
