@@ -3,7 +3,7 @@ import { shortDigits } from './digits';
 import { plainText, quoted } from './plain-text';
 import type { Reading, UnitSystem } from './reading';
 import { readSum, type Sum } from './sum';
-import { unitAt, type TermGrammar } from './term';
+import type { TermGrammar } from './term';
 import { fromSI, toSI, UNITS, type Unit } from './units';
 
 /** How a figure without a unit is taken, where the size of the figure has a say. */
@@ -135,10 +135,4 @@ function foreignUnit(plain: string, measure: Measure, units: UnitSystem): string
 	if (!all.ok || all.sum.unit === null || measure.units.includes(all.sum.unit)) return null;
 	if (measure.units.length === 0) return `${measure.noun} stands here without a unit`;
 	return `${all.sum.unit.label} is not a unit of ${measure.noun}`;
-}
-
-/** Whether a text is the name of a unit of this kind; for the grammar of longer texts. */
-export function isUnitOf(measure: Measure, name: string): boolean {
-	const plain = plainText(name);
-	return unitAt(plain, 0, measure.units)?.end === plain.length;
 }
