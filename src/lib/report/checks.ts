@@ -46,7 +46,7 @@ export function checksOf({ solution, units }: ReportInput): Check[] {
 			const shown = shownBy(rule, units);
 			const findings = flags.map(({ row, value, message }) => ({
 				row,
-				found: value === undefined ? NOTHING : shown(value),
+				found: value === undefined || rule === 'to-be-confirmed' ? NOTHING : shown(value),
 				message
 			}));
 			const limit = threshold === undefined ? NOTHING : shown(threshold);

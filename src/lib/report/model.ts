@@ -149,6 +149,8 @@ export interface PartLine {
 	readonly name: string;
 	readonly count: string;
 	readonly coefficient: string;
+	/** A person's own coefficient, not one of the catalogue. */
+	readonly coefficientKind: CellKind;
 	readonly loss: string;
 	/** Number in the list of sources. */
 	readonly source: number | null;

@@ -24,6 +24,7 @@ export function partsOf({ document, solution, units }: ReportInput, sources: rea
 					name: item.name.trim() === PART[item.part] ? '' : item.name,
 					count: item.count === null ? NOTHING : String(item.count),
 					coefficient: formatCoefficient(item.coefficient),
+					coefficientKind: item.kind === 'fixed' ? 'entered' : 'computed',
 					loss: formatPressure(item.loss, units),
 					source: numbers.get(sourceText(item)) ?? null,
 					toBeConfirmed: item.toBeConfirmed

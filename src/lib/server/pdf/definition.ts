@@ -38,8 +38,7 @@ export function definitionOf(report: Report, printedAt: Date): TDocumentDefiniti
 			section(wide, 'Duct schedule', schedulePages(report, wide)),
 			section(text, 'Paths and ledger', ledgerPages(report, text)),
 			section(text, 'Parts of each section', partsPages(report, text)),
-			section(text, 'Fan duty and cautions', fanPages(report, text)),
-			section(text, 'Sources and methods', sourcesPages(report, text))
+			section(text, 'Fan duty, cautions, sources', [...fanPages(report, text), ...sourcesPages(report, text)])
 		],
 		defaultStyle: { font: SANS, fontSize: 9.75, color: '#000000' },
 		info: {

@@ -83,7 +83,7 @@ function cellsOf(sheet: Sheet): { x: number; width: number }[] {
 	const whole = right - left;
 	const record = [80, 46, 86, 50]; // system, revision, status, page
 	const rest = whole - record.reduce((sum, width) => sum + width, 0);
-	const widths = [Math.min(rest * 0.43, 190), 0, ...record];
+	const widths = [Math.min(rest * 0.455, 190), 0, ...record];
 	widths[1] = rest - (widths[0] ?? 0);
 	let x = left;
 	return widths.map((width) => {

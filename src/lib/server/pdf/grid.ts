@@ -25,8 +25,10 @@ export interface GridOptions {
 	readonly pad?: number;
 }
 
-const SIDE = 2.8; // padding left and right [pt]
-const BAR = 7; // room for the bar of the index path [pt]
+/** Padding left and right of a cell [pt]. */
+export const CELL_SIDE = 2.8;
+/** Room for the bar of the index path [pt]. */
+export const BAR = 7;
 
 /** A table with the house's rules: horizontal lines only, units in the head, tint where the engine answers. */
 export function grid(columns: readonly GridColumn[], body: readonly TableCell[][], options: GridOptions): ContentTable {
@@ -40,7 +42,7 @@ export function grid(columns: readonly GridColumn[], body: readonly TableCell[][
 			headerRows: heads.length,
 			keepWithHeaderRows: 1,
 			dontBreakRows: true,
-			widths: columns.map(({ width }) => width - 2 * SIDE),
+			widths: columns.map(({ width }) => width - 2 * CELL_SIDE),
 			body: [...heads, ...body]
 		},
 		layout: {
@@ -52,8 +54,8 @@ export function grid(columns: readonly GridColumn[], body: readonly TableCell[][
 			},
 			hLineColor: (i) => (i <= heads.length || i === last || lineAbove?.(i - heads.length) ? BLACK : RULE),
 			vLineWidth: () => 0,
-			paddingLeft: () => SIDE,
-			paddingRight: () => SIDE,
+			paddingLeft: () => CELL_SIDE,
+			paddingRight: () => CELL_SIDE,
 			paddingTop: (i) => (i < heads.length ? (i === 0 ? 2.5 : 0) : pad),
 			paddingBottom: (i) => (i < heads.length ? (i === heads.length - 1 ? 2.5 : 0.5) : pad)
 		}
@@ -94,5 +96,5 @@ export function tagCell(
 	const style: TextStyle = { bold: true, fontSize, fontFeatures: ['tnum', 'case'] };
 	if (!index) return { ...sans(tag, { ...style, margin: [BAR, 0, 0, 0] }), ...tint(kind) };
 	const bar: Column = { width: BAR, canvas: [{ type: 'rect', x: 0, y: 1, w: 3, h: fontSize, color: BLACK }] };
-	return { columns: [bar, { ...sans(tag, style), width: width - 2 * SIDE - BAR }], columnGap: 0, ...tint(kind) };
+	return { columns: [bar, { ...sans(tag, style), width: width - 2 * CELL_SIDE - BAR }], columnGap: 0, ...tint(kind) };
 }

@@ -1,5 +1,6 @@
 import type { Content, TableCell } from 'pdfmake/interfaces';
 import type { Account, AccountLine, Ledger, Report } from '$lib/report';
+import { columnWidths, type ColumnText } from './column-widths';
 import { cell, grid, tagCell, type GridColumn } from './grid';
 import { keyLine, notes, pageHead } from './page-head';
 import type { Sheet } from './paper';
@@ -7,16 +8,15 @@ import { sans } from './printable';
 import { columnsOn, placed } from './beside';
 
 const SIZE = 8.4;
-const FIGURE = 38;
-const WIDTHS: Readonly<Record<string, number>> = { step: 92, size: 58, flow: 40, loss: 42, total: 52 };
 /** An account up to this length stays on one page. */
 const TOGETHER = 30;
 
 /** Every path as an account of total pressure, the index path first. */
 export function ledgerPages({ ledger }: Report, sheet: Sheet): Content[] {
 	const { count, width } = columnsOn(sheet);
-	const columns = columnsOf(ledger, width);
-	const accounts = ledger.accounts.map((account) => accountTable(account, ledger, columns));
+	const { widths, fontSize } = columnWidths(textsOf(ledger), width, SIZE);
+	const columns = ledger.columns.map((column, place) => ({ ...column, width: widths[place] ?? 0 }));
+	const accounts = ledger.accounts.map((account) => accountTable(account, columns, fontSize));
 	return [
 		pageHead('ledger', 'Paths and ledger', titleOf(ledger), keyLine()),
 		notes(ledger.notes),
@@ -28,24 +28,25 @@ function titleOf({ accounts }: Ledger): string {
 	return accounts.length === 1 ? '1 path' : `${accounts.length} paths, index path first`;
 }
 
-function columnsOf({ columns }: Ledger, width: number): GridColumn[] {
-	const widths = columns.map(({ key }) => WIDTHS[key] ?? FIGURE);
-	const scale = width / widths.reduce((sum, one) => sum + one, 0);
-	return columns.map(({ head, unit, kind, align }, place) => ({
-		width: (widths[place] ?? FIGURE) * scale,
-		head,
-		unit,
-		kind,
-		align
-	}));
+function textsOf({ columns, accounts }: Ledger): ColumnText[] {
+	const lines = accounts.flatMap((account) => account.lines);
+	return columns.map(({ key, head, unit }, place): ColumnText => {
+		if (key === 'step') return { head, unit, texts: [], holds: 'rest', least: 84 };
+		if (key === 'loss') return { head, unit, texts: lines.map(({ lossText }) => lossText), holds: 'figures' };
+		if (key === 'total') return { head, unit, texts: lines.map(({ totalText }) => totalText), holds: 'figures' };
+		const texts = lines.map(({ cells }) => cells[place - 1] ?? '');
+		return key === 'size'
+			? { head, unit, texts, holds: 'words', most: 76 }
+			: { head, unit, texts, holds: 'figures', least: 36 };
+	});
 }
 
-function accountTable(account: Account, { columns }: Ledger, grids: readonly GridColumn[]) {
+function accountTable(account: Account, columns: readonly GridColumn[], fontSize: number) {
 	const { rank, outlet, serves, index, lines, requirementText, spareText } = account;
 	const unit = columns.at(-1)?.unit ?? '';
-	const body = lines.map((line) => rowOf(line, index, grids));
-	const table = grid(grids, body, {
-		fontSize: SIZE,
+	const body = lines.map((line) => rowOf(line, index, columns, fontSize));
+	const table = grid(columns, body, {
+		fontSize,
 		heavy: false,
 		pad: 1.5,
 		lineAbove: (row) => row === 1 || lines[row]?.kind === 'end'
@@ -76,17 +77,15 @@ function accountTable(account: Account, { columns }: Ledger, grids: readonly Gri
 	return { content: { stack: [title, table] }, whole: lines.length <= TOGETHER };
 }
 
-function rowOf(line: AccountLine, index: boolean, columns: readonly GridColumn[]): TableCell[] {
+function rowOf(line: AccountLine, index: boolean, columns: readonly GridColumn[], fontSize: number): TableCell[] {
 	const { kind, name, cells, lossText, totalText } = line;
 	const figure = (text: string, place: number, bold = false) => {
 		const column = columns[place];
-		return cell(text, column?.kind ?? 'computed', { fontSize: SIZE, alignment: column?.align ?? 'right', bold });
+		return cell(text, column?.kind ?? 'computed', { fontSize, alignment: column?.align ?? 'right', bold });
 	};
 	const width = columns[0]?.width ?? 0;
 	const first =
-		kind === 'row'
-			? tagCell(name, index, width, SIZE)
-			: cell(name, 'entered', { fontSize: SIZE, bold: kind === 'end' });
+		kind === 'row' ? tagCell(name, index, width, fontSize) : cell(name, 'entered', { fontSize, bold: kind === 'end' });
 	const middle = cells.map((text, place) => figure(text, place + 1));
 	return [
 		first,

@@ -7,16 +7,16 @@ import type { Sheet } from './paper';
 import { sans } from './printable';
 
 const SIZE = 8.4;
+/** Lines in one column of a wide sheet. */
+const IN_A_COLUMN = 36;
 
 /** What each section's loss is made of, and the number of each source. */
 export function partsPages({ parts, schedule, ledger }: Report, sheet: Sheet): Content[] {
 	const unit = ledger.columns.at(-1)?.unit ?? '';
 	const { count, width } = columnsOn(sheet);
 	const columns = columnsOf(width, unit);
-	const share = count === 1 ? parts.length : Math.ceil(parts.length / 2);
-	const blocks = [parts.slice(0, share), parts.slice(share)]
-		.filter((some) => some.length > 0)
-		.map((some) => ({ content: tableOf(some, columns), whole: false }));
+	const runs = count === 1 ? [parts] : columnsFull(parts);
+	const blocks = runs.map((some) => ({ content: tableOf(some, columns), whole: count > 1 }));
 	return [
 		pageHead('parts', 'Parts of each section', schedule.title, keyLine()),
 		...placed(blocks, count),
@@ -24,6 +24,21 @@ export function partsPages({ parts, schedule, ledger }: Report, sheet: Sheet): C
 			'Coefficients are on the section’s own velocity pressure, of one piece; the loss is of all pieces. Numbers of sources are those of the list of sources and methods.'
 		])
 	];
+}
+
+/** On a wide sheet the sections fill one column after the other, so that they read on within a page. */
+function columnsFull(parts: readonly PartsOfRow[]): PartsOfRow[][] {
+	const runs: PartsOfRow[][] = [];
+	let lines = Infinity;
+	for (const part of parts) {
+		if (lines + part.lines.length > IN_A_COLUMN) {
+			runs.push([]);
+			lines = 0;
+		}
+		runs.at(-1)?.push(part);
+		lines += part.lines.length;
+	}
+	return runs;
 }
 
 function columnsOf(width: number, unit: string): GridColumn[] {
@@ -68,7 +83,7 @@ function rowOf(part: PartsOfRow, line: PartLine, first: boolean, columns: readon
 		put(1, line.part),
 		name,
 		put(3, line.count),
-		put(4, line.coefficient),
+		cell(line.coefficient, line.coefficientKind, { fontSize: SIZE, alignment: 'right' }),
 		put(5, first ? part.velocityPressure : ''),
 		put(6, line.loss),
 		put(7, first ? part.loss : '', true),

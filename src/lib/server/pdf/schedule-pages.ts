@@ -1,57 +1,43 @@
 import type { Content } from 'pdfmake/interfaces';
 import type { Report, Schedule } from '$lib/report';
-import { cell, grid, tagCell, type GridColumn } from './grid';
+import { columnWidths, type ColumnText } from './column-widths';
+import { BAR, cell, grid, tagCell } from './grid';
 import { keyLine, notes, pageHead } from './page-head';
 import type { Sheet } from './paper';
 import { narrow } from './printable';
 
-const SIZE = 8.4;
-/** Least widths [pt]; what is left over goes to the columns of words. */
-const WIDTHS: Readonly<Record<string, number>> = {
-	section: 44,
-	joins: 34,
-	side: 38,
-	serves: 60,
-	flow: 34,
-	size: 53,
-	length: 32,
-	flexible: 27,
-	rate: 37,
-	fittings: 35,
-	total: 35
-};
-const FIGURE = 31;
+const SIZE = 8.6;
+/** Columns of words, set in the condensed face. */
 const WORDS = new Set(['serves', 'side']);
 
 /** The duct schedule, its heads repeated on each page. */
 export function schedulePages({ schedule }: Report, sheet: Sheet): Content[] {
-	const columns = columnsOf(schedule, sheet);
+	const { widths, fontSize } = columnWidths(textsOf(schedule), sheet.content.width, SIZE);
+	const columns = schedule.columns.map((column, place) => ({ ...column, width: widths[place] ?? 0 }));
 	const body = schedule.rows.map(({ tag, index, cells }) =>
 		cells.map(({ text, kind }, place) => {
 			const column = columns[place];
-			if (place === 0) return tagCell(tag, index, column?.width ?? 0, SIZE);
-			const key = schedule.columns[place]?.key;
-			if (key !== undefined && WORDS.has(key)) return { ...narrow(text, { fontSize: SIZE }) };
-			const bold = key === 'total' || (key === 'spare' && index);
-			return cell(text, kind, { fontSize: SIZE, alignment: column?.align ?? 'left', bold });
+			if (place === 0 || column === undefined) return tagCell(tag, index, column?.width ?? 0, fontSize);
+			if (WORDS.has(column.key)) return { ...narrow(text, { fontSize }) };
+			const bold = column.key === 'total' || (column.key === 'spare' && index);
+			return cell(text, kind, { fontSize, alignment: column.align, bold });
 		})
 	);
 	return [
 		pageHead('schedule', 'Duct schedule', schedule.title, keyLine()),
-		grid(columns, body, { fontSize: SIZE }),
+		grid(columns, body, { fontSize }),
 		notes(schedule.notes)
 	];
 }
 
-function columnsOf({ columns }: Schedule, sheet: Sheet): GridColumn[] {
-	const widths = columns.map(({ key }) => WIDTHS[key] ?? FIGURE);
-	const spare = sheet.content.width - widths.reduce((sum, width) => sum + width, 0);
-	const shares: Readonly<Record<string, number>> = { section: 0.1, joins: 0.1, serves: 0.72, size: 0.08 };
-	return columns.map(({ key, head, unit, kind, align }, place) => ({
-		width: (widths[place] ?? FIGURE) + spare * (shares[key] ?? 0),
-		head,
-		unit,
-		kind,
-		align
-	}));
+function textsOf({ columns, rows }: Schedule): ColumnText[] {
+	return columns.map(({ key, head, unit }, place): ColumnText => {
+		const texts = rows.map(({ cells }) => cells[place]?.text ?? '');
+		if (key === 'serves') return { head, unit, texts, holds: 'rest', least: 70 };
+		if (key === 'section') return { head, unit, texts, holds: 'words', least: 40, most: 82, before: BAR };
+		if (key === 'joins') return { head, unit, texts, holds: 'words', least: 30, most: 70 };
+		if (key === 'side') return { head, unit, texts, holds: 'words', most: 46 };
+		if (key === 'size') return { head, unit, texts, holds: 'words', most: 76 };
+		return { head, unit, texts, holds: 'figures' };
+	});
 }

@@ -20,7 +20,7 @@ export function sourcesPages({ sources }: Report, sheet: Sheet): Content[] {
 		cell(uses, 'entered', { fontSize: SIZE })
 	]);
 	return [
-		pageHead('sources', 'Sources and methods', 'Where the losses come from'),
+		{ stack: [pageHead('sources', 'Sources and methods', 'Where the losses come from')], margin: [0, 20, 0, 0] },
 		grid(columns, body, { fontSize: 9 }),
 		notes([
 			'Friction: Darcy–Weisbach on the hydraulic diameter and the mean velocity, with the Colebrook–White factor. Each stream keeps its own total pressure where streams split and meet.',
