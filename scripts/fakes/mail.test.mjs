@@ -73,7 +73,7 @@ describe('the mail fake', () => {
 		expect(readdirSync(folder)).toEqual([]);
 	});
 
-	it('refuses a message beyond 16 MB', async () => {
+	it('refuses a message beyond 16 MB', { timeout: 30_000 }, async () => {
 		await expect(
 			send({ attachments: [{ filename: 'big', content: Buffer.alloc(13 * 1024 * 1024) }] })
 		).rejects.toMatchObject({ responseCode: 552 });

@@ -16,10 +16,9 @@ export function clusterFault(said, { cluster, port }) {
 	if (/No space left on device|ENOSPC|Disk quota exceeded/i.test(said)) return fullDisk('the database wrote');
 	if (/Address already in use|could not create any TCP\/IP sockets/i.test(said))
 		return new Refusal(`Port ${port} was taken while the database started: run the command again.`);
+	// The version in PG_VERSION has been compared before.
 	if (/database files are incompatible|not compatible with (?:this|server)/i.test(said))
-		return new Refusal(
-			`The database in ${cluster} was made by another version of PostgreSQL: install that version, or move the folder away to begin with an empty one.`
-		);
+		return new Refusal(`The database in ${cluster} is damaged, or was made by another build of PostgreSQL: ${afresh}.`);
 	if (/lock file "[^"]*" already exists|pre-existing shared memory block/i.test(said))
 		return new Refusal(
 			`Another PostgreSQL still works in ${cluster}: stop it ('node scripts/database.mjs stop') and run the command again.`

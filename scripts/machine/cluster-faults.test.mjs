@@ -7,7 +7,7 @@ describe("PostgreSQL's trouble", () => {
 		['FATAL:  could not write to file "pg_wal/xlogtemp.77": No space left on device', 'The disk filled up'],
 		['FATAL:  could not resize shared memory segment "/PostgreSQL.1": No space left on device', '/dev/shm'],
 		['LOG:  could not bind IPv4 address "127.0.0.1": Address already in use', 'Port 54310 was taken'],
-		['FATAL:  database files are incompatible with server', 'another version of PostgreSQL'],
+		['FATAL:  database files are incompatible with server', 'another build of PostgreSQL'],
 		['FATAL:  lock file "postmaster.pid" already exists', 'Another PostgreSQL still works in'],
 		['FATAL:  data directory "/c" has wrong ownership', 'cannot be read by the user'],
 		['PANIC:  could not locate a valid checkpoint record', 'is damaged (PANIC: could not locate'],
