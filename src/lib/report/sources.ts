@@ -26,7 +26,7 @@ export function sourceText({ kind, source }: Item): string {
 	if (entry === null) return source ?? UNSTATED;
 	const named = source ?? entry.source;
 	const how = entry.known === 'published formula' ? '' : ` (${entry.known})`;
-	return named.includes(entry.method) ? `${named}${how}` : `${entry.method}: ${named}${how}`;
+	return named.includes(entry.method) ? `${named}${how}` : `${named}${how}; method: ${entry.method}`;
 }
 
 function useOf({ kind, part }: Item): string {

@@ -32,12 +32,14 @@ function textsOf({ columns, accounts }: Ledger): ColumnText[] {
 	const lines = accounts.flatMap((account) => account.lines);
 	return columns.map(({ key, head, unit }, place): ColumnText => {
 		if (key === 'step') return { head, unit, texts: [], holds: 'rest', least: 84 };
-		if (key === 'loss') return { head, unit, texts: lines.map(({ lossText }) => lossText), holds: 'figures' };
-		if (key === 'total') return { head, unit, texts: lines.map(({ totalText }) => totalText), holds: 'figures' };
+		if (key === 'loss')
+			return { head, unit, texts: lines.map(({ lossText }) => lossText), holds: 'figures', least: 44 };
+		if (key === 'total')
+			return { head, unit, texts: lines.map(({ totalText }) => totalText), holds: 'figures', least: 56 };
 		const texts = lines.map(({ cells }) => cells[place - 1] ?? '');
 		return key === 'size'
 			? { head, unit, texts, holds: 'words', most: 76 }
-			: { head, unit, texts, holds: 'figures', least: 36 };
+			: { head, unit, texts, holds: 'figures', least: 40 };
 	});
 }
 

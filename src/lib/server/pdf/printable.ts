@@ -14,7 +14,6 @@ const SUBSTITUTES: Readonly<Record<string, string>> = {
 	'\u2009': '\u00a0',
 	'\u200a': '\u00a0',
 	'\u202f': '\u00a0',
-	'\t': ' ',
 	'′': "'",
 	'″': '"',
 	'⌀': 'Ø',
@@ -31,10 +30,11 @@ export function printable(text: string): string {
 	const normal = face(SANS, 'normal');
 	const known = (one: string) => one === '\n' || normal.has(one.codePointAt(0) ?? 0);
 	let printed = '';
-	for (const character of text.normalize('NFC')) {
+	for (const character of text.replaceAll('\t', ' ').normalize('NFC')) {
 		const plain = SUBSTITUTES[character] ?? character;
+		if (/[\p{Cc}\p{Cf}]/u.test(character) && character !== '\n') continue;
 		if ([...plain].every(known)) printed += plain;
-		else if (/\p{C}|\p{M}/u.test(character)) continue;
+		else if (/\p{M}/u.test(character)) continue;
 		else {
 			const compatible = [...character.normalize('NFKC')].map((one) => SUBSTITUTES[one] ?? one);
 			printed += compatible.every(known) ? compatible.join('') : UNKNOWN;

@@ -12,7 +12,7 @@ const WORDS = new Set(['serves', 'side']);
 
 /** The duct schedule, its heads repeated on each page. */
 export function schedulePages({ schedule }: Report, sheet: Sheet): Content[] {
-	const { widths, fontSize } = columnWidths(textsOf(schedule), sheet.content.width, SIZE);
+	const { widths, fontSize } = columnWidths(textsOf(schedule, sheet), sheet.content.width, SIZE);
 	const columns = schedule.columns.map((column, place) => ({ ...column, width: widths[place] ?? 0 }));
 	const body = schedule.rows.map(({ tag, index, cells }) =>
 		cells.map(({ text, kind }, place) => {
@@ -30,7 +30,7 @@ export function schedulePages({ schedule }: Report, sheet: Sheet): Content[] {
 	];
 }
 
-function textsOf({ columns, rows }: Schedule): ColumnText[] {
+function textsOf({ columns, rows }: Schedule, sheet: Sheet): ColumnText[] {
 	return columns.map(({ key, head, unit }, place): ColumnText => {
 		const texts = rows.map(({ cells }) => cells[place]?.text ?? '');
 		if (key === 'serves') return { head, unit, texts, holds: 'rest', least: 70 };
@@ -38,6 +38,6 @@ function textsOf({ columns, rows }: Schedule): ColumnText[] {
 		if (key === 'joins') return { head, unit, texts, holds: 'words', least: 30, most: 70 };
 		if (key === 'side') return { head, unit, texts, holds: 'words', most: 46 };
 		if (key === 'size') return { head, unit, texts, holds: 'words', most: 76 };
-		return { head, unit, texts, holds: 'figures' };
+		return { head, unit, texts, holds: 'figures', least: sheet.wide ? 40 : 30 };
 	});
 }
