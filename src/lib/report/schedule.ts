@@ -113,7 +113,13 @@ function columnsOf(
 			(row) => row.outlet !== undefined,
 			({ outletLoss }) => outletLoss
 		),
-		...(also.gravity ? [loss('gravity', 'Gravity', always, ({ thermalGravity }) => 0 - thermalGravity)] : []),
+		...(also.gravity
+			? [
+					computed('gravity', 'Gravity', pressure, (_row, { thermalGravity }) =>
+						thermalGravity === 0 ? NOTHING : formatPressure(-thermalGravity, units)
+					)
+				]
+			: []),
 		loss('total', 'Total', always, ({ loss: all }) => all),
 		computed('spare', 'Spare', pressure, (row, { spare }) =>
 			onIndex.has(row.tag) ? 'index' : formatPressure(spare, units)

@@ -4,7 +4,7 @@ import { cell, grid, type GridColumn } from './grid';
 import { heading, notes, pageHead } from './page-head';
 import type { Sheet } from './paper';
 import { sans } from './printable';
-import { COVER_REVISIONS, revisionTable } from './revision-table';
+import { leavesOut, revisionTable } from './revision-table';
 
 const SIZE = 8.8;
 /** Sections named in one cell; more go on in the next row, so that no row is taller than a page. */
@@ -31,9 +31,7 @@ export function checksPages({ checks, toBeConfirmed, revisions }: Report, sheet:
 			: [notes(['No check of the engine found anything to look at. That is no proof that nothing is wrong.'])]),
 		heading('To be confirmed'),
 		...(open.length > 0 ? (open as Content[]) : [notes(['Nothing is marked as to be confirmed.'])]),
-		...(revisions.length > COVER_REVISIONS
-			? [heading('All revisions'), revisionTable(revisions, sheet.content.width)]
-			: [])
+		...(leavesOut(revisions) ? [heading('All revisions'), revisionTable(revisions, sheet.content.width)] : [])
 	];
 }
 

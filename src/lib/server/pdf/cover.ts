@@ -5,8 +5,8 @@ import { heading, notes } from './page-head';
 import type { Sheet } from './paper';
 import { narrow, sans } from './printable';
 import { resultBand } from './result-band';
-import { COVER_REVISIONS, revisionTable } from './revision-table';
-import { stamp } from './stamp';
+import { COVER_REVISIONS, coverNote, revisionTable } from './revision-table';
+import { STAMP_WIDTH, stamp } from './stamp';
 
 /** Open items told on the cover; all stand on the page of the checks. */
 const COVER_ITEMS = 4;
@@ -46,7 +46,7 @@ function headOf({ heading: { kind, title, place, identity, stamp: status }, basi
 		{
 			columns: [
 				{
-					width: '*',
+					width: width - STAMP_WIDTH - 16,
 					stack: [
 						sans(kind, { fontSize: 9.75, color: '#333333' }),
 						sans(title, { fontSize: 21.75, bold: true, lineHeight: 0.98 }),
@@ -135,14 +135,17 @@ function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Con
 }
 
 function recordOf({ revisions }: Report, width: number): Content[] {
-	const latest = revisions.slice(0, COVER_REVISIONS);
+	const latest = revisions.slice(0, COVER_REVISIONS).map((one) => ({ ...one, note: coverNote(one.note) }));
 	const table: Content[] =
 		latest.length > 0
 			? [revisionTable(latest, width)]
 			: [sans('None: this sheet was not saved as a version.', { fontSize: 9.6 })];
-	if (revisions.length > latest.length)
-		table.push(reference(`and ${revisions.length - latest.length} earlier, on page `, 'checks', 3));
-	return [heading('Revisions'), ...table, heading('Pages'), pageList(width)];
+	const more = revisions.length - latest.length;
+	if (more > 0) table.push(reference(`and ${more} earlier, on page `, 'checks', 3));
+	return [
+		{ stack: [heading('Revisions'), ...table], unbreakable: true },
+		{ stack: [heading('Pages'), pageList(width)], unbreakable: true }
+	];
 }
 
 function pageList(width: number): Content {

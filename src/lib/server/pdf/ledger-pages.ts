@@ -9,7 +9,7 @@ import { columnsOn, placed } from './beside';
 
 const SIZE = 8.4;
 /** An account up to this length stays on one page. */
-const TOGETHER = 30;
+const TOGETHER = 34;
 
 /** Every path as an account of total pressure, the index path first. */
 export function ledgerPages({ ledger }: Report, sheet: Sheet): Content[] {

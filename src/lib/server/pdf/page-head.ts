@@ -1,6 +1,9 @@
 import type { Column, Content } from 'pdfmake/interfaces';
 import { narrow, sans } from './printable';
 
+/** Width of the key at the right of a page's head [pt]. */
+const KEY = 182;
+
 /** Name of a page, its subject, and what stands at the right. */
 export function pageHead(id: string, kind: string, title: string, right: Content | null = null): Content {
 	const left: Column = {
@@ -11,7 +14,7 @@ export function pageHead(id: string, kind: string, title: string, right: Content
 		]
 	};
 	return {
-		columns: right === null ? [left] : [left, { width: 'auto', stack: [right], margin: [0, 18, 0, 0] }],
+		columns: right === null ? [left] : [left, { width: KEY, stack: [right], margin: [0, 18, 0, 0] }],
 		columnGap: 12,
 		margin: [0, 0, 0, 7]
 	};
@@ -19,15 +22,15 @@ export function pageHead(id: string, kind: string, title: string, right: Content
 
 /** What white, tint and bar mean. */
 export function keyLine(): Content {
-	const word = (text: string) => ({ ...narrow(text, { fontSize: 9 }), width: 'auto' });
+	const word = (text: string, width: number) => ({ ...narrow(text, { fontSize: 9, noWrap: true }), width });
 	return {
 		columns: [
 			{ width: 22, canvas: [{ type: 'line', x1: 0, y1: 10, x2: 20, y2: 10, lineWidth: 0.75 }] },
-			word('entered'),
-			{ width: 22, canvas: [{ type: 'rect', x: 0, y: 1, w: 20, h: 10, color: '#e0e0e0' }], margin: [8, 0, 0, 0] },
-			{ ...word('computed'), margin: [8, 0, 0, 0] },
-			{ width: 6, canvas: [{ type: 'rect', x: 0, y: 1, w: 3, h: 10, color: '#000000' }], margin: [8, 0, 0, 0] },
-			{ ...word('index path'), margin: [8, 0, 0, 0] }
+			word('entered', 34),
+			{ width: 22, canvas: [{ type: 'rect', x: 0, y: 1, w: 20, h: 10, color: '#e0e0e0' }] },
+			word('computed', 42),
+			{ width: 6, canvas: [{ type: 'rect', x: 0, y: 1, w: 3, h: 10, color: '#000000' }] },
+			word('index path', 40)
 		],
 		columnGap: 3
 	} as Content;

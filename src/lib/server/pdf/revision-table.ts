@@ -4,7 +4,19 @@ import { cell, grid, type GridColumn } from './grid';
 
 /** Revisions on the cover; where there are more, all stand on the page of the checks. */
 export const COVER_REVISIONS = 3;
+/** Characters of a note on the cover. */
+const COVER_NOTE = 180;
 const SIZE = 9.4;
+
+/** A note as the cover has it; where something is left out, the whole stands on the page of the checks. */
+export function coverNote(note: string): string {
+	return note.length <= COVER_NOTE ? note : `${note.slice(0, COVER_NOTE).trimEnd()}…`;
+}
+
+/** Whether the cover leaves out revisions or parts of notes. */
+export function leavesOut(revisions: readonly RevisionLine[]): boolean {
+	return revisions.length > COVER_REVISIONS || revisions.some(({ note }) => coverNote(note) !== note);
+}
 
 export function revisionTable(revisions: readonly RevisionLine[], width: number): ContentTable {
 	const column = (head: string, wide: number): GridColumn => ({ width: wide, head, kind: 'entered', align: 'left' });

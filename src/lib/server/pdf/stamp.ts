@@ -3,7 +3,7 @@ import type { Report } from '$lib/report';
 import { STRONG } from './fonts';
 import { narrow, sans } from './printable';
 
-const WIDTH = 196;
+export const STAMP_WIDTH = 196;
 
 /** The stamp of status: a double edge, two lines, upper case. Never round, never near the seal box. */
 export function stamp({ lines, caution }: Report['heading']['stamp']): Content {
@@ -32,10 +32,10 @@ export function stamp({ lines, caution }: Report['heading']['stamp']): Content {
 					lineHeight: 1.05
 				})
 			),
-			{ canvas: [{ type: 'line', x1: 0, y1: 0, x2: WIDTH - 26, y2: 0, lineWidth: 0.75 }], margin: [4, 3, 0, 3] },
+			{ canvas: [{ type: 'line', x1: 0, y1: 0, x2: STAMP_WIDTH - 26, y2: 0, lineWidth: 0.75 }], margin: [4, 3, 0, 3] },
 			narrow(caution, { fontSize: 8.6, alignment: 'center' })
 		],
 		margin: [4, 2, 4, 1]
 	};
-	return { width: WIDTH, stack: [edge(0.75, 1.6, edge(1.6, 3, text))] } as Content;
+	return { width: STAMP_WIDTH, stack: [edge(0.75, 1.6, edge(1.6, 3, text))] } as Content;
 }
