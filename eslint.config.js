@@ -32,6 +32,8 @@ export default ts.config(
 			'no-undef': 'off',
 			'no-console': 'error',
 			'svelte/no-navigation-without-resolve': 'off',
+			// State holds plain values that are replaced whole, never changed in place.
+			'svelte/prefer-svelte-reactivity': 'off',
 			'@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }]
 		}
 	},

@@ -7,7 +7,6 @@ import {
 	readHumidity,
 	readLength,
 	readNumber,
-	readPressure,
 	readRate,
 	readRise,
 	readRoomPressure,

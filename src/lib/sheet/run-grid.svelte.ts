@@ -18,9 +18,15 @@ export interface Editing {
 	readonly mode: 'replace' | 'amend';
 }
 
+/** What the grid needs of a sheet: the open one, or a saved version that only shows. */
+export type GridSource = Pick<
+	OpenSheet,
+	'sheet' | 'units' | 'solved' | 'whatIf' | 'isConfirmed' | 'mayUndo' | 'mayRedo' | 'do' | 'undo' | 'redo' | 'tryOut'
+>;
+
 /** The run sheet under a person's hands: selection, editing, clipboard, and what each row has to say. */
 export class RunGrid {
-	readonly open: OpenSheet;
+	readonly open: GridSource;
 	readonly selection: Selection;
 	readonly mayEdit: boolean;
 	#editing = $state.raw<Editing | null>(null);
@@ -28,7 +34,7 @@ export class RunGrid {
 	/** Told to the person: a refused paste and the like. */
 	notice = $state('');
 
-	constructor(open: OpenSheet, mayEdit: boolean) {
+	constructor(open: GridSource, mayEdit: boolean) {
 		this.open = open;
 		this.mayEdit = mayEdit;
 		this.selection = new Selection({ rows: () => this.rows.length - (mayEdit ? 0 : 1), columns: () => this.columns });

@@ -1,0 +1,26 @@
+import { z } from 'zod';
+import { SETTING_READERS } from '$lib/sheet/fields';
+import { SETTING_NAMES } from '$lib/sheet/setting-names';
+
+const typed = z.string().trim().max(200, 'At most 200 characters.').default('');
+const FIELDS = Object.keys(SETTING_NAMES) as (keyof typeof SETTING_NAMES)[];
+
+/** The basis of design as its form has it: every setting as typed, and the units they were typed in. */
+export const basisSchema = z
+	.object({
+		typedIn: z.enum(['SI', 'IP']).default('SI'),
+		...(Object.fromEntries(FIELDS.map((field) => [field, typed])) as Record<(typeof FIELDS)[number], typeof typed>)
+	})
+	.superRefine((form, context) => {
+		for (const field of FIELDS) {
+			const reading = form[field] ? SETTING_READERS[field](form[field], form.typedIn) : null;
+			if (reading && !reading.ok)
+				context.addIssue({
+					code: 'custom',
+					path: [field],
+					message: `${reading.message} Expected: ${reading.expected}.`
+				});
+		}
+	});
+
+export const BASIS_FIELDS = FIELDS;

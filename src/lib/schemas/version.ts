@@ -1,0 +1,7 @@
+import { z } from 'zod';
+
+/** What a person says of a version that they save. */
+export const saveVersionSchema = z.object({
+	note: z.string().trim().min(1, 'Say in a few words what changed.').max(400, 'At most 400 characters.'),
+	status: z.enum(['work-in-progress', 'issued-for-review']).default('work-in-progress')
+});

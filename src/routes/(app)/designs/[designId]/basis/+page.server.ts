@@ -1,0 +1,29 @@
+import { randomUUID } from 'node:crypto';
+import { error, fail } from '@sveltejs/kit';
+import { message, superValidate } from 'sveltekit-superforms';
+import { zod4 } from 'sveltekit-superforms/adapters';
+import { BASIS_FIELDS, basisSchema } from '$lib/schemas/basis';
+import { requireEditor } from '$lib/server/auth/require';
+import { appendEdits } from '$lib/server/designs/append-edits';
+import { openDesign } from '$lib/server/designs/find-design';
+import { settingEdits, settingsToEdit } from '$lib/sheet/settings';
+import type { Actions, PageServerLoad } from './$types';
+
+export const load: PageServerLoad = async ({ parent }) => {
+	const { sheet } = await parent();
+	return { form: await superValidate(settingsToEdit(sheet, BASIS_FIELDS), zod4(basisSchema)) };
+};
+
+export const actions: Actions = {
+	save: async ({ locals, params, request }) => {
+		const scope = requireEditor(locals);
+		const form = await superValidate(request, zod4(basisSchema));
+		if (!form.valid) return fail(400, { form });
+		const opened = await openDesign(scope, params.designId);
+		if (!opened) error(404, 'No such design');
+		const edit = settingEdits(opened.sheet, form.data, form.data.typedIn, BASIS_FIELDS);
+		if (edit && !(await appendEdits(scope, params.designId, opened.seq, [{ id: randomUUID(), edit }])))
+			error(404, 'No such design');
+		return message(form, edit ? 'Saved' : 'Nothing was changed');
+	}
+};

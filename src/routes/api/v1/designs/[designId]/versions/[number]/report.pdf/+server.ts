@@ -1,0 +1,19 @@
+import { requireScope } from '$lib/server/auth/require';
+import { download } from '$lib/server/http/download';
+import { problem } from '$lib/server/http/problem';
+import { reportPdf } from '$lib/server/pdf/report-pdf';
+import { printSchema, reportOfVersion } from '$lib/server/versions/report-of';
+import type { RequestHandler } from './$types';
+
+/** A saved version as a calculation report, from its stored figures. */
+export const GET: RequestHandler = async ({ locals, params, url }) => {
+	const print = printSchema.parse(Object.fromEntries(url.searchParams));
+	const number = Number(params.number);
+	const report = Number.isInteger(number)
+		? await reportOfVersion(requireScope(locals), params.designId, number, print)
+		: null;
+	if (!report) return problem('not-found', 'No such version');
+	const bytes = await reportPdf(report);
+	const { project, system, revision } = report.titleBlock;
+	return download(new Uint8Array(bytes), 'application/pdf', `${project} ${system} ${revision}.pdf`);
+};
