@@ -61,6 +61,15 @@ describe('air against a second implementation (psychrolib 1.1.1)', () => {
 	});
 });
 
+describe('viscosity to the digits of the U.S. Standard Atmosphere, 1976', () => {
+	it.each([
+		[0, 1.71608e-5],
+		[15, 1.78938e-5],
+		[40, 1.90757e-5],
+		[60, 1.99882e-5]
+	])('at %d °C is %d Pa s', (t, mu) => expect(Math.abs(sutherlandViscosity(t) - mu)).toBeLessThanOrEqual(0.51e-10));
+});
+
 describe('the state of the air', () => {
 	it('is dry air at sea level when only the temperature is given', () => {
 		expect(airState({ temperature: 20 }).density).toBe(humidAirDensity(20, 0, 101_325));

@@ -33,6 +33,24 @@ describePublished('area changes against published values', published, {
 		coefficientOnLeg(given.number('C_on_branch_pv'), given.number('V_branch'), given.number('V_common'))
 });
 
+describe('cones by Rennels & Hudson against the worked values of the fluids package', () => {
+	it.each([
+		[0.1, 10, 0.02, 0.12301652230915454],
+		[1 / 9, 50, 0.03, 0.8081340270019336],
+		[4 / 9, 40, 0.03, 0.32533470783539786],
+		[1 / 9, 120, 0.0185, 0.812308728765127],
+		[4 / 9, 120, 0.0185, 0.3282650135070033]
+	])('expansion of area ratio %d, %d°, f %d: %d', (a, d, f, K) => {
+		expect(conicalExpansionRennels2012(d, a, f)).toBeCloseTo(K, 10);
+	});
+
+	// A cone from 0.1 m to 0.04 m over 0.04 m
+	it('contraction from 0.1 m to 0.04 m over 0.04 m: 0.15779', () => {
+		const d = (2 * Math.atan(0.75) * 180) / Math.PI;
+		expect(conicalContractionRennels2012(d, 0.16, 0.0185)).toBeCloseTo(0.15779041548350314, 10);
+	});
+});
+
 const ratio = fc.double({ min: 0.05, max: 0.95, noNaN: true });
 
 describe('area changes', () => {

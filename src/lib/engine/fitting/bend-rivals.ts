@@ -1,7 +1,6 @@
 // Other methods for round bends, for comparison; the catalogue uses those of Idelchik and of SMACNA.
 import { PI, pow, radians, sin } from '../arithmetic';
 import { requireInRange, type Range } from '../errors';
-import { interpolate } from './interpolate';
 
 /**
  * Smooth round bend, wall friction along the arc included.
@@ -37,30 +36,23 @@ export function mitreRennels2012(angle: number): number {
 	return 0.42 * s + 2.56 * s * s * s;
 }
 
-const ITO_ANGLES: Range = { min: 45, max: 180 };
 const ITO_CURVED: Range = { min: 91, max: Number.MAX_VALUE };
 
 /**
- * Smooth round bend with smooth walls, wall friction along the arc included.
+ * Smooth round bend of 90° with smooth walls, wall friction along the arc included.
  *
- *   K = 0.00241 k d Re^-0.17 (2r/D)^0.84 for Re (D/2r)^2 above 91; k = 1 + 14.2 (2r/D)^-1.47 at 45°,
- *   0.95 + 17.2 (2r/D)^-1.96 at 90° (1 when 2r/D >= 19.7), 1 + 116 (2r/D)^-4.52 at 180°, straight lines between
+ *   K = 0.00241 k 90 Re^-0.17 (2r/D)^0.84 for Re (D/2r)^2 above 91; k = 0.95 + 17.2 (2r/D)^-1.96, or 1 when 2r/D >= 19.7
  *
- * @param angle d [°], 45 to 180
  * @param radiusRatio r/D [-], from 0.5
  * @param Re Reynolds number [-]
  * @returns K on the velocity pressure in the bend [-]
- * @throws {OutOfRangeError} when the angle or Re (D/2r)^2 leaves its range
+ * @throws {OutOfRangeError} when Re (D/2r)^2 leaves its range
  * @source Ito, Pressure losses in smooth pipe bends (1960), from memory; agrees with its checks
  * @check fixtures/published/elbows.json
  */
-export function bendIto1960(angle: number, radiusRatio: number, Re: number): number {
+export function bendIto1960(radiusRatio: number, Re: number): number {
 	const R = 2 * radiusRatio;
-	requireInRange('bendIto1960', 'd', angle, ITO_ANGLES);
 	requireInRange('bendIto1960', 'Re (D/2r)^2', Re / (R * R), ITO_CURVED);
-	const at45 = 1 + 14.2 * pow(R, -1.47);
-	const at90 = R < 19.7 ? 0.95 + 17.2 * pow(R, -1.96) : 1;
-	const at180 = 1 + 116 * pow(R, -4.52);
-	const k = interpolate([45, 90, 180], [at45, at90, at180], angle);
-	return 0.00241 * k * angle * pow(Re, -0.17) * pow(R, 0.84);
+	const k = R < 19.7 ? 0.95 + 17.2 * pow(R, -1.96) : 1;
+	return 0.00241 * k * 90 * pow(Re, -0.17) * pow(R, 0.84);
 }

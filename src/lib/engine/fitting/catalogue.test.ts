@@ -100,6 +100,12 @@ describe('the coefficient of a fitting', () => {
 		expect(value('round-elbow-segmented', { pieces: 5, radiusRatio: 1, angle: 45 })).toBeCloseTo(0.33 * 0.6, 12);
 	});
 
+	// SMACNA, HVAC Systems Duct Design, single-thickness vanes: 0.12, 0.15, 0.18 by radius and spacing (from memory)
+	it('of turning vanes lies within the printed ones (SMACNA)', () => {
+		expect(value('rectangular-elbow-vaned', {}, square)).toBeGreaterThanOrEqual(0.12);
+		expect(value('rectangular-elbow-vaned', {}, square)).toBeLessThanOrEqual(0.18);
+	});
+
 	it('of an exit diffuser is that of the cone and of the velocity left', () => {
 		const { frictionFactor: f } = round;
 		const friction = (f * (1 - 0.25)) / (8 * Math.sin((5 * Math.PI) / 180));

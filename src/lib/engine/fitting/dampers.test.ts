@@ -26,6 +26,15 @@ describe('dampers', () => {
 				expect(bladeDamper(d + 1, blades)).toBeGreaterThan(bladeDamper(d, blades));
 	});
 
+	it('fully open lose alike on either side of a free-area ratio of 0.5', () => {
+		const loss = (freeRatio: number) => {
+			const Ad = 0.5;
+			const free = openBladeDamper('parallel', Ad, Ad, 5.08).freeRatio;
+			return openBladeDamper('parallel', Ad, (free * Ad) / freeRatio, 5.08).loss;
+		};
+		expect(loss(0.4999) / loss(0.5001)).toBeCloseTo(1, 2);
+	});
+
 	it('lose more with opposed blades once they close', () => {
 		for (let d = 10; d <= 80; d += 5) expect(bladeDamper(d, 'opposed')).toBeGreaterThan(bladeDamper(d, 'parallel'));
 	});

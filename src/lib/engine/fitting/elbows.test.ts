@@ -2,9 +2,11 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import published from '../../../../fixtures/published/elbows.json';
 import { describePublished, type Given } from '../../../../fixtures/published/published-checks';
+import { OutOfRangeError } from '../errors';
 import { bendAspectFactorIdelchik, bendIdelchik, bendReynoldsFactorIdelchik } from './bend-idelchik';
 import { bendIto1960, bendRennels2012, mitreRennels2012 } from './bend-rivals';
 import {
+	elbowAngleFactorSmacna,
 	mitreReynoldsFactorSmacna,
 	rectangularElbowSmacna,
 	roundElbowSmacna,
@@ -40,7 +42,8 @@ describePublished('elbows against published values', published, {
 		bendReynoldsFactorIdelchik(given.number('R0_over_D'), given.number('Re')),
 	'fitting.elbow-round-smooth.rennels': (given) =>
 		bendRennels2012(angle(given), given.number('r_over_D'), given.number('fd')),
-	'fitting.elbow-round-smooth.ito': (given) => bendIto1960(angle(given), given.number('r_over_D'), given.number('Re')),
+	'fitting.elbow-round-smooth.ito': (given) =>
+		angle(given) === 90 ? bendIto1960(given.number('r_over_D'), given.number('Re')) : NaN,
 	'fitting.elbow-round-mitred.rennels': (given) => mitreRennels2012(angle(given))
 });
 
@@ -55,6 +58,20 @@ describe('the closed form of mitred elbows', () => {
 				expect(Math.abs(form - table), `${d}°, H/W ${ratio}`).toBeLessThanOrEqual(table >= 1 ? 0.05 : 0.0125);
 			}
 		}
+	});
+});
+
+describe('the angle factor of smooth bends', () => {
+	// Two sources: Idelchik, diagram 6-1, and SMACNA, table A-7, printed to two decimals
+	it('is that of the SMACNA table A-7 beyond 100°', () => {
+		for (const d of [110, 130, 150, 180])
+			expect(Math.abs(bendIdelchik(d, 1) / 0.21 - elbowAngleFactorSmacna(d)), `${d}°`).toBeLessThanOrEqual(0.006);
+	});
+});
+
+describe('the method of Ito', () => {
+	it('refuses what flows too slowly for a turbulent bend', () => {
+		expect(() => bendIto1960(10, 30_000)).toThrow(OutOfRangeError);
 	});
 });
 

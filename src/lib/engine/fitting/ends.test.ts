@@ -28,6 +28,18 @@ describePublished('exits against published values', exits, {
 	'fitting.exit': (given) => plainExit(given.text('profile') === 'uniform' ? 1 : NaN)
 });
 
+describe('the rounded entry of Rennels & Hudson', () => {
+	// fluids package, entrance_rounded: a point of their diagram 9.2
+	it('is 0.098395 at r/D 0.235', () => {
+		expect(roundedEntryRennels2012(0.235)).toBeCloseTo(0.09839534618360923, 12);
+	});
+
+	it('settles at 0.03 from r/D 1 on', () => {
+		expect(roundedEntryRennels2012(1)).toBeCloseTo(0.03, 4);
+		expect(roundedEntryRennels2012(2)).toBe(roundedEntryRennels2012(1));
+	});
+});
+
 describe('entries', () => {
 	it('lose less the rounder the edge', () => {
 		for (let r = 0; r < 0.2; r += 0.005) {

@@ -93,6 +93,17 @@ describe('Colebrook–White', () => {
 			});
 	});
 
+	it('lies within 4 % of Altshul and Tsal, whose two branches meet within 1 %', () => {
+		for (const roughness of [1e-5, 1e-4, 1e-3])
+			eachReynolds(2e4, 1e7, 1.5, (Re) => {
+				const f = frictionFactor({ reynolds: Re, relativeRoughness: roughness });
+				expect(Math.abs(frictionAltshulTsal1989(Re, roughness) / f - 1), `${Re} ${roughness}`).toBeLessThan(0.04);
+			});
+		// 0.11 (68/Re)^0.25 = 0.018
+		const Re = 68 / (0.018 / 0.11) ** 4;
+		expect(Math.abs(frictionAltshulTsal1989(Re * 1.0001, 0) / frictionAltshulTsal1989(Re, 0) - 1)).toBeLessThan(0.01);
+	});
+
 	it('can be solved for any roughness up to the diameter, and no further', () => {
 		for (const roughness of [0.1, 0.3, 1])
 			eachReynolds(4_000, 1e8, 3, (Re) => {
