@@ -53,7 +53,7 @@ export default {
 				'row-touch': token('row-touch'),
 				register: token('register'),
 				tools: token('tools'),
-				block: token('block'),
+				'title-block': token('block'),
 				strip: token('margin-strip')
 			}
 		}

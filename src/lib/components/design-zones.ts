@@ -1,4 +1,5 @@
 import { formatPressure, unitOf, type Solution, type UnitSystem } from '$lib/engine';
+import { mainIndex } from '$lib/sheet/main-index';
 import type { Zone } from './frame/ZoneRuler.svelte';
 
 /** The sheets of a design, in the order of their numbers. */
@@ -23,7 +24,7 @@ interface Facts {
 /** The zone of each sheet with its one live fact. */
 export function zonesOf(designId: string, open: SheetKey, { solution, units, problems, revision }: Facts): Zone[] {
 	const checks = solution?.flags.filter(({ severity }) => severity !== 'note').length ?? 0;
-	const index = solution?.index.supply ?? solution?.index.return ?? '';
+	const index = mainIndex(solution) ?? '';
 	const facts: Record<SheetKey, string> = {
 		sheet: problems ? `${problems} to mend` : checks === 1 ? '1 check' : checks ? `${checks} checks` : '',
 		ledger: index,

@@ -1,31 +1,8 @@
-import {
-	formatCoefficient,
-	formatLength,
-	formatPressure,
-	formatRate,
-	formatVelocity,
-	unitOf,
-	type Flag,
-	type FlagRule,
-	type UnitSystem
-} from '$lib/engine';
+import type { Flag, FlagRule } from '$lib/engine';
+import { shownBy } from './flag-figure';
 import type { ReportInput } from './input';
 import type { Check, Criterion } from './model';
 import { NOTHING, RULE } from './wording';
-
-/** How the figure of a rule is shown. */
-function shownBy(rule: FlagRule, units: UnitSystem): (value: number) => string {
-	if (rule === 'velocity-main' || rule === 'velocity-run-out')
-		return (value) => `${formatVelocity(value, units)}\u00a0${unitOf('velocity', units)}`;
-	if (rule === 'friction-rate') return (value) => `${formatRate(value, units)}\u00a0${unitOf('rate', units)}`;
-	if (rule === 'flexible-length' || rule === 'rise-exceeds-length')
-		return (value) => `${formatLength(value, units)}\u00a0${unitOf('length', units)}`;
-	if (rule === 'negative-loss') return (value) => `${formatPressure(value, units)}\u00a0${unitOf('pressure', units)}`;
-	if (rule === 'fan-flows-differ') return (value) => `${(value * 100).toFixed(1)}\u00a0%`;
-	if (rule === 'aspect-ratio') return (value) => formatCoefficient(value);
-	if (rule === 'coefficient-range') return (value) => value.toPrecision(2);
-	return (value) => String(Math.round(value));
-}
 
 const GRAVITY = { fault: 0, caution: 1, note: 2 } as const;
 

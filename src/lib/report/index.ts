@@ -1,1 +1,2 @@
+export { flagWords } from './flag-figure';
 export * from './report';

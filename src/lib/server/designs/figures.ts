@@ -1,4 +1,5 @@
 import type { Side } from '$lib/engine';
+import { mainIndex } from '$lib/sheet/main-index';
 import type { SolvedSheet } from '$lib/sheet/solve-sheet';
 
 /** What the register shows of a design without opening it. */
@@ -21,13 +22,12 @@ export interface DesignFigures {
 
 /** The figures of a solved sheet for the register. */
 export function figuresOf({ document, solution, problems, uncounted }: SolvedSheet): DesignFigures {
-	const index = solution?.index.supply ?? solution?.index.return ?? null;
 	return {
 		rows: (document?.rows.length ?? 0) + uncounted.length,
 		side: mainSide(document?.rows.map(({ side }) => side) ?? []),
 		flow: solution?.fan.flow ?? null,
 		totalPressure: solution?.fan.totalPressure ?? null,
-		index,
+		index: mainIndex(solution),
 		problems: problems.length,
 		uncounted: uncounted.length,
 		checks: solution?.flags.filter(({ severity }) => severity !== 'note').length ?? 0
