@@ -5,7 +5,7 @@ const email = z
 	.string()
 	.trim()
 	.toLowerCase()
-	.min(1, 'Type your e-mail address.')
+	.min(1, { error: 'Type your e-mail address.', abort: true })
 	.max(254, 'An address has at most 254 characters.')
 	.regex(z.regexes.email, 'This is not an e-mail address. One looks like name@firm.example.');
 

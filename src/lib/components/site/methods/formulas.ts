@@ -1,6 +1,7 @@
 /** What is computed outside the catalogue of fittings, as the method notes show it. */
 export interface FormulaNote {
 	readonly name: string;
+	/** What stands in ^{…} is raised. */
 	readonly equation: string;
 	/** Symbols with their units. */
 	readonly where: string;
@@ -44,7 +45,7 @@ const NETWORK: FormulaGroup = {
 		},
 		{
 			name: 'Equipment and outlets',
-			equation: 'Δp = Δp₀ (Q / Q₀)ⁿ',
+			equation: 'Δp = Δp₀ (Q / Q₀)^{n}',
 			where: 'Δp₀ loss at the flow Q₀, n exponent entered with it [–]',
 			range: 'As the maker states',
 			source: 'The maker’s data that were entered'
@@ -66,7 +67,7 @@ const AIR: FormulaGroup = {
 	formulas: [
 		{
 			name: 'Pressure at elevation',
-			equation: 'p = 101 325 (1 − 2.25577 × 10⁻⁵ z)⁵·²⁵⁵⁹',
+			equation: 'p = 101 325 (1 − 2.25577 × 10⁻⁵ z)^{5.2559}',
 			where: 'z elevation [m], p [Pa]',
 			range: '−5000 to 11 000 m',
 			source: 'U.S. Standard Atmosphere, 1976, eq. 33a'
@@ -80,7 +81,7 @@ const AIR: FormulaGroup = {
 		},
 		{
 			name: 'Viscosity',
-			equation: 'μ = 1.458 × 10⁻⁶ T¹·⁵ / (T + 110.4)',
+			equation: 'μ = 1.458 × 10⁻⁶ T^{1.5} / (T + 110.4)',
 			where: 'T [K], μ [Pa s]',
 			range: '−103 to 1627 °C; moisture lowers it by less than 1 % below 40 °C',
 			source: 'U.S. Standard Atmosphere, 1976, eq. 51 (Sutherland)'
@@ -124,7 +125,7 @@ const FRICTION: FormulaGroup = {
 		},
 		{
 			name: 'Flexible duct, compressed',
-			equation: 'factor = 1 + 0.58 K e^(−0.00496 D)',
+			equation: 'factor = 1 + 0.58 K e^{−0.00496 D}',
 			where: 'K what is missing of the full length [%], D diameter [mm]',
 			range: 'K to 45 %, D 150 to 400 mm',
 			source: 'Abushakra, Walker & Sherman (2004) and Culp; the form is from memory',
