@@ -66,7 +66,7 @@ function runOut(tag: string, joins: string, turn: number): DesignRow {
 		length: 2 + (turn % 4),
 		flexible: { length: 1.2 },
 		junction: { kind: 'fixed', coefficient: 0.6 },
-		fittings: [{ kind: 'round-elbow-smooth' }, { kind: 'fixed', coefficient: 0.2, name: 'damper' }],
+		fittings: [{ kind: 'round-elbow-smooth' }, { kind: 'damper-butterfly', name: 'damper' }],
 		outlet: { name: `Room ${turn}`, flow: 0.02 + (turn % 11) / 500, loss: 20 + (turn % 5) }
 	};
 }

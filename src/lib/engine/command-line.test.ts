@@ -3,7 +3,9 @@ import { mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'n
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { whereJsonBreaks } from '../../../scripts/programs/calc/json-fault';
 import { solutionOf } from '../../../tests/engine/any-design';
 
 const root = fileURLToPath(new URL('../../..', import.meta.url));
@@ -97,10 +99,18 @@ describe('the calc command refuses, with status 2 and nothing on standard output
 	it('no file', () => expect(refusal([])[0]).toMatch(/usage/));
 	it('two files', () => expect(refusal([hood, hood])[0]).toMatch(/usage/));
 
+	it('what is not JSON, by line and column', () =>
+		expect(refusal(['-'], '{"a": 1,\n "b": [1, 2,]}')).toEqual([
+			'standard input: is not JSON: expected a value at line 2, column 13'
+		]));
+});
+
+describe('where JSON breaks', () => {
 	it.each([
 		['{"a": 1,\n "b": [1, 2,]}', 'a value at line 2, column 13'],
 		['{"a": 1\n "b": 2}', 'a comma or } at line 2, column 2'],
 		['{a: 1}', 'a key in double quotes at line 1, column 2'],
+		['{"a": 1,}', 'a key in double quotes at line 1, column 9'],
 		['{"a" 1}', 'a colon at line 1, column 6'],
 		['[1, 2', 'a comma or ] at line 1, column 6'],
 		['{} {}', 'the end at line 1, column 4'],
@@ -108,7 +118,16 @@ describe('the calc command refuses, with status 2 and nothing on standard output
 		['[01]', 'a value at line 1, column 2'],
 		['[NaN]', 'a value at line 1, column 2'],
 		['["a\nb"]', 'a value at line 1, column 2']
-	])('%j, which is not JSON, by line and column', (text, expected) =>
-		expect(refusal(['-'], text)).toEqual([`standard input: is not JSON: expected ${expected}`])
-	);
+	])('in %j', (text, expected) => {
+		expect(() => JSON.parse(text)).toThrow(SyntaxError);
+		expect(whereJsonBreaks(text)).toBe(`expected ${expected}`);
+	});
+
+	it('is never found before the end of what is JSON', () => {
+		fc.assert(
+			fc.property(fc.json(), (text) => {
+				expect(whereJsonBreaks(`${text} ]`)).toMatch(/^expected the end at /);
+			})
+		);
+	});
 });

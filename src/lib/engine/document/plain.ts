@@ -14,10 +14,13 @@ export interface PlainCopy {
 }
 
 type Holder = unknown[] | Record<string, unknown>;
+/** An object or a list that is still to be copied, and the way to it. */
 interface Visit {
 	readonly from: object;
 	readonly to: Holder;
-	readonly path: readonly Step[];
+	readonly within: Visit | null;
+	readonly step: Step;
+	readonly depth: number;
 }
 
 export function plainCopy(input: unknown): PlainCopy {
@@ -34,42 +37,55 @@ function copyOf(input: unknown): PlainCopy {
 	const waiting: Visit[] = [];
 	let values = 0;
 
-	function place(value: unknown, path: readonly Step[]): unknown {
+	function place(value: unknown, within: Visit | null, step: Step): unknown {
 		values += 1;
 		if (value === null || typeof value === 'string' || typeof value === 'boolean') return value;
 		if (typeof value === 'number') {
-			if (!Number.isFinite(value)) problems.push(fault('not-finite', path, `is ${value}`, 'a finite number'));
+			if (!Number.isFinite(value))
+				problems.push(fault('not-finite', pathTo(within, step), `is ${value}`, 'a finite number'));
 			return value === 0 ? 0 : value;
 		}
 		if (typeof value !== 'object') {
-			problems.push(fault('type', path, `is a ${typeof value}`, 'plain JSON'));
+			problems.push(fault('type', pathTo(within, step), `is a ${typeof value}`, 'plain JSON'));
 			return null;
 		}
 		const to: Holder = Array.isArray(value) ? [] : {};
-		waiting.push({ from: value, to, path });
+		waiting.push({ from: value, to, within, step, depth: (within?.depth ?? -1) + 1 });
 		return to;
 	}
 
-	const value = place(input, []);
+	const value = place(input, null, '');
 	for (let visit = waiting.pop(); visit !== undefined; visit = waiting.pop()) {
-		const { from, to, path } = visit;
-		if (path.length >= LIMITS.depth)
+		const { from, to, depth } = visit;
+		if (depth >= LIMITS.depth) {
+			const path = pathTo(visit.within, visit.step);
 			return broken(fault('too-deep', path, 'is nested too deeply', `at most ${LIMITS.depth} levels`));
+		}
 		if (Array.isArray(from)) {
 			if (values + from.length > LIMITS.values) return tooLarge();
-			for (let i = 0; i < from.length; i += 1) (to as unknown[]).push(place(from[i] ?? null, [...path, i]));
+			for (let i = 0; i < from.length; i += 1) (to as unknown[]).push(place(from[i] ?? null, visit, i));
 		} else {
 			const keys = Object.keys(from);
 			if (values + keys.length > LIMITS.values) return tooLarge();
 			for (const key of keys) {
 				const inner = (from as Record<string, unknown>)[key];
 				if (inner === undefined) continue;
-				if (key === '__proto__') problems.push(fault('type', path, 'has a key named __proto__', 'no such key'));
-				else (to as Record<string, unknown>)[key] = place(inner, [...path, key]);
+				if (key === '__proto__') {
+					const path = pathTo(visit.within, visit.step);
+					problems.push(fault('type', path, 'has a key named __proto__', 'no such key'));
+				} else (to as Record<string, unknown>)[key] = place(inner, visit, key);
 			}
 		}
 	}
 	return { value, whole: true, problems };
+}
+
+/** The steps from the document to a value; the document itself has none. */
+function pathTo(within: Visit | null, step: Step): Step[] {
+	if (within === null) return [];
+	const path = [step];
+	for (let visit = within; visit.within !== null; visit = visit.within) path.push(visit.step);
+	return path.reverse();
 }
 
 function tooLarge(): PlainCopy {

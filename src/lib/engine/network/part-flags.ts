@@ -35,8 +35,7 @@ export function partFlags(
 		});
 	}
 
-	const names = [...(row.fittings ?? []).map((one) => one.name ?? ''), ...(row.equipment ?? []).map((one) => one.name)];
-	if (names.some((name) => FIRE.test(name) && DAMPER.test(name)))
+	if (hasNamed(row, (name) => FIRE.test(name) && DAMPER.test(name)))
 		flags.push({
 			rule: 'fire-damper-caution',
 			row: row.tag,
@@ -46,7 +45,7 @@ export function partFlags(
 			basis: 'outside the scope of a pressure calculation'
 		});
 
-	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !hasBalancingDamper(row, names))
+	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !hasBalancingDamper(row))
 		flags.push({
 			rule: 'damper-missing',
 			row: row.tag,
@@ -66,7 +65,13 @@ export function partFlags(
 		});
 }
 
-function hasBalancingDamper(row: DesignRow, names: readonly string[]): boolean {
-	if (names.some((name) => DAMPER.test(name) && !FIRE.test(name))) return true;
-	return (row.fittings ?? []).some((one) => fittingEntry(one.kind)?.family === 'dampers');
+function hasBalancingDamper(row: DesignRow): boolean {
+	if (hasNamed(row, (name) => DAMPER.test(name) && !FIRE.test(name))) return true;
+	return row.fittings?.some((one) => fittingEntry(one.kind)?.family === 'dampers') ?? false;
+}
+
+/** Whether a fitting or a piece of equipment has a name such as this. */
+function hasNamed(row: DesignRow, isSuch: (name: string) => boolean): boolean {
+	if (row.fittings?.some((one) => one.name !== undefined && isSuch(one.name)) === true) return true;
+	return row.equipment?.some((one) => isSuch(one.name)) ?? false;
 }

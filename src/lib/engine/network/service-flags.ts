@@ -28,9 +28,10 @@ export function serviceFlags(document: DesignDocument): Flag[] {
 	}
 	const flags: Flag[] = [];
 	for (const row of document.rows) {
-		const words = `${row.serves ?? ''} ${row.outlet?.name ?? ''}`;
-		if (words === ' ') continue;
-		const hint = HINTS.find(([pattern]) => pattern.test(words));
+		const name = row.outlet?.name ?? '';
+		const { serves = '' } = row;
+		if (name === '' && serves === '') continue;
+		const hint = HINTS.find(([pattern]) => pattern.test(serves) || pattern.test(name));
 		if (hint === undefined) continue;
 		const message = `${CAUTIONS[hint[1]]} Name the service of the design to settle this.`;
 		flags.push({ rule: 'service-caution', row: row.tag, severity: 'caution', message, basis: BASIS });

@@ -68,7 +68,9 @@ describe('any design, solved', () => {
 			const paths = solution.paths.filter((path) => (path.side === 'supply') === (half === 'supply'));
 			const asks = paths.map((path) => path.loss + (half === 'supply' ? path.roomPressure : -path.roomPressure));
 			const most = paths.length === 0 ? 0 : Math.max(...asks);
-			expect(solution.index[half]).toBe(paths[asks.indexOf(most)]?.outlet ?? null);
+			// Of several that ask as much, any may be the index.
+			const governing = paths.filter((_path, i) => asks[i] === most).map((path) => path.outlet);
+			expect(paths.length === 0 ? [null] : governing).toContain(solution.index[half]);
 			expect(half === 'supply' ? solution.fan.supplyPressure : solution.fan.returnPressure).toBe(most);
 			paths.forEach((path, i) => near(path.spare, most - (asks[i] ?? NaN)));
 		}
