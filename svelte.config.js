@@ -6,6 +6,8 @@ export default {
 	preprocess: vitePreprocess(),
 	kit: {
 		adapter: adapter({ out: 'build' }),
+		// The page for absent addresses is made under another path than it is shown at.
+		paths: { relative: false },
 		csp: {
 			mode: 'auto',
 			directives: {
