@@ -9,8 +9,9 @@ import { fileURLToPath } from 'node:url';
 
 const ROOT = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
 const OUT = path.join(ROOT, '.evendraft', 'programs');
+const TSCONFIG = 'src/lib/engine/tsconfig.json';
 /** What every program depends on beside its own sources. */
-const ALWAYS = ['package-lock.json', 'scripts/bundle.mjs'];
+const ALWAYS = ['package-lock.json', 'scripts/bundle.mjs', TSCONFIG];
 
 /** Whether the packages are installed. */
 export function installed() {
@@ -47,6 +48,8 @@ async function built(entry) {
 		envFile: false,
 		logLevel: 'silent',
 		publicDir: false,
+		// One that stands on its own: the general one extends a file that only SvelteKit makes.
+		tsconfig: TSCONFIG,
 		resolve: { alias: [{ find: '$lib', replacement: path.join(ROOT, 'src', 'lib') }] },
 		build: {
 			ssr: entry,

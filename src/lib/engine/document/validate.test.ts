@@ -32,7 +32,7 @@ describe('a sound document', () => {
 	it('may have a curve of the fan, given air and any side', () => {
 		const other = { ...last, tag: 'R1', joins: null, side: 'return' };
 		const exhaust = { ...last, tag: 'E1', joins: 'R1', side: 'exhaust' };
-		const { outlet: _outlet, ...middle } = other;
+		const { outlet: _outlet, ...middle }: Json = other;
 		const fan = {
 			curve: [
 				[0, 500],
