@@ -37,12 +37,12 @@ const computed = (
 });
 
 export const COLUMNS: readonly Column[] = [
-	entered('tag', 'Section', 112, 'Tag of the duct section', { align: 'left' }),
-	entered('joins', 'Joins', 50, 'Tag of the row on the fan’s side; blank where it meets the fan', { align: 'left' }),
-	entered('side', 'Side', 58, 'Supply, return, exhaust or outdoor; blank as the row it joins', { align: 'left' }),
-	entered('serves', 'Serves', 128, 'Room served, or from where to where', { align: 'left', grows: true }),
+	entered('tag', 'Section', 108, 'Tag of the duct section', { align: 'left' }),
+	entered('joins', 'Joins', 46, 'Tag of the row on the fan’s side; blank where it meets the fan', { align: 'left' }),
+	entered('side', 'Side', 56, 'Supply, return, exhaust or outdoor; blank as the row it joins', { align: 'left' }),
+	entered('serves', 'Serves', 116, 'Room served, or from where to where', { align: 'left', grows: true }),
 	entered('flow', 'Flow', 54, 'Design flow of the outlet; sums elsewhere', { quantity: 'flow' }),
-	entered('size', 'Size', 76, 'Inside size', { quantity: 'size', align: 'left' }),
+	entered('size', 'Size', 74, 'Inside size', { quantity: 'size', align: 'left' }),
 	entered('length', 'Length', 48, 'On the centre line, rigid duct', { quantity: 'length' }),
 	entered('rise', 'Rise', 42, 'Far end over the fan end', { quantity: 'length', optional: true }),
 	entered('flex', 'Flex.', 42, 'Length of flexible duct', { quantity: 'length' }),
@@ -58,9 +58,9 @@ export const COLUMNS: readonly Column[] = [
 	computed('fittings', 'Fittings', 52, 'Loss of the junction and the fittings', { quantity: 'pressure' }),
 	computed('equipment', 'Equip.', 48, 'Loss of equipment and outlet', { quantity: 'pressure' }),
 	computed('total', 'Total', 52, 'Loss of total pressure in the section', { quantity: 'pressure' }),
-	computed('spare', 'Spare', 78, 'Spare pressure of the best path through the section', {
+	computed('spare', 'Spare', 74, 'Spare pressure of the best path through the section', {
 		quantity: 'pressure',
 		align: 'left'
 	}),
-	computed('marks', '', 30, 'Problems and checks of the row')
+	computed('marks', '', 28, 'Problems and checks of the row')
 ];

@@ -61,6 +61,8 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 					elevation: settingOf(sheet, 'elevation') ?? 0
 				};
 	const surroundings = settingOf(sheet, 'surroundings');
+	// Left out until a person names it: the engine then asks where a room's name hints at a special service.
+	const service = settingOf(sheet, 'service');
 	const criteria = criteriaOf(sheet);
 	return {
 		format: 'evendraft/design@1',
@@ -70,7 +72,7 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 			surroundings: { temperature: surroundings, relativeHumidity: 0, elevation: settingOf(sheet, 'elevation') ?? 0 }
 		}),
 		material: settingOf(sheet, 'material') ?? 'galvanized-steel',
-		service: settingOf(sheet, 'service') ?? 'general',
+		...(service !== null && { service }),
 		...(criteria && { criteria })
 	};
 }

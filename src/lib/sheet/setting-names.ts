@@ -11,7 +11,7 @@ export interface SettingName {
 
 export const SETTING_NAMES = {
 	title: { name: 'Title on reports', blank: 'the tag of the system' },
-	service: { name: 'Service', blank: 'general' },
+	service: { name: 'Service', blank: 'not named yet; taken as general' },
 	temperature: { name: 'Temperature of the air', quantity: 'temperature', blank: '20 °C' },
 	humidity: { name: 'Relative humidity', quantity: 'humidity', blank: '50 %' },
 	elevation: { name: 'Elevation', quantity: 'elevation', blank: 'sea level' },

@@ -98,7 +98,6 @@ export const EMPTY_SHEET: Sheet = { format: SHEET_FORMAT, settings: {}, rows: []
 /** What holds where a setting was not typed. */
 export const DEFAULT_SETTINGS = {
 	units: 'SI',
-	service: 'general',
 	temperature: 20,
 	humidity: 0.5,
 	elevation: 0,

@@ -15,11 +15,8 @@ const end: Json = {
 	outlet: { flow: 0.1, loss: 20 }
 };
 
-function flagsOf(keysOfMain: Json, keysOfEnd: Json = {}, keys: Json = {}): readonly Flag[] {
-	const rows = [
-		{ ...main, ...keysOfMain },
-		{ ...end, ...keysOfEnd }
-	];
+function flagsOf(keysOfMain: Json, keysOfEnd: Json = {}, keys: Json = {}, others: Json[] = []): readonly Flag[] {
+	const rows = [{ ...main, ...keysOfMain }, { ...end, ...keysOfEnd }, ...others];
 	return solutionOf({ format: 'evendraft/design@1', air: { density: 1.2 }, ...keys, rows }).flags;
 }
 
@@ -38,7 +35,6 @@ describe('flags', () => {
 		['flexible-length E', {}, { flexible: { length: 2 } }, { criteria: { flexibleLength: 1.5 } }],
 		['aspect-ratio M', { size: { shape: 'rectangular', width: 0.9, height: 0.2 } }, {}, {}],
 		['aspect-ratio M', { size: { shape: 'oval', width: 0.2, height: 0.5 } }, {}, { criteria: { aspectRatio: 2 } }],
-		['damper-missing E', {}, {}, { criteria: { damperAtOutlet: true } }],
 		['coefficient-range E', {}, { roughness: 0.02 }, {}],
 		['coefficient-range M', { fittings: [{ kind: 'rectangular-elbow-smooth' }] }, {}, {}],
 		['to-be-confirmed M', { equipment: [{ name: 'Coil', loss: 5, toBeConfirmed: true }] }, {}, {}],
@@ -67,9 +63,17 @@ describe('flags', () => {
 		expect(brief(flagsOf({}, keys, { criteria: { damperAtOutlet: true } }))).toEqual([])
 	);
 
-	it('do not take a fire damper for one that balances', () => {
-		const fire = { equipment: [{ name: 'Fire damper', loss: 4 }] };
-		expect(brief(flagsOf({}, fire, { criteria: { damperAtOutlet: true } }))).toContain('damper-missing E');
+	const damped: Json = { ...end, tag: 'F', fittings: [{ kind: 'damper-butterfly' }] };
+	const dampers = { criteria: { damperAtOutlet: true } };
+
+	it('ask for a damper at an outlet that another is balanced against', () =>
+		expect(brief(flagsOf({}, {}, dampers, [damped]))).toEqual(['damper-missing E']));
+
+	it('ask for none where the side has no other outlet', () => expect(flagsOf({}, {}, dampers)).toEqual([]));
+
+	it.each(['Fire damper', 'Backdraught damper'])('do not take a %s for one that balances', (name) => {
+		const closer = { equipment: [{ name, loss: 4 }] };
+		expect(brief(flagsOf({}, closer, dampers, [damped]))).toContain('damper-missing E');
 	});
 
 	it('leave out the hint of a kitchen once the service is named', () =>

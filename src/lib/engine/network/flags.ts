@@ -21,12 +21,15 @@ export function flagsOf(
 ): readonly Flag[] {
 	const flags: Flag[] = [...serviceFlags(document), ...fanFlowFlags(totals)];
 	unreadKeyFlags(document, flags);
+	const outlets = { supply: 0, other: 0 };
+	for (const { side, outlet } of network.rows) if (outlet) outlets[side === 'supply' ? 'supply' : 'other']++;
 	network.rows.forEach((row, place) => {
 		const solved = losses[place];
 		if (solved === undefined) return;
+		const alone = outlets[row.side === 'supply' ? 'supply' : 'other'] === 1;
 		const joined = network.joined[place] === 1;
 		rowFlags(row, solved, joined, document.criteria, flags);
-		partFlags(row, solved, notes.get(row.tag) ?? NO_NOTES, document.criteria, flags);
+		partFlags(row, solved, notes.get(row.tag) ?? NO_NOTES, document.criteria, alone, flags);
 	});
 	return flags;
 }

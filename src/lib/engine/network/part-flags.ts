@@ -4,14 +4,20 @@ import type { RangeNote } from './items';
 import type { RowLoss } from './row-loss';
 
 const DAMPER = /damper|\bvcd\b/i;
+/** Dampers that do not balance: they close, or open, by themselves. */
+const UNSUITED = /\b(fire|smoke|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
 const FIRE = /\b(fire|smoke)\b/i;
 
-/** Fittings, equipment and outlet of one row: what is not settled, out of range, missing or needs a caution. */
+/**
+ * Fittings, equipment and outlet of one row: what is not settled, out of range, missing or needs a caution.
+ * `alone`: no other outlet is on its side of the fan, so that there is nothing to balance it against.
+ */
 export function partFlags(
 	row: DesignRow,
 	solved: RowLoss,
 	notes: readonly RangeNote[],
 	criteria: Criteria | undefined,
+	alone: boolean,
 	flags: Flag[]
 ): void {
 	for (const { name, inRange, note } of notes)
@@ -39,13 +45,13 @@ export function partFlags(
 		flags.push({
 			rule: 'fire-damper-caution',
 			row: row.tag,
-			severity: 'caution',
+			severity: 'note',
 			message:
 				'Fire or smoke damper: only its pressure drop is counted. Where it must stand, its rating, listing, installation and access are not checked here.',
 			basis: 'outside the scope of a pressure calculation'
 		});
 
-	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !hasBalancingDamper(row))
+	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !alone && !hasBalancingDamper(row))
 		flags.push({
 			rule: 'damper-missing',
 			row: row.tag,
@@ -66,7 +72,7 @@ export function partFlags(
 }
 
 function hasBalancingDamper(row: DesignRow): boolean {
-	if (hasNamed(row, (name) => DAMPER.test(name) && !FIRE.test(name))) return true;
+	if (hasNamed(row, (name) => DAMPER.test(name) && !UNSUITED.test(name))) return true;
 	return row.fittings?.some((one) => fittingEntry(one.kind)?.family === 'dampers') ?? false;
 }
 

@@ -68,5 +68,6 @@ export function formatSize(size: Size | null | undefined, units: UnitSystem): st
 }
 
 function shortTo(value: Decimal, decimals: number, units: UnitSystem): string {
-	return shortDigits(value.toDecimalPlaces(decimals), 15, units);
+	// A size is written closed up, as the trade does: 1200×600.
+	return shortDigits(value.toDecimalPlaces(decimals), 15, units).replace(/[\u2009,](?=\d{3})/g, '');
 }

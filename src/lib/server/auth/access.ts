@@ -39,7 +39,6 @@ export const ACCESS: Readonly<Record<string, Audience>> = {
 	'/(app)/designs/[designId]/hand-over': 'member',
 	'/api/v1/health': 'anyone',
 	'/api/v1/designs/[designId]/edits': 'member',
-	'/api/v1/designs/[designId]/versions': 'member',
 	'/api/v1/designs/[designId]/versions/[number]/report.pdf': 'member',
 	'/api/v1/designs/[designId]/report.pdf': 'member',
 	'/api/v1/designs/[designId]/document.json': 'member',
