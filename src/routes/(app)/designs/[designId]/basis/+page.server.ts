@@ -1,17 +1,19 @@
 import { randomUUID } from 'node:crypto';
 import { error, fail } from '@sveltejs/kit';
-import { message, superValidate } from 'sveltekit-superforms';
+import { message, setError, superValidate } from 'sveltekit-superforms';
 import { zod4 } from 'sveltekit-superforms/adapters';
 import { BASIS_FIELDS, basisSchema } from '$lib/schemas/basis';
 import { requireEditor } from '$lib/server/auth/require';
 import { appendEdits } from '$lib/server/designs/append-edits';
+import { changeDesign } from '$lib/server/designs/change-design';
 import { openDesign } from '$lib/server/designs/find-design';
 import { settingEdits, settingsToEdit } from '$lib/sheet/settings';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ parent }) => {
-	const { sheet } = await parent();
-	return { form: await superValidate(settingsToEdit(sheet, BASIS_FIELDS), zod4(basisSchema)) };
+	const { sheet, heading } = await parent();
+	const names = { name: heading.name, serves: heading.service };
+	return { form: await superValidate({ ...names, ...settingsToEdit(sheet, BASIS_FIELDS) }, zod4(basisSchema)) };
 };
 
 export const actions: Actions = {
@@ -21,9 +23,13 @@ export const actions: Actions = {
 		if (!form.valid) return fail(400, { form });
 		const opened = await openDesign(scope, params.designId);
 		if (!opened) error(404, 'No such design');
-		const edit = settingEdits(opened.sheet, form.data, form.data.typedIn, BASIS_FIELDS);
+		const { name, serves, typedIn } = form.data;
+		const renamed = name !== opened.heading.name || serves !== opened.heading.service;
+		if (renamed && (await changeDesign(scope, params.designId, { name, service: serves })) === 'taken')
+			return setError(form, 'name', `This project has a system ${name} already.`);
+		const edit = settingEdits(opened.sheet, form.data, typedIn, BASIS_FIELDS);
 		if (edit && !(await appendEdits(scope, params.designId, opened.seq, [{ id: randomUUID(), edit }])))
 			error(404, 'No such design');
-		return message(form, edit ? 'Saved' : 'Nothing was changed');
+		return message(form, edit || renamed ? 'Saved' : 'Nothing was changed');
 	}
 };
