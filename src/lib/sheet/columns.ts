@@ -37,9 +37,9 @@ const computed = (
 });
 
 export const COLUMNS: readonly Column[] = [
-	entered('tag', 'Section', 108, 'Tag of the duct section', { align: 'left' }),
-	entered('joins', 'Joins', 46, 'Tag of the row on the fan’s side; blank where it meets the fan', { align: 'left' }),
-	entered('side', 'Side', 56, 'Supply, return, exhaust or outdoor; blank as the row it joins', { align: 'left' }),
+	entered('tag', 'Section', 116, 'Tag of the duct section', { align: 'left' }),
+	entered('joins', 'Joins', 44, 'Tag of the row on the fan’s side; blank where it meets the fan', { align: 'left' }),
+	entered('side', 'Side', 50, 'Supply, return, exhaust or outdoor; blank as the row it joins', { align: 'left' }),
 	entered('serves', 'Serves', 116, 'Room served, or from where to where', { align: 'left', grows: true }),
 	entered('flow', 'Flow', 54, 'Design flow of the outlet; sums elsewhere', { quantity: 'flow' }),
 	entered('size', 'Size', 74, 'Inside size', { quantity: 'size', align: 'left' }),
