@@ -1,9 +1,10 @@
 import { z } from 'zod';
 import { readElevation } from '$lib/engine';
+import { keepable } from './keepable';
 
 const line = (what: string, most: number) =>
-	z.string().trim().min(1, `The project needs ${what}.`).max(most, `At most ${most} characters.`);
-const optional = (most: number) => z.string().trim().max(most, `At most ${most} characters.`).default('');
+	keepable().trim().min(1, `The project needs ${what}.`).max(most, `At most ${most} characters.`);
+const optional = (most: number) => keepable().trim().max(most, `At most ${most} characters.`).default('');
 
 /** A project as its form has it; the elevation as typed, in the units chosen beside it. */
 export const projectSchema = z
@@ -34,6 +35,6 @@ export function elevationOf({ elevation, units }: z.infer<typeof projectSchema>)
 
 /** A new design of a project. */
 export const designSchema = z.object({
-	name: z.string().trim().min(1, 'The system needs a tag, as AHU-1.').max(40, 'At most 40 characters.'),
-	service: z.string().trim().max(120, 'At most 120 characters.').default('')
+	name: keepable().trim().min(1, 'The system needs a tag, as AHU-1.').max(40, 'At most 40 characters.'),
+	service: keepable().trim().max(120, 'At most 120 characters.').default('')
 });

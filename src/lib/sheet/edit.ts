@@ -39,8 +39,8 @@ export type SingleEdit = z.infer<typeof single>;
 export type Edit = z.infer<typeof editSchema>;
 export type TypedCell = z.infer<typeof cell>;
 
-/** An edit with the id that its client gave it: sent again, it is applied once. */
-export const sentEditSchema = z.object({ id: z.uuid(), edit: editSchema });
+/** An edit with the id that its client gave it: sent again, it is applied once. In small letters, as the database has it. */
+export const sentEditSchema = z.object({ id: z.uuid().toLowerCase(), edit: editSchema });
 export type SentEdit = z.infer<typeof sentEditSchema>;
 
 /** Body of the route that takes edits. `base` is the last entry that the client has. */

@@ -25,7 +25,11 @@ interface Asked {
 	readonly routeId: string | null;
 	readonly path: string;
 	readonly run?: Run;
+	/** Of the route, as SvelteKit reads them from the path. */
+	readonly params?: Readonly<Record<string, string>>;
 	readonly form?: Readonly<Record<string, string>>;
+	/** Another body than a form. */
+	readonly content?: string;
 	readonly headers?: Readonly<Record<string, string>>;
 	readonly method?: string;
 }
@@ -52,13 +56,13 @@ export function browser(userAgent = 'Mozilla/5.0 (X11; Linux x86_64) Firefox/140
 		}
 	}
 
-	function eventOf({ routeId, path, form, headers, method }: Asked): RequestEvent {
+	function eventOf({ routeId, path, params = {}, form, content, headers, method }: Asked): RequestEvent {
 		const url = new URL(path, ORIGIN);
 		const cookie = [...jar].map(([name, value]) => `${name}=${encodeURIComponent(value)}`).join('; ');
 		const request = new Request(url, {
-			method: method ?? (form ? 'POST' : 'GET'),
+			method: method ?? (form || content !== undefined ? 'POST' : 'GET'),
 			headers: { 'user-agent': userAgent, ...(cookie && { cookie }), ...(form && { origin: ORIGIN }), ...headers },
-			body: form ? new URLSearchParams(form) : undefined
+			body: form ? new URLSearchParams(form) : content
 		});
 		const cookies = {
 			get: (name: string) => jar.get(name),
@@ -66,7 +70,7 @@ export function browser(userAgent = 'Mozilla/5.0 (X11; Linux x86_64) Firefox/140
 			set: (name: string, value: string, options: { maxAge?: number }) => keep(name, value, options.maxAge === 0),
 			delete: (name: string) => keep(name, '', true)
 		};
-		const rest = { params: {}, route: { id: routeId }, fetch: absentPage, isDataRequest: false, isSubRequest: false };
+		const rest = { params, route: { id: routeId }, fetch: absentPage, isDataRequest: false, isSubRequest: false };
 		// Only what our hooks and routes use of an event; a member that is missing shows as a failing test.
 		return { url, request, cookies, locals: {}, ...rest } as unknown as RequestEvent;
 	}

@@ -1,4 +1,5 @@
 import { error, json, redirect, type RequestEvent } from '@sveltejs/kit';
+import { isId } from '../http/is-id';
 import { log } from '../http/log';
 import { problem } from '../http/problem';
 import { verdict } from './access';
@@ -23,10 +24,14 @@ function mustSignIn({ url, request }: RequestEvent): Response {
 	redirect(303, `/sign-in?to=${encodeURIComponent(back)}`);
 }
 
+/** Whether a place for an id holds what cannot be one. */
+const namesNoId = ({ params }: RequestEvent): boolean =>
+	Object.entries(params).some(([name, text]) => name.endsWith('Id') && !isId(text ?? ''));
+
 /** Null when the visitor may use the route, else the reply that they get instead. */
 export async function refusal(event: RequestEvent): Promise<Response | null> {
 	const judged = verdict(event.route.id, event.locals);
-	if (judged === 'open') return null;
+	if (judged === 'open') return namesNoId(event) ? absent(event) : null;
 	if (judged === 'sign-in') return mustSignIn(event);
 	if (judged === 'unlisted') log.error({ route: event.route.id }, 'a route that names no audience is closed');
 	return absent(event);

@@ -13,7 +13,7 @@ import { figuresOf } from '../designs/figures';
 export function restoreVersion(scope: FirmScope, designId: string, number: number): Promise<'done' | 'absent'> {
 	return inFirm(scope, async (tx) => {
 		const [head] = await tx
-			.select({ seq: design.headSeq })
+			.select({ seq: design.headSeq, archivedAt: design.archivedAt })
 			.from(design)
 			.where(and(eq(design.firmId, scope.firmId), eq(design.designId, designId)))
 			.for('update');
@@ -21,7 +21,7 @@ export function restoreVersion(scope: FirmScope, designId: string, number: numbe
 			.select({ sheet: version.sheet, revision: version.revision })
 			.from(version)
 			.where(and(eq(version.firmId, scope.firmId), eq(version.designId, designId), eq(version.number, number)));
-		if (!head || !saved) return 'absent';
+		if (!head || head.archivedAt || !saved) return 'absent';
 		const sheet = saved.sheet as Sheet;
 		const entry: Entry = { kind: 'replace', sheet, from: saved.revision };
 		await appendEntries(tx, scope, designId, head.seq, [{ id: randomUUID(), entry }], sheet);

@@ -18,7 +18,7 @@ export type SaveResult =
 	| { readonly ok: false; readonly reason: 'absent' }
 	| { readonly ok: false; readonly reason: 'incomplete'; readonly solved: SolvedSheet };
 
-/** Saves the working sheet as the next version. Refused while a row does not count: a version stands for the whole sheet. */
+/** Saves the working sheet as the next version; an archived design takes none. Refused while a row does not count: a version stands for the whole sheet. */
 export function saveVersion(scope: FirmScope, designId: string, wanted: Wanted): Promise<SaveResult> {
 	return inFirm(scope, async (tx) => {
 		await tx
@@ -27,7 +27,7 @@ export function saveVersion(scope: FirmScope, designId: string, wanted: Wanted):
 			.where(and(eq(design.firmId, scope.firmId), eq(design.designId, designId)))
 			.for('update');
 		const heading = await findDesign(tx, scope, designId);
-		if (!heading) return { ok: false, reason: 'absent' };
+		if (!heading || heading.archivedAt) return { ok: false, reason: 'absent' };
 		const { sheet, seq } = await loadSheet(tx, scope, designId);
 		const solved = solveSheet(sheet);
 		if (!isComplete(solved)) return { ok: false, reason: 'incomplete', solved };

@@ -6,6 +6,7 @@ import { requireEditor, requirePerson, requireScope } from '$lib/server/auth/req
 import { mayEdit } from '$lib/server/auth/scope';
 import { changeDesign } from '$lib/server/designs/change-design';
 import { createDesign } from '$lib/server/designs/create-design';
+import { isId } from '$lib/server/http/is-id';
 import { changeProject, findProject, listDesigns } from '$lib/server/projects/projects';
 import type { Actions, PageServerLoad } from './$types';
 
@@ -58,7 +59,8 @@ export const actions: Actions = {
 	archiveDesign: async ({ locals, request }) => {
 		const typed = await request.formData();
 		const archived = typed.get('archived') === 'yes';
-		gone(await changeDesign(requireEditor(locals), String(typed.get('designId') ?? ''), { archived }));
+		const designId = String(typed.get('designId') ?? '');
+		gone(isId(designId) ? await changeDesign(requireEditor(locals), designId, { archived }) : 'absent');
 		return {};
 	}
 };

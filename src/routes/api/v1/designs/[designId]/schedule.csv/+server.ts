@@ -15,7 +15,7 @@ export const GET: RequestHandler = async ({ locals, params, url }) => {
 	const { columns, rows } = report.schedule;
 	const head = columns.map(({ head, unit }) => (unit ? `${head} [${unit}]` : head));
 	const csv = Papa.unparse([head, ...rows.map(({ cells }) => cells.map(({ text }) => plain(text)))], {
-		escapeFormulae: true
+		escapeFormulae: FORMULA
 	});
 	return download(
 		`\ufeff${csv}\r\n`,
@@ -23,6 +23,9 @@ export const GET: RequestHandler = async ({ locals, params, url }) => {
 		`${report.titleBlock.project} ${report.titleBlock.system}.csv`
 	);
 };
+
+/** What spreadsheets would run as a formula; a figure below zero is none. */
+const FORMULA = /^(?!-\d+(\.\d+)?$)[=+\-@\t\r]/;
 
 /** Figures as programs read them: no grouping, a hyphen for minus, a blank for nothing. */
 const plain = (text: string) =>

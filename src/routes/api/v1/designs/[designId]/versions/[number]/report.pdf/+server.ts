@@ -8,9 +8,9 @@ import type { RequestHandler } from './$types';
 /** A saved version as a calculation report, from its stored figures. */
 export const GET: RequestHandler = async ({ locals, params, url }) => {
 	const print = printSchema.parse(Object.fromEntries(url.searchParams));
-	const number = Number(params.number);
-	const report = Number.isInteger(number)
-		? await reportOfVersion(requireScope(locals), params.designId, number, print)
+	const scope = requireScope(locals);
+	const report = /^\d{1,9}$/.test(params.number)
+		? await reportOfVersion(scope, params.designId, Number(params.number), print)
 		: null;
 	if (!report) return problem('not-found', 'No such version');
 	const bytes = await reportPdf(report);
