@@ -14,7 +14,7 @@ export default defineConfig({
 				test: {
 					name: 'unit',
 					environment: 'node',
-					include: ['src/**/*.test.ts', 'tests/boundaries/**/*.test.ts']
+					include: ['src/**/*.test.ts', 'tests/boundaries/**/*.test.ts', 'scripts/**/*.test.mjs']
 				}
 			},
 			{
