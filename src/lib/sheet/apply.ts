@@ -13,13 +13,10 @@ export function applyEntry(sheet: Sheet, entry: Entry): Sheet {
 				: { ...sheet, rows: withRowCell(sheet.rows, entry.row, entry.field, entry.cell) };
 		case 'insert': {
 			const present = new Set(sheet.rows.map(({ id }) => id));
+			const isNew = ({ id }: SheetRow) => !present.has(id) && present.add(id);
 			return {
 				...sheet,
-				rows: insertBefore(
-					sheet.rows,
-					entry.rows.filter(({ id }) => !present.has(id)),
-					entry.before
-				)
+				rows: insertBefore(sheet.rows, entry.rows.filter(isNew), entry.before)
 			};
 		}
 		case 'delete': {
@@ -31,7 +28,7 @@ export function applyEntry(sheet: Sheet, entry: Entry): Sheet {
 			const rows = sheet.rows.filter(({ id }) => moved.has(id));
 			const rest = sheet.rows.filter(({ id }) => !moved.has(id));
 			const byId = new Map(rows.map((row) => [row.id, row]));
-			const ordered = entry.rows.flatMap((id) => byId.get(id) ?? []);
+			const ordered = [...moved].flatMap((id) => byId.get(id) ?? []);
 			return { ...sheet, rows: insertBefore(rest, ordered, entry.before) };
 		}
 		case 'batch':

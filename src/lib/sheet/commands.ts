@@ -1,6 +1,7 @@
 /** What the keys and buttons of the sheet do, as edits. Pure: sheet and selection in, edit out. */
 import type { UnitSystem } from '$lib/engine';
 import type { Edit, SingleEdit, TypedCell } from './edit';
+import { ROW_READERS } from './fields';
 import { linksOf } from './links';
 import { newId } from './new-id';
 import { valueOf, type Cell, type RowField, type Sheet, type SheetRow } from './sheet';
@@ -14,7 +15,8 @@ const together = (edits: SingleEdit[]): Edit | null => {
 export function writeCell(sheet: Sheet, row: SheetRow, field: RowField, typed: string, units: UnitSystem): Edit | null {
 	const set: SingleEdit = { kind: 'set', row: row.id, field, typed, units };
 	if (field !== 'tag') return set;
-	const [old, wanted] = [valueOf(row, 'tag'), typed.trim()];
+	const reading = ROW_READERS.tag(typed, units);
+	const [old, wanted] = [valueOf(row, 'tag'), reading.ok ? reading.value : ''];
 	const tags = sheet.rows.map((one) => valueOf(one, 'tag'));
 	const alone = tags.filter((tag) => tag === old).length === 1;
 	if (old === null || !alone || !wanted || tags.includes(wanted)) return set;
@@ -39,6 +41,7 @@ export function pasteBlock(
 	cells: readonly (readonly string[])[],
 	units: UnitSystem
 ): Edit | null {
+	if (!at.fields.length) return null;
 	const edits: SingleEdit[] = [];
 	const added: { id: string; cells: Record<string, TypedCell> }[] = [];
 	cells.forEach((line, down) => {

@@ -28,7 +28,7 @@ export interface SheetDocument {
 export function documentOf(sheet: Sheet): SheetDocument {
 	const problems: SheetProblem[] = settingProblems(sheet);
 	const links = linksOf(sheet.rows, problems);
-	const sides = new Map<string, Side | null>();
+	const sides = new Map<string, FoundSide>();
 	const drafts = new Map<string, DesignRow>();
 	for (const row of links.fromFan) {
 		sides.set(row.id, sideOf(row, links, sides));
@@ -98,7 +98,7 @@ function draftRow(
 	sheet: Sheet,
 	row: SheetRow,
 	links: Links,
-	sides: ReadonlyMap<string, Side | null>,
+	sides: ReadonlyMap<string, FoundSide>,
 	problems: SheetProblem[]
 ): DesignRow | null {
 	const before = problems.length;
@@ -116,21 +116,19 @@ function draftRow(
 	if (!row.cells.size) fault('size', 'This row has no size.', 'a size, as 600x300 or Ø250');
 	if (!row.cells.length) fault('length', 'This row has no length.', 'the length on the centre line; 0 for none');
 	const side = sides.get(row.id) ?? null;
-	if (side === null)
+	if (side === 'differs')
 		fault('side', 'Air cannot run toward the fan and away from it in one run.', sideExpected(row, links, sides));
 	const parts = valueOf(row, 'parts');
 	const fitted = parts && size ? fittingsFor(parts, size) : null;
 	for (const { message, expected } of fitted?.problems ?? []) fault('parts', message, expected);
 	const flow = valueOf(row, 'flow');
 	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
-	if (!isEnd && row.cells.flow)
-		fault(
-			'flow',
-			`Rows join ${tag ?? 'this row'}, so its flow is their sum.`,
-			'a blank; type flows at the outlets only'
-		);
-	if (links.faulty.has(row.id) || problems.length > before || tag === null || !size || length === null || !side)
-		return null;
+	if (!isEnd)
+		for (const field of END_FIELDS)
+			if (row.cells[field])
+				fault(field, `Rows join ${tag ?? 'this row'}, so ${IN_THE_MIDDLE[field]}`, AT_AN_END[field]);
+	if (links.faulty.has(row.id) || problems.length > before || tag === null || !size || length === null) return null;
+	if (side === null || side === 'differs') return null;
 	const flex = valueOf(row, 'flex');
 	const outlet = valueOf(row, 'outlet');
 	return {
@@ -160,21 +158,39 @@ function draftRow(
 	};
 }
 
+/** Cells that speak of the end of a run, and have no place where other rows join. */
+export const END_FIELDS = ['flow', 'outlet', 'pressure'] as const;
+const IN_THE_MIDDLE = {
+	flow: 'its flow is their sum.',
+	outlet: 'no outlet stands at its end.',
+	pressure: 'no room is at its end.'
+} as const;
+const AT_AN_END = {
+	flow: 'a blank; type flows at the outlets only',
+	outlet: 'a blank; an outlet stands where no row joins',
+	pressure: 'a blank; the pressure of a room stands at its outlet'
+} as const;
+
+/** `differs`: cannot stand in one run with the row it joins. Null: cannot be told, for a fault that is named elsewhere. */
+type FoundSide = Side | 'differs' | null;
+
 const towardFan = (side: Side) => side !== 'supply';
 
-/** The side as typed, or that of the row it joins; null where the two cannot stand in one run. */
-function sideOf(row: SheetRow, links: Links, sides: ReadonlyMap<string, Side | null>): Side | null {
+/** The side as typed, or that of the row it joins. */
+function sideOf(row: SheetRow, links: Links, sides: ReadonlyMap<string, FoundSide>): FoundSide {
+	const own = valueOf(row, 'side');
+	if (own === null && row.cells.side) return null;
 	const parent = links.parent.get(row.id);
-	const inherited = parent ? (sides.get(parent.id) ?? null) : 'supply';
-	const own = valueOf(row, 'side') ?? inherited;
-	if (!parent || own === null || inherited === null) return own;
-	return towardFan(own) === towardFan(inherited) ? own : null;
+	if (parent === null) return own ?? 'supply';
+	const inherited = parent ? (sides.get(parent.id) ?? null) : null;
+	if (inherited === null || inherited === 'differs') return own;
+	return own === null || towardFan(own) === towardFan(inherited) ? (own ?? inherited) : 'differs';
 }
 
-function sideExpected(row: SheetRow, links: Links, sides: ReadonlyMap<string, Side | null>): string {
+function sideExpected(row: SheetRow, links: Links, sides: ReadonlyMap<string, FoundSide>): string {
 	const parent = links.parent.get(row.id);
 	const inherited = parent && sides.get(parent.id);
-	return inherited && towardFan(inherited)
+	return inherited && inherited !== 'differs' && towardFan(inherited)
 		? 'return, exhaust or outdoor, as the row it joins'
 		: 'supply, as the row it joins';
 }

@@ -1,14 +1,11 @@
 /** What a person does to a sheet. Checked on both sides; the server reads the typed texts itself. */
 import { z } from 'zod';
 import { MOST_ROWS } from './sheet';
+import { MOST_TYPED, storableText } from './storable-text';
 
 const rowId = z.uuid();
 const units = z.enum(['SI', 'IP']);
-/** PostgreSQL's JSON takes neither NUL nor half of a surrogate pair; nobody types them on purpose. */
-const typed = z
-	.string()
-	.max(2_000)
-	.transform((text) => text.replaceAll('\0', '').replace(/\p{Surrogate}/gu, '\ufffd'));
+const typed = z.string().max(MOST_TYPED).transform(storableText);
 const cell = z.object({ typed, units });
 const field = z.string().max(40);
 

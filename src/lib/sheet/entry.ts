@@ -3,6 +3,7 @@ import type { UnitSystem } from '$lib/engine';
 import type { Edit, SingleEdit, TypedCell } from './edit';
 import { isRowField, isSettingField, ROW_READERS, SETTING_READERS } from './fields';
 import type { Cell, RowCells, RowField, Sheet, SheetRow, SettingField } from './sheet';
+import { storableText } from './storable-text';
 
 export type Entry =
 	| {
@@ -25,7 +26,8 @@ export interface LoggedEntry {
 }
 
 /** The cell that a typed text makes; null for a blank. */
-export function cellOf(row: boolean, field: string, typed: string, units: UnitSystem): Cell<unknown> | null {
+export function cellOf(row: boolean, field: string, text: string, units: UnitSystem): Cell<unknown> | null {
+	const typed = storableText(text);
 	if (typed.trim() === '') return null;
 	const reading = row
 		? isRowField(field) && ROW_READERS[field](typed, units)

@@ -3,19 +3,17 @@ import {
 	materials,
 	readDensity,
 	readElevation,
-	readFlow,
 	readHumidity,
 	readLength,
-	readNumber,
 	readRate,
 	readRise,
 	readRoomPressure,
 	readSize,
-	readTemperature,
 	readVelocity,
 	type Reader,
 	type Reading
 } from '$lib/engine';
+import { aspectRatio, flexFactor, outletFlow, temperatureAround, temperatureOfAir } from './bounded';
 import { readParts } from './parts';
 import { readOutlet } from './read-outlet';
 import type { RowField, RowValues, SettingField, SettingValues } from './sheet';
@@ -80,7 +78,7 @@ export const ROW_READERS: Readers<RowValues> = {
 	joins: readText('tag', 40),
 	side: readChoice(SIDES),
 	serves: readText('text', 120),
-	flow: readFlow,
+	flow: outletFlow,
 	size: readSize,
 	length: readLength,
 	rise: readRise,
@@ -98,18 +96,18 @@ export const SETTING_READERS: Readers<SettingValues> = {
 		{ key: 'IP', name: 'IP' }
 	] as const),
 	service: readChoice(SERVICES),
-	temperature: readTemperature,
+	temperature: temperatureOfAir,
 	humidity: readHumidity,
 	elevation: readElevation,
 	density: readDensity,
-	surroundings: readTemperature,
+	surroundings: temperatureAround,
 	material: readChoice(MATERIALS),
-	flexFactor: readNumber,
+	flexFactor,
 	mainVelocity: readVelocity,
 	runOutVelocity: readVelocity,
 	frictionRate: readRate,
 	flexibleLength: readLength,
-	aspectRatio: readNumber,
+	aspectRatio,
 	damperAtOutlet: readYesNo
 };
 

@@ -1,39 +1,77 @@
 import type { UnitSystem } from '$lib/engine';
 import type { Edit, SingleEdit, TypedCell } from './edit';
-import { applyEntry } from './apply';
-import { entryOf } from './entry';
+import { applyMany } from './apply';
+import { entryOf, type Entry } from './entry';
 import type { Cell, Sheet, SheetRow } from './sheet';
 import { unitsOf } from './sheet';
+import { storableText } from './storable-text';
 
 type AnyCells = Readonly<Record<string, Cell<unknown> | undefined>>;
+type SetEdit = Extract<SingleEdit, { kind: 'set' }>;
 
-/** The edit that undoes `edit` on `sheet`, the sheet before it: cells come back as they were typed. */
-export function inverseOf(sheet: Sheet, edit: Edit): Edit {
-	if (edit.kind !== 'batch') return flat(inverseOfSingle(sheet, edit));
-	const inverses: SingleEdit[] = [];
+/**
+ * The edit that undoes `edit` on `sheet`, the sheet before it: cells come back as they were typed. Null where there is
+ * nothing to undo, as when all rows that it names are gone.
+ */
+export function inverseOf(sheet: Sheet, edit: Edit): Edit | null {
+	const singles = edit.kind === 'batch' ? edit.edits : [edit];
+	const inverses: SingleEdit[][] = [];
 	let current = sheet;
-	for (const single of edit.edits) {
-		inverses.unshift(...inverseOfSingle(current, single));
+	let sets: Entry[] = [];
+	let cells = new CellsBefore(sheet);
+	for (const single of singles) {
 		const entry = entryOf(single);
-		if (entry) current = applyEntry(current, entry);
+		if (!entry) continue;
+		// Runs of `set`, as a paste makes them, are applied in one pass.
+		if (single.kind === 'set') {
+			inverses.push(cells.inverseOf(single));
+			sets.push(entry);
+			continue;
+		}
+		current = applyMany(current, sets);
+		sets = [];
+		inverses.push(inverseOfRows(current, single));
+		current = applyMany(current, [entry]);
+		cells = new CellsBefore(current);
 	}
-	return flat(inverses);
+	const edits = inverses.reverse().flat();
+	const [only] = edits;
+	if (!only) return null;
+	return edits.length === 1 ? only : { kind: 'batch', edits };
 }
 
-const flat = (edits: SingleEdit[]): Edit => {
-	const [only] = edits;
-	return edits.length === 1 && only ? only : { kind: 'batch', edits };
-};
+/** The cells of a sheet as a run of `set` goes over them. */
+class CellsBefore {
+	readonly #settings: AnyCells;
+	readonly #rows: ReadonlyMap<string, AnyCells>;
+	readonly #units: UnitSystem;
+	readonly #written = new Map<string, TypedCell | null>();
 
-function inverseOfSingle(sheet: Sheet, edit: SingleEdit): SingleEdit[] {
+	constructor(sheet: Sheet) {
+		this.#settings = sheet.settings;
+		this.#rows = new Map(sheet.rows.map(({ id, cells }) => [id, cells]));
+		this.#units = unitsOf(sheet);
+	}
+
+	inverseOf(edit: SetEdit): SingleEdit[] {
+		const cells = edit.row === null ? this.#settings : this.#rows.get(edit.row);
+		if (!cells) return [];
+		const key = `${edit.row} ${edit.field}`;
+		const written = this.#written.get(key);
+		const old = written === undefined ? cells[edit.field] : written;
+		const typed = storableText(edit.typed);
+		this.#written.set(key, typed.trim() ? { typed, units: edit.units } : null);
+		return [{ ...edit, typed: old?.typed ?? '', units: old?.units ?? this.#units }];
+	}
+}
+
+function inverseOfRows(sheet: Sheet, edit: Exclude<SingleEdit, SetEdit>): SingleEdit[] {
 	switch (edit.kind) {
-		case 'set': {
-			const cells: AnyCells = edit.row === null ? sheet.settings : (rowOf(sheet, edit.row)?.cells ?? {});
-			const old = cells[edit.field];
-			return [{ ...edit, typed: old?.typed ?? '', units: old?.units ?? unitsOf(sheet) }];
+		case 'insert': {
+			const present = new Set(sheet.rows.map(({ id }) => id));
+			const rows = [...new Set(edit.rows.map(({ id }) => id))].filter((id) => !present.has(id));
+			return rows.length ? [{ kind: 'delete', rows }] : [];
 		}
-		case 'insert':
-			return [{ kind: 'delete', rows: edit.rows.map(({ id }) => id) }];
 		case 'delete':
 			return backInPlace(sheet, edit.rows, (rows, before) => ({ kind: 'insert', rows: rows.map(typedRow), before }));
 		case 'move':
@@ -56,11 +94,11 @@ function backInPlace(
 	let run: SheetRow[] = [];
 	let before: string | null = null;
 	const close = () => {
-		if (run.length) edits.push(make(run, before));
+		if (run.length) edits.push(make(run.reverse(), before));
 		run = [];
 	};
 	for (const row of [...sheet.rows].reverse()) {
-		if (taken.has(row.id)) run.unshift(row);
+		if (taken.has(row.id)) run.push(row);
 		else {
 			close();
 			before = row.id;
@@ -70,11 +108,9 @@ function backInPlace(
 	return edits;
 }
 
-const rowOf = (sheet: Sheet, id: string) => sheet.rows.find((row) => row.id === id);
-
 function typedRow(row: SheetRow) {
 	const cells: Record<string, TypedCell> = {};
 	for (const [field, cell] of Object.entries(row.cells as AnyCells))
-		if (cell) cells[field] = { typed: cell.typed, units: cell.units as UnitSystem };
+		if (cell) cells[field] = { typed: cell.typed, units: cell.units };
 	return { id: row.id, cells };
 }

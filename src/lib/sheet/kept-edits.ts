@@ -14,10 +14,16 @@ export function readKept(designId: string): SentEdit[] {
 	}
 }
 
-/** Keeps the unsent edits; false when this device has no room for them. */
-export function keep(designId: string, unsent: readonly SentEdit[]): boolean {
+/**
+ * Keeps the unsent edits and forgets those that have gone; false when this device has no room for them. What another
+ * window keeps of the same design stays.
+ */
+export function keep(designId: string, unsent: readonly SentEdit[], gone: ReadonlySet<string> = new Set()): boolean {
 	try {
-		if (unsent.length) localStorage.setItem(key(designId), JSON.stringify(unsent));
+		const mine = new Set(unsent.map(({ id }) => id));
+		const others = readKept(designId).filter(({ id }) => !mine.has(id) && !gone.has(id));
+		const all = [...others, ...unsent];
+		if (all.length) localStorage.setItem(key(designId), JSON.stringify(all));
 		else localStorage.removeItem(key(designId));
 		return true;
 	} catch {

@@ -113,24 +113,21 @@ export function pressInEditor(grid: RunGrid, event: KeyboardEvent): boolean {
 	const arrow = ARROWS[event.key];
 	if (event.isComposing) return false;
 	if (arrow && grid.editing?.mode === 'replace' && !event.ctrlKey && !event.metaKey && !event.altKey) {
-		grid.accept();
-		selection.move(arrow[0], arrow[1], event.shiftKey);
+		if (grid.accept()) selection.move(arrow[0], arrow[1], event.shiftKey);
 		return true;
 	}
 	switch (event.key) {
 		case 'Enter':
-			grid.accept();
-			selection.move(event.shiftKey ? -1 : 1, 0);
+			if (grid.accept()) selection.move(event.shiftKey ? -1 : 1, 0);
 			return true;
 		case 'Tab':
-			grid.accept();
-			selection.step(event.shiftKey ? -1 : 1);
+			if (grid.accept()) selection.step(event.shiftKey ? -1 : 1);
 			return true;
 		case 'Escape':
 			grid.leave();
 			return true;
 		case 'F2':
-			grid.edit(grid.editing?.text ?? null);
+			grid.switchMode();
 			return true;
 	}
 	return false;

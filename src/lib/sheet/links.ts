@@ -17,7 +17,7 @@ export function linksOf(rows: readonly SheetRow[], problems: SheetProblem[] = []
 	const byTag = new Map<string, SheetRow[]>();
 	for (const row of rows) {
 		const tag = valueOf(row, 'tag');
-		if (tag !== null) byTag.set(tag, [...(byTag.get(tag) ?? []), row]);
+		if (tag !== null) add(byTag, tag, row);
 	}
 	const faulty = new Set<string>();
 	const fault = (row: SheetRow, field: 'tag' | 'joins', message: string, expected: string) => {
@@ -36,11 +36,10 @@ export function linksOf(rows: readonly SheetRow[], problems: SheetProblem[] = []
 		if (row.cells.joins && joins === null) continue;
 		const [found, another] = joins === null ? [null, undefined] : (byTag.get(joins) ?? []);
 		if (found === row) fault(row, 'joins', `${joins} joins itself.`, 'another row, or a blank where it meets the fan');
-		else if (found === undefined)
-			fault(row, 'joins', `No row has the tag ${joins}.`, 'the tag of the row on the fan’s side');
+		else if (found === undefined) fault(row, 'joins', `No row has the tag ${joins}.`, likeIt(joins ?? '', byTag));
 		else if (!another) {
 			parent.set(row.id, found);
-			if (found) children.set(found.id, [...(children.get(found.id) ?? []), row]);
+			if (found) add(children, found.id, row);
 		}
 	}
 	const fromFan = walk(rows, parent, children);
@@ -53,6 +52,19 @@ export function linksOf(rows: readonly SheetRow[], problems: SheetProblem[] = []
 			'runs that end at the fan'
 		);
 	return { parent, children, fromFan, faulty };
+}
+
+function add(lists: Map<string, SheetRow[]>, key: string, row: SheetRow): void {
+	const list = lists.get(key);
+	if (list) list.push(row);
+	else lists.set(key, [row]);
+}
+
+/** The tag that was meant, where capitals or blanks alone set it apart. */
+function likeIt(joins: string, byTag: ReadonlyMap<string, unknown>): string {
+	const bare = (tag: string) => tag.toLowerCase().replace(/[\s_-]/g, '');
+	const like = [...byTag.keys()].find((tag) => bare(tag) === bare(joins));
+	return like === undefined ? 'the tag of the row on the fan’s side' : `${like}, as that row has it`;
 }
 
 /** From the rows that meet the fan, or that name no row which is there, outward. */

@@ -107,25 +107,37 @@ export class OpenSheet {
 
 	/** Does an edit: at once on the screen, then to the server. */
 	do(edit: Edit): void {
-		this.#undo = [...this.#undo, inverseOf(this.#sheet, edit)].slice(-MOST_STEPS);
+		const inverse = inverseOf(this.#sheet, edit);
+		if (!inverse) return;
+		this.#undo = [...this.#undo, inverse].slice(-MOST_STEPS);
 		this.#redo = [];
 		this.#apply(edit);
 	}
 
 	undo(): void {
-		const edit = this.#undo.at(-1);
-		if (!edit) return;
-		this.#undo = this.#undo.slice(0, -1);
-		this.#redo = [...this.#redo, inverseOf(this.#sheet, edit)];
-		this.#apply(edit);
+		const step = this.#stepBack(this.#undo);
+		this.#undo = step.rest;
+		if (!step.inverse) return;
+		this.#redo = [...this.#redo, step.inverse];
+		this.#apply(step.edit);
 	}
 
 	redo(): void {
-		const edit = this.#redo.at(-1);
-		if (!edit) return;
-		this.#redo = this.#redo.slice(0, -1);
-		this.#undo = [...this.#undo, inverseOf(this.#sheet, edit)];
-		this.#apply(edit);
+		const step = this.#stepBack(this.#redo);
+		this.#redo = step.rest;
+		if (!step.inverse) return;
+		this.#undo = [...this.#undo, step.inverse];
+		this.#apply(step.edit);
+	}
+
+	/** The last step that still changes something; those whose rows others have deleted are passed over. */
+	#stepBack(steps: readonly Edit[]) {
+		for (let at = steps.length - 1; at >= 0; at--) {
+			const edit = steps[at];
+			const inverse = edit && inverseOf(this.#sheet, edit);
+			if (inverse) return { edit, inverse, rest: steps.slice(0, at) };
+		}
+		return { inverse: null, rest: [] };
 	}
 
 	/** Computes what an edit would do, without doing it; null ends it. */

@@ -25,6 +25,7 @@ export class Outbox {
 	#savedAt = $state<Date | null>(null);
 	#reason = $state('');
 	#running = false;
+	#stopped = false;
 	#tries = 0;
 	#timer: ReturnType<typeof setTimeout> | undefined;
 
@@ -67,11 +68,16 @@ export class Outbox {
 		if (this.#running) return;
 		this.#running = true;
 		clearTimeout(this.#timer);
-		while (this.#unsent.length) if (!(await this.#sendSome())) break;
-		this.#running = false;
+		try {
+			while (this.#unsent.length) if (!(await this.#sendSome())) break;
+		} finally {
+			this.#running = false;
+		}
 	}
 
+	/** Ends the tries: what is not sent by then stays kept on this device. */
 	stop(): void {
+		this.#stopped = true;
 		clearTimeout(this.#timer);
 	}
 
@@ -83,7 +89,7 @@ export class Outbox {
 		this.#options.onreply(reply, sent);
 		const gone = new Set(sent.map(({ id }) => id));
 		this.#unsent = this.#unsent.filter(({ id }) => !gone.has(id));
-		keep(this.#options.designId, this.#unsent);
+		keep(this.#options.designId, this.#unsent, gone);
 		const [refused] = reply.refused;
 		this.#reason = refused?.reason ?? '';
 		this.#state = refused ? 'refused' : this.#unsent.length ? 'saving' : 'saved';
@@ -99,7 +105,9 @@ export class Outbox {
 				headers: { 'content-type': 'application/json' },
 				body: JSON.stringify({ base: this.#options.base(), edits })
 			});
-			if (answer.ok) return (await answer.json()) as EditsReply;
+			const reply: unknown = answer.ok ? await answer.json() : null;
+			if (isReply(reply)) return reply;
+			if (answer.ok) throw new TypeError('no reply to edits');
 			this.#wait(answer.status === 401 ? 'You are signed out. Sign in again in another tab.' : await reasonOf(answer));
 		} catch {
 			this.#wait('The server cannot be reached.');
@@ -110,9 +118,17 @@ export class Outbox {
 	#wait(reason: string): void {
 		this.#state = 'kept';
 		this.#reason = reason;
+		if (this.#stopped) return;
 		const wait = WAITS[Math.min(this.#tries++, WAITS.length - 1)];
 		this.#timer = setTimeout(() => void this.flush(), wait);
 	}
+}
+
+/** Whether this is the route's reply, and not a page that something in between put in its place. */
+function isReply(reply: unknown): reply is EditsReply {
+	if (typeof reply !== 'object' || !reply) return false;
+	const { entries, refused, seq } = reply as Partial<Record<keyof EditsReply, unknown>>;
+	return Array.isArray(entries) && Array.isArray(refused) && typeof seq === 'number';
 }
 
 async function reasonOf(answer: Response): Promise<string> {

@@ -1,17 +1,21 @@
-import type { Flag, Reading } from '$lib/engine';
+import { quoted, type Flag, type Reading } from '$lib/engine';
 import { readBlock, writeBlock } from './clipboard';
 import { textToCopy, textToEdit } from './cell-text';
 import { COLUMNS, type Column } from './columns';
 import * as commands from './commands';
-import type { SheetProblem } from './design-document';
+import { END_FIELDS, type SheetProblem } from './design-document';
 import type { Edit } from './edit';
 import { isRowField, ROW_READERS } from './fields';
 import type { OpenSheet } from './open-sheet.svelte';
 import { Selection } from './selection.svelte';
 import { MOST_ROWS, valueOf, type RowField, type SheetRow } from './sheet';
+import { MOST_TYPED } from './storable-text';
 
 export interface Editing {
+	/** Where the row stands now. */
 	readonly row: number;
+	/** The row itself, wherever others move it; null on the blank line. */
+	readonly id: string | null;
 	readonly field: RowField;
 	readonly text: string;
 	/** `replace`: typed over the cell, arrows leave it; `amend`: arrows move in the text. */
@@ -49,8 +53,9 @@ export class RunGrid {
 	get optional() {
 		return this.#optional;
 	}
-	get editing() {
-		return this.#editing;
+	get editing(): Editing | null {
+		const now = this.#editing;
+		return now && { ...now, row: this.#placeOf(now) };
 	}
 	/** The active row; undefined on the blank line. */
 	get activeRow(): SheetRow | undefined {
@@ -93,6 +98,7 @@ export class RunGrid {
 		const kept = row ? textToEdit(row, field, this.open.units) : '';
 		this.#editing = {
 			row: this.selection.active.row,
+			id: row?.id ?? null,
 			field,
 			text: text ?? kept,
 			mode: text === null ? 'amend' : 'replace'
@@ -100,9 +106,9 @@ export class RunGrid {
 		this.type(this.#editing.text);
 	}
 
-	/** A flow is typed at outlets only; where rows join, it is their sum. A flow that stands there can still be taken out. */
+	/** Flow, outlet and room belong to the ends of runs; what stands in the middle already can still be taken out. */
 	isWritable(row: SheetRow | undefined, field: RowField): boolean {
-		if (field !== 'flow' || !row || row.cells.flow) return true;
+		if (!END_FIELDS.some((one) => one === field) || !row || row.cells[field]) return true;
 		const tag = valueOf(row, 'tag');
 		return tag === null || !this.joined.has(tag);
 	}
@@ -122,15 +128,27 @@ export class RunGrid {
 		return now && now.text.trim() ? ROW_READERS[now.field](now.text, this.open.units) : null;
 	}
 
-	/** Writes the text into its cell, if it differs, and closes the editor. */
-	accept(): void {
+	/** From typing over, where arrows leave the cell, to amending, where they move in its text, and back. */
+	switchMode(): void {
 		const now = this.#editing;
-		this.#editing = null;
-		this.open.tryOut(null);
-		if (!now) return;
-		const row = this.rows[now.row];
+		if (now) this.#editing = { ...now, mode: now.mode === 'amend' ? 'replace' : 'amend' };
+	}
+
+	/** Writes the text into its cell, if it differs, and closes the editor. False where no cell can hold the text. */
+	accept(): boolean {
+		const now = this.#editing;
+		if (now && now.text.length > MOST_TYPED) {
+			this.notice = `This text has ${now.text.length} characters; a cell holds at most ${MOST_TYPED}.`;
+			return false;
+		}
+		this.leave();
+		if (!now) return true;
+		const row = this.#rowOf(now);
 		const before = row ? textToEdit(row, now.field, this.open.units) : '';
 		if (now.text !== before) this.#do(this.#editOf(now));
+		if (now.id !== null && !row)
+			this.notice = `The row was deleted meanwhile; ${quoted(now.text)} could not be written into it.`;
+		return true;
 	}
 
 	/** Closes the editor and leaves the cell as it was. */
@@ -207,8 +225,19 @@ export class RunGrid {
 		if (row >= 0) this.selection.go({ row, column: Math.max(0, column) });
 	}
 
-	#editOf({ row: at, field, text }: Editing): Edit | null {
-		const row = this.rows[at];
+	#rowOf({ id }: Editing): SheetRow | undefined {
+		return id === null ? undefined : this.rows.find((row) => row.id === id);
+	}
+
+	#placeOf({ row, id }: Editing): number {
+		if (id === null) return this.rows.length;
+		return this.rows[row]?.id === id ? row : this.rows.findIndex((one) => one.id === id);
+	}
+
+	#editOf(now: Editing): Edit | null {
+		const { id, field, text } = now;
+		const row = this.#rowOf(now);
+		if (id !== null && !row) return null;
 		if (row) return commands.writeCell(this.open.sheet, row, field, text, this.open.units);
 		return text.trim() ? commands.newRow({ [field]: text }, this.open.units, null).edit : null;
 	}

@@ -1,4 +1,4 @@
-import { solveDesign, type DesignDocument, type Solution } from '$lib/engine';
+import { solveDesign, type DesignDocument, type Problem, type Solution } from '$lib/engine';
 import { documentOf, type SheetProblem } from './design-document';
 import type { Sheet } from './sheet';
 
@@ -18,14 +18,18 @@ export function solveSheet(sheet: Sheet): SolvedSheet {
 	if (!document) return { document, solution: null, problems, uncounted: left };
 	const result = solveDesign(document);
 	if (result.ok) return { document, solution: result.solution, problems, uncounted: left };
-	const found = result.problems.map(({ id, field, message, expected }) => ({
-		row: id,
-		field:
-			(id === null ? SETTING_OF : FIELD_OF)[field ?? ''] ?? (id === null ? ('temperature' as const) : ('tag' as const)),
-		message,
-		expected
-	}));
+	const found = result.problems.map((problem) => {
+		const { message, expected } = problem;
+		return { ...placeOf(problem, document), message, expected };
+	});
 	return { document, solution: null, problems: [...problems, ...found], uncounted: left };
+}
+
+/** What the engine found too late for the cells to say it; what concerns all rows stands at the first one's link. */
+function placeOf({ id, path, field }: Problem, { rows }: DesignDocument): Pick<SheetProblem, 'row' | 'field'> {
+	if (id !== null) return { row: id, field: FIELD_OF[field ?? ''] ?? 'tag' };
+	if (path.startsWith('rows')) return { row: rows[0]?.id ?? null, field: 'joins' };
+	return { row: null, field: path.startsWith('surroundings') ? 'surroundings' : 'temperature' };
 }
 
 /** The cell where a key of the document was typed. */
@@ -42,10 +46,6 @@ const FIELD_OF: Readonly<Record<string, SheetProblem['field']>> = {
 	fittings: 'parts',
 	equipment: 'parts',
 	outlet: 'outlet'
-};
-const SETTING_OF: Readonly<Record<string, SheetProblem['field']>> = {
-	air: 'temperature',
-	surroundings: 'surroundings'
 };
 
 /** Whether the figures stand for the whole sheet. */

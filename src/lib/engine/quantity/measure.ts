@@ -38,7 +38,7 @@ const LEAST = 1e-12; // of any SI value but zero
 
 /** Reads one figure of this kind; the value is SI. Never throws. */
 export function readMeasure(measure: Measure, text: string, units: UnitSystem): Reading<number> {
-	const expected = `expected ${measure.noun}, such as ${measure.example[units]}`;
+	const expected = `${measure.noun}, such as ${measure.example[units]}`;
 	const refuse = (why: string): Reading<number> => ({ ok: false, message: `${quoted(text)}: ${why}`, expected });
 	const plain = plainText(text);
 	if (plain === '') return { ok: false, message: 'nothing is typed', expected };

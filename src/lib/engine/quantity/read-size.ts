@@ -35,8 +35,8 @@ interface Sides {
 export function readSize(text: string, units: UnitSystem): Reading<Size> {
 	const expected =
 		units === 'SI'
-			? 'expected a size, such as 600x350, ø200, oval 510x255 or 12"'
-			: 'expected a size, such as 24x12, 12"ø, 20x10 FO or 315 mm';
+			? 'a size, such as 600x350, ø200, oval 510x255 or 12"'
+			: 'a size, such as 24x12, 12"ø, 20x10 FO or 315 mm';
 	const refuse = (why: string): Reading<Size> => ({ ok: false, message: `${quoted(text)}: ${why}`, expected });
 	const plain = plainText(text);
 	if (plain === '') return { ok: false, message: 'nothing is typed', expected };

@@ -22,7 +22,7 @@ const START = '(?<![a-z0-9])';
 const COEFFICIENT = new RegExp(`${START}(?:c|zeta|ζ) ?[=:]? ?${N}(?![\\d.,]*\\d)`);
 // A lone inch mark is a pressure only behind a decimal figure below ten: `12" damper` tells a size.
 const PRESSURE =
-	/\d*[.,]?\d+ ?(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o)|(?<![\d.,])\d?[.,]\d+ ?(?:in\b\.?|")/;
+	/(?:(?<![^ ])-)?\d*[.,]?\d+ ?(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o)|(?<![\d.,])\d?[.,]\d+ ?(?:in\b\.?|")/;
 const PARAMETERS: readonly (readonly [string, RegExp])[] = [
 	['radiusRatio', new RegExp(`${START}r(?: ?/ ?[dwh])? ?=? ?${N}`)],
 	['pieces', /(?<![\d.,])(\d+)[ -]?(?=(?:pieces?|pc|gores?|segments?)\b)/],

@@ -30,6 +30,12 @@ export function readPart(typed: string, units: UnitSystem): PartReading {
 }
 
 function unknownWord(typed: string): PartReading {
+	if (/^\d*[.,]?\d+$/.test(typed))
+		return {
+			ok: false,
+			message: `“${typed}” is a figure without a sign`,
+			expected: `${typed} Pa for a pressure, or C${typed} for a coefficient`
+		};
 	if (/\d/.test(typed)) return { ok: false, message: `“${typed}” is not understood`, expected: exampleOf('elbow') };
 	const message = `“${typed}” is not a known part`;
 	return { ok: false, message, expected: `known words nearest to it: ${nearestWords(typed).join(', ')}` };
@@ -54,7 +60,7 @@ function assembled(
 		return refuse('has both a coefficient and a pressure', 'one of the two');
 	if (count < 1) return refuse('a count is 1 or more', exampleOf(word));
 	if (coefficient !== null && Math.abs(coefficient) > MOST.coefficient)
-		return refuse('the coefficient is too great', 'C0.23');
+		return refuse('the coefficient is too great', `at most ${MOST.coefficient}, such as C0.23`);
 	if (word === 'junction') {
 		if (count > 1) return refuse('a row has one junction, at its fan end', 'the junction without a count');
 		if (coefficient === null) return refuse('a junction needs its coefficient', 'add it, such as tee branch C0.8');

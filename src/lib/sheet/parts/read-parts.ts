@@ -5,8 +5,9 @@ import { readPart } from './read-part';
 import { splitParts } from './split-parts';
 
 const LONGEST = 2000; // characters
-const MOST = 100; // parts of one row
-const EXPECTED = 'expected parts between commas, such as 2x elbow r1.0 C0.23, silencer 25 Pa, damper';
+const MOST = 100; // parts of one row, as typed
+const MOST_LOSSES = 500; // of equipment, with their counts
+const EXPECTED = 'parts between commas, such as 2x elbow r1.0 C0.23, silencer 25 Pa, damper';
 
 /**
  * Reads a Parts cell. With a coefficient a part is a fitting, with a pressure it is equipment, with neither it comes
@@ -30,6 +31,12 @@ export function readParts(text: string, units: UnitSystem): Reading<Parts> {
 			return { ok: false, message, expected: 'put the other junction in the row that starts there' };
 		}
 	}
+	if (equipment.length > MOST_LOSSES)
+		return {
+			ok: false,
+			message: `${equipment.length} losses of equipment in one row`,
+			expected: `at most ${MOST_LOSSES}`
+		};
 	const parts: Parts = { junction, fittings, equipment };
 	const all = [...(junction ? [junction] : []), ...fittings, ...equipment];
 	const computed = fittings.filter((part) => part.kind !== 'fixed').map((part) => part.name.toLowerCase());
