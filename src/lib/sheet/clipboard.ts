@@ -18,7 +18,7 @@ export function readBlock(text: string, room: number): PasteBlock {
 	const read = (quoteChar: string) =>
 		Papa.parse<string[]>(lines, { delimiter: '\t', quoteChar, preview: Math.max(1, room + 1) });
 	const quoted = read('"');
-	const data = quoted.errors.length ? read('\0').data : quoted.data;
+	const data = lines === '' && text !== '' ? [['']] : quoted.errors.length ? read('\0').data : quoted.data;
 	if (data.length > room)
 		return refused(`The clipboard holds ${countLines(text)} rows; there is room for ${room} more.`);
 	const cells = data.reduce((sum, row) => sum + row.length, 0);
