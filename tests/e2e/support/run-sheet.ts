@@ -84,7 +84,7 @@ export class RunSheet {
 	}
 
 	/** Waits until every edit is with the server and the figures are no preview any more. */
-	async saved(timeout = 20_000): Promise<void> {
+	async saved(timeout = 12_000): Promise<void> {
 		await this.page.waitForFunction(
 			() =>
 				document.querySelector('[data-testid="state"]')?.getAttribute('data-state') === 'saved' &&
