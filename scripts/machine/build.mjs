@@ -1,6 +1,6 @@
 /** The production build and the small programs, made again only when what they are made of has changed. */
 import { createHash } from 'node:crypto';
-import { existsSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { cpSync, existsSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join, relative } from 'node:path';
 import { KEPT, LOGS, PROJECT } from './folders.mjs';
 import { fullDisk, tellsOfFullDisk } from './disk.mjs';
@@ -63,6 +63,14 @@ export async function buildIfChanged({ echo } = {}) {
 	if (code !== 0) throw buildTrouble(output);
 	writeFileSync(stamp, `${sources}\n${builtHash(PROJECT)}\n`);
 	return 'built';
+}
+
+/** Copies the build to where it is served from, so that another build or a test run does not pull files from under it. */
+export function copyBuild() {
+	const served = join(KEPT, 'served');
+	rmSync(served, { recursive: true, force: true });
+	cpSync(join(PROJECT, 'build'), served, { recursive: true });
+	return join(served, 'index.js');
 }
 
 /** @param {string} output */

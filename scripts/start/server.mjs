@@ -28,15 +28,15 @@ export function errorIn(line) {
  * Starts the server and waits until it answers.
  *
  * @param {import('../machine/lifetime.mjs').Lifetime} life that it stops with, and that ends when it dies by itself
- * @param {{ port: number, env: Record<string, string>,
+ * @param {{ entry: string, port: number, env: Record<string, string>,
  *   onStart: (mark: import('../machine/processes.mjs').ProcessMark) => void }} how
  */
-export async function startServer(life, { port, env, onStart }) {
+export async function startServer(life, { entry, port, env, onStart }) {
 	const file = join(LOGS, 'server.log');
 	if (existsSync(file) && statSync(file).size > LOG_LIMIT) renameSync(file, `${file}.1`);
 	const log = createWriteStream(file, { flags: 'a', mode: 0o600 });
 	log.on('error', (error) => complain(`The server's log cannot be written: ${error.message}`));
-	const child = spawn(process.execPath, ['build/index.js'], {
+	const child = spawn(process.execPath, [entry], {
 		cwd: PROJECT,
 		env: { ...process.env, ...env },
 		detached: true,

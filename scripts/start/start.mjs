@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { stopCluster } from '../machine/cluster.mjs';
 import { requireRoom } from '../machine/disk.mjs';
 import { KEPT, makeFolders } from '../machine/folders.mjs';
-import { buildIfChanged, bundlePrograms } from '../machine/build.mjs';
+import { buildIfChanged, bundlePrograms, copyBuild } from '../machine/build.mjs';
 import { live } from '../machine/lifetime.mjs';
 import { localEnv } from '../machine/local-env.mjs';
 import { installPackages } from '../machine/packages.mjs';
@@ -54,7 +54,7 @@ async function steps(life) {
 	});
 	record.note({ address: env.ORIGIN });
 	life.checkpoint();
-	await startServer(life, { port, env, onStart: (mark) => record.note({ server: mark }) });
+	await startServer(life, { entry: copyBuild(), port, env, onStart: (mark) => record.note({ server: mark }) });
 	told('server', 'answers');
 	say(welcome(env.ORIGIN, accounts));
 }
