@@ -1,7 +1,6 @@
 import { beforeAll, describe, expect, it } from 'vitest';
 import type { FirmScope } from '../../src/lib/server/auth/scope';
 import { append, firm, logOf, rowsOf, sent, treeDesign } from '../server/support/designs';
-import { signIn } from './support/person';
 import { RunSheet } from './support/run-sheet';
 import { useStage } from './support/stage';
 
@@ -17,8 +16,7 @@ async function openTree(name: string): Promise<{ sheet: RunSheet; designId: stri
 	const { designId } = await treeDesign(ours, name);
 	const last = { tag: 'S4', joins: 'S1', serves: 'Store', flow: '60', size: 'Ø160', length: '3', outlet: '15' };
 	await append(ours, designId, [sent(rowsOf([last]).edit)]);
-	const page = await stage.newPage();
-	await signIn(page, EMAIL);
+	const page = await stage.pageOf(EMAIL);
 	const sheet = new RunSheet(page);
 	await sheet.open(designId);
 	return { sheet, designId };

@@ -53,8 +53,7 @@ describe('a stranger', () => {
 
 describe('a person of another firm', () => {
 	it("finds nothing where a firm's design is, as at an address that leads nowhere", async () => {
-		const page = await stage.newPage();
-		await signIn(page, 'stranger@example.test');
+		const page = await stage.pageOf('stranger@example.test');
 		const nowhere = await page.goto('/designs/00000000-0000-4000-8000-000000000000/sheet');
 		expect(nowhere?.status()).toBe(404);
 		const shown = await page.locator('body').innerText();
@@ -71,8 +70,7 @@ describe('a person of another firm', () => {
 
 describe('a viewer', () => {
 	it('sees the sheet without its tools, types nothing, and is refused when they send an edit', async () => {
-		const page = await stage.newPage();
-		await signIn(page, 'viewer@example.test');
+		const page = await stage.pageOf('viewer@example.test');
 		const sheet = new RunSheet(page);
 		await sheet.open(designId);
 		await page.getByText('for reading only').waitFor();
@@ -109,8 +107,7 @@ describe('a viewer', () => {
 
 describe('a request that another site sends in a person’s name', () => {
 	it.each(['application/json', 'text/plain', 'application/x-www-form-urlencoded'])('is refused as %s', async (type) => {
-		const page = await stage.newPage();
-		await signIn(page, 'owner@example.test');
+		const page = await stage.pageOf('owner@example.test');
 		for (const path of [`/api/v1/designs/${designId}/edits`, `/designs/${designId}/versions?/save`])
 			for (const origin of ['https://elsewhere.example', 'null']) {
 				const answer = await page.request.post(path, { data: body(), headers: { 'content-type': type, origin } });
@@ -122,8 +119,7 @@ describe('a request that another site sends in a person’s name', () => {
 
 describe('a body that is too large', () => {
 	it('is told so, and the server goes on', async () => {
-		const page = await stage.newPage();
-		await signIn(page, 'owner@example.test');
+		const page = await stage.pageOf('owner@example.test');
 		const answer = await page.request.post(`/api/v1/designs/${designId}/edits`, {
 			data: Buffer.alloc(17 * 1024 * 1024, ' '),
 			headers: { 'content-type': 'application/json' }

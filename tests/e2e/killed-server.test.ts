@@ -4,7 +4,6 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import type { FirmScope } from '../../src/lib/server/auth/scope';
 import { openDesign } from '../../src/lib/server/designs/find-design';
 import { firm, logOf, treeDesign } from '../server/support/designs';
-import { signIn } from './support/person';
 import { RunSheet } from './support/run-sheet';
 import { useStage } from './support/stage';
 
@@ -27,9 +26,8 @@ async function countsOf(designId: string): Promise<Map<string, number>> {
 }
 
 async function openSheet(designId: string): Promise<RunSheet> {
-	const page = await stage.newPage();
+	const page = await stage.pageOf(EMAIL);
 	page.on('dialog', (dialog) => void dialog.accept());
-	await signIn(page, EMAIL);
 	const sheet = new RunSheet(page);
 	await sheet.open(designId);
 	return sheet;

@@ -2,7 +2,6 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import type { FirmScope } from '../../src/lib/server/auth/scope';
 import { emptyDesign, firm } from '../server/support/designs';
 import { worked, type Published } from './support/fixtures';
-import { signIn } from './support/person';
 import { figureOf, RunSheet } from './support/run-sheet';
 import { useStage } from './support/stage';
 
@@ -193,8 +192,7 @@ describe('a worked system that is entered through the screen', () => {
 		'$fixture agrees with its source within the stated tolerance: $source',
 		async (system) => {
 			const designId = await emptyDesign(ours, system.fixture);
-			const page = await stage.newPage();
-			await signIn(page, EMAIL);
+			const page = await stage.pageOf(EMAIL);
 			await page.goto(`/designs/${designId}/basis`);
 			await page.waitForLoadState('networkidle');
 			await page

@@ -7,7 +7,6 @@ import { solveSheet } from '../../src/lib/sheet/solve-sheet';
 import { building } from '../bench/building';
 import { firm } from '../server/support/designs';
 import { demoDesigns, enterDemo, networks } from './support/fixtures';
-import { signIn } from './support/person';
 import { RunSheet } from './support/run-sheet';
 import { useStage } from './support/stage';
 
@@ -66,7 +65,7 @@ describe('the engine in Chromium and in Node', () => {
 describe("the sheet's own worker, as it is served", () => {
 	it.each(demoDesigns())('computes $name as the server does, to the last bit', async (demo) => {
 		const designId = await enterDemo(ours, demo);
-		const page = await stage.newPage();
+		const page = await stage.pageOf(EMAIL);
 		// Listens beside the page to what its worker answers.
 		await page.addInitScript(() => {
 			const heard: unknown[] = [];
@@ -78,7 +77,6 @@ describe("the sheet's own worker, as it is served", () => {
 				}
 			};
 		});
-		await signIn(page, EMAIL);
 		await new RunSheet(page).open(designId);
 		await page.waitForFunction(() => (globalThis as unknown as { heard: unknown[] }).heard.length > 0);
 		const heard = await page.evaluate(() =>

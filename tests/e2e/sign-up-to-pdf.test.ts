@@ -164,7 +164,7 @@ describe('the path from sign-up to the PDF', () => {
 		await page.getByRole('link', { name: 'P01', exact: true }).click();
 		await page.getByRole('button', { name: 'Restore into the sheet' }).waitFor();
 		expect(await sheet.grid.getAttribute('aria-readonly')).toBe('true');
-		await sheet.awake();
+		await page.waitForLoadState('networkidle');
 		await sheet.select('T1', 'size');
 		await page.keyboard.type('900');
 		await page.keyboard.press('Delete');

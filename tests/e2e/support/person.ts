@@ -10,6 +10,3 @@ export async function signIn(page: Page, email: string, to = '/register'): Promi
 	await page.getByRole('button', { name: 'Sign in' }).click();
 	await page.waitForURL((url) => url.pathname === to);
 }
-
-/** Waits until the scripts of a page have taken it over. */
-export const awake = (page: Page) => page.waitForLoadState('networkidle');

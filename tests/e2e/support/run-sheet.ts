@@ -28,8 +28,9 @@ export class RunSheet {
 		await this.awake();
 	}
 
+	/** The worker is started when the scripts have taken the page over. */
 	async awake(): Promise<void> {
-		await this.page.waitForLoadState('networkidle');
+		if (!this.page.workers().length) await this.page.waitForEvent('worker');
 		await this.grid.focus();
 	}
 

@@ -5,6 +5,7 @@ import { chromium, type Browser, type BrowserContext, type BrowserContextOptions
 import { afterAll, beforeAll, beforeEach } from 'vitest';
 import { startMailFake } from '../../../scripts/fakes/mail.mjs';
 import { freshDatabase, type TestDatabase } from '../../server/support/database';
+import { signIn } from './person';
 import { makeServer, type Server } from './server';
 
 const SHOTS = '.evendraft/e2e';
@@ -27,6 +28,8 @@ export interface Stage {
 	readonly inboxUrl: string;
 	/** A page of a browser of its own, with no cookies. Faults of its scripts are kept in `faults`. */
 	readonly newPage: (options?: BrowserContextOptions) => Promise<Page>;
+	/** The same of a browser in which this person is signed in; the form is filled once for each person. */
+	readonly pageOf: (email: string, options?: BrowserContextOptions) => Promise<Page>;
 	/** Uncaught faults of the scripts of the pages of this test. */
 	readonly faults: string[];
 }
@@ -37,7 +40,8 @@ export function useStage(): Stage {
 	let mail: Awaited<ReturnType<typeof startMailFake>> | undefined;
 	const contexts: BrowserContext[] = [];
 	const faults: string[] = [];
-	const stage = { faults, newPage } as { -readonly [K in keyof Stage]: Stage[K] };
+	const signedIn = new Map<string, Awaited<ReturnType<BrowserContext['storageState']>>>();
+	const stage = { faults, newPage, pageOf } as { -readonly [K in keyof Stage]: Stage[K] };
 
 	async function newPage(options: BrowserContextOptions = {}): Promise<Page> {
 		const context = await stage.browser.newContext({
@@ -49,6 +53,15 @@ export function useStage(): Stage {
 		await context.grantPermissions(['clipboard-read', 'clipboard-write'], { origin: stage.server.origin });
 		const page = await context.newPage();
 		page.on('pageerror', (fault) => faults.push(fault.message));
+		return page;
+	}
+
+	async function pageOf(email: string, options: BrowserContextOptions = {}): Promise<Page> {
+		const storageState = signedIn.get(email);
+		const page = await newPage({ ...options, ...(storageState && { storageState }) });
+		if (storageState) return page;
+		await signIn(page, email);
+		signedIn.set(email, await page.context().storageState());
 		return page;
 	}
 
