@@ -58,6 +58,11 @@ export const RULE: Readonly<Record<FlagRule, string>> = {
 	'negative-loss': 'Section with a gain of pressure',
 	'rise-exceeds-length': 'Rise greater than length',
 	'static-loss-at-inlet': 'Loss given as static at an inlet',
+	'end-counted-twice': 'End of a run counted twice',
+	'flexible-default': 'Flexible duct at the default factor',
+	'negative-duty': 'Fan duty below nothing',
+	'losses-as-entered': 'Losses entered for other air',
+	'damper-open-assumed': 'Damper taken as open',
 	'key-not-read': 'Entry that was not read'
 };
 

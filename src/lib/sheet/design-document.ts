@@ -1,5 +1,12 @@
 /** The design document of a sheet: which rows count, what keeps the others from counting, and at which cell. */
-import { type Criteria, type DesignAir, type DesignDocument, type DesignRow, type Side } from '$lib/engine';
+import {
+	fittingEntry,
+	type Criteria,
+	type DesignAir,
+	type DesignDocument,
+	type DesignRow,
+	type Side
+} from '$lib/engine';
 import { fittingsFor } from './parts';
 import { settingOf, valueOf, type RowField, type SettingField, type Sheet, type SheetRow } from './sheet';
 import { readingOf } from './reading-of';
@@ -43,10 +50,14 @@ export function documentOf(sheet: Sheet): SheetDocument {
 }
 
 function settingProblems(sheet: Sheet): SheetProblem[] {
-	return Object.entries(sheet.settings).flatMap(([field, cell]) => {
+	const notRead = Object.entries(sheet.settings).flatMap(([field, cell]) => {
 		if (!cell || cell.value !== null) return [];
 		return [{ row: null, field: field as SettingField, ...readingOf('setting', field, cell) }];
 	});
+	const { density, surroundings, elevation } = sheet.settings;
+	if (!density || !surroundings || elevation) return notRead;
+	const message = 'The air around the ducts is compared with a given density, so it must be known at what elevation.';
+	return [...notRead, { row: null, field: 'elevation', message, expected: 'the elevation, as 0 m' }];
 }
 
 /** The document without its rows. */
@@ -69,7 +80,11 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 		title: settingOf(sheet, 'title') ?? '',
 		air,
 		...(surroundings !== null && {
-			surroundings: { temperature: surroundings, relativeHumidity: 0, elevation: settingOf(sheet, 'elevation') ?? 0 }
+			surroundings: {
+				temperature: surroundings,
+				relativeHumidity: settingOf(sheet, 'humidity') ?? 0,
+				elevation: settingOf(sheet, 'elevation') ?? 0
+			}
 		}),
 		material: settingOf(sheet, 'material') ?? 'galvanized-steel',
 		...(service !== null && { service }),
@@ -130,7 +145,10 @@ function draftRow(
 	if (links.faulty.has(row.id) || problems.length > before || tag === null || !size || length === null) return null;
 	if (side === null || side === 'differs') return null;
 	const flex = valueOf(row, 'flex');
+	const flexFactor = settingOf(sheet, 'flexFactor');
 	const outlet = valueOf(row, 'outlet');
+	// An entry or exit among the parts is the end of the run: a blank outlet then loses nothing more.
+	const endsInPart = outlet === null && fitted?.fittings.some(({ kind }) => isEndPart(kind));
 	return {
 		id: row.id,
 		tag,
@@ -141,7 +159,7 @@ function draftRow(
 		serves: valueOf(row, 'serves') ?? '',
 		rise: valueOf(row, 'rise') ?? 0,
 		...(valueOf(row, 'material') && { material: valueOf(row, 'material') ?? '' }),
-		...(flex && { flexible: { length: flex, factor: settingOf(sheet, 'flexFactor') ?? 4 } }),
+		...(flex && { flexible: { length: flex, ...(flexFactor !== null && { factor: flexFactor }) } }),
 		...(fitted?.junction && { junction: fitted.junction }),
 		fittings: fitted?.fittings ?? [],
 		equipment: fitted?.equipment ?? [],
@@ -152,11 +170,15 @@ function draftRow(
 					flow,
 					...(outlet?.loss !== null &&
 						outlet && { loss: outlet.loss, lossIs: outlet.lossIs, toBeConfirmed: outlet.toBeConfirmed }),
+					...(endsInPart && { loss: 0 }),
 					pressure: valueOf(row, 'pressure') ?? 0
 				}
 			})
 	};
 }
+
+/** Whether a fitting of the catalogue is where a run begins or ends in the open. */
+const isEndPart = (kind: string) => ['entries', 'exits'].includes(fittingEntry(kind)?.family ?? '');
 
 /** Cells that speak of the end of a run, and have no place where other rows join. */
 export const END_FIELDS = ['flow', 'outlet', 'pressure'] as const;

@@ -22,7 +22,7 @@ export const SETTING_NAMES = {
 		blank: 'as inside: no thermal gravity'
 	},
 	material: { name: 'Material of the ducts', blank: 'galvanised steel, 0.09 mm' },
-	flexFactor: { name: 'Flexible duct, times the rigid rate', blank: '4, an entry by hand' },
+	flexFactor: { name: 'Flexible duct, times the rigid rate', blank: '4, the program’s default; illustrative' },
 	mainVelocity: { name: 'Velocity in mains, at most', quantity: 'velocity', blank: 'not checked' },
 	runOutVelocity: { name: 'Velocity in run-outs, at most', quantity: 'velocity', blank: 'not checked' },
 	frictionRate: { name: 'Friction rate, at most', quantity: 'rate', blank: 'not checked' },

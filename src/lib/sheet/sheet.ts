@@ -101,8 +101,7 @@ export const DEFAULT_SETTINGS = {
 	temperature: 20,
 	humidity: 0.5,
 	elevation: 0,
-	material: 'galvanized-steel',
-	flexFactor: 4
+	material: 'galvanized-steel'
 } as const satisfies Partial<SettingValues>;
 
 /** The value of a setting, or its default, or null where there is none. */

@@ -102,7 +102,24 @@ export interface Item {
 	/** Of all pieces [Pa]; a gain by thermal gravity is negative. */
 	readonly loss: number;
 	readonly source: string | null;
+	/** What the catalogue says of it, for a fitting that comes from there. */
+	readonly catalogue: CatalogueUse | null;
 	readonly toBeConfirmed: boolean;
+}
+
+/** A fitting of the catalogue as it was used: enough to compute its coefficient again. */
+export interface CatalogueUse {
+	/** All parameters of the entry, defaults included. */
+	readonly parameters: { readonly [name: string]: number | string };
+	/** The parameters in words, as 'r/D 1, 90°'. */
+	readonly words: string;
+	readonly method: string;
+	readonly known: string;
+	/** Fraction of the coefficient. */
+	readonly uncertainty: number;
+	/** What lies outside the range of its source. */
+	readonly rangeNote: string | null;
+	readonly caution: string | null;
 }
 
 /** A row solved. Pressures are gauge, at [fan end, far end]. */
@@ -160,6 +177,11 @@ export type FlagRule =
 	| 'negative-loss'
 	| 'rise-exceeds-length'
 	| 'static-loss-at-inlet'
+	| 'end-counted-twice'
+	| 'flexible-default'
+	| 'negative-duty'
+	| 'losses-as-entered'
+	| 'damper-open-assumed'
 	| 'key-not-read';
 
 /** Something an engineer should look at. `row` is null when it concerns the whole design. */

@@ -6,7 +6,7 @@ import { interpolate } from './interpolate';
 export const BEND_ANGLE: Range = { min: 0, max: 180 };
 /** Centre-line radius over diameter or side for which the Reynolds factor is given [-]. */
 export const BEND_RADIUS: Range = { min: 0.5, max: 3 };
-/** Reynolds numbers of the factor; above, it is 1 [-]. */
+/** Reynolds numbers of the factor [-]; it falls to 1 and stays there. */
 export const BEND_REYNOLDS: Range = { min: 10_000, max: Infinity };
 
 const ASPECT = [0.25, 0.5, 0.75, 1, 1.5, 2, 3, 4, 5, 6, 8];
@@ -50,7 +50,8 @@ export function bendAspectFactorIdelchik(aspect: number): number {
 }
 
 /**
- * Factor for Reynolds numbers below 2e5.
+ * Factor for low Reynolds numbers. The source gives it below 2e5, where it does not yet meet 1; it is carried on until it
+ * does (Re 3.8e5 for R/D above 0.7, 1.7e6 for 0.55 to 0.7), so that no coefficient jumps. Never less than the source.
  *
  *   1 + 4400/Re (0.5 <= R/D < 0.55), 5.45/Re^0.118 (0.55 to 0.70), 11.5/Re^0.19 (above); never below 1
  *

@@ -2,6 +2,9 @@ import { findDefinition } from './catalogue';
 import { readParameters } from './parameters';
 import type { CoefficientResult, FittingContext, FittingParameters } from './types';
 
+/** Below this Reynolds number no source of the catalogue was measured. */
+const TURBULENT = 4_000;
+
 /**
  * Coefficient of a fitting of the catalogue, on the velocity pressure of the row it sits in.
  *
@@ -20,11 +23,23 @@ export function coefficientOf(kind: string, parameters: FittingParameters, conte
 	const notes: string[] = [];
 	const note = (text: string) => void (notes.includes(text) || notes.push(text));
 	if (!entry.shapes.includes(context.size.shape)) note(`the source is not for ${context.size.shape} ducts`);
-	const coefficient = definition.coefficient(readParameters(entry, parameters, note), context, note);
+	const values = readParameters(entry, parameters, note);
+	const coefficient = definition.coefficient(values, context, note);
+	if (context.reynolds < TURBULENT) note(`the source is for turbulent flow; Re is ${Math.floor(context.reynolds)}`);
 	return {
 		coefficient: coefficient === 0 ? 0 : coefficient, // never -0
 		method: entry.method,
 		source: entry.source,
+		parameters: Object.fromEntries(
+			entry.parameters.map(({ name, options, default: standard }) => [
+				name,
+				options === undefined
+					? values.number(name)
+					: typeof standard === 'number'
+						? Number(values.choice(name))
+						: values.choice(name)
+			])
+		),
 		inRange: notes.length === 0,
 		rangeNote: notes.length === 0 ? null : notes.join('; ')
 	};

@@ -37,7 +37,8 @@ const smooth: FittingDefinition = {
 		shapes,
 		parameters: [radiusRatio(1, 10), angle(BEND_ANGLE.max), plane],
 		reference: 'row',
-		range: 'r/W 0.5 to 3, H/W 0.25 to 8, Re from 10 000; wall friction along the arc belongs to the length of the row',
+		range:
+			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1; r/W 0.5 to 3, H/W 0.25 to 8, Re from 10 000; wall friction along the arc belongs to the length of the row',
 		method: 'Idelchik, A1 B1 C1 with Reynolds factor; C1 from memory',
 		source: idelchik('6-1'),
 		known: 'from memory',
@@ -64,9 +65,10 @@ const mitred: FittingDefinition = {
 		parameters: [angle(120), plane],
 		reference: 'row',
 		range: 'angle 20 to 90°, H/W 0.25 to 8, Re from 10 000',
-		method: 'Idelchik, sine form, with the Reynolds factor of the SMACNA table',
+		method:
+			'factors from memory, which agree with the SMACNA table; Idelchik, sine form, with the Reynolds factor of the SMACNA table',
 		source: `${idelchik('6-7')}; ${SMACNA_ELBOWS}`,
-		known: 'published formula',
+		known: 'from memory',
 		uncertainty: 0.2,
 		picture: 'elbow',
 		caution: null

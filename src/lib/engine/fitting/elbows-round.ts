@@ -18,7 +18,8 @@ const smooth: FittingDefinition = {
 		shapes: ['round'],
 		parameters: [radiusRatio(10), angle(BEND_ANGLE.max)],
 		reference: 'row',
-		range: 'r/D 0.5 to 3, angle to 180°, Re from 10 000; wall friction along the arc belongs to the length of the row',
+		range:
+			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1; r/D 0.5 to 3, angle to 180°, Re from 10 000; wall friction along the arc belongs to the length of the row',
 		method: 'Idelchik, A1 B1 with Reynolds factor',
 		source: idelchik('6-1'),
 		known: 'published formula',
@@ -68,9 +69,10 @@ const mitred: FittingDefinition = {
 		parameters: [angle(120)],
 		reference: 'row',
 		range: 'angle 20 to 90°, Re from 10 000',
-		method: 'Idelchik, sine form, with the Reynolds factor of the SMACNA table',
+		method:
+			'factors from memory, which agree with the SMACNA table; Idelchik, sine form, with the Reynolds factor of the SMACNA table',
 		source: `${idelchik('6-7')}; ${SMACNA_ELBOWS}`,
-		known: 'published formula',
+		known: 'from memory',
 		uncertainty: 0.2,
 		picture: 'elbow',
 		caution: null

@@ -70,6 +70,8 @@ export interface CoefficientResult {
 	readonly coefficient: number;
 	readonly method: string;
 	readonly source: string;
+	/** All parameters of the entry as used, defaults included */
+	readonly parameters: Readonly<Record<string, number | string>>;
 	readonly inRange: boolean;
 	readonly rangeNote: string | null;
 }

@@ -32,7 +32,7 @@ describe('flags', () => {
 		['velocity-main M', {}, {}, { criteria: { mainVelocity: 1.4 } }],
 		['velocity-run-out E', {}, {}, { criteria: { runOutVelocity: 3.1 } }],
 		['friction-rate E', {}, {}, { criteria: { frictionRate: 0.3 } }],
-		['flexible-length E', {}, { flexible: { length: 2 } }, { criteria: { flexibleLength: 1.5 } }],
+		['flexible-length E', {}, { flexible: { length: 2, factor: 3 } }, { criteria: { flexibleLength: 1.5 } }],
 		['aspect-ratio M', { size: { shape: 'rectangular', width: 0.9, height: 0.2 } }, {}, {}],
 		['aspect-ratio M', { size: { shape: 'oval', width: 0.2, height: 0.5 } }, {}, { criteria: { aspectRatio: 2 } }],
 		['coefficient-range E', {}, { roughness: 0.02 }, {}],
@@ -43,11 +43,25 @@ describe('flags', () => {
 		['fire-damper-caution M', { equipment: [{ name: 'Fire damper FD-01', loss: 6 }] }, {}, {}],
 		['negative-loss M', { length: 0, fittings: [{ kind: 'fixed', coefficient: -0.4 }] }, {}, {}],
 		['rise-exceeds-length M', { rise: -11 }, {}, {}],
+		['flexible-default E', {}, { flexible: { length: 2 } }, {}],
+		['damper-open-assumed E', {}, { fittings: [{ kind: 'damper-butterfly' }] }, {}],
+		['end-counted-twice E', {}, { fittings: [{ kind: 'exit-plain' }] }, {}],
+		['end-counted-twice E', {}, { fittings: [{ kind: 'entry-flush' }], outlet: { flow: 0.1 } }, {}],
+		['negative-duty null', {}, { outlet: { flow: 0.1, loss: 0, pressure: -80 } }, {}],
+		['losses-as-entered null', {}, {}, { air: { density: 1 } }],
+		['service-caution null', {}, {}, { title: 'Kitchen extract EF-2' }],
+		['service-caution E', {}, { serves: 'Labs 1 to 4' }, {}],
+		['service-caution E', {}, { serves: 'Isolation room' }, {}],
+		['service-caution M', { equipment: [{ name: 'Grease filter', loss: 40 }] }, {}, {}],
+		['fire-damper-caution M', { equipment: [{ name: 'FSD-2', loss: 6 }] }, {}, {}],
 		['key-not-read M', { lenght: 3 }, {}, {}],
 		['key-not-read null', {}, {}, { air: { density: 1.2, temperature: 20 } }]
 	])('%s', (expected, keysOfMain, keysOfEnd, keys) => {
 		expect(brief(flagsOf(keysOfMain, keysOfEnd, keys))).toEqual([expected]);
 	});
+
+	it('do not say that an end is counted twice where the outlet loses nothing', () =>
+		expect(flagsOf({}, { fittings: [{ kind: 'exit-plain' }], outlet: { flow: 0.1, loss: 0 } })).toEqual([]));
 
 	it('carry the value and its threshold', () => {
 		const [flag] = flagsOf({}, {}, { criteria: { runOutVelocity: 3.1 } });
@@ -56,14 +70,14 @@ describe('flags', () => {
 	});
 
 	it.each([
-		['a butterfly damper of the catalogue', { fittings: [{ kind: 'damper-butterfly' }] }],
+		['a butterfly damper of the catalogue', { fittings: [{ kind: 'damper-butterfly', angle: 10 }] }],
 		['a damper by its name', { fittings: [{ kind: 'fixed', coefficient: 0.2, name: 'VCD open' }] }],
 		['a damper among the equipment', { equipment: [{ name: 'Volume damper', loss: 4 }] }]
 	])('take %s for the damper of a run-out', (_name, keys) =>
 		expect(brief(flagsOf({}, keys, { criteria: { damperAtOutlet: true } }))).toEqual([])
 	);
 
-	const damped: Json = { ...end, tag: 'F', fittings: [{ kind: 'damper-butterfly' }] };
+	const damped: Json = { ...end, tag: 'F', fittings: [{ kind: 'damper-butterfly', angle: 10 }] };
 	const dampers = { criteria: { damperAtOutlet: true } };
 
 	it('ask for a damper at an outlet that another is balanced against', () =>

@@ -17,9 +17,16 @@ export function flagsOf(
 	network: Network,
 	losses: readonly RowLoss[],
 	notes: ReadonlyMap<string, readonly RangeNote[]>,
-	totals: { readonly supplyFlow: number; readonly returnFlow: number }
+	totals: { readonly supplyFlow: number; readonly returnFlow: number },
+	duty: number,
+	density: number
 ): readonly Flag[] {
-	const flags: Flag[] = [...serviceFlags(document), ...fanFlowFlags(totals)];
+	const flags: Flag[] = [
+		...serviceFlags(document),
+		...fanFlowFlags(totals),
+		...dutyFlags(duty),
+		...densityFlags(document, density)
+	];
 	unreadKeyFlags(document, flags);
 	const outlets = { supply: 0, other: 0 };
 	for (const { side, outlet } of network.rows) if (outlet) outlets[side === 'supply' ? 'supply' : 'other']++;
@@ -47,6 +54,42 @@ function fanFlowFlags({ supplyFlow, returnFlow }: { supplyFlow: number; returnFl
 			value,
 			threshold: FLOWS_DIFFER,
 			basis: 'conservation of mass; the threshold is common practice'
+		}
+	];
+}
+
+function dutyFlags(duty: number): Flag[] {
+	if (duty >= 0) return [];
+	return [
+		{
+			rule: 'negative-duty',
+			row: null,
+			severity: 'caution',
+			message:
+				'The fan would have to give less than nothing: rooms at pressure or thermal gravity drive this flow. Check their signs.',
+			value: duty,
+			threshold: 0,
+			basis: 'sum of the requirements of both sides'
+		}
+	];
+}
+
+/** Air of which makers' data are given [kg/m3]; a difference that is worth a word. Common practice. */
+const RATED = 1.2;
+const DENSITY_DIFFERS = 0.05;
+
+function densityFlags({ rows }: DesignDocument, density: number): Flag[] {
+	if (Math.abs(density / RATED - 1) <= DENSITY_DIFFERS) return [];
+	if (!rows.some(({ equipment, outlet }) => (equipment?.length ?? 0) > 0 || outlet?.loss !== undefined)) return [];
+	return [
+		{
+			rule: 'losses-as-entered',
+			row: null,
+			severity: 'note',
+			message: 'Losses of equipment and outlets are counted as entered; makers give them for air of about 1.2 kg/m³.',
+			value: density,
+			threshold: RATED,
+			basis: 'common practice: a loss grows in proportion to the density'
 		}
 	];
 }

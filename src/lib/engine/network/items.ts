@@ -1,10 +1,11 @@
-import type { DesignRow, Equipment, Fitting, Item, Junction, Outlet } from '../document/types';
-import { coefficientOf, fittingEntry, ratedLoss } from '../fitting';
-import { COLEBROOK_ROUGHNESS } from '../friction';
+import type { CatalogueUse, DesignRow, Equipment, Fitting, Item, Junction, Outlet } from '../document/types';
+import { coefficientOf, fittingEntry, ratedLoss, type CatalogueEntry, type CoefficientResult } from '../fitting';
+import { COLEBROOK_ROUGHNESS, regime } from '../friction';
+import { parametersInWords } from './parameters-in-words';
 import type { Hydraulics } from './hydraulics';
 
 const BY_HAND = 'entered by hand';
-/** Times the rigid friction rate: flexible duct not fully stretched, entered by hand until it is measured. */
+/** Times the rigid friction rate, where the design names no factor; illustrative, for a length not fully stretched. */
 const FLEXIBLE_FACTOR = 4;
 
 /** A coefficient outside the range of its source, or used beside its purpose. */
@@ -14,18 +15,39 @@ export interface RangeNote {
 	readonly note: string;
 }
 
-export function ductItem(length: number, hydraulics: Hydraulics, notes: RangeNote[]): Item {
-	const { frictionRate, relativeRoughness } = hydraulics;
+/** The friction law that holds for the row, by its regime. */
+const FRICTION = {
+	laminar: 'Darcy–Weisbach, laminar law',
+	transition: 'Darcy–Weisbach, blend between the laminar law and Colebrook–White',
+	turbulent: 'Darcy–Weisbach, Colebrook–White'
+} as const;
+
+export function ductItem(
+	length: number,
+	shape: DesignRow['size']['shape'],
+	hydraulics: Hydraulics,
+	notes: RangeNote[]
+): Item {
+	const { frictionRate, relativeRoughness, reynolds } = hydraulics;
+	const law = regime(reynolds);
+	if (law !== 'turbulent' && shape === 'oval')
+		notes.push({
+			name: 'Duct',
+			inRange: false,
+			note: 'no laminar law of flat ovals is carried; 64/Re of round ducts stands in'
+		});
 	if (relativeRoughness > COLEBROOK_ROUGHNESS.max)
 		notes.push({ name: 'Duct', inRange: false, note: 'the relative roughness is above the range of Colebrook–White' });
-	return item('duct', 'Duct', frictionRate * length, { source: 'Darcy–Weisbach, Colebrook–White' });
+	return item('duct', 'Duct', frictionRate * length, { source: FRICTION[law] });
 }
 
 export function flexibleItem(
 	{ length, factor }: NonNullable<DesignRow['flexible']>,
 	{ frictionRate }: Hydraulics
 ): Item {
-	return item('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, { source: BY_HAND });
+	const source =
+		factor === undefined ? `${FLEXIBLE_FACTOR} times the rigid rate: the program’s default, illustrative` : BY_HAND;
+	return item('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, { source });
 }
 
 export function junctionItem(junction: Junction, { velocityPressure }: Hydraulics): Item {
@@ -41,13 +63,28 @@ export function fittingItem(fitting: Fitting, row: DesignRow, hydraulics: Hydrau
 		const loss = coefficient * count * pv;
 		return item('fitting', name, loss, { kind, count, coefficient, source: BY_HAND, toBeConfirmed });
 	}
-	const name = fitting.name ?? fittingEntry(kind)?.name ?? kind;
+	const entry = fittingEntry(kind);
+	const name = fitting.name ?? entry?.name ?? kind;
 	const { reynolds, velocity, relativeRoughness, frictionFactor } = hydraulics;
 	const context = { size: row.size, reynolds, velocity, relativeRoughness, frictionFactor };
-	const { coefficient, source, inRange, rangeNote } = coefficientOf(kind, fitting, context);
+	const result = coefficientOf(kind, fitting, context);
+	const { coefficient, source, inRange, rangeNote } = result;
 	if (!inRange || rangeNote !== null)
 		notes.push({ name, inRange, note: rangeNote ?? 'outside the range of its source' });
-	return item('fitting', name, coefficient * count * pv, { kind, count, coefficient, source, toBeConfirmed });
+	const catalogue = entry === null ? null : useOf(entry, result);
+	return item('fitting', name, coefficient * count * pv, {
+		kind,
+		count,
+		coefficient,
+		source,
+		catalogue,
+		toBeConfirmed
+	});
+}
+
+function useOf(entry: CatalogueEntry, { parameters, method, rangeNote }: CoefficientResult): CatalogueUse {
+	const { known, uncertainty, caution } = entry;
+	return { parameters, words: parametersInWords(entry, parameters), method, known, uncertainty, rangeNote, caution };
 }
 
 /** Without the flow it was given at, a loss is that at the design flow. */
@@ -69,11 +106,20 @@ export function gravityItem(gain: number): Item {
 	return item('gravity', 'Thermal gravity', -gain, { source: 'g (ρ surroundings − ρ) Δz' });
 }
 
-type More = { readonly [K in 'kind' | 'count' | 'coefficient' | 'source' | 'toBeConfirmed']?: Item[K] | undefined };
+type More = {
+	readonly [K in 'kind' | 'count' | 'coefficient' | 'source' | 'catalogue' | 'toBeConfirmed']?: Item[K] | undefined;
+};
 
 function item(part: Item['part'], name: string, loss: number, more: More): Item {
-	const { kind = null, count = null, coefficient = null, source = null, toBeConfirmed = false } = more;
+	const {
+		kind = null,
+		count = null,
+		coefficient = null,
+		source = null,
+		catalogue = null,
+		toBeConfirmed = false
+	} = more;
 	// Adding 0 turns -0 into 0.
 	const figure = coefficient === null ? null : coefficient + 0;
-	return { part, name, kind, count, coefficient: figure, loss: loss + 0, source, toBeConfirmed };
+	return { part, name, kind, count, coefficient: figure, loss: loss + 0, source, catalogue, toBeConfirmed };
 }

@@ -3,10 +3,10 @@ import { fittingEntry } from '../fitting';
 import type { RangeNote } from './items';
 import type { RowLoss } from './row-loss';
 
-const DAMPER = /damper|\bvcd\b/i;
+const DAMPER = /damper|\b(vcd|fsd)\b/i;
 /** Dampers that do not balance: they close, or open, by themselves. */
-const UNSUITED = /\b(fire|smoke|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
-const FIRE = /\b(fire|smoke)\b/i;
+const UNSUITED = /\b(fire|smoke|fsd|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
+const FIRE = /\b(fire|smoke|fsd)\b/i;
 
 /**
  * Fittings, equipment and outlet of one row: what is not settled, out of range, missing or needs a caution.
@@ -60,6 +60,24 @@ export function partFlags(
 			basis: 'criteria of the design'
 		});
 
+	endFlag(row, flags);
+	if (row.flexible !== undefined && row.flexible.length > 0 && row.flexible.factor === undefined)
+		flags.push({
+			rule: 'flexible-default',
+			row: row.tag,
+			severity: 'note',
+			message: 'Flexible duct is taken at 4 times the rigid rate, the program’s default; as installed it can be more.',
+			basis: 'illustrative: published tests give about 4 times for moderate and near 10 times for severe compression'
+		});
+	if (row.fittings?.some((one) => fittingEntry(one.kind)?.family === 'dampers' && !('angle' in one)) === true)
+		flags.push({
+			rule: 'damper-open-assumed',
+			row: row.tag,
+			severity: 'note',
+			message: 'A damper without an angle is taken as fully open.',
+			basis: 'default of the catalogue'
+		});
+
 	if (row.outlet?.lossIs === 'static' && row.side !== 'supply')
 		flags.push({
 			rule: 'static-loss-at-inlet',
@@ -69,6 +87,22 @@ export function partFlags(
 				'The loss of the inlet is given as static: one velocity pressure is added, as at an outlet. Give the total-pressure loss if the maker states it.',
 			basis: 'rule of the design document'
 		});
+}
+
+/** An entry or exit of the catalogue is the end of its run: the outlet's own loss would count it a second time. */
+function endFlag(row: DesignRow, flags: Flag[]): void {
+	if (row.outlet === undefined || row.outlet.loss === 0) return;
+	const end = row.fittings
+		?.map((one) => fittingEntry(one.kind))
+		.find((entry) => entry?.family === 'entries' || entry?.family === 'exits');
+	if (!end) return;
+	flags.push({
+		rule: 'end-counted-twice',
+		row: row.tag,
+		severity: 'caution',
+		message: `${end.name} and the loss of the outlet are both counted. Where the fitting is the end of the run, the outlet loses 0.`,
+		basis: 'an end loses its velocity pressure once'
+	});
 }
 
 function hasBalancingDamper(row: DesignRow): boolean {

@@ -43,7 +43,7 @@ export function rowLoss(row: DesignRow, flow: number, settings: Settings, notes:
 		return item.loss;
 	};
 
-	const frictionLoss = lossOf(ductItem(row.length, hydraulics, notes));
+	const frictionLoss = lossOf(ductItem(row.length, row.size.shape, hydraulics, notes));
 	const flexibleLoss = row.flexible === undefined ? 0 : lossOf(flexibleItem(row.flexible, hydraulics));
 	const junctionLoss = row.junction === undefined ? 0 : lossOf(junctionItem(row.junction, hydraulics));
 	let fittingLoss = 0;

@@ -1,4 +1,4 @@
-import type { DesignDocument, Flag, Service } from '../document/types';
+import type { DesignDocument, DesignRow, Flag, Service } from '../document/types';
 
 const CAUTIONS: Readonly<Record<Exclude<Service, 'general'>, string>> = {
 	'kitchen-grease':
@@ -11,10 +11,10 @@ const CAUTIONS: Readonly<Record<Exclude<Service, 'general'>, string>> = {
 
 /** Words that hint at a service nobody has named. */
 const HINTS: readonly (readonly [RegExp, Exclude<Service, 'general'>])[] = [
-	[/\b(kitchen|grease|cooking|range hood)\b/i, 'kitchen-grease'],
-	[/\b(laborator(y|ies)|fume|fume hood)\b/i, 'laboratory'],
-	[/\b(hazardous|explosive|dust|welding)\b/i, 'hazardous'],
-	[/\b(smoke (control|exhaust|extract))\b/i, 'smoke-control']
+	[/\b(kitchens?|grease|cooking|cookers?|fryers?|canop(y|ies)|range hoods?)\b/i, 'kitchen-grease'],
+	[/\b(laborator(y|ies)|labs?|fume (hoods?|cupboards?)|fumes?|isolation)\b/i, 'laboratory'],
+	[/\b(hazardous|explosive|dusts?|welding|flues?|boilers?|combustion)\b/i, 'hazardous'],
+	[/\b(smoke (control|exhaust|extract)|(stairs?|lift|lobby) pressuri[sz]ation|pressuri[sz]ation)\b/i, 'smoke-control']
 ];
 const BASIS = 'outside the scope of a pressure calculation: the adopted codes and a licensed professional govern';
 
@@ -27,14 +27,32 @@ export function serviceFlags(document: DesignDocument): Flag[] {
 		return [{ rule: 'service-caution', row: null, severity: 'caution', message, basis: BASIS }];
 	}
 	const flags: Flag[] = [];
+	const inTitle = hintIn([document.title ?? '']);
+	if (inTitle !== null) flags.push(hinted(null, inTitle));
 	for (const row of document.rows) {
-		const name = row.outlet?.name ?? '';
-		const { serves = '' } = row;
-		if (name === '' && serves === '') continue;
-		const hint = HINTS.find(([pattern]) => pattern.test(serves) || pattern.test(name));
-		if (hint === undefined) continue;
-		const message = `${CAUTIONS[hint[1]]} Name the service of the design to settle this.`;
-		flags.push({ rule: 'service-caution', row: row.tag, severity: 'caution', message, basis: BASIS });
+		const hint = hintIn(textsOf(row));
+		if (hint !== null) flags.push(hinted(row.tag, hint));
 	}
 	return flags;
+}
+
+/** Every text of a row that may name what it serves. */
+function* textsOf({ serves, outlet, equipment, fittings }: DesignRow): Generator<string> {
+	if (serves !== undefined) yield serves;
+	if (outlet?.name !== undefined) yield outlet.name;
+	for (const { name } of equipment ?? []) yield name;
+	for (const { name } of fittings ?? []) if (name !== undefined) yield name;
+}
+
+function hintIn(texts: Iterable<string>): Exclude<Service, 'general'> | null {
+	for (const text of texts) {
+		const hint = HINTS.find(([pattern]) => pattern.test(text));
+		if (hint !== undefined) return hint[1];
+	}
+	return null;
+}
+
+function hinted(row: string | null, service: Exclude<Service, 'general'>): Flag {
+	const message = `${CAUTIONS[service]} Name the service of the design to settle this.`;
+	return { rule: 'service-caution', row, severity: 'caution', message, basis: BASIS };
 }

@@ -46,7 +46,8 @@ export function solveDesign(document: DesignDocument): SolveResult {
 	const { paths, required, index, spares } = pathsOf(network, along);
 	placePressures(network, along, required, spares, rowLosses);
 	const totals = totalsOf(network, flows);
-	const flags = flagsOf(document, network, rowLosses, notes, totals);
+	const fan = fanDuty(network, rowLosses, required, totals);
+	const flags = flagsOf(document, network, rowLosses, notes, totals, fan.totalPressure, settings.air.density);
 	return {
 		ok: true,
 		solution: {
@@ -57,7 +58,7 @@ export function solveDesign(document: DesignDocument): SolveResult {
 			rows: byTag(network.rows, rowLosses),
 			paths,
 			index,
-			fan: fanDuty(network, rowLosses, required, totals),
+			fan,
 			totals,
 			flags
 		}
