@@ -18,13 +18,16 @@ import { SERVICE } from './wording';
 export function basisOf({ document, solution, units, heading }: ReportInput): Labelled[] {
 	const density = `${formatDensity(solution.air.density, units)} ${unitOf('density', units)}`;
 	const { surroundings } = document;
+	const assumed = 'density' in document.air && document.air.viscosity === undefined ? ', of air at 20 °C' : '';
 	return [
 		{ label: 'Air', value: [...airWords(document.air, units), density].join(', ') },
+		{ label: 'Viscosity', value: `${(solution.air.viscosity * 1e6).toFixed(2)} µPa s${assumed}` },
 		...(surroundings ? [{ label: 'Surroundings', value: surroundingsWords(surroundings, units) }] : []),
-		{ label: 'Service', value: heading.service.trim() || SERVICE[document.service ?? 'general'] },
+		{ label: 'Service', value: document.service ? SERVICE[document.service] : 'not named; taken as general' },
+		...(heading.service.trim() ? [{ label: 'Serves', value: heading.service.trim() }] : []),
 		{ label: 'Friction', value: 'Darcy–Weisbach, Colebrook–White' },
 		{ label: 'Roughness', value: roughnessWords(document, units) },
-		{ label: 'Losses', value: 'coefficient × own velocity pressure' },
+		{ label: 'Losses', value: 'coefficient × own velocity pressure; equipment and outlets as entered' },
 		{ label: 'Flexible duct', value: flexibleWords(document) },
 		{ label: 'Leakage, margin', value: 'none included' },
 		{ label: 'Engine', value: `Evendraft ${solution.engineVersion}` }
@@ -59,15 +62,16 @@ function roughnessWords(document: DesignDocument, units: UnitSystem): string {
 	};
 	const general = own(document) ?? own({ material: 'galvanized-steel' }) ?? '';
 	const used = [...new Set(document.rows.map((row) => own(row) ?? general))];
-	if (used.length <= 3) return used.join('; ');
-	return `${used.slice(0, 2).join('; ')}; and ${used.length - 2} others`;
+	return used.join('; ');
 }
 
 function flexibleWords(document: DesignDocument): string {
-	const factors = document.rows.flatMap(({ flexible }) => (flexible ? [flexible.factor ?? 4] : []));
-	if (factors.length === 0) return 'none';
+	const flexible = document.rows.flatMap((row) => row.flexible ?? []);
+	if (flexible.length === 0) return 'none';
+	const byDefault = flexible.some(({ factor }) => factor === undefined) ? ' (the program’s default)' : '';
+	const factors = flexible.map(({ factor }) => factor ?? 4);
 	const [least, most] = [Math.min(...factors), Math.max(...factors)].map((factor) => String(Number(factor.toFixed(2))));
-	return `${least === most ? least : `${least} to ${most}`} × the rigid rate`;
+	return `${least === most ? least : `${least} to ${most}`} × the rigid rate${byDefault}`;
 }
 
 const lowered = (name: string) => name.charAt(0).toLowerCase() + name.slice(1);

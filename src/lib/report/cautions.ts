@@ -1,3 +1,4 @@
+import { isExhaustOnly } from './discharge';
 import type { ReportInput } from './input';
 import type { Caution } from './model';
 import { SERVICE } from './wording';
@@ -26,8 +27,7 @@ export function cautionsOf({ document, solution }: ReportInput): Caution[] {
 		const title = rule === 'fire-damper-caution' ? 'Fire and smoke dampers' : specialTitle(service);
 		cautions.push({ title, text: message });
 	}
-	const { supplyFlow, returnFlow } = solution.totals;
-	if (supplyFlow === 0 && returnFlow > 0)
+	if (isExhaustOnly(document))
 		cautions.push({
 			title: 'Combustion air',
 			text: 'Exhaust without make-up air can draw flue gas into the building. Check fuel-burning appliances and make-up air.'

@@ -45,7 +45,12 @@ export function criteriaOf({ document, solution, units }: ReportInput): Criterio
 		if (limit === undefined) return;
 		const shown = shownBy(rule, units);
 		const found = values.length === 0 ? NOTHING : shown(Math.max(...values));
-		lines.push({ rule, label: `${label}, at most ${shown(limit)}`, found: figureAlone(found), verdict: verdict(rule) });
+		lines.push({
+			rule,
+			label: `${label}, at most ${shown(limit)}`,
+			found: figureAlone(found),
+			verdict: values.length === 0 ? 'not applicable' : verdict(rule)
+		});
 	};
 	const flagged = (rule: FlagRule) => solution.flags.filter((flag) => flag.rule === rule).length;
 	const verdict = (rule: FlagRule) => (flagged(rule) === 0 ? 'met' : 'not met');
@@ -62,12 +67,23 @@ export function criteriaOf({ document, solution, units }: ReportInput): Criterio
 	);
 	most('aspect-ratio', 'Aspect ratio', criteria.aspectRatio, ratios);
 	if (criteria.damperAtOutlet === true) {
-		const outlets = solution.paths.length;
-		const found = `${outlets - flagged('damper-missing')} of ${outlets}`;
+		const needed = outletsToBalance(solution.paths);
+		const found = needed === 0 ? NOTHING : `${needed - flagged('damper-missing')} of ${needed}`;
 		const label = 'Damper in every outlet branch';
-		lines.push({ rule: 'damper-missing', label, found, verdict: verdict('damper-missing') });
+		lines.push({
+			rule: 'damper-missing',
+			label,
+			found,
+			verdict: needed === 0 ? 'not applicable' : verdict('damper-missing')
+		});
 	}
 	return lines;
+}
+
+/** Outlets that have another on their side of the fan to be balanced against: the engine asks for dampers at these. */
+function outletsToBalance(paths: ReportInput['solution']['paths']): number {
+	const supply = paths.filter(({ side }) => side === 'supply').length;
+	return [supply, paths.length - supply].reduce((sum, count) => sum + (count > 1 ? count : 0), 0);
 }
 
 /** The unit stands with the limit already. */

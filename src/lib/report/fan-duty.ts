@@ -1,4 +1,5 @@
 import { formatDensity, formatFlow, formatPressure, formatVelocity, unitOf } from '$lib/engine';
+import { isExhaustOnly } from './discharge';
 import type { ReportInput } from './input';
 import type { FanDuty, FanLine } from './model';
 import { suctionName } from './result';
@@ -28,12 +29,21 @@ export function fanDutyOf({ document, solution, units }: ReportInput): FanDuty {
 	const lines: FanLine[] = [
 		flow('Flow, actual', fan.flow, 'at the density below; the greater of the two sides of the fan', true),
 		...(totals.supplyFlow > 0 && totals.returnFlow > 0
-			? [flow('Supply side', totals.supplyFlow, ''), flow(`Other side, ${drawing}`, totals.returnFlow, '')]
+			? [
+					flow(isExhaustOnly(document) ? 'Discharge side' : 'Supply side', totals.supplyFlow, ''),
+					flow(`Other side, ${drawing}`, totals.returnFlow, '')
+				]
 			: []),
-		pressure('Fan total pressure', fan.totalPressure, 'supply part and suction part together', true)
+		pressure('Fan total pressure', fan.totalPressure, 'both parts together', true)
 	];
 	if (index.supply !== null)
-		lines.push(pressure('Supply part', fan.supplyPressure, `asked by the index path to ${index.supply}`));
+		lines.push(
+			pressure(
+				isExhaustOnly(document) ? 'Discharge part' : 'Supply part',
+				fan.supplyPressure,
+				`asked by the index path to ${index.supply}`
+			)
+		);
 	if (index.return !== null)
 		lines.push(
 			pressure('Suction part', fan.returnPressure, `asked by the index path from ${index.return}, ${drawing}`)
@@ -75,6 +85,6 @@ export function fanDutyOf({ document, solution, units }: ReportInput): FanDuty {
 
 function outletNote(tag: string | undefined, count: number): string {
 	return count === 1
-		? `in ${tag ?? ''}, the first supply section`
+		? `in ${tag ?? ''}, the first section; the fan’s own outlet may differ`
 		: `mean of ${count} supply sections, weighted by flow`;
 }

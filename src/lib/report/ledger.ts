@@ -7,6 +7,7 @@ import {
 	type Path,
 	type UnitSystem
 } from '$lib/engine';
+import { isExhaustOnly } from './discharge';
 import type { ReportInput } from './input';
 import type { Account, AccountLine, Column, Ledger } from './model';
 import { requirementOf, servesOf } from './network-order';
@@ -31,6 +32,7 @@ export function ledgerOf({ document, solution, units }: ReportInput): Ledger {
 	);
 	const short = ranked.reduce((sum, path) => sum + path.rows.length, 0) > LONG;
 	const told = new Map<string, string>();
+	const exhaustOnly = isExhaustOnly(document);
 	const accounts = ranked.map((path, place): Account => {
 		const index = indexes.includes(path.outlet);
 		const requirement = requirementOf(path);
@@ -44,7 +46,7 @@ export function ledgerOf({ document, solution, units }: ReportInput): Ledger {
 			requirementText: formatPressure(requirement, units),
 			spare: path.spare,
 			spareText: index ? 'index' : formatPressure(path.spare, units),
-			lines: linesOf(path, shared(path, place + 1, short, told), solution.rows, rows, figures, units)
+			lines: linesOf(path, shared(path, place + 1, short, told), solution.rows, rows, figures, units, exhaustOnly)
 		};
 	});
 	return {
@@ -128,7 +130,8 @@ function linesOf(
 	solved: ReportInput['solution']['rows'],
 	rows: ReadonlyMap<string, DesignRow>,
 	figures: readonly Figure[],
-	units: UnitSystem
+	units: UnitSystem,
+	exhaustOnly: boolean
 ): AccountLine[] {
 	const blanks = ['', '', ...figures.map(() => '')];
 	const supply = path.side === 'supply';
@@ -173,11 +176,11 @@ function linesOf(
 	}
 	if (!supply) carry();
 	if (supply) damper();
-	line('end', supply ? roomName(path) : 'At the fan', null);
+	line('end', supply ? roomName(path, exhaustOnly) : 'At the fan', null);
 	return lines;
 }
 
-function roomName({ side, roomPressure }: Path): string {
-	if (side === 'outdoor') return roomPressure === 0 ? 'Outdoors' : 'Outdoors, at pressure';
+function roomName({ side, roomPressure }: Path, exhaustOnly = false): string {
+	if (side === 'outdoor' || exhaustOnly) return roomPressure === 0 ? 'Outdoors' : 'Outdoors, at pressure';
 	return roomPressure === 0 ? 'In the room' : 'In the room, at pressure';
 }

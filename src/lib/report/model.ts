@@ -16,6 +16,7 @@ export interface Report {
 	readonly schedule: Schedule;
 	readonly ledger: Ledger;
 	readonly parts: readonly PartsOfRow[];
+	readonly remarks: readonly Remark[];
 	readonly fan: FanDuty;
 	readonly cautions: readonly Caution[];
 	readonly sources: readonly SourceUsed[];
@@ -68,7 +69,7 @@ export interface Criterion {
 	readonly rule: FlagRule;
 	readonly label: string;
 	readonly found: string;
-	readonly verdict: 'met' | 'not met';
+	readonly verdict: 'met' | 'not met' | 'not applicable';
 }
 
 export interface OpenItem {
@@ -152,9 +153,18 @@ export interface PartLine {
 	/** A person's own coefficient, not one of the catalogue. */
 	readonly coefficientKind: CellKind;
 	readonly loss: string;
+	/** A person's own figure, counted as it was entered. */
+	readonly lossKind: CellKind;
+	/** Numbers of remarks under the table. */
+	readonly remarks: readonly number[];
 	/** Number in the list of sources. */
 	readonly source: number | null;
 	readonly toBeConfirmed: boolean;
+}
+/** A caution of the catalogue, or what lies outside the range of a source. */
+export interface Remark {
+	readonly number: number;
+	readonly text: string;
 }
 export interface PartsOfRow {
 	readonly tag: string;

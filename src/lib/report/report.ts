@@ -6,7 +6,7 @@ import type { ReportInput } from './input';
 import { ledgerOf } from './ledger';
 import type { HeadingBlock, Report, RevisionLine, TitleBlock } from './model';
 import { openItemsOf } from './open-items';
-import { partsOf } from './parts';
+import { partsOf, remarksOf } from './parts';
 import { resultOf } from './result';
 import { scheduleOf } from './schedule';
 import { sourcesOf } from './sources';
@@ -22,6 +22,7 @@ export type * from './model';
  */
 export function reportOf(input: ReportInput): Report {
 	const sources = sourcesOf(input);
+	const remarks = remarksOf(input);
 	return {
 		paper: input.paper,
 		printedAt: input.printedAt,
@@ -35,7 +36,8 @@ export function reportOf(input: ReportInput): Report {
 		checks: checksOf(input),
 		schedule: scheduleOf(input),
 		ledger: ledgerOf(input),
-		parts: partsOf(input, sources),
+		parts: partsOf(input, sources, remarks),
+		remarks,
 		fan: fanDutyOf(input),
 		cautions: cautionsOf(input),
 		sources,

@@ -1,11 +1,15 @@
 import { formatFlow, formatPressure, unitOf, type Side } from '$lib/engine';
+import { isExhaustOnly } from './discharge';
 import type { ReportInput } from './input';
 import type { Result, ResultCell } from './model';
 import { requirementOf } from './network-order';
 import { NOTHING } from './wording';
 
+/** Spare pressure that a damper takes without being heard [Pa]: common practice. */
+const LOUD = 50;
+
 /** The figures that a reader looks for first, each with its basis. */
-export function resultOf({ solution, units }: ReportInput): Result {
+export function resultOf({ document, solution, units }: ReportInput): Result {
 	const { fan, index, paths } = solution;
 	const unit = unitOf('pressure', units);
 	const pressure = (label: string, value: number | null, before = ''): ResultCell => ({
@@ -25,12 +29,20 @@ export function resultOf({ solution, units }: ReportInput): Result {
 	const cells = [
 		pressure('Fan duty, total pressure', fan.totalPressure),
 		{ label: 'at flow, actual', value: formatFlow(fan.flow, units), unit: unitOf('flow', units), aside: null },
-		...indexCell(index.return === null ? 'Index outlet' : 'Index, supply', index.supply),
+		...indexCell(
+			index.return === null ? 'Index outlet' : isExhaustOnly(document) ? 'Index, discharge' : 'Index, supply',
+			index.supply
+		),
 		...indexCell(index.supply === null ? 'Index inlet' : `Index, ${suctionName(inlets)}`, index.return),
 		spread > 0 ? pressure('Dampers must take', spread, 'up to ') : pressure('Dampers must take', null)
 	];
-	if (outletPressure !== null) cells.push(pressure('Velocity pressure at fan outlet', outletPressure));
-	return { cells, notes: notesOf(fan.staticPressure, (value) => `${formatPressure(value, units)} ${unit}`) };
+	if (outletPressure !== null) cells.push(pressure('Velocity pressure, first section', outletPressure));
+	const notes = notesOf(fan.staticPressure, (value) => `${formatPressure(value, units)} ${unit}`);
+	if (spread > LOUD)
+		notes.push(
+			`More than ${formatPressure(LOUD, units)} ${unit} at one damper asks for a low-noise device (common practice).`
+		);
+	return { cells, notes };
 }
 
 function notesOf(staticPressure: number | null, shown: (value: number) => string): string[] {
@@ -38,7 +50,7 @@ function notesOf(staticPressure: number | null, shown: (value: number) => string
 	const margin = 'No margin and no leakage are included.';
 	if (staticPressure === null) return [`${inside} ${margin}`];
 	return [
-		`${inside} ${margin} Fan static pressure, total less the velocity pressure at the fan outlet: ${shown(staticPressure)}.`
+		`${inside} ${margin} Fan static pressure, total less the velocity pressure in the first section, which may differ from that at the fan’s own outlet: ${shown(staticPressure)}.`
 	];
 }
 

@@ -13,7 +13,8 @@ import {
 import type { ReportInput } from './input';
 import type { CellKind, Column, Schedule } from './model';
 import { indexRows, rowsFromFan, servesOf } from './network-order';
-import { NOTHING, SIDE, counted, orNothing } from './wording';
+import { isExhaustOnly, sideWords } from './discharge';
+import { NOTHING, counted, orNothing } from './wording';
 
 interface Shown extends Column {
 	readonly text: (row: DesignRow, solved: SolvedRow) => string;
@@ -26,8 +27,10 @@ export function scheduleOf({ document, solution, units, heading }: ReportInput):
 	const onIndex = indexRows(solution);
 	const rows = rowsFromFan(document);
 	const sides = new Set(rows.map(({ side }) => side));
+	const exhaustOnly = isExhaustOnly(document);
 	const columns = columnsOf(units, onIndex, {
 		sides: sides.size > 1,
+		exhaustOnly,
 		gravity: Object.values(solution.rows).some(({ thermalGravity }) => thermalGravity !== 0)
 	});
 	return {
@@ -49,7 +52,7 @@ export function scheduleOf({ document, solution, units, heading }: ReportInput):
 function columnsOf(
 	units: UnitSystem,
 	onIndex: ReadonlySet<string>,
-	also: { readonly sides: boolean; readonly gravity: boolean }
+	also: { readonly sides: boolean; readonly exhaustOnly: boolean; readonly gravity: boolean }
 ): Shown[] {
 	const entered = (key: string, head: string, unit: string, text: Shown['text'], align: Column['align'] = 'left') =>
 		({ key, head, unit, kind: 'entered', align, text }) satisfies Shown;
@@ -63,7 +66,7 @@ function columnsOf(
 	return [
 		entered('section', 'Section', '', (row) => row.tag),
 		entered('joins', 'Joins', '', (row) => row.joins ?? 'fan'),
-		...(also.sides ? [entered('side', 'Air', '', (row) => SIDE[row.side])] : []),
+		...(also.sides ? [entered('side', 'Air', '', (row) => sideWords(row.side, also.exhaustOnly))] : []),
 		entered('serves', 'Serves', '', (row) => servesOf(row)),
 		{
 			...computed('flow', 'Flow', unitOf('flow', units), (_row, solved) => formatFlow(solved.flow, units)),
@@ -101,18 +104,24 @@ function columnsOf(
 			(row) => Boolean(row.fittings?.length),
 			({ fittingLoss }) => fittingLoss
 		),
-		loss(
-			'equipment',
-			'Equip.',
-			(row) => Boolean(row.equipment?.length),
-			({ equipmentLoss }) => equipmentLoss
-		),
-		loss(
-			'outlet',
-			'Outlet',
-			(row) => row.outlet !== undefined,
-			({ outletLoss }) => outletLoss
-		),
+		{
+			...loss(
+				'equipment',
+				'Equip.',
+				(row) => Boolean(row.equipment?.length),
+				({ equipmentLoss }) => equipmentLoss
+			),
+			kindOf: (row) => (isAsEntered(row) ? 'entered' : 'computed')
+		},
+		{
+			...loss(
+				'outlet',
+				'Outlet',
+				(row) => row.outlet !== undefined,
+				({ outletLoss }) => outletLoss
+			),
+			kindOf: ({ outlet }) => (outlet?.loss !== undefined && outlet.lossIs !== 'static' ? 'entered' : 'computed')
+		},
 		...(also.gravity
 			? [
 					computed('gravity', 'Gravity', pressure, (_row, { thermalGravity }) =>
@@ -125,4 +134,9 @@ function columnsOf(
 			onIndex.has(row.tag) ? 'index' : formatPressure(spare, units)
 		)
 	];
+}
+
+/** Whether all that the row's equipment loses was entered as it stands, at the row's own flow. */
+function isAsEntered({ equipment }: DesignRow): boolean {
+	return equipment !== undefined && equipment.length > 0 && equipment.every(({ atFlow }) => atFlow === undefined);
 }

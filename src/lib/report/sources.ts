@@ -25,7 +25,8 @@ export function sourceText({ kind, source }: Item): string {
 	const entry = kind === null ? null : fittingEntry(kind);
 	if (entry === null) return source ?? UNSTATED;
 	const named = source ?? entry.source;
-	const how = entry.known === 'published formula' ? '' : ` (${entry.known})`;
+	const band = `known to about ±${Math.round(entry.uncertainty * 100)} %`;
+	const how = ` (${entry.known === 'published formula' ? '' : `${entry.known}; `}${band})`;
 	return named.includes(entry.method) ? `${named}${how}` : `${named}${how}; method: ${entry.method}`;
 }
 

@@ -11,7 +11,7 @@ const SIZE = 8.4;
 const IN_A_COLUMN = 36;
 
 /** What each section's loss is made of, and the number of each source. */
-export function partsPages({ parts, schedule, ledger }: Report, sheet: Sheet): Content[] {
+export function partsPages({ parts, remarks, schedule, ledger }: Report, sheet: Sheet): Content[] {
 	const unit = ledger.columns.at(-1)?.unit ?? '';
 	const { count, width } = columnsOn(sheet);
 	const columns = columnsOf(width, unit);
@@ -21,7 +21,8 @@ export function partsPages({ parts, schedule, ledger }: Report, sheet: Sheet): C
 		pageHead('parts', 'Parts of each section', schedule.title, keyLine()),
 		...placed(blocks, count),
 		notes([
-			'Coefficients are on the section’s own velocity pressure, of one piece; the loss is of all pieces. Numbers of sources are those of the list of sources and methods.'
+			'Coefficients are on the section’s own velocity pressure, of one piece; the loss is of all pieces. Numbers of sources are those of the list of sources and methods; figures in brackets are remarks.',
+			...remarks.map(({ number, text }) => `(${number}) ${text}`)
 		])
 	];
 }
@@ -67,25 +68,31 @@ function tableOf(parts: readonly PartsOfRow[], columns: readonly GridColumn[]): 
 	return grid(columns, body, { fontSize: SIZE, pad: 1.4, lineAbove: (row) => starts.has(row) });
 }
 
+/** The tag of a section on its further lines, so that a page which begins within it still names it. */
+function tagAgain(tag: string): TableCell {
+	return { text: sans(tag), fontSize: SIZE - 1.4, color: '#777777', margin: [8, 0.8, 0, 0], ...tint('entered') };
+}
+
 function rowOf(part: PartsOfRow, line: PartLine, first: boolean, columns: readonly GridColumn[]): TableCell[] {
 	const put = (place: number, text: string, bold = false) =>
 		cell(text, columns[place]?.kind ?? 'entered', { fontSize: SIZE, alignment: columns[place]?.align ?? 'left', bold });
 	const name: TableCell = {
 		text: [
 			sans(line.name),
+			sans(line.remarks.length ? ` (${line.remarks.join(', ')})` : ''),
 			sans(line.toBeConfirmed ? `${line.name === '' ? '' : ', '}to be confirmed` : '', { bold: true })
 		],
 		fontSize: SIZE,
 		...tint('entered')
 	};
 	return [
-		first ? tagCell(part.tag, part.index, columns[0]?.width ?? 0, SIZE) : put(0, ''),
+		first ? tagCell(part.tag, part.index, columns[0]?.width ?? 0, SIZE) : tagAgain(part.tag),
 		put(1, line.part),
 		name,
 		put(3, line.count),
 		cell(line.coefficient, line.coefficientKind, { fontSize: SIZE, alignment: 'right' }),
 		put(5, first ? part.velocityPressure : ''),
-		put(6, line.loss),
+		cell(line.loss, line.lossKind, { fontSize: SIZE, alignment: 'right' }),
 		put(7, first ? part.loss : '', true),
 		put(8, line.source === null ? '–' : String(line.source))
 	];

@@ -38,8 +38,9 @@ const NETWORK: FormulaGroup = {
 		},
 		{
 			name: 'Path, index and spare',
-			equation: 'spare = loss of the index path − loss of the path',
-			where: 'The index path has the greatest loss on its side of the fan',
+			equation: 'spare = what the index path asks of the fan − what the path asks',
+			where:
+				'A path asks its loss, and the gauge pressure of its room: added in supply, taken off where air comes from the room',
 			range: 'Supply, and the other side, each have their own',
 			source: 'Common practice'
 		},
@@ -124,11 +125,12 @@ const FRICTION: FormulaGroup = {
 			caution: 'Flow of this kind is unsteady. A check says where it occurs.'
 		},
 		{
-			name: 'Flexible duct, compressed',
-			equation: 'factor = 1 + 0.58 K e^{−0.00496 D}',
-			where: 'K what is missing of the full length [%], D diameter [mm]',
-			range: 'K to 45 %, D 150 to 400 mm',
-			source: 'Abushakra, Walker & Sherman (2004) and Culp; the form is from memory',
+			name: 'Flexible duct',
+			equation: 'Δp = k R L',
+			where:
+				'R friction rate of the rigid duct [Pa/m], L length of flexible duct [m], k a factor that the designer gives; 4 if none is',
+			range: 'k is illustrative: it covers moderate compression',
+			source: 'Abushakra, Walker & Sherman (2004): about 4 times for moderate, near 10 times for severe compression',
 			caution: 'Flexible duct as built differs more than any formula. Look at it before trusting the figure.'
 		}
 	]
