@@ -28,6 +28,9 @@ export type GridSource = Pick<
 	'sheet' | 'units' | 'solved' | 'whatIf' | 'isConfirmed' | 'mayUndo' | 'mayRedo' | 'do' | 'undo' | 'redo' | 'tryOut'
 >;
 
+/** One and the same for every row that has nothing to say, so that it is not drawn anew. */
+const NONE: readonly never[] = [];
+
 /** The run sheet under a person's hands: selection, editing, clipboard, and what each row has to say. */
 export class RunGrid {
 	readonly open: GridSource;
@@ -47,9 +50,9 @@ export class RunGrid {
 	get rows(): readonly SheetRow[] {
 		return this.open.sheet.rows;
 	}
-	get columns(): readonly Column[] {
-		return COLUMNS.filter(({ key, optional }) => !optional || this.#optional.has(key));
-	}
+	readonly columns: readonly Column[] = $derived.by(() =>
+		COLUMNS.filter(({ key, optional }) => !optional || this.#optional.has(key))
+	);
 	get optional() {
 		return this.#optional;
 	}
@@ -76,11 +79,11 @@ export class RunGrid {
 
 	/** What is to be mended in a row. */
 	problems(row: SheetRow): readonly SheetProblem[] {
-		return this.problemsOf.get(row.id) ?? [];
+		return this.problemsOf.get(row.id) ?? NONE;
 	}
 	/** What is to be looked at in a row, gravest first. */
 	flags(row: SheetRow): readonly Flag[] {
-		return this.flagsOf.get(valueOf(row, 'tag') ?? '') ?? [];
+		return this.flagsOf.get(valueOf(row, 'tag') ?? '') ?? NONE;
 	}
 
 	showColumn(key: string, shown: boolean): void {

@@ -23,12 +23,10 @@ export class Selection {
 		this.#bounds = bounds;
 	}
 
-	get active(): Place {
-		return this.#clamped(this.#active);
-	}
+	readonly active: Place = $derived.by(() => this.#clamped(this.#active));
 
 	/** Top, left, bottom and right of the range, inclusive. */
-	get range() {
+	readonly range = $derived.by(() => {
 		const [a, b] = [this.active, this.#clamped(this.#anchor)];
 		return {
 			top: Math.min(a.row, b.row),
@@ -36,7 +34,7 @@ export class Selection {
 			left: Math.min(a.column, b.column),
 			right: Math.max(a.column, b.column)
 		};
-	}
+	});
 
 	get isRange(): boolean {
 		const { top, bottom, left, right } = this.range;
@@ -44,8 +42,13 @@ export class Selection {
 	}
 
 	has(row: number, column: number): boolean {
-		const { top, bottom, left, right } = this.range;
-		return row >= top && row <= bottom && column >= left && column <= right;
+		const { left, right } = this.range;
+		return this.hasRow(row) && column >= left && column <= right;
+	}
+
+	hasRow(row: number): boolean {
+		const { top, bottom } = this.range;
+		return row >= top && row <= bottom;
 	}
 
 	/** Goes to a place; with `extend` the anchor stays. */

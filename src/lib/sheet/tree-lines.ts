@@ -82,3 +82,11 @@ export function treeLines(rows: readonly SheetRow[], onIndex: (row: SheetRow) =>
 		};
 	});
 }
+
+const same = (a: TreeLine, b: TreeLine | undefined) => b !== undefined && JSON.stringify(a) === JSON.stringify(b);
+
+/** Hands on the line that a row had before where it is still the same, so that the row is not drawn anew. */
+export function linesKept(): (lines: readonly TreeLine[]) => readonly TreeLine[] {
+	let last: readonly TreeLine[] = [];
+	return (lines) => (last = lines.map((line, at) => (same(line, last[at]) ? (last[at] ?? line) : line)));
+}

@@ -1,0 +1,267 @@
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
+import { rowId } from '../../../tests/sheet/any-sheet';
+import type { SentEdit } from './edit';
+import { keep, readKept } from './kept-edits';
+import { Outbox } from './outbox.svelte';
+import type { EditsReply } from './server-reply';
+
+const DESIGN = 'design-1';
+
+/** The browser's store, with room for so many characters. */
+function storeOf(room = Infinity): Storage {
+	const kept = new Map<string, string>();
+	return {
+		get length() {
+			return kept.size;
+		},
+		key: (at) => [...kept.keys()][at] ?? null,
+		clear: () => kept.clear(),
+		getItem: (key) => kept.get(key) ?? null,
+		removeItem: (key) => void kept.delete(key),
+		setItem: (key, text) => {
+			if (text.length > room) throw new DOMException('full', 'QuotaExceededError');
+			kept.set(key, text);
+		}
+	};
+}
+
+const edit = (n: number, typed = String(n)): SentEdit => ({
+	id: rowId(n),
+	edit: { kind: 'set', row: rowId(900), field: 'tag', typed, units: 'SI' }
+});
+const idsOf = (edits: readonly SentEdit[]) => edits.map(({ id }) => id);
+
+interface Posted {
+	readonly base: number;
+	readonly edits: SentEdit[];
+}
+type Answer = (posted: Posted) => Response | Promise<Response>;
+
+/** A server that numbers what it accepts and knows an edit that it has seen. */
+function serverOf() {
+	const log: string[] = [];
+	const posts: Posted[] = [];
+	const accept: Answer = ({ base, edits }) => {
+		for (const { id } of edits) if (!log.includes(id)) log.push(id);
+		const entries = log.slice(base).map((id, at) => ({
+			...{ seq: base + at + 1, id, entry: { kind: 'delete', rows: [] } as const }
+		}));
+		const reply: EditsReply = { entries, seq: log.length, refused: [], figures: null, problems: 0 };
+		return Response.json(reply);
+	};
+	const answers: Answer[] = [];
+	const send: typeof fetch = async (_address, { body } = {}) => {
+		const posted = JSON.parse(String(body)) as Posted;
+		posts.push(posted);
+		return (answers.shift() ?? accept)(posted);
+	};
+	return { log, posts, answers, accept, send };
+}
+
+function boxOf(send: typeof fetch, designId = DESIGN) {
+	let base = 0;
+	const replies: { seq: number; sent: string[]; unsent: string[] }[] = [];
+	const box: Outbox = new Outbox({
+		designId,
+		base: () => base,
+		send,
+		onreply: (reply, sent) => {
+			base = reply.seq;
+			replies.push({ seq: reply.seq, sent: idsOf(sent), unsent: idsOf(box.unsent) });
+		}
+	});
+	return { box, replies };
+}
+
+const settled = () => vi.advanceTimersByTimeAsync(0);
+
+beforeEach(() => {
+	vi.useFakeTimers();
+	vi.stubGlobal('localStorage', storeOf());
+});
+afterEach(() => {
+	vi.useRealTimers();
+	vi.unstubAllGlobals();
+});
+
+describe('the outbox', () => {
+	it('sends edits in their order, each once', async () => {
+		const server = serverOf();
+		const { box } = boxOf(server.send);
+		for (let n = 1; n <= 30; n++) {
+			box.put(edit(n));
+			if (n % 7 === 0) await settled();
+		}
+		await settled();
+		expect(server.log).toEqual(Array.from({ length: 30 }, (_, n) => rowId(n + 1)));
+		expect(server.posts.flatMap(({ edits }) => idsOf(edits))).toEqual(server.log);
+		expect([box.state, box.unsent]).toEqual(['saved', []]);
+		expect(box.savedAt).toBeInstanceOf(Date);
+	});
+
+	it('keeps each edit until the answer is there', async () => {
+		const server = serverOf();
+		let answer = () => {};
+		server.answers.push((posted) => new Promise((resolve) => (answer = () => resolve(server.accept(posted)))));
+		const { box, replies } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		expect([box.state, idsOf(box.unsent), idsOf(readKept(DESIGN))]).toEqual(['saving', [rowId(1)], [rowId(1)]]);
+		box.put(edit(2));
+		await settled();
+		expect(server.posts).toHaveLength(1);
+		answer();
+		await settled();
+		expect(replies[0]).toMatchObject({ sent: [rowId(1)], unsent: [rowId(1), rowId(2)] });
+		expect(server.log).toEqual([rowId(1), rowId(2)]);
+		expect(readKept(DESIGN)).toEqual([]);
+	});
+
+	it.each<[string, Answer, string]>([
+		['the server cannot be reached', () => Promise.reject(new TypeError('failed')), 'The server cannot be reached.'],
+		[
+			'the session has ended',
+			() => new Response(null, { status: 401 }),
+			'You are signed out. Sign in again in another tab.'
+		],
+		['the server says why', () => Response.json({ title: 'Out of order' }, { status: 503 }), 'Out of order'],
+		['the server says nothing', () => new Response('<html>', { status: 502 }), 'The server answered 502.'],
+		['a page stands in its place', () => new Response('<html>'), 'The server cannot be reached.'],
+		['something else answers', () => Response.json({ hello: 1 }), 'The server cannot be reached.']
+	])('where %s, waits and sends the same edits again', async (_what, failure, reason) => {
+		const server = serverOf();
+		server.answers.push(failure, failure);
+		const { box } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		expect([box.state, box.reason, idsOf(readKept(DESIGN))]).toEqual(['kept', reason, [rowId(1)]]);
+		await vi.advanceTimersByTimeAsync(500);
+		expect(server.posts).toHaveLength(2);
+		await vi.advanceTimersByTimeAsync(1_000);
+		expect(server.posts.map(({ edits }) => idsOf(edits))).toEqual([[rowId(1)], [rowId(1)], [rowId(1)]]);
+		expect([box.state, box.reason, server.log]).toEqual(['saved', '', [rowId(1)]]);
+	});
+
+	it('is applied once, though the answer to the first sending was lost', async () => {
+		const server = serverOf();
+		server.answers.push(async (posted) => {
+			await server.accept(posted);
+			throw new TypeError('the line is cut');
+		});
+		const { box, replies } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		expect(box.state).toBe('kept');
+		await box.flush();
+		expect([server.log, replies.map(({ seq }) => seq), box.unsent]).toEqual([[rowId(1)], [1], []]);
+	});
+
+	it('waits longer each time, up to ten seconds, and not at all once told to', async () => {
+		const server = serverOf();
+		for (let n = 0; n < 9; n++) server.answers.push(() => Promise.reject(new TypeError('failed')));
+		const { box } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		for (const wait of [500, 1_000, 2_000, 5_000, 10_000, 10_000]) {
+			const before = server.posts.length;
+			await vi.advanceTimersByTimeAsync(wait - 1);
+			expect(server.posts).toHaveLength(before);
+			await vi.advanceTimersByTimeAsync(1);
+			expect(server.posts).toHaveLength(before + 1);
+		}
+		await box.flush();
+		expect(server.posts).toHaveLength(8);
+		box.stop();
+		await vi.advanceTimersByTimeAsync(60_000);
+		expect(server.posts).toHaveLength(8);
+	});
+
+	it('begins no new wait when it is stopped while an answer is under way', async () => {
+		const server = serverOf();
+		let fail = () => {};
+		server.answers.push(() => new Promise((_, reject) => (fail = () => reject(new TypeError('failed')))));
+		const { box } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		box.stop();
+		fail();
+		await vi.advanceTimersByTimeAsync(60_000);
+		expect(server.posts).toHaveLength(1);
+		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1)]);
+	});
+
+	it('lets a refused edit go, with the reason', async () => {
+		const server = serverOf();
+		const reason = 'A sheet holds at most 5000 rows; this would make 5001.';
+		server.answers.push(() =>
+			Response.json({ entries: [], seq: 0, refused: [{ id: rowId(1), reason }], figures: null, problems: 0 })
+		);
+		const { box } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		expect([box.state, box.reason, box.unsent, readKept(DESIGN)]).toEqual(['refused', reason, [], []]);
+		box.put(edit(2));
+		await settled();
+		expect([box.state, box.reason]).toEqual(['saved', '']);
+	});
+
+	it('sends a long queue in parts', async () => {
+		const server = serverOf();
+		const { box } = boxOf(server.send);
+		box.fill(Array.from({ length: 450 }, (_, n) => edit(n)));
+		await settled();
+		expect(server.posts.map(({ edits }) => edits.length)).toEqual([200, 200, 50]);
+		expect(server.posts.map(({ base }) => base)).toEqual([0, 200, 400]);
+	});
+});
+
+describe('edits kept on a device', () => {
+	it('outlive a reload, and are sent by the next visit in their order', async () => {
+		const away = boxOf(() => Promise.reject(new TypeError('failed')));
+		away.box.put(edit(1));
+		away.box.put(edit(2));
+		await settled();
+		away.box.stop();
+		const server = serverOf();
+		const back = boxOf(server.send);
+		back.box.fill(readKept(DESIGN));
+		await settled();
+		expect([server.log, readKept(DESIGN)]).toEqual([[rowId(1), rowId(2)], []]);
+	});
+
+	it('of two windows on one design stay beside each other', async () => {
+		const server = serverOf();
+		const [left, right] = [boxOf(() => Promise.reject(new TypeError('failed'))), boxOf(server.send)];
+		left.box.put(edit(1));
+		await settled();
+		right.box.put(edit(2));
+		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1), rowId(2)]);
+		await settled();
+		expect(server.log).toEqual([rowId(2)]);
+		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1)]);
+		left.box.stop();
+	});
+
+	it('are those of one design alone', () => {
+		keep('one', [edit(1)]);
+		keep('two', [edit(2)]);
+		expect([idsOf(readKept('one')), idsOf(readKept('two'))]).toEqual([[rowId(1)], [rowId(2)]]);
+	});
+
+	it.each([['not JSON'], ['{}'], ['[{"id":"x"}]'], ['null']])('are none where the store holds %s', (text) => {
+		localStorage.setItem(`evendraft/unsent/${DESIGN}`, text);
+		expect(readKept(DESIGN)).toEqual([]);
+		expect(keep(DESIGN, [edit(1)])).toBe(true);
+		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1)]);
+	});
+
+	it('are told of where the device has no room, and are sent nevertheless', async () => {
+		vi.stubGlobal('localStorage', storeOf(100));
+		const server = serverOf();
+		const { box } = boxOf(server.send);
+		box.put(edit(1, 'x'.repeat(200)));
+		expect(box.reason).toBe('This device has no room to keep edits; leave the page open until they are saved.');
+		await settled();
+		expect([box.state, server.log]).toEqual(['saved', [rowId(1)]]);
+	});
+});
