@@ -9,16 +9,9 @@ import {
 } from '$lib/engine';
 import { fittingsFor } from './parts';
 import { settingOf, valueOf, type RowField, type SettingField, type Sheet, type SheetRow } from './sheet';
+import type { SheetProblem } from './sheet-problem';
 import { readingOf } from './reading-of';
 import { linksOf, type Links } from './links';
-
-/** Something that a person must mend, at its cell. `row` is null for a setting. */
-export interface SheetProblem {
-	readonly row: string | null;
-	readonly field: RowField | SettingField;
-	readonly message: string;
-	readonly expected: string;
-}
 
 export interface SheetDocument {
 	/** Null while no row counts. */

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { anyTree, rowId, sheetOf, type TypedRow } from '../../../tests/sheet/any-sheet';
-import type { SheetProblem } from './design-document';
+import type { SheetProblem } from './sheet-problem';
 import { linksOf } from './links';
 import { MOST_ROWS, valueOf } from './sheet';
 import { treeLines } from './tree-lines';

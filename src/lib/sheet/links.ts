@@ -1,4 +1,4 @@
-import type { SheetProblem } from './design-document';
+import type { SheetProblem } from './sheet-problem';
 import { valueOf, type SheetRow } from './sheet';
 
 /** Which row joins which. */

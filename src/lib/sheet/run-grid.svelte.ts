@@ -3,12 +3,13 @@ import { readBlock, writeBlock } from './clipboard';
 import { textToCopy, textToEdit } from './cell-text';
 import { COLUMNS, type Column } from './columns';
 import * as commands from './commands';
-import { END_FIELDS, type SheetProblem } from './design-document';
+import { END_FIELDS } from './design-document';
 import type { Edit } from './edit';
 import { isRowField, ROW_READERS } from './fields';
 import type { OpenSheet } from './open-sheet.svelte';
 import { Selection } from './selection.svelte';
 import { MOST_ROWS, valueOf, type RowField, type SheetRow } from './sheet';
+import type { SheetProblem } from './sheet-problem';
 import { MOST_TYPED } from './storable-text';
 
 export interface Editing {

@@ -1,6 +1,7 @@
 import { solveDesign, type DesignDocument, type Problem, type Solution } from '$lib/engine';
-import { documentOf, type SheetProblem } from './design-document';
+import { documentOf } from './design-document';
 import type { Sheet } from './sheet';
+import type { SheetProblem } from './sheet-problem';
 
 /** What a sheet comes to. */
 export interface SolvedSheet {
