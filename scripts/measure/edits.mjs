@@ -67,12 +67,8 @@ async function makeDesign(page) {
 async function commitLength(/** @type {import('playwright-core').Page} */ page, /** @type {number} */ at) {
 	await page.locator(`[data-row="${at % 12}"][data-key="length"]`).click();
 	await page.keyboard.type(`${5 + (at % 7)}.${1 + at}`);
-	const before = await page.evaluate(() => /** @type {any} */ (globalThis).edits.length);
 	await page.keyboard.press('Enter');
-	await page.waitForFunction((count) => /** @type {any} */ (globalThis).edits.length > count, before);
-	await page.waitForFunction(
-		() => document.querySelector('[data-testid="state"]')?.getAttribute('data-state') === 'saved'
-	);
+	await page.evaluate((count) => /** @type {any} */ (globalThis).settled(count), at + 1);
 }
 
 /** @param {Record<string, number>[]} edits @param {string} chromiumVersion */

@@ -12,7 +12,13 @@ export function listen() {
 	const edits = /** @type {Record<string, number>[]} */ ([]);
 	/** @type {Record<string, number> | null} */
 	let now = null;
-	Object.assign(globalThis, { edits });
+	/** Fulfilled when so many edits were painted and the server has the last one; without asking again and again. */
+	const settled = async (/** @type {number} */ count) => {
+		const state = document.querySelector('[data-testid="state"]');
+		const done = () => edits.length >= count && state?.getAttribute('data-state') === 'saved';
+		while (!done()) await new Promise((resolve) => setTimeout(resolve, 50));
+	};
+	Object.assign(globalThis, { edits, settled });
 
 	addEventListener(
 		'keydown',
