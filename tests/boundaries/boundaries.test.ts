@@ -153,7 +153,7 @@ const allowed: readonly (readonly [string, string])[] = [
 	['src/lib/engine/air/x.test.ts', `import '../../../../fixtures/published/air.json'; import 'vitest';`]
 ];
 
-describe('a boundary', () => {
+describe('a boundary', { timeout: 30_000 }, () => {
 	it.each(forbidden)('keeps %s from %s', async (file, text) => {
 		const found = await refusals(file, text);
 		expect(found).not.toEqual([]);

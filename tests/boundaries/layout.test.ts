@@ -26,7 +26,7 @@ const MAY_KNOW: Readonly<Record<string, readonly string[]>> = {
 	routes: ['engine', 'sheet', 'schemas', 'report', 'drawing', 'components', 'server']
 };
 
-describe('ESLint', () => {
+describe('ESLint', { timeout: 30_000 }, () => {
 	const eslint = new ESLint();
 
 	it('skips no file of src, and has the boundaries on each that is no test', async () => {
@@ -163,7 +163,7 @@ describe('the walk over imports', () => {
 	});
 });
 
-describe('the engine’s own tsconfig', () => {
+describe('the engine’s own tsconfig', { timeout: 30_000 }, () => {
 	const { config } = ts.readConfigFile('src/lib/engine/tsconfig.json', ts.sys.readFile);
 	const { fileNames, options } = ts.parseJsonConfigFileContent(config, ts.sys, 'src/lib/engine');
 

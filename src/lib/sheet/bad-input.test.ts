@@ -257,7 +257,7 @@ describe('tried through the clipboard', () => {
 			ok: false,
 			message: 'The clipboard holds 1000000 rows; there is room for 5000 more. Nothing was pasted.'
 		});
-		expect(performance.now() - begun).toBeLessThan(500);
+		expect(performance.now() - begun).toBeLessThan(2_000);
 	});
 });
 

@@ -28,7 +28,7 @@ const anyLinks = fc
 	)
 	.map((rows: TypedRow[]) => sheetOf(rows).rows);
 
-describe('links between rows', () => {
+describe('links between rows', { timeout: 30_000 }, () => {
 	it('name a tag that several rows have, at each of them', () => {
 		expect(faultsOf(['A'], ['B', 'A'], ['B', 'A'])).toEqual(
 			[1, 2].map((n) => ({
@@ -109,15 +109,15 @@ describe('links between rows', () => {
 		['one after another', (n) => [`R${n}`, n ? `R${n - 1}` : '']],
 		['in one ring', (n) => [`R${n}`, `R${(n + 1) % MOST_ROWS}`]],
 		['all with one tag', () => ['R0', 'R0']]
-	])('of a full sheet, %s, are read in less than half a second', (_shape, link) => {
+	])('of a full sheet, %s, are read in less than two seconds', (_shape, link) => {
 		const rows = rowsOf(...Array.from({ length: MOST_ROWS }, (_, n) => link(n)));
 		const begun = performance.now();
 		linksOf(rows, []);
-		expect(performance.now() - begun).toBeLessThan(500);
+		expect(performance.now() - begun).toBeLessThan(2_000);
 	});
 });
 
-describe('the tree in the first column', () => {
+describe('the tree in the first column', { timeout: 30_000 }, () => {
 	const depths = (rows: readonly TypedRow[]) => {
 		const sheet = sheetOf(rows);
 		return new Map(treeLines(sheet.rows, () => false).map(({ depth }, at) => [valueOf(sheet.rows[at]!, 'tag'), depth]));

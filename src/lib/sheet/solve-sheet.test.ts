@@ -23,7 +23,7 @@ function figuresOf(sheet: Sheet) {
 	return { ...rest, paths: byText(paths), flags: byText(flags), problems };
 }
 
-describe('a sheet of rows that all count', () => {
+describe('a sheet of rows that all count', { timeout: 30_000 }, () => {
 	it('has figures for each of them, and no problem', () => {
 		fc.assert(
 			fc.property(anyTree, (rows) => {
@@ -73,7 +73,7 @@ describe('a sheet of rows that all count', () => {
 	});
 });
 
-describe('switching units', () => {
+describe('switching units', { timeout: 30_000 }, () => {
 	it('changes no cell of a row and no figure, to the last bit', () => {
 		fc.assert(
 			fc.property(anyTree, fc.constantFrom<UnitSystem>('SI', 'IP'), (rows, units) => {
@@ -173,7 +173,7 @@ describe('rows that do not count', () => {
 	});
 });
 
-describe('whatever is typed', () => {
+describe('whatever is typed', { timeout: 30_000 }, () => {
 	it('is kept in its cell, and never throws', () => {
 		fc.assert(
 			fc.property(
@@ -217,9 +217,9 @@ describe('whatever is typed', () => {
 				expect(solved.document.rows.length + solved.uncounted.length).toBe(sheet.rows.length);
 				solutions++;
 			}),
-			{ numRuns: 400 }
+			{ numRuns: 250 }
 		);
-		expect(solutions).toBeGreaterThan(100);
+		expect(solutions).toBeGreaterThan(60);
 	});
 
 	it.each([
