@@ -150,6 +150,7 @@ describe('the owner of the tables', () => {
 			});
 		await expect(inOurs((tx) => tx`update ${tx(table)} set seq = 2`)).rejects.toMatchObject({ code: '23001' });
 		await expect(inOurs((tx) => tx`delete from ${tx(table)}`)).rejects.toMatchObject({ code: '23001' });
+		await expect(inOurs((tx) => tx`truncate ${tx(table)}`)).rejects.toMatchObject({ code: '23001' });
 	});
 });
 
