@@ -42,6 +42,11 @@ async function typeRooms(sheet: RunSheet, texts: readonly string[], shown: Set<s
 		if (at % 3 === 0) await page.keyboard.press('Control+ArrowUp');
 		await page.keyboard.type(text);
 		await page.keyboard.press('Enter');
+		// Now and then a person stops until the sheet says where it stands.
+		if (at % 5 === 4)
+			await page.waitForFunction(() =>
+				['saved', 'kept'].includes(document.querySelector('[data-testid="state"]')?.getAttribute('data-state') ?? '')
+			);
 		// The word is read after the key, so it speaks of this edit too.
 		if ((await sheet.state.getAttribute('data-state')) === 'saved')
 			for (const done of texts.slice(0, at + 1)) shown.add(done);

@@ -46,14 +46,14 @@ export function reportOf(input: ReportInput): Report {
 	};
 }
 
-function headingOf({ heading, revision, status, preparedBy, savedAt, printedAt }: ReportInput): HeadingBlock {
+function headingOf({ document, heading, revision, status, preparedBy, savedAt, printedAt }: ReportInput): HeadingBlock {
 	const calculation = [heading.projectNumber, heading.system, revision ?? 'working sheet']
 		.map((part) => part.trim())
 		.filter((part) => part !== '')
 		.join(' · ');
 	return {
 		kind: 'Calculation report',
-		title: orNothing(heading.system),
+		title: orNothing(document.title || heading.system),
 		place: [heading.projectName, heading.place].filter((part) => part.trim() !== '').join(', '),
 		identity: [
 			{ label: 'Firm', value: orNothing(heading.firm) },

@@ -23,6 +23,9 @@ export interface Editing {
 	readonly mode: 'replace' | 'amend';
 }
 
+/** The gravest first. */
+const GRAVITY = { fault: 0, caution: 1, note: 2 } as const;
+
 /** What the grid needs of a sheet: the open one, or a saved version that only shows. */
 export type GridSource = Pick<
 	OpenSheet,
@@ -71,7 +74,13 @@ export class RunGrid {
 	}
 
 	readonly problemsOf = $derived.by(() => groupBy(this.open.solved.problems, ({ row }) => row ?? ''));
-	readonly flagsOf = $derived.by(() => groupBy(this.open.solved.solution?.flags ?? [], ({ row }) => row ?? ''));
+	readonly flagsOf = $derived.by(() => {
+		const flags = [...(this.open.solved.solution?.flags ?? [])];
+		return groupBy(
+			flags.sort((a, b) => GRAVITY[a.severity] - GRAVITY[b.severity]),
+			({ row }) => row ?? ''
+		);
+	});
 	readonly onIndex = $derived.by(() => {
 		const solution = this.open.solved.solution;
 		const ends = [solution?.index.supply, solution?.index.return];

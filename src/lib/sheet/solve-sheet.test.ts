@@ -219,7 +219,7 @@ describe('whatever is typed', { timeout: 30_000 }, () => {
 			}),
 			{ numRuns: 250 }
 		);
-		expect(solutions).toBeGreaterThan(60);
+		expect(solutions).toBeGreaterThan(20);
 	});
 
 	it.each([

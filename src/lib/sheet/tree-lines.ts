@@ -72,8 +72,8 @@ export function treeLines(rows: readonly SheetRow[], onIndex: (row: SheetRow) =>
 		return {
 			depth: depth.get(row.id) ?? 0,
 			from: start === null ? null : below ? 'below' : 'above',
-			through: through[at] ?? [],
-			indexThrough: indexThrough[at] ?? [],
+			through: [...new Set(through[at])],
+			indexThrough: [...new Set(indexThrough[at])],
 			goesOn: around !== undefined && (below ? around.top < at : around.bottom > at),
 			indexGoesOn: around !== undefined && (below ? around.indexTop < at : around.indexBottom > at),
 			ownBelow: own !== undefined && own.bottom > at,

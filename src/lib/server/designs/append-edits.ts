@@ -8,6 +8,7 @@ import type { FirmScope } from '../auth/scope';
 import { inFirm, type Tx } from '../db';
 import { design, edit, snapshot } from '../db/schema';
 import { figuresOf } from './figures';
+import { findDesign } from './find-design';
 import { loadSheet } from './load-sheet';
 
 /** The log is folded into a snapshot each time it has grown by this many entries. */
@@ -39,11 +40,12 @@ export function appendEdits(
 	return inFirm(scope, async (tx) => {
 		// The lock on the design's row is what orders the edits of several people and servers.
 		const [head] = await tx
-			.select({ seq: design.headSeq, archivedAt: design.archivedAt })
+			.select({ seq: design.headSeq })
 			.from(design)
 			.where(and(eq(design.firmId, scope.firmId), eq(design.designId, designId)))
 			.for('update');
-		if (!head || (head.archivedAt && sent.length)) return null;
+		const heading = head && (await findDesign(tx, scope, designId));
+		if (!head || !heading || (heading.archivedAt && sent.length)) return null;
 		const loaded = await loadSheet(tx, scope, designId);
 		const known = await knownEdits(tx, scope, designId, sent);
 		const step = readEdits(loaded.sheet, sent, known);

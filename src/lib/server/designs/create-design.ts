@@ -30,7 +30,6 @@ export async function createDesign(
 			if (!of) return 'absent';
 			const designId = randomUUID();
 			const edits: SingleEdit[] = [
-				{ kind: 'set', row: null, field: 'title', typed: wanted.name, units: of.units },
 				{ kind: 'set', row: null, field: 'units', typed: of.units, units: of.units },
 				{ kind: 'set', row: null, field: 'elevation', typed: `${of.elevation_m} m`, units: of.units }
 			];

@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import type { FirmScope } from '../auth/scope';
 import { inFirm, type Tx } from '../db';
 import { design, firm, project } from '../db/schema';
@@ -8,7 +8,8 @@ const columns = {
 	designId: design.designId,
 	name: design.name,
 	service: design.service,
-	archivedAt: design.archivedAt,
+	/** Of the design, or of its whole project. */
+	archivedAt: sql<string | null>`coalesce(${design.archivedAt}, ${project.archivedAt})`,
 	projectId: project.projectId,
 	projectNumber: project.number,
 	projectName: project.name,
