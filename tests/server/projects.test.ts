@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { FirmScope } from '../../src/lib/server/auth/scope';
+import { appendEdits } from '../../src/lib/server/designs/append-edits';
 import { changeDesign } from '../../src/lib/server/designs/change-design';
 import { createDesign } from '../../src/lib/server/designs/create-design';
 import { openDesign } from '../../src/lib/server/designs/find-design';
@@ -74,15 +75,31 @@ describe('a project', () => {
 });
 
 describe('a design', () => {
-	it('begins with the units, the elevation and the name that its project gives it', async () => {
+	it('begins with the units and the elevation of its project; its title is its tag until one is typed', async () => {
 		const projectId = await project();
 		const done = await createDesign(ours, { projectId, name: 'AHU-1', service: 'Supply' });
 		if (typeof done === 'string') throw new Error(done);
 		const opened = await openDesign(ours, done.designId);
 		const { settings, rows } = opened?.sheet ?? {};
-		expect([settings?.units?.value, settings?.elevation?.value, settings?.title?.value]).toEqual(['IP', 250, 'AHU-1']);
+		expect([settings?.units?.value, settings?.elevation?.value, settings?.title?.value]).toEqual([
+			'IP',
+			250,
+			undefined
+		]);
 		expect(rows).toEqual([]);
 		expect(opened?.seq).toBe(1);
+	});
+
+	it('takes no edits while its project is archived, and takes them again afterwards', async () => {
+		const projectId = await project();
+		const done = await createDesign(ours, { projectId, name: 'AHU-9', service: '' });
+		if (typeof done === 'string') throw new Error(done);
+		const edit = { kind: 'set', row: null, field: 'title', typed: 'Hall', units: 'SI' } as const;
+		const send = () => appendEdits(ours, done.designId, 1, [{ id: randomUUID(), edit }]);
+		await changeProject(ours, projectId, { archived: true });
+		expect(await send()).toBeNull();
+		await changeProject(ours, projectId, { archived: false });
+		expect((await send())?.seq).toBe(2);
 	});
 
 	it('has a name of its own in its project, also when it is renamed', async () => {
