@@ -7,6 +7,7 @@ const MINUS = '\u2212';
 export const NOTHING = '\u2013';
 
 function grouped(digits: string, units: UnitSystem): string {
+	if (digits.length < 4) return digits;
 	return digits.replace(/\B(?=(\d{3})+$)/g, units === 'SI' ? THIN_SPACE : ',');
 }
 
@@ -19,6 +20,23 @@ function lettered(plain: string, units: UnitSystem): string {
 /** With a fixed number of decimals, grouped as the system does, with a true minus and never minus zero. */
 export function fixedDigits(value: Decimal | number, decimals: number, units: UnitSystem): string {
 	return lettered(new Decimal(value).toFixed(decimals), units);
+}
+
+/** Of the last digit shown: nearer than this to a tie, a double cannot say which way to round. */
+const NEAR_A_TIE = 1e-6;
+/** Last digits up to here are whole numbers that a double holds, with room for its error. */
+const MOST_UNITS = 1e9;
+
+/**
+ * As `fixedDigits` of a figure that a double comes close to, without decimal arithmetic; null where that could round
+ * another way. A sheet shows some hundred figures with each edit.
+ */
+export function quickDigits(near: number, decimals: number, units: UnitSystem): string | null {
+	const scale = 10 ** decimals;
+	const last = Math.abs(near) * scale;
+	if (!(last < MOST_UNITS) || Math.abs(last - Math.floor(last) - 0.5) < NEAR_A_TIE) return null;
+	const plain = (Math.round(last) / scale).toFixed(decimals);
+	return lettered(near < 0 ? `-${plain}` : plain, units);
 }
 
 /** With as many decimals as it has, up to so many significant digits. */

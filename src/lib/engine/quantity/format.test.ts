@@ -1,7 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { COLUMNS } from './columns';
+import { fixedDigits } from './digits';
 import * as q from './index';
 import type { FigureName, Reader, UnitSystem } from './index';
+import { fromSI } from './units';
 
 describe('figures as the look has them', () => {
 	it.each([
@@ -119,6 +122,45 @@ describe('shown and read again', () => {
 					}
 				}
 			)
+		);
+	});
+});
+
+describe('without decimal arithmetic', () => {
+	const exact = (name: FigureName, value: number, units: UnitSystem) => {
+		const { unit, decimals } = COLUMNS[name][units];
+		return fixedDigits(fromSI(value, unit), decimals, units);
+	};
+	const names = ['velocity', 'pressure', 'rate', 'length', 'density', 'roughness', 'power'] as const;
+	const systems = ['SI', 'IP'] as const;
+
+	it('shows the digits that decimal arithmetic shows', () => {
+		fc.assert(
+			fc.property(
+				fc.constantFrom(...names),
+				fc.constantFrom(...systems),
+				fc.double({ min: -1e7, max: 1e7, noNaN: true }),
+				(name, units, value) => expect(q.formatQuantity(name, value, units)).toBe(exact(name, value, units))
+			),
+			{ numRuns: 2_000 }
+		);
+	});
+
+	it('rounds ties, and what lies beside them, as decimal arithmetic does', () => {
+		fc.assert(
+			fc.property(
+				fc.constantFrom(...names),
+				fc.constantFrom(...systems),
+				fc.integer({ min: -20_000, max: 20_000 }),
+				fc.integer({ min: -2, max: 2 }),
+				(name, units, half, ulps) => {
+					const { unit, decimals } = COLUMNS[name][units];
+					const tie = ((half + 0.5) / 10 ** decimals / Number(unit.over)) * Number(unit.times);
+					const value = tie * (1 + ulps * Number.EPSILON);
+					expect(q.formatQuantity(name, value, units)).toBe(exact(name, value, units));
+				}
+			),
+			{ numRuns: 2_000 }
 		);
 	});
 });

@@ -1,9 +1,9 @@
 import type { Size } from '../shape';
 import { COLUMNS, type QuantityName } from './columns';
 import { Decimal } from './decimal';
-import { fixedDigits, NOTHING, shortDigits } from './digits';
+import { fixedDigits, NOTHING, quickDigits, shortDigits } from './digits';
 import type { UnitSystem } from './reading';
-import { fromSI } from './units';
+import { fromSI, nearSI } from './units';
 
 /** An SI value, or nothing. */
 export type Shown = number | null | undefined;
@@ -19,7 +19,7 @@ const absent = (value: Shown): value is null | undefined =>
 export function formatQuantity(name: FigureName, value: Shown, units: UnitSystem): string {
 	if (absent(value)) return NOTHING;
 	const { unit, decimals } = COLUMNS[name][units];
-	return fixedDigits(fromSI(value, unit), decimals, units);
+	return quickDigits(nearSI(value, unit), decimals, units) ?? fixedDigits(fromSI(value, unit), decimals, units);
 }
 
 const formatter = (name: FigureName) => (value: Shown, units: UnitSystem) => formatQuantity(name, value, units);
@@ -45,7 +45,11 @@ export function formatCoefficient(value: Shown): string {
 /** Whole; one decimal only for a small flow that is not whole in its unit. */
 export function formatFlow(value: Shown, units: UnitSystem): string {
 	if (absent(value)) return NOTHING;
-	const shown = fromSI(value, COLUMNS.flow[units].unit);
+	const { unit } = COLUMNS.flow[units];
+	const near = nearSI(value, unit);
+	const quick = Math.abs(near) > 11 ? quickDigits(near, 0, units) : null;
+	if (quick !== null) return quick;
+	const shown = fromSI(value, unit);
 	const tenths = shown.abs().lt(10) && !shown.toDecimalPlaces(1).isInteger();
 	return fixedDigits(shown, tenths ? 1 : 0, units);
 }

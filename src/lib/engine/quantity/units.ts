@@ -95,3 +95,13 @@ export function toSI(value: Decimal, of: Unit): Decimal {
 export function fromSI(value: Decimal | number, of: Unit): Decimal {
 	return new Decimal(value).times(of.over).div(of.times).plus(of.zero);
 }
+
+/** Of each unit, how many of it are one of the SI unit, as a double. */
+const perSI = new Map<Unit, number>();
+
+/** An SI figure in this unit to a few units of the last place of a double: for showing, not for keeping. */
+export function nearSI(value: number, of: Unit): number {
+	let factor = perSI.get(of);
+	if (factor === undefined) perSI.set(of, (factor = Number(of.over) / Number(of.times)));
+	return value * factor + Number(of.zero);
+}
