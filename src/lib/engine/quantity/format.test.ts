@@ -140,7 +140,9 @@ describe('without decimal arithmetic', () => {
 				fc.constantFrom(...names),
 				fc.constantFrom(...systems),
 				fc.double({ min: -1e7, max: 1e7, noNaN: true }),
-				(name, units, value) => expect(q.formatQuantity(name, value, units)).toBe(exact(name, value, units))
+				(name, units, value) => {
+					expect(q.formatQuantity(name, value, units)).toBe(exact(name, value, units));
+				}
 			),
 			{ numRuns: 2_000 }
 		);
