@@ -2,6 +2,7 @@ import type { Size } from '../shape';
 import { Decimal } from './decimal';
 import { shortDigits } from './digits';
 import { withLabel } from './measure';
+import { withoutFractions } from './mixed-fractions';
 import { plainText, quoted } from './plain-text';
 import type { Reading, UnitSystem } from './reading';
 import { withoutNotes } from './size-notes';
@@ -41,7 +42,7 @@ export function readSize(text: string, units: UnitSystem): Reading<Size> {
 	const plain = plainText(text);
 	if (plain === '') return { ok: false, message: 'nothing is typed', expected };
 	if (plain.length > 100) return refuse('too long for a size');
-	const { size: bareText, notes } = withoutNotes(plain);
+	const { size: bareText, notes } = withoutNotes(withoutFractions(plain, units));
 	const sides = sidesOf(bareText, units);
 	if (typeof sides === 'string') return refuse(sides);
 	const metres: number[] = [];

@@ -26,7 +26,7 @@ export interface Term {
 
 const FEET_INCHES =
 	/(\d+) ?(?:'|ft\.?|feet|foot) ?-? ?(\d+(?:[.,]\d+)?)?(?:(?:[ -]|(?<!\d))(\d+)\/(\d+))? ?("|in(?:ch(?:es)?)?\.?)?(?! ?['\d.,/a-z"])/y;
-const FRACTION = /(?:(\d+)[ -])?(\d+)\/(2|4|8|16|32)(?!\d)/y;
+const FRACTION = /(?:(\d+)[ -])?(\d+)\/(2|4|8|16|32|64)(?!\d)/y;
 
 /** The term that starts at a place of a plain text, or null. */
 export function termAt(text: string, start: number, grammar: TermGrammar, units: UnitSystem): Term | null {
