@@ -39,7 +39,7 @@ const cells: readonly Answer[] = [
 		'outlet',
 		'lots',
 		'“lots”: “lots” is not a figure',
-		'a pressure, such as 25, 25 Pa or 0.1 in wg, or “open”'
+		'a pressure, such as 25, 25 Pa or 0.1 in wg, “open”, or a word before it, such as grille 25 Pa or louvre C 1.2'
 	],
 	[
 		'a side that is none',

@@ -10,6 +10,7 @@ import {
 	type UnitSystem
 } from '$lib/engine';
 import { SIDES } from './fields';
+import type { Parts } from './parts';
 import type { Cell, OutletLoss, RowField, RowValues, SheetRow } from './sheet';
 
 type Shown = { readonly [F in RowField]: (value: RowValues[F], units: UnitSystem) => string };
@@ -30,19 +31,34 @@ const SHOWN: Shown = {
 	pressure: formatPressure
 };
 
-function outletText({ loss, lossIs }: OutletLoss, units: UnitSystem): string {
+function outletText({ loss, lossIs, coefficient }: OutletLoss, units: UnitSystem): string {
+	if (coefficient !== undefined) return `C ${coefficient}`;
 	if (loss === null) return 'open';
 	return lossIs === 'static' ? `${formatPressure(loss, units)} s` : formatPressure(loss, units);
 }
 
 const cellOfRow = (row: SheetRow, field: RowField) => row.cells[field] as Cell<RowValues[RowField]> | undefined;
 
+/** A cell never changes, so its text is made once. */
+const texts = { SI: new WeakMap<Cell<unknown>, string>(), IP: new WeakMap<Cell<unknown>, string>() };
+
 /** The text of an entered cell in the units of the screen; what was not understood stays as it was typed. */
 export function shownText(row: SheetRow, field: RowField, units: UnitSystem): string {
 	const cell = cellOfRow(row, field);
 	if (!cell) return '';
 	if (cell.value === null || field === 'parts') return cell.typed;
-	return (SHOWN[field] as (value: unknown, units: UnitSystem) => string)(cell.value, units);
+	const known = texts[units].get(cell);
+	if (known !== undefined) return known;
+	const text = (SHOWN[field] as (value: unknown, units: UnitSystem) => string)(cell.value, units);
+	texts[units].set(cell, text);
+	return text;
+}
+
+/** What a blank cell stands for, to be shown greyed: the outlet at the end of a run is an open end. */
+export function impliedText(row: SheetRow, field: RowField, isEnd: boolean): string {
+	if (field !== 'outlet' || !isEnd || row.cells.outlet || !row.cells.flow) return '';
+	const fittings = (row.cells.parts?.value as Parts | null | undefined)?.fittings ?? [];
+	return fittings.some(({ word, kind }) => kind !== 'fixed' && (word === 'entry' || word === 'exit')) ? '' : 'open';
 }
 
 /** The text that an editor begins with: as typed, or, where that was in other units, converted with all its digits. */
@@ -62,9 +78,11 @@ export function textToEdit(row: SheetRow, field: RowField, units: UnitSystem): s
 		case 'pressure':
 			return editText('pressure', cell.value as number, units);
 		case 'outlet': {
-			const { loss, lossIs, toBeConfirmed } = cell.value as OutletLoss;
+			const { loss, lossIs, toBeConfirmed, description } = cell.value as OutletLoss;
+			if (loss === null) return cell.typed;
+			const before = description === undefined ? '' : `${description} `;
 			const basis = lossIs === 'static' ? ' static' : '';
-			return loss === null ? cell.typed : `${editText('pressure', loss, units)}${basis}${toBeConfirmed ? '?' : ''}`;
+			return `${before}${editText('pressure', loss, units)}${basis}${toBeConfirmed ? '?' : ''}`;
 		}
 		default:
 			return cell.typed;

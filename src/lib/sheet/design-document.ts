@@ -5,10 +5,19 @@ import {
 	type DesignAir,
 	type DesignDocument,
 	type DesignRow,
+	type FittingEntry,
 	type Side
 } from '$lib/engine';
 import { fittingsFor } from './parts';
-import { settingOf, valueOf, type RowField, type SettingField, type Sheet, type SheetRow } from './sheet';
+import {
+	settingOf,
+	valueOf,
+	type OutletLoss,
+	type RowField,
+	type SettingField,
+	type Sheet,
+	type SheetRow
+} from './sheet';
 import type { SheetProblem } from './sheet-problem';
 import { readingOf } from './reading-of';
 import { linksOf, type Links } from './links';
@@ -142,6 +151,8 @@ function draftRow(
 	const outlet = valueOf(row, 'outlet');
 	// An entry or exit among the parts is the end of the run: a blank outlet then loses nothing more.
 	const endsInPart = outlet === null && fitted?.fittings.some(({ kind }) => isEndPart(kind));
+	// An outlet's coefficient is computed with as a fitting's: both are on the velocity pressure of the row.
+	const terminal = isEnd && outlet ? terminalOf(outlet) : null;
 	return {
 		id: row.id,
 		tag,
@@ -154,20 +165,25 @@ function draftRow(
 		...(valueOf(row, 'material') && { material: valueOf(row, 'material') ?? '' }),
 		...(flex && { flexible: { length: flex, ...(flexFactor !== null && { factor: flexFactor }) } }),
 		...(fitted?.junction && { junction: fitted.junction }),
-		fittings: fitted?.fittings ?? [],
+		fittings: [...(fitted?.fittings ?? []), ...(terminal ? [terminal] : [])],
 		equipment: fitted?.equipment ?? [],
 		...(isEnd &&
 			flow !== null && {
 				outlet: {
-					name: valueOf(row, 'serves') ?? '',
+					name: outlet?.description ?? valueOf(row, 'serves') ?? '',
 					flow,
 					...(outlet?.loss !== null &&
 						outlet && { loss: outlet.loss, lossIs: outlet.lossIs, toBeConfirmed: outlet.toBeConfirmed }),
-					...(endsInPart && { loss: 0 }),
+					...((endsInPart || terminal) && { loss: 0 }),
 					pressure: valueOf(row, 'pressure') ?? 0
 				}
 			})
 	};
+}
+
+function terminalOf({ coefficient, description, toBeConfirmed }: OutletLoss): FittingEntry | null {
+	if (coefficient === undefined) return null;
+	return { kind: 'fixed', coefficient, name: description ?? 'Outlet', ...(toBeConfirmed && { toBeConfirmed }) };
 }
 
 /** Whether a fitting of the catalogue is where a run begins or ends in the open. */

@@ -12,9 +12,13 @@ export const MOST_ROWS = 5_000;
 
 /** What the outlet at a row's far end loses. */
 export interface OutletLoss {
-	/** Total-pressure loss [Pa]; null: an open end, of one velocity pressure. */
+	/** Total-pressure loss [Pa]; null: by its coefficient, or an open end, of one velocity pressure. */
 	readonly loss: number | null;
 	readonly lossIs: 'total' | 'static';
+	/** On the velocity pressure of the duct. */
+	readonly coefficient?: number;
+	/** What it is, as 'Grille'. */
+	readonly description?: string;
 	readonly toBeConfirmed: boolean;
 }
 

@@ -72,7 +72,7 @@ add('device', 'silencer', 'silencer silencers=silencer attenuator attenuators=at
 add('device', 'coil', 'coil coils=coil heater cooler humidifier recuperator exchanger');
 add('device', 'filter', 'filter filters=filter');
 add('device', 'louvre', 'louvre louvres=louvre louver=louvre cowl cowls=cowl screen mesh');
-add('device', 'diffuser', 'diffuser diffusers=diffuser');
+add('device', 'diffuser', 'diffuser diffusers=diffuser nozzle nozzles=nozzle');
 add('device', 'grille', 'grille grilles=grille register valve valves=valve hood');
 add('device', 'fan', 'fan');
 add('device', 'flexible', 'connector connection flexible');
@@ -103,7 +103,7 @@ add(
 	'way volume control balancing manual motorised motorized=motorised open single double single-thickness double-thickness ' +
 		'blade blades past main converging diverging long short plenum weather roof exhaust supply return intake inlet outlet ' +
 		'outdoor discharge suction ahu heating cooling heat recovery bag panel carbon duct air room wire bird insect terminal ' +
-		'flow leg plain round rectangular rect=rectangular oval hepa sound linear slot swirl disc spill and with of the in at for to + &'
+		'flow leg plain ceiling floor door transfer jet perforated egg-crate eggcrate=egg-crate round rectangular rect=rectangular oval hepa sound linear slot swirl disc spill and with of the in at for to + &'
 );
 
 export function findWord(typed: string): Word | null {
