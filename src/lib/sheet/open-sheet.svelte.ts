@@ -5,7 +5,7 @@ import { inverseOf } from './invert';
 import { readKept } from './kept-edits';
 import { newId } from './new-id';
 import { Outbox } from './outbox.svelte';
-import type { FromWorker, ToWorker } from './preview';
+import { PreviewFigures } from './preview-figures';
 import type { EditsReply, ServerFigures } from './server-reply';
 import { unitsOf, type Sheet } from './sheet';
 import { solveSheet, type SolvedSheet } from './solve-sheet';
@@ -37,7 +37,7 @@ export class OpenSheet {
 	#turn = $state(0);
 	#solvedTurn = $state(0);
 	#whatIfTurn = 0;
-	#worker: Worker | null = null;
+	#figures: PreviewFigures;
 	/** Time that the engine took for the last figures [ms]. */
 	took = $state(0);
 
@@ -46,6 +46,16 @@ export class OpenSheet {
 		this.#confirmed = this.#sheet = opened.sheet;
 		this.#base = opened.seq;
 		this.#solved = solveSheet(opened.sheet);
+		this.#figures = new PreviewFigures({
+			onsolved: (turn, solved, took) => {
+				this.#solvedTurn = turn;
+				this.#solved = solved;
+				this.took = took;
+			},
+			onwhatif: (turn, solved) => {
+				if (turn === this.#whatIfTurn) this.#whatIf = solved;
+			}
+		});
 		this.outbox = new Outbox({
 			designId: opened.designId,
 			base: () => this.#base,
@@ -86,22 +96,20 @@ export class OpenSheet {
 
 	/** Starts the worker and sends what an earlier visit kept. In the browser only. Returns the end of it. */
 	start(): () => void {
-		this.#worker = new Worker(new URL('./preview.worker.ts', import.meta.url), { type: 'module' });
-		this.#worker.onmessage = ({ data }: MessageEvent<FromWorker>) => this.#hear(data);
+		this.#figures.start(() => this.#sheet);
 		const kept = readKept(this.designId);
 		for (const { edit } of kept) {
 			const entry = entryOf(edit);
 			if (entry) this.#sheet = applyEntry(this.#sheet, entry);
 		}
-		this.#tell({ kind: 'sheet', turn: ++this.#turn, sheet: this.#sheet });
+		this.#solve('all');
 		if (kept.length) this.outbox.fill(kept);
 		const online = () => void this.outbox.flush();
 		addEventListener('online', online);
 		return () => {
 			removeEventListener('online', online);
 			this.outbox.stop();
-			this.#worker?.terminate();
-			this.#worker = null;
+			this.#figures.stop();
 		};
 	}
 
@@ -148,7 +156,7 @@ export class OpenSheet {
 			this.#whatIf = null;
 			return;
 		}
-		this.#tell({ kind: 'what-if', turn: ++this.#whatIfTurn, entry });
+		this.#figures.tryOut(++this.#whatIfTurn, entry);
 	}
 
 	#apply(edit: Edit): void {
@@ -156,26 +164,12 @@ export class OpenSheet {
 		if (!entry) return;
 		this.#sheet = applyEntry(this.#sheet, entry);
 		this.tryOut(null);
-		this.#tell({ kind: 'entry', turn: ++this.#turn, entry });
+		this.#solve(entry);
 		this.outbox.put({ id: newId(), edit });
 	}
 
-	#tell(message: ToWorker): void {
-		if (this.#worker) this.#worker.postMessage(message);
-		else if (message.kind !== 'what-if') {
-			this.#solved = solveSheet(this.#sheet);
-			this.#solvedTurn = message.turn;
-		}
-	}
-
-	#hear({ kind, turn, solved, took }: FromWorker): void {
-		if (kind === 'what-if') {
-			if (turn === this.#whatIfTurn) this.#whatIf = solved;
-			return;
-		}
-		this.#solvedTurn = turn;
-		this.#solved = solved;
-		this.took = took;
+	#solve(change: Entry | 'all'): void {
+		this.#figures.solve(++this.#turn, this.#sheet, change);
 	}
 
 	/** Brings in the server's order. Where others were faster, the screen is rebuilt from it and the unsent edits. */
@@ -192,7 +186,7 @@ export class OpenSheet {
 		const waiting = this.outbox.unsent.filter(({ id }) => !gone.has(id));
 		const entries = waiting.flatMap(({ edit }) => (entryOf(edit) ?? []) as Entry | []);
 		this.#sheet = applyMany(this.#confirmed, entries);
-		this.#tell({ kind: 'sheet', turn: ++this.#turn, sheet: this.#sheet });
+		this.#solve('all');
 	}
 }
 

@@ -4,8 +4,9 @@ import type { Sheet } from './sheet';
 import type { SolvedSheet } from './solve-sheet';
 
 export type ToWorker =
-	| { readonly kind: 'sheet'; readonly turn: number; readonly sheet: Sheet }
-	| { readonly kind: 'entry'; readonly turn: number; readonly entry: Entry }
+	/** `solve`: false where the page itself solves it, and the worker only keeps its copy up to date. */
+	| { readonly kind: 'sheet'; readonly turn: number; readonly sheet: Sheet; readonly solve: boolean }
+	| { readonly kind: 'entry'; readonly turn: number; readonly entry: Entry; readonly solve: boolean }
 	| { readonly kind: 'what-if'; readonly turn: number; readonly entry: Entry };
 
 export interface FromWorker {

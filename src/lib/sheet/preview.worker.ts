@@ -12,6 +12,7 @@ self.onmessage = ({ data }: MessageEvent<ToWorker>) => {
 	const begun = performance.now();
 	if (data.kind === 'sheet') sheet = data.sheet;
 	if (data.kind === 'entry') sheet = applyEntry(sheet, data.entry);
+	if (data.kind !== 'what-if' && !data.solve) return;
 	const solved = data.kind === 'what-if' ? tried(data.entry) : solveSheet(sheet);
 	const answer: FromWorker = {
 		kind: data.kind === 'what-if' ? 'what-if' : 'solved',

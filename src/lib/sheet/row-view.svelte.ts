@@ -1,10 +1,11 @@
 import type { Flag, SolvedRow, UnitSystem } from '$lib/engine';
 import type { Column } from './columns';
+import { rowFigures, type RowFigures } from './row-figures';
 import type { RowField, SheetRow } from './sheet';
 import type { SheetProblem } from './sheet-problem';
 import type { TreeLine } from './tree-lines';
 
-/** All that one row of the screen shows. */
+/** All that one row of the screen is made of. */
 export interface RowShown {
 	readonly row: SheetRow;
 	readonly line: TreeLine;
@@ -24,40 +25,80 @@ export interface RowShown {
 	readonly edited: RowField | null;
 }
 
-/** Figures that a row shows; worker and server send them as new objects each time. */
-const FIGURES = [
-	...['side', 'flow', 'velocity', 'frictionRate', 'frictionLoss', 'flexibleLoss', 'fittingLoss', 'junctionLoss'],
-	...['equipmentLoss', 'outletLoss', 'loss', 'spare']
-] as (keyof SolvedRow)[];
-
-const sameFigures = (a: SolvedRow | undefined, b: SolvedRow | undefined) =>
-	a === b || (a !== undefined && b !== undefined && FIGURES.every((key) => a[key] === b[key]));
-
 const sameTexts = (a: readonly { message: string }[], b: readonly { message: string }[]) =>
 	a.length === b.length && a.every(({ message }, at) => message === b[at]?.message);
 
 /**
- * What one row of the screen shows, told to it only where it differs from before: an edit then redraws the rows that it
- * changes, and the others are not even asked.
+ * What one row of the screen shows. Each thing in it is a signal of its own, told only where it differs from before: an
+ * edit then redraws the texts that it changes, and the others are not even asked.
  */
 export class RowView {
-	#shown = $state.raw<RowShown>() as RowShown;
+	row = $state.raw<SheetRow>() as SheetRow;
+	line = $state.raw<TreeLine>() as TreeLine;
+	onIndex = $state.raw(false);
+	problems = $state.raw<readonly SheetProblem[]>([]);
+	flags = $state.raw<readonly Flag[]>([]);
+	units = $state.raw<UnitSystem>('SI');
+	columns = $state.raw<readonly Column[]>([]);
+	template = $state.raw('');
+	activeColumn = $state.raw(-1);
+	firstRanged = $state.raw(Infinity);
+	lastRanged = $state.raw(-1);
+	edited = $state.raw<RowField | null>(null);
+
+	hasAnswer = $state.raw(false);
+	toBeConfirmed = $state.raw(false);
+	side = $state.raw('');
+	flow = $state.raw('');
+	velocity = $state.raw('');
+	rate = $state.raw('');
+	duct = $state.raw('');
+	fittings = $state.raw('');
+	equipment = $state.raw('');
+	total = $state.raw('');
+	spare = $state.raw('');
+	/** Of the full bar, from 0 to 1. */
+	spareShare = $state.raw(0);
+
+	#shown: RowShown | null = null;
 
 	constructor(shown: RowShown) {
-		this.#shown = shown;
-	}
-
-	get shown(): RowShown {
-		return this.#shown;
+		this.show(shown);
 	}
 
 	/** Takes what the row shows now. */
-	show(now: RowShown, before: RowShown): void {
-		const solved = sameFigures(now.solved, before.solved) ? before.solved : now.solved;
-		const problems = sameTexts(now.problems, before.problems) ? before.problems : now.problems;
-		const flags = sameTexts(now.flags, before.flags) ? before.flags : now.flags;
-		const next: RowShown = { ...now, solved, problems, flags };
-		const keys = Object.keys(next) as (keyof RowShown)[];
-		if (keys.some((key) => next[key] !== before[key])) this.#shown = next;
+	show(now: RowShown): void {
+		const before = this.#shown;
+		this.#shown = now;
+		this.row = now.row;
+		this.line = now.line;
+		this.onIndex = now.onIndex;
+		this.units = now.units;
+		this.columns = now.columns;
+		this.template = now.template;
+		this.activeColumn = now.activeColumn;
+		this.firstRanged = now.firstRanged;
+		this.lastRanged = now.lastRanged;
+		this.edited = now.edited;
+		if (!before || !sameTexts(now.problems, before.problems)) this.problems = now.problems;
+		if (!before || !sameTexts(now.flags, before.flags)) this.flags = now.flags;
+		if (!before || now.solved !== before.solved || now.units !== before.units) this.#figure(now);
+		const { solved, mostSpare } = now;
+		this.spareShare = solved && mostSpare > 0 ? Math.max(0, Math.min(1, solved.spare / mostSpare)) : 0;
+	}
+
+	#figure({ solved, units }: RowShown): void {
+		const figures: RowFigures = rowFigures(solved, units);
+		this.hasAnswer = solved !== undefined;
+		this.toBeConfirmed = solved?.items.some((item) => item.toBeConfirmed) ?? false;
+		this.side = figures.side;
+		this.flow = figures.flow;
+		this.velocity = figures.velocity;
+		this.rate = figures.rate;
+		this.duct = figures.duct;
+		this.fittings = figures.fittings;
+		this.equipment = figures.equipment;
+		this.total = figures.total;
+		this.spare = figures.spare;
 	}
 }

@@ -11,6 +11,7 @@ import { Selection } from './selection.svelte';
 import { MOST_ROWS, valueOf, type RowField, type SheetRow } from './sheet';
 import type { SheetProblem } from './sheet-problem';
 import { MOST_TYPED } from './storable-text';
+import { sameMembers } from './tree-lines';
 
 export interface Editing {
 	/** Where the row stands now. */
@@ -33,7 +34,7 @@ export type GridSource = Pick<
 >;
 
 /** One and the same for every row that has nothing to say, so that it is not drawn anew. */
-const NONE: readonly never[] = [];
+export const NONE: readonly never[] = [];
 
 /** The run sheet under a person's hands: selection, editing, clipboard, and what each row has to say. */
 export class RunGrid {
@@ -81,10 +82,13 @@ export class RunGrid {
 			({ row }) => row ?? ''
 		);
 	});
-	readonly onIndex = $derived.by(() => {
+	#lastIndex: ReadonlySet<string> = new Set();
+	/** Tags of the rows on the index paths. */
+	readonly onIndex: ReadonlySet<string> = $derived.by(() => {
 		const solution = this.open.solved.solution;
 		const ends = [solution?.index.supply, solution?.index.return];
-		return new Set(solution?.paths.filter(({ outlet }) => ends.includes(outlet)).flatMap(({ rows }) => rows));
+		const now = new Set(solution?.paths.filter(({ outlet }) => ends.includes(outlet)).flatMap(({ rows }) => rows));
+		return sameMembers(now, this.#lastIndex) ? this.#lastIndex : (this.#lastIndex = now);
 	});
 
 	/** What is to be mended in a row. */

@@ -1,6 +1,6 @@
 /** The tree of ducts that is drawn in the first column: for each row its depth and the lines that cross it. */
 import { linksOf } from './links';
-import type { SheetRow } from './sheet';
+import { valueOf, type SheetRow } from './sheet';
 
 export interface TreeLine {
 	readonly depth: number;
@@ -84,9 +84,26 @@ export function treeLines(rows: readonly SheetRow[], onIndex: (row: SheetRow) =>
 }
 
 const same = (a: TreeLine, b: TreeLine | undefined) => b !== undefined && JSON.stringify(a) === JSON.stringify(b);
+const sameCells = (a: SheetRow, b: SheetRow | undefined) =>
+	a === b || (b !== undefined && a.id === b.id && a.cells.tag === b.cells.tag && a.cells.joins === b.cells.joins);
 
-/** Hands on the line that a row had before where it is still the same, so that the row is not drawn anew. */
-export function linesKept(): (lines: readonly TreeLine[]) => readonly TreeLine[] {
+/**
+ * Draws the lines anew only where tags, links, their order or the index path have changed, and hands on the line that a
+ * row had before where it is still the same, so that the row is not drawn anew.
+ */
+export function linesKept(): (rows: readonly SheetRow[], onIndex: ReadonlySet<string>) => readonly TreeLine[] {
+	let lastRows: readonly SheetRow[] = [];
+	let lastIndex: ReadonlySet<string> = new Set();
 	let last: readonly TreeLine[] = [];
-	return (lines) => (last = lines.map((line, at) => (same(line, last[at]) ? (last[at] ?? line) : line)));
+	return (rows, onIndex) => {
+		const sameRows = rows.length === lastRows.length && rows.every((row, at) => sameCells(row, lastRows[at]));
+		lastRows = rows;
+		if (sameRows && sameMembers(onIndex, lastIndex)) return last;
+		lastIndex = onIndex;
+		const lines = treeLines(rows, (row) => onIndex.has(valueOf(row, 'tag') ?? ''));
+		return (last = lines.map((line, at) => (same(line, last[at]) ? (last[at] ?? line) : line)));
+	};
 }
+
+export const sameMembers = (a: ReadonlySet<string>, b: ReadonlySet<string>): boolean =>
+	a === b || (a.size === b.size && [...a].every((one) => b.has(one)));
