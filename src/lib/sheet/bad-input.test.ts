@@ -80,15 +80,15 @@ const cells: readonly Answer[] = [
 		'a junction without its coefficient',
 		'parts',
 		'tee branch',
-		'“tee branch”: a junction needs its coefficient',
-		'add it, such as tee branch C0.8'
+		'“tee branch”: a junction needs its coefficient C, that of this row’s own stream on the velocity pressure of this row',
+		'C, such as tee branch C0.8'
 	],
 	[
 		'equipment without its loss',
 		'parts',
 		'silencer',
-		'“silencer”: its coefficient or its pressure is missing',
-		'add its coefficient or its pressure, such as C0.6 or 12 Pa'
+		'“silencer”: its coefficient or its pressure is missing: what the maker states at the design flow, or C',
+		'silencer 25 Pa, or silencer C0.6'
 	],
 	[
 		'equipment with a figure of no unit',

@@ -27,6 +27,14 @@ export function describePart(
 	return { words: words.join(', '), picture: part.picture };
 }
 
+/** Pieces of equipment alike, each with its own loss, and what they lose together. */
+export function describeSeveral(part: PartEquipment, count: number, units: UnitSystem): string {
+	const [name, loss, ...rest] = equipmentWords(part, units);
+	const together = `${formatPressure(part.loss * count, units)} ${unitOf('pressure', units)} together`;
+	if (part.toBeConfirmed) rest.push('to be confirmed');
+	return [`${count} × ${name}`, `${loss} each`, together, ...rest].join(', ');
+}
+
 function equipmentWords(part: PartEquipment, units: UnitSystem): string[] {
 	const loss = `${formatPressure(part.loss, units)} ${unitOf('pressure', units)}`;
 	return part.exponent === 2 ? [part.name, loss] : [part.name, loss, `exponent ${part.exponent}`];

@@ -2,6 +2,7 @@ import type { Picture, UnitSystem } from '$lib/engine';
 import { takeAmounts, type Amounts } from './amounts';
 import { findWord, nearestWords, type Role, type Word } from './lexicon';
 import type { PartEquipment, PartFitting, PartWord } from './parts';
+import { takesOf } from './takes';
 
 export type PartReading =
 	| { readonly ok: true; readonly slot: 'junction' | 'fitting'; readonly part: PartFitting }
@@ -26,7 +27,7 @@ export function readPart(typed: string, units: UnitSystem): PartReading {
 	const roles = new Set(known.map((word) => word.role));
 	if (known.length === 0 && amounts.parameters['angle'] !== undefined) roles.add('elbow');
 	if (known.length === 0 && amounts.parameters['radiusRatio'] !== undefined) roles.add('elbow');
-	return assembled(typed, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
+	return assembled(typed, units, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
 }
 
 function unknownWord(typed: string): PartReading {
@@ -43,6 +44,7 @@ function unknownWord(typed: string): PartReading {
 
 function assembled(
 	typed: string,
+	units: UnitSystem,
 	amounts: Amounts,
 	roles: ReadonlySet<Role>,
 	name: string,
@@ -63,7 +65,7 @@ function assembled(
 		return refuse('the coefficient is too great', `at most ${MOST.coefficient}, such as C0.23`);
 	if (word === 'junction') {
 		if (count > 1) return refuse('a row has one junction, at its fan end', 'the junction without a count');
-		if (coefficient === null) return refuse('a junction needs its coefficient', 'add it, such as tee branch C0.8');
+		if (coefficient === null) return lacking(word);
 		return { ok: true, slot: 'junction', part: fitting('fixed') };
 	}
 	if (pressure !== null) {
@@ -76,8 +78,12 @@ function assembled(
 	if (count > MOST.fittings) return refuse('the count is too great', `at most ${MOST.fittings}`);
 	if (coefficient !== null) return { ok: true, slot: 'fitting', part: fitting('fixed') };
 	const kind = kindOf(word, roles);
-	if (kind === null) return refuse('its coefficient or its pressure is missing', missingHint(word));
-	return { ok: true, slot: 'fitting', part: fitting(kind) };
+	return kind === null ? lacking(word) : { ok: true, slot: 'fitting', part: fitting(kind) };
+
+	function lacking(what: PartWord): PartReading {
+		const { message, expected } = takesOf(what, amounts.rest, units);
+		return refuse(message, expected);
+	}
 
 	function fitting(kind: string): PartFitting {
 		const leg = roles.has('smaller') ? 'smaller' : roles.has('larger') ? 'larger' : null;
@@ -135,13 +141,6 @@ function kindOf(word: PartWord, roles: ReadonlySet<Role>): string | null {
 		return change !== null && roles.has('gradual') ? `gradual-${change}` : null;
 	}
 	return null;
-}
-
-function missingHint(word: PartWord): string {
-	if (word === 'entry') return `add C, such as C0.5, or say which: flush entry, plain end entry, bellmouth r0.2`;
-	if (word === 'transition')
-		return 'add C, such as C0.1, or say which: gradual expansion a0.5 20°, sudden contraction a0.5';
-	return 'add its coefficient or its pressure, such as C0.6 or 12 Pa';
 }
 
 function exampleOf(word: PartWord): string {

@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { UnitSystem } from '$lib/engine';
 import { readParts, type Parts } from './index';
+import { EXAMPLES } from './takes';
 
 function understood(text: string, units: UnitSystem = 'SI') {
 	const reading = readParts(text, units);
@@ -154,15 +155,59 @@ describe('the Parts cell', () => {
 	});
 });
 
+describe('what a Parts cell says of what it read', () => {
+	it('takes a pressure behind a count for that of each, and says both', () => {
+		const { value, words, why } = understood('2 FD 8 Pa');
+		expect(value.equipment.map(({ loss }) => loss)).toEqual([8, 8]);
+		expect(words).toBe('2 × Fire damper, 8.0 Pa each, 16.0 Pa together');
+		expect(why).toBe('a pressure behind a count is that of each');
+		expect(understood('FD 8 Pa; FD 8 Pa').words).toBe('Fire damper, 8.0 Pa; Fire damper, 8.0 Pa');
+	});
+
+	it.each([
+		[
+			'elbow',
+			'elbow: from the catalogue, at r 1.5, 90° in round duct, r 1, 90° in rectangular duct; for others type elbow r1.5 45° or elbow C0.23'
+		],
+		['elbow r2', 'elbow: from the catalogue, at 90°; for others type elbow r1.5 45° or elbow C0.23'],
+		['damper', 'damper: from the catalogue, at open, 0°; for others type damper 20° or damper C0.2'],
+		['elbow r1.5 45°', 'elbow: without a coefficient, from the catalogue']
+	])('says what “%s” is computed with, and how to type another figure', (text, why) =>
+		expect(understood(text).why).toBe(why)
+	);
+
+	it.each(['SI', 'IP'] as const)('has examples in %s that it reads itself', (units) => {
+		for (const example of EXAMPLES[units]) expect(readParts(example, units)).toMatchObject({ ok: true });
+	});
+
+	it.each([
+		['tee', 'SI'],
+		['tee straight', 'SI'],
+		['transition', 'SI'],
+		['entry', 'IP'],
+		['grille', 'SI'],
+		['silencer', 'IP'],
+		['1 FD', 'IP']
+	] as const)('answers “%s” with examples that it reads itself', (text, units) => {
+		const reading = readParts(text, units);
+		if (reading.ok) throw new Error('read');
+		const examples = reading.expected.replace(/^C, such as /, '').split(/[;,] (?:or )?/);
+		expect(examples.length).toBeGreaterThan(0);
+		for (const example of examples) expect([example, readParts(example, units).ok]).toEqual([example, true]);
+	});
+});
+
 describe('what is not understood in a Parts cell', () => {
 	it.each([
-		['tee', '“tee”', 'C0.8'],
+		['tee', '“tee”: a junction needs its coefficient C', 'such as tee branch C0.8'],
+		['tee straight', 'own stream', 'such as tee straight C0.8'],
 		['1 tee(b)', '“1 tee(b)”', 'C0.8'],
 		['2E 1T 1D', '“1T”', 'C0.8'],
-		['silencer', '“silencer”', '12 Pa'],
-		['1 FD', '“1 FD”', 'C0.6 or 12 Pa'],
+		['silencer', '“silencer”', 'silencer 25 Pa, or silencer C0.6'],
+		['grille', 'the maker states', 'grille 25 Pa, or grille C0.6'],
+		['1 FD', '“1 FD”', 'fd 8 Pa, or fd C0.6'],
 		['backdraught damper', '“backdraught damper”', 'C0.6'],
-		['transition', '“transition”', 'sudden contraction'],
+		['transition', '“transition”', 'sudden expansion'],
 		['plenum entry', '“plenum entry”', 'flush entry'],
 		['elbo', '“elbo”', 'elbow'],
 		['silencr 25 Pa', '“silencr”', 'silencer'],

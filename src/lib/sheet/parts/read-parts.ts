@@ -1,8 +1,9 @@
 import { plainSigns, type Reading, type UnitSystem } from '$lib/engine';
-import { describePart } from './describe-part';
+import { describePart, describeSeveral } from './describe-part';
 import type { PartEquipment, PartFitting, Parts } from './parts';
 import { readPart } from './read-part';
 import { splitParts } from './split-parts';
+import { assumedOf, exampleOf } from './takes';
 
 const LONGEST = 2000; // characters
 const MOST = 100; // parts of one row, as typed
@@ -38,14 +39,34 @@ export function readParts(text: string, units: UnitSystem): Reading<Parts> {
 			expected: `at most ${MOST_LOSSES}`
 		};
 	const parts: Parts = { junction, fittings, equipment };
-	const all = [...(junction ? [junction] : []), ...fittings, ...equipment];
-	const computed = fittings.filter((part) => part.kind !== 'fixed').map((part) => part.name.toLowerCase());
-	return {
-		ok: true,
-		value: parts,
-		words: all.length === 0 ? 'no parts' : all.map((part) => describePart(part, units).words).join('; '),
-		why:
-			computed.length === 0 ? null : `without a coefficient, from the catalogue: ${[...new Set(computed)].join(', ')}`,
-		other: null
-	};
+	return { ok: true, value: parts, words: wordsOf(parts, units), why: whyOf(parts), other: null };
+}
+
+function wordsOf({ junction, fittings, equipment }: Parts, units: UnitSystem): string {
+	const words = [...(junction ? [junction] : []), ...fittings].map((part) => describePart(part, units).words);
+	for (let at = 0; at < equipment.length;) {
+		const one = equipment[at] as PartEquipment;
+		let end = at + 1;
+		while (equipment[end] === one) end += 1;
+		words.push(end - at > 1 ? describeSeveral(one, end - at, units) : describePart(one, units).words);
+		at = end;
+	}
+	return words.length === 0 ? 'no parts' : words.join('; ');
+}
+
+/** What a person should know of how it was read: what comes from the catalogue, and what a count counts. */
+function whyOf({ fittings, equipment }: Parts): string | null {
+	const said = new Set<string>();
+	const computed = fittings.filter((part) => part.kind !== 'fixed');
+	for (const part of computed) {
+		const assumed = assumedOf(part);
+		const name = part.name.toLowerCase();
+		said.add(
+			assumed === null
+				? `${name}: without a coefficient, from the catalogue`
+				: `${name}: from the catalogue, at ${assumed}; for others type ${exampleOf(part)}`
+		);
+	}
+	if (equipment.some((one, at) => one === equipment[at + 1])) said.add('a pressure behind a count is that of each');
+	return said.size === 0 ? null : [...said].join('. ');
 }
