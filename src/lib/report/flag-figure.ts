@@ -12,9 +12,10 @@ import {
 
 /** How the figure of a rule is shown. */
 export function shownBy(rule: FlagRule, units: UnitSystem): (value: number) => string {
-	if (rule === 'velocity-main' || rule === 'velocity-run-out')
+	if (rule === 'velocity-main' || rule === 'velocity-run-out' || rule === 'velocity-plausible')
 		return (value) => `${formatVelocity(value, units)}\u00a0${unitOf('velocity', units)}`;
-	if (rule === 'friction-rate') return (value) => `${formatRate(value, units)}\u00a0${unitOf('rate', units)}`;
+	if (rule === 'friction-rate' || rule === 'friction-rate-plausible')
+		return (value) => `${formatRate(value, units)}\u00a0${unitOf('rate', units)}`;
 	if (rule === 'flexible-length' || rule === 'rise-exceeds-length')
 		return (value) => `${formatLength(value, units)}\u00a0${unitOf('length', units)}`;
 	if (rule === 'negative-loss') return (value) => `${formatPressure(value, units)}\u00a0${unitOf('pressure', units)}`;

@@ -47,6 +47,8 @@ export const RULE: Readonly<Record<FlagRule, string>> = {
 	'velocity-main': 'Velocity in mains',
 	'velocity-run-out': 'Velocity in run-outs',
 	'friction-rate': 'Friction rate',
+	'velocity-plausible': 'Velocity hardly found in a duct',
+	'friction-rate-plausible': 'Friction rate hardly found in a duct',
 	'flexible-length': 'Length of flexible duct',
 	'aspect-ratio': 'Aspect ratio',
 	'damper-missing': 'Damper at the outlet',

@@ -166,6 +166,8 @@ export type FlagRule =
 	| 'velocity-main'
 	| 'velocity-run-out'
 	| 'friction-rate'
+	| 'velocity-plausible'
+	| 'friction-rate-plausible'
 	| 'flexible-length'
 	| 'aspect-ratio'
 	| 'damper-missing'

@@ -27,7 +27,19 @@ describe('flags', () => {
 
 	// Velocities: M 1.415 m/s, E 3.183 m/s.
 	it.each<[string, Json, Json, Json]>([
-		['reynolds-transition E', {}, { outlet: { flow: 0.0055 } }, {}],
+		// 0.003 m³/s: in M of 0.05 m 1.528 m/s and Re 5 060, in E of 0.1 m 0.382 m/s and Re 2 530.
+		[
+			'reynolds-transition E',
+			{ size: { shape: 'round', diameter: 0.05 } },
+			{ size: { shape: 'round', diameter: 0.1 }, outlet: { flow: 0.003 } },
+			{}
+		],
+		// 24x12 typed in a metric design, 0.1 m³/s: 347 m/s.
+		['velocity-plausible E', {}, { size: { shape: 'rectangular', width: 0.024, height: 0.012 } }, {}],
+		// 0.1 m³/s in 1.2 m²: 0.083 m/s.
+		['velocity-plausible M', { size: { shape: 'rectangular', width: 1.2, height: 1 } }, {}, {}],
+		// 0.1 m³/s in Ø 70 mm: 26 m/s; f about 0.024 gives 139 Pa/m.
+		['friction-rate-plausible E', {}, { size: { shape: 'round', diameter: 0.07 } }, {}],
 		['no-junction-loss E', {}, { junction: undefined }, {}],
 		['velocity-main M', {}, {}, { criteria: { mainVelocity: 1.4 } }],
 		['velocity-run-out E', {}, {}, { criteria: { runOutVelocity: 3.1 } }],
@@ -62,6 +74,20 @@ describe('flags', () => {
 
 	it('do not say that an end is counted twice where the outlet loses nothing', () =>
 		expect(flagsOf({}, { fittings: [{ kind: 'exit-plain' }], outlet: { flow: 0.1, loss: 0 } })).toEqual([]));
+
+	it('leave a fast duct to the limits of the design where it has them', () => {
+		const fast = { size: { shape: 'round', diameter: 0.05 } };
+		expect(brief(flagsOf({}, fast, { criteria: { runOutVelocity: 60 } }))).toEqual([]);
+		expect(brief(flagsOf({}, fast, { criteria: { runOutVelocity: 40 } }))).toEqual(['velocity-run-out E']);
+		expect(brief(flagsOf({}, fast, { criteria: { mainVelocity: 60 } }))).toEqual(['velocity-plausible E']);
+	});
+
+	it('say of an odd velocity that it is judged by common practice', () => {
+		const [flag] = flagsOf({}, { size: { shape: 'round', diameter: 0.05 } });
+		expect(flag).toMatchObject({ severity: 'caution', threshold: 30, message: expect.stringMatching(/right unit\?/) });
+		expect(flag?.basis).toContain('common practice');
+		expect(flag?.value).toBeCloseTo(0.1 / (Math.PI * 0.025 ** 2), 9);
+	});
 
 	it('carry the value and its threshold', () => {
 		const [flag] = flagsOf({}, {}, { criteria: { runOutVelocity: 3.1 } });

@@ -1,5 +1,6 @@
 import type { Criteria, DesignRow, Flag } from '../document/types';
 import { regime } from '../friction';
+import { plausibilityFlag } from './plausibility-flags';
 import type { RowLoss } from './row-loss';
 
 const CRITERIA = 'criteria of the design';
@@ -36,6 +37,8 @@ export function rowFlags(
 			'The velocity is above that of a run-out.',
 			flags
 		);
+	const velocityLimit = joined ? criteria?.mainVelocity : criteria?.runOutVelocity;
+	plausibilityFlag(row, solved, velocityLimit, criteria, flags);
 	above('friction-rate', row, frictionRate, criteria?.frictionRate, 'The friction rate is above the criterion.', flags);
 	const flexible = row.flexible?.length ?? 0;
 	above(
