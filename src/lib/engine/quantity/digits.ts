@@ -26,16 +26,18 @@ export function fixedDigits(value: Decimal | number, decimals: number, units: Un
 const NEAR_A_TIE = 1e-6;
 /** Last digits up to here are whole numbers that a double holds, with room for its error. */
 const MOST_UNITS = 1e9;
+/** Last digits in one, by the number of decimals. */
+const SCALES: readonly number[] = [1, 10, 100, 1e3, 1e4, 1e5, 1e6];
 
 /**
  * As `fixedDigits` of a figure that a double comes close to, without decimal arithmetic; null where that could round
  * another way. A sheet shows some hundred figures with each edit.
  */
 export function quickDigits(near: number, decimals: number, units: UnitSystem): string | null {
-	const scale = 10 ** decimals;
+	const scale = SCALES[decimals] ?? Infinity;
 	const last = Math.abs(near) * scale;
 	if (!(last < MOST_UNITS) || Math.abs(last - Math.floor(last) - 0.5) < NEAR_A_TIE) return null;
-	const plain = (Math.round(last) / scale).toFixed(decimals);
+	const plain = (Math.floor(last + 0.5) / scale).toFixed(decimals);
 	return lettered(near < 0 ? `-${plain}` : plain, units);
 }
 
