@@ -2,6 +2,7 @@
 import { cpus } from 'node:os';
 import { chromium } from 'playwright-core';
 import { listen } from './listen.mjs';
+import { editsOf, startTrace } from './main-thread.mjs';
 import { typedRows } from './rows.mjs';
 
 const ROWS = 500;
@@ -24,11 +25,12 @@ export async function measureEdits({ origin, email, password }) {
 		await page.getByRole('button', { name: 'Sign in' }).click();
 		await page.waitForURL('**/register');
 		await makeDesign(page);
-		for (let at = 0; at < WARM_UP + EDITS; at++) await commitLength(page, at);
-		const edits = await page.evaluate(
-			() => /** @type {{ edits: Record<string, number>[] }} */ (/** @type {any} */ (globalThis)).edits
-		);
-		return summary(edits.slice(WARM_UP), browser.version());
+		for (let at = 0; at < WARM_UP; at++) await commitLength(page, at);
+		const endTrace = await startTrace(await page.context().newCDPSession(page));
+		for (let at = WARM_UP; at < WARM_UP + EDITS; at++) await commitLength(page, at);
+		const traced = committed(editsOf(await endTrace()));
+		const seen = await page.evaluate(() => /** @type {Seen[]} */ (/** @type {any} */ (globalThis).edits));
+		return summary(traced, seen.slice(WARM_UP), browser.version());
 	} finally {
 		await browser.close();
 	}
@@ -71,30 +73,38 @@ async function commitLength(/** @type {import('playwright-core').Page} */ page, 
 	await page.evaluate((count) => /** @type {any} */ (globalThis).settled(count), at + 1);
 }
 
-/** @param {Record<string, number>[]} edits @param {string} chromiumVersion */
-function summary(edits, chromiumVersion) {
-	const of = (/** @type {(edit: Record<string, number>) => number} */ figure) => {
-		const sorted = edits.map(figure).sort((a, b) => a - b);
+/** @typedef {{ isInFirstFrame: boolean, toPicture?: number }} Seen */
+/** @typedef {ReturnType<typeof editsOf>[number]} Traced */
+
+/** The last key before each pause is the one that commits. @param {Traced[]} keys */
+function committed(keys) {
+	const PAUSE_us = 40_000;
+	const last = keys.filter(({ at }, index) => (keys[index + 1]?.at ?? Infinity) - at > PAUSE_us);
+	if (last.length < EDITS) throw new Error(`${last.length} of ${EDITS} edits were found in the trace`);
+	return last.slice(-EDITS);
+}
+
+/** @param {Traced[]} traced @param {Seen[]} seen @param {string} chromiumVersion */
+function summary(traced, seen, chromiumVersion) {
+	const spread = (/** @type {number[]} */ figures) => {
+		const sorted = [...figures].sort((a, b) => a - b);
 		const at = (/** @type {number} */ share) =>
 			Number((sorted[Math.ceil(share * sorted.length) - 1] ?? NaN).toFixed(2));
-		return { median: at(0.5), p95: at(0.95) };
+		return { least: sorted[0] === undefined ? NaN : Number(sorted[0].toFixed(2)), median: at(0.5), p95: at(0.95) };
 	};
-	const part = (/** @type {string} */ name) => of((edit) => edit[name] ?? NaN);
+	const of = (/** @type {(edit: Traced) => number} */ figure) => spread(traced.map(figure));
 	return {
-		...{ rows: ROWS, edits: edits.length, unit: 'ms', chromium: chromiumVersion, node: process.version },
-		machine: `${cpus().length} × ${cpus()[0]?.model ?? 'unknown'}`,
-		/** In the worker: the document, its validation and the solution. */
-		engineInWorker: part('engine'),
-		/** On the page's own thread, from the key to the end of its task. */
-		workOfTheKey: part('keyWork'),
-		/** On the page's own thread, from the worker's answer to the changed page. */
-		workOfShowing: part('showWork'),
-		/** Engine and both. */
-		computing: of((edit) => (edit.engine ?? NaN) + (edit.keyWork ?? NaN) + (edit.showWork ?? NaN)),
-		keyToAnswer: part('answered'),
-		/** To the end of the first frame that has the new figures. */
-		keyToPainted: part('painted'),
-		/** To the frame after it. */
-		keyToSecondFrame: part('secondFrame')
+		...{ rows: ROWS, edits: traced.length, unit: 'ms', chromium: chromiumVersion, node: process.version },
+		machine: `${cpus().length} × ${cpus()[0]?.model ?? 'unknown'}, software rendering`,
+		/** The task of the key: the edit, the engine, and writing the figures into the page. */
+		computing: of(({ computing }) => computing),
+		/** The first frame after it on the page's own thread: style, layout and painted layers. */
+		painting: of(({ painting }) => painting),
+		computingAndPainting: of(({ computing, painting }) => computing + painting),
+		/** By the clock, with whatever came in between. */
+		keyToPaintedLayers: of(({ toPaintedLayers }) => toPaintedLayers),
+		/** By the browser's own account, in steps of 8 ms, with raster and display. */
+		keyToPicture: spread(seen.flatMap(({ toPicture }) => toPicture ?? [])),
+		inFirstFrame: `${seen.filter(({ isInFirstFrame }) => isInFirstFrame).length} of ${seen.length}`
 	};
 }

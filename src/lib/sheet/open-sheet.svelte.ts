@@ -1,3 +1,4 @@
+import type { UnitSystem } from '$lib/engine';
 import { applyEntry, applyMany } from './apply';
 import type { Edit, SentEdit } from './edit';
 import { entryOf, type Entry } from './entry';
@@ -66,9 +67,8 @@ export class OpenSheet {
 	get sheet() {
 		return this.#sheet;
 	}
-	get units() {
-		return unitsOf(this.#sheet);
-	}
+	/** Derived, so that what hangs on the units is not asked anew with every edit. */
+	readonly units: UnitSystem = $derived.by(() => unitsOf(this.#sheet));
 	get solved() {
 		return this.#solved;
 	}
