@@ -9,18 +9,11 @@ import {
 	type Side
 } from '$lib/engine';
 import { fittingsFor } from './parts';
-import {
-	settingOf,
-	valueOf,
-	type OutletLoss,
-	type RowField,
-	type SettingField,
-	type Sheet,
-	type SheetRow
-} from './sheet';
+import { settingOf, valueOf, type OutletLoss, type RowField, type Sheet, type SheetRow } from './sheet';
 import type { SheetProblem } from './sheet-problem';
 import { readingOf } from './reading-of';
 import { linksOf, type Links } from './links';
+import { settingProblems } from './setting-problems';
 
 export interface SheetDocument {
 	/** Null while no row counts. */
@@ -49,17 +42,6 @@ export function documentOf(sheet: Sheet): SheetDocument {
 	const rows = sheet.rows.flatMap((row) => drafts.get(row.id) ?? []);
 	const uncounted = new Set(sheet.rows.map(({ id }) => id).filter((id) => !drafts.has(id)));
 	return { document: rows.length ? { ...frameOf(sheet), rows } : null, problems, uncounted };
-}
-
-function settingProblems(sheet: Sheet): SheetProblem[] {
-	const notRead = Object.entries(sheet.settings).flatMap(([field, cell]) => {
-		if (!cell || cell.value !== null) return [];
-		return [{ row: null, field: field as SettingField, ...readingOf('setting', field, cell) }];
-	});
-	const { density, surroundings, elevation } = sheet.settings;
-	if (!density || !surroundings || elevation) return notRead;
-	const message = 'The air around the ducts is compared with a given density, so it must be known at what elevation.';
-	return [...notRead, { row: null, field: 'elevation', message, expected: 'the elevation, as 0 m' }];
 }
 
 /** The document without its rows. */
@@ -121,7 +103,12 @@ function draftRow(
 	const before = problems.length;
 	const fault = (field: RowField, message: string, expected: string) =>
 		problems.push({ row: row.id, field, message, expected });
-	for (const [field, cell] of Object.entries(row.cells))
+	const cells = Object.entries(row.cells);
+	if (cells.length === 0) {
+		fault('tag', 'Nothing is entered in this row yet.', 'its tag first, as S01; or delete the row');
+		return null;
+	}
+	for (const [field, cell] of cells)
 		if (cell && cell.value === null) {
 			const { message, expected } = readingOf('row', field, cell);
 			fault(field as RowField, message, expected);

@@ -7,26 +7,67 @@ export interface SettingName {
 	readonly quantity?: QuantityName;
 	/** What holds when it is left blank. */
 	readonly blank: string;
+	/** What the figures stand on while it is not understood. */
+	readonly meanwhile: string;
 }
 
+const notChecked = (what: string) => ({ blank: 'not checked', meanwhile: `${what} is not checked` });
+
 export const SETTING_NAMES = {
-	title: { name: 'Title on reports', blank: 'the tag of the system' },
-	service: { name: 'Service', blank: 'not named yet; taken as general' },
-	temperature: { name: 'Temperature of the air', quantity: 'temperature', blank: '20 °C' },
-	humidity: { name: 'Relative humidity', quantity: 'humidity', blank: '50 %' },
-	elevation: { name: 'Elevation', quantity: 'elevation', blank: 'sea level' },
-	density: { name: 'Density, if given', quantity: 'density', blank: 'computed from the three above' },
+	title: {
+		name: 'Title on reports',
+		blank: 'the tag of the system',
+		meanwhile: 'reports carry the tag of the system'
+	},
+	service: { name: 'Service', blank: 'not named yet; taken as general', meanwhile: 'it is taken as general' },
+	temperature: {
+		name: 'Temperature of the air',
+		quantity: 'temperature',
+		blank: '20 °C',
+		meanwhile: 'the air is taken at 20 °C (68 °F)'
+	},
+	humidity: {
+		name: 'Relative humidity',
+		quantity: 'humidity',
+		blank: '50 %',
+		meanwhile: 'the air is taken at 50 %'
+	},
+	elevation: {
+		name: 'Elevation',
+		quantity: 'elevation',
+		blank: 'sea level',
+		meanwhile: 'the place is taken at sea level'
+	},
+	density: {
+		name: 'Density, if given',
+		quantity: 'density',
+		blank: 'computed from the three above',
+		meanwhile: 'it is computed from temperature, humidity and elevation'
+	},
 	surroundings: {
 		name: 'Temperature around the ducts',
 		quantity: 'temperature',
-		blank: 'as inside: no thermal gravity'
+		blank: 'as inside: no thermal gravity',
+		meanwhile: 'it is taken as inside, without thermal gravity'
 	},
-	material: { name: 'Material of the ducts', blank: 'galvanised steel, 0.09 mm' },
-	flexFactor: { name: 'Flexible duct, times the rigid rate', blank: '4, the program’s default; illustrative' },
-	mainVelocity: { name: 'Velocity in mains, at most', quantity: 'velocity', blank: 'not checked' },
-	runOutVelocity: { name: 'Velocity in run-outs, at most', quantity: 'velocity', blank: 'not checked' },
-	frictionRate: { name: 'Friction rate, at most', quantity: 'rate', blank: 'not checked' },
-	flexibleLength: { name: 'Flexible duct at an outlet, at most', quantity: 'length', blank: 'not checked' },
-	aspectRatio: { name: 'Aspect ratio, at most', blank: '4, common practice' },
-	damperAtOutlet: { name: 'A damper at every outlet', blank: 'not checked' }
+	material: {
+		name: 'Material of the ducts',
+		blank: 'galvanised steel, 0.09 mm',
+		meanwhile: 'ducts are taken as galvanised steel, 0.09 mm'
+	},
+	flexFactor: {
+		name: 'Flexible duct, times the rigid rate',
+		blank: '4, the program’s default; illustrative',
+		meanwhile: 'flexible duct is taken at 4 times the rigid rate'
+	},
+	mainVelocity: { name: 'Velocity in mains, at most', quantity: 'velocity', ...notChecked('it') },
+	runOutVelocity: { name: 'Velocity in run-outs, at most', quantity: 'velocity', ...notChecked('it') },
+	frictionRate: { name: 'Friction rate, at most', quantity: 'rate', ...notChecked('it') },
+	flexibleLength: { name: 'Flexible duct at an outlet, at most', quantity: 'length', ...notChecked('its length') },
+	aspectRatio: {
+		name: 'Aspect ratio, at most',
+		blank: '4, common practice',
+		meanwhile: 'it is checked against 4, common practice'
+	},
+	damperAtOutlet: { name: 'A damper at every outlet', ...notChecked('it') }
 } as const satisfies Partial<Record<SettingField, SettingName>>;

@@ -164,6 +164,23 @@ describe('rows that do not count', () => {
 		expect(solved.problems.map(({ row, field }) => [row, field])).toEqual([[rowId(2), 'side']]);
 	});
 
+	it('say one thing of a row with nothing in it, wherever it stands', () => {
+		for (const rows of [
+			[{}, main, good],
+			[main, {}, good],
+			[main, good, {}]
+		] as TypedRow[][]) {
+			const { problems, uncounted } = solveSheet(sheetOf(rows));
+			const blank = rowId(rows.findIndex(({ tag }) => !tag));
+			const message = 'Nothing is entered in this row yet.';
+			expect(problems).toEqual([
+				{ row: blank, field: 'tag', message, expected: 'its tag first, as S01; or delete the row' }
+			]);
+			expect(uncounted).toEqual([blank]);
+		}
+		expect(solveSheet(sheetOf([main, good, { serves: 'Store' }])).problems).toHaveLength(3);
+	});
+
 	it('say nothing of the side where the link is at fault', () => {
 		const twice = { ...main, side: 'exhaust' };
 		const solved = solveSheet(
