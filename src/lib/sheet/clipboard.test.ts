@@ -63,13 +63,15 @@ describe('the clipboard', () => {
 		const million = 'S1\tA\t600x350\n'.repeat(1_000_000);
 		const begun = performance.now();
 		expect(refusalOf(million)).toBe(
-			'The clipboard holds 1000000 rows; there is room for 5000 more. Nothing was pasted.'
+			'Nothing was pasted: the clipboard holds 1000000 rows, and the sheet has room for 5000 more.'
 		);
 		expect(performance.now() - begun).toBeLessThan(2_000);
 	});
 
 	it('refuses what is left of a full sheet', () =>
-		expect(refusalOf('a\nb\n', 0)).toBe('The clipboard holds 2 rows; there is room for 0 more. Nothing was pasted.'));
+		expect(refusalOf('a\nb\n', 0)).toBe(
+			'Nothing was pasted: the clipboard holds 2 rows, and the sheet has room for no more.'
+		));
 
 	it('takes as many rows as there is room for, also where cells have lines', () => {
 		expect(cellsOf('"a\nb"\n'.repeat(10), 10)).toHaveLength(10);
@@ -79,7 +81,7 @@ describe('the clipboard', () => {
 	it('refuses more cells than a sheet has, and a cell that no cell can hold', () => {
 		expect(refusalOf(`${'\t'.repeat(MOST_CELLS)}\n`)).toContain(`at most ${MOST_CELLS} are pasted`);
 		expect(refusalOf('x'.repeat(MOST_TYPED + 1))).toBe(
-			'The clipboard holds a cell of 2001 characters; a cell of the sheet holds 2000. Nothing was pasted.'
+			'Nothing was pasted: the clipboard holds a cell of 2001 characters, and a cell of the sheet holds at most 2000.'
 		);
 	});
 });

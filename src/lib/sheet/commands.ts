@@ -4,6 +4,7 @@ import type { Edit, SingleEdit, TypedCell } from './edit';
 import { ROW_READERS } from './fields';
 import { linksOf } from './links';
 import { newId } from './new-id';
+import { byHeader, headerOf } from './paste-header';
 import { valueOf, type Cell, type RowField, type Sheet, type SheetRow } from './sheet';
 
 const together = (edits: SingleEdit[]): Edit | null => {
@@ -34,22 +35,26 @@ export function newRow(cells: Partial<Record<RowField, string>>, units: UnitSyst
 	return { id, edit };
 }
 
-/** Writes a block from a cell to the right and down; rows that are lacking are added at the end. */
+/**
+ * Writes a block from a cell to the right and down; rows that are lacking are added at the end. Where its first line
+ * names columns, that line is left out and each column goes where it is named.
+ */
 export function pasteBlock(
 	sheet: Sheet,
 	at: { readonly row: number; readonly fields: readonly RowField[] },
 	cells: readonly (readonly string[])[],
 	units: UnitSystem
 ): Edit | null {
-	if (!at.fields.length) return null;
+	const header = headerOf(cells);
+	if (!header && !at.fields.length) return null;
 	const edits: SingleEdit[] = [];
 	const added: { id: string; cells: Record<string, TypedCell> }[] = [];
-	cells.forEach((line, down) => {
+	cells.slice(header ? 1 : 0).forEach((line, down) => {
 		const row = sheet.rows[at.row + down];
-		const texts = line.slice(0, at.fields.length).map((text, right) => [at.fields[right], text] as const);
-		if (row)
-			for (const [field, typed] of texts)
-				edits.push({ kind: 'set', row: row.id, field: field as string, typed, units });
+		const texts: readonly (readonly [RowField, string])[] = header
+			? byHeader(header, line)
+			: at.fields.slice(0, line.length).map((field, right) => [field, line[right] ?? ''] as const);
+		if (row) for (const [field, typed] of texts) edits.push({ kind: 'set', row: row.id, field, typed, units });
 		else added.push({ id: newId(), cells: typedCells(Object.fromEntries(texts), units) });
 	});
 	if (added.length) edits.push({ kind: 'insert', rows: added, before: null });
