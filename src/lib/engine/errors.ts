@@ -1,3 +1,5 @@
+import { shortFigure } from './short-figure';
+
 /** The interval in which a formula holds; both ends belong to it. */
 export interface Range {
 	readonly min: number;
@@ -14,7 +16,7 @@ export class OutOfRangeError extends Error {
 		readonly value: number,
 		readonly range: Range
 	) {
-		super(`${formula}: ${symbol} = ${value} is outside ${range.min} to ${range.max}`);
+		super(`${formula}: ${symbol} = ${shortFigure(value, range)} is outside ${range.min} to ${range.max}`);
 	}
 }
 

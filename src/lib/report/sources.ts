@@ -26,7 +26,9 @@ export function sourceText({ kind, source }: Item): string {
 	if (entry === null) return source ?? UNSTATED;
 	const named = source ?? entry.source;
 	const band = `known to about ±${Math.round(entry.uncertainty * 100)} %`;
-	const how = ` (${entry.known === 'published formula' ? '' : `${entry.known}; `}${band})`;
+	// A source that says itself how it is known is not told so twice.
+	const isSaid = entry.known === 'published formula' || named.includes(entry.known);
+	const how = ` (${isSaid ? '' : `${entry.known}; `}${band})`;
 	return named.includes(entry.method) ? `${named}${how}` : `${named}${how}; method: ${entry.method}`;
 }
 

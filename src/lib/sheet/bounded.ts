@@ -1,5 +1,5 @@
 /** Quantities that a sheet takes within narrower bounds than their reader. */
-import { LIMITS, quoted, readFlow, readNumber, readTemperature, type Reader, type UnitSystem } from '$lib/engine';
+import { LIMITS, readFlow, readNumber, readTemperature, refusal, type Reader, type UnitSystem } from '$lib/engine';
 
 interface Bounds {
 	readonly min: number;
@@ -13,7 +13,7 @@ const bounded =
 	(text, units) => {
 		const reading = read(text, units);
 		if (!reading.ok || (reading.value >= min && reading.value <= max)) return reading;
-		return { ok: false, message: `${quoted(text)}: ${why(units)}`, expected: expected(units) };
+		return { ok: false, message: refusal(text, why(units)), expected: expected(units) };
 	};
 
 /** Of an outlet [m3/s]: nothing can be computed for one without a flow. */

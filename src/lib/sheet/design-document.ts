@@ -136,6 +136,7 @@ function draftRow(
 	const flex = valueOf(row, 'flex');
 	const flexFactor = settingOf(sheet, 'flexFactor');
 	const outlet = valueOf(row, 'outlet');
+	const name = outlet?.description ?? valueOf(row, 'serves');
 	// An entry or exit among the parts is the end of the run: a blank outlet then loses nothing more.
 	const endsInPart = outlet === null && fitted?.fittings.some(({ kind }) => isEndPart(kind));
 	// An outlet's coefficient is computed with as a fitting's: both are on the velocity pressure of the row.
@@ -157,7 +158,7 @@ function draftRow(
 		...(isEnd &&
 			flow !== null && {
 				outlet: {
-					name: outlet?.description ?? valueOf(row, 'serves') ?? '',
+					...(name !== null && { name }),
 					flow,
 					...(outlet?.loss !== null &&
 						outlet && { loss: outlet.loss, lossIs: outlet.lossIs, toBeConfirmed: outlet.toBeConfirmed }),

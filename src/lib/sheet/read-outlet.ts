@@ -1,4 +1,4 @@
-import { plainSigns, quoted, readPressure, type Reader, type Reading } from '$lib/engine';
+import { plainSigns, quoted, readPressure, refusal, type Reader, type Reading } from '$lib/engine';
 import { findWord } from './parts/lexicon';
 import type { OutletLoss } from './sheet';
 
@@ -54,7 +54,7 @@ export const readOutlet: Reader<OutletLoss> = (text, units) => {
 	function ofCoefficient(value: number, shown: string): Reading<OutletLoss> {
 		const refuse = (message: string): Reading<OutletLoss> => ({
 			ok: false,
-			message: `${quoted(text)}: ${message}.`,
+			message: refusal(text, message),
 			expected: 'a coefficient from 0 up, such as louvre C 1.2'
 		});
 		if (isStatic) return refuse('a coefficient counts total pressure, not static');

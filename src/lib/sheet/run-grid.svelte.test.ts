@@ -182,7 +182,7 @@ describe('typing in the grid', () => {
 		const grid = gridOf();
 		go(grid, 1, 'size');
 		write(grid, '24xx12');
-		expect(grid.reading).toMatchObject({ ok: false, message: '“24xx12”: a figure of the size is missing' });
+		expect(grid.reading).toMatchObject({ ok: false, message: '“24xx12”: a figure of the size is missing.' });
 		press(grid, 'Enter');
 		expect(typed(grid, 'size')[1]).toBe('24xx12');
 		const row = grid.rows[1];
@@ -404,7 +404,9 @@ describe('copy and paste', () => {
 		grid.paste('S1\tA\n'.repeat(1_000_000));
 		expect(performance.now() - begun).toBeLessThan(2_000);
 		expect(grid.open.sheet).toBe(before);
-		expect(grid.notice).toBe('The clipboard holds 1000000 rows; there is room for 5000 more. Nothing was pasted.');
+		expect(grid.notice).toBe(
+			'Nothing was pasted: the clipboard holds 1000000 rows, and the sheet has room for 5000 more.'
+		);
 		grid.paste('Z\n');
 		expect(grid.notice).toBe('');
 	});
@@ -415,7 +417,7 @@ describe('copy and paste', () => {
 		expect(grid.rows).toHaveLength(MOST_ROWS);
 		go(grid, MOST_ROWS - 1, 'tag');
 		grid.paste('X\nY');
-		expect(grid.notice).toBe('The clipboard holds 2 rows; there is room for 1 more. Nothing was pasted.');
+		expect(grid.notice).toBe('Nothing was pasted: the clipboard holds 2 rows, and the sheet has room for 1 more.');
 		expect(valueOf(grid.rows[MOST_ROWS - 1]!, 'tag')).toBe(`R${MOST_ROWS - 1}`);
 	}, 20_000);
 });

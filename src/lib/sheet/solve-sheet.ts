@@ -1,4 +1,4 @@
-import { solveDesign, type DesignDocument, type Problem, type Solution } from '$lib/engine';
+import { sentence, solveDesign, type DesignDocument, type Problem, type Solution } from '$lib/engine';
 import { documentOf } from './design-document';
 import type { Sheet } from './sheet';
 import type { SheetProblem } from './sheet-problem';
@@ -21,7 +21,7 @@ export function solveSheet(sheet: Sheet): SolvedSheet {
 	if (result.ok) return { document, solution: result.solution, problems, uncounted: left };
 	const found = result.problems.map((problem) => {
 		const { message, expected } = problem;
-		return { ...placeOf(problem, document), message, expected };
+		return { ...placeOf(problem, document), message: sentence(message), expected };
 	});
 	return { document, solution: null, problems: [...problems, ...found], uncounted: left };
 }

@@ -25,7 +25,7 @@ export function coefficientOf(kind: string, parameters: FittingParameters, conte
 	if (!entry.shapes.includes(context.size.shape)) note(`the source is not for ${context.size.shape} ducts`);
 	const values = readParameters(entry, parameters, note);
 	const coefficient = definition.coefficient(values, context, note);
-	if (context.reynolds < TURBULENT) note(`the source is for turbulent flow; Re is ${Math.floor(context.reynolds)}`);
+	if (context.reynolds < TURBULENT) note(turbulentNote(context.reynolds, notes));
 	return {
 		coefficient: coefficient === 0 ? 0 : coefficient, // never -0
 		method: entry.method,
@@ -43,4 +43,10 @@ export function coefficientOf(kind: string, parameters: FittingParameters, conte
 		inRange: notes.length === 0,
 		rangeNote: notes.length === 0 ? null : notes.join('; ')
 	};
+}
+
+/** The Reynolds number is told once: a note on the range of a formula may have told it already. */
+function turbulentNote(reynolds: number, notes: readonly string[]): string {
+	const isTold = notes.some((text) => text.startsWith('Reynolds number'));
+	return `the source is for turbulent flow${isTold ? '' : `; Re is ${Math.floor(reynolds)}`}`;
 }

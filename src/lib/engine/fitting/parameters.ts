@@ -1,4 +1,5 @@
 import type { Range } from '../errors';
+import { shortFigure } from '../short-figure';
 import type { Note, ParameterValues } from './definition';
 import type { CatalogueEntry, FittingParameter, FittingParameters } from './types';
 
@@ -25,17 +26,21 @@ export function choiceParameter(
 	return { name, label, unit: '', default: standard, min: bounded ? min : 0, max: bounded ? max : 0, options };
 }
 
+function outside(value: number, range: Range, what: string): string {
+	return `${what} ${shortFigure(value, range)} is outside ${range.min} to ${range.max}`;
+}
+
 /** value within range, with a note when it was outside. */
 export function heldWithin(value: number, range: Range, what: string, note: Note): number {
 	if (value >= range.min && value <= range.max) return value;
 	const held = value < range.min ? range.min : range.max;
-	note(`${what} ${value} is outside ${range.min} to ${range.max}; taken at ${held}`);
+	note(`${outside(value, range, what)}, and is taken at the nearer end`);
 	return held;
 }
 
 /** A note when value is outside range, where the formula is used all the same. */
 export function noteOutside(value: number, range: Range, what: string, note: Note): void {
-	if (!(value >= range.min && value <= range.max)) note(`${what} ${value} is outside ${range.min} to ${range.max}`);
+	if (!(value >= range.min && value <= range.max)) note(outside(value, range, what));
 }
 
 /** Parameters of a document read for one entry: defaults for what is missing, limits for what is beyond them. */

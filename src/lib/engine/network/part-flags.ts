@@ -25,17 +25,18 @@ export function partFlags(
 			rule: 'coefficient-range',
 			row: row.tag,
 			severity: inRange ? 'note' : 'caution',
-			message: `${name}: ${note}`,
+			message: `${name}: ${note}.`,
 			basis: 'range of the source of the coefficient'
 		});
 
 	if (solved.items.some((item) => item.toBeConfirmed)) {
 		const open = solved.items.filter((item) => item.toBeConfirmed).map((item) => item.name);
+		const names = [...new Set(open)];
 		flags.push({
 			rule: 'to-be-confirmed',
 			row: row.tag,
 			severity: 'note',
-			message: `To be confirmed: ${open.join(', ')}.`,
+			message: `To be confirmed: ${names.join(', ')}.`,
 			value: open.length,
 			basis: 'marked so in the design'
 		});

@@ -1,6 +1,7 @@
 import type { DesignDocument, DesignRow, Problem, Solution, SolvedRow, SolveResult } from '../document/types';
 import { fault, locate } from '../document/fault';
 import { OutOfRangeError } from '../errors';
+import { shortFigure } from '../short-figure';
 import { ENGINE_VERSION } from '../version';
 import { flagsOf } from './flags';
 import { designFlows } from './flows';
@@ -87,7 +88,7 @@ function lossOrProblem(solve: () => RowLoss, place: number): RowLoss | Problem {
 function outsideProblem(error: unknown, path: readonly (string | number)[]): Problem {
 	if (!(error instanceof OutOfRangeError)) throw error;
 	const { formula, symbol, value, range } = error;
-	const message = `${formula}: ${symbol} = ${value} is outside the range of the formula`;
+	const message = `${formula}: ${symbol} = ${shortFigure(value, range)} is outside the range of the formula`;
 	return fault('outside-formula', path, message, `${symbol} from ${range.min} to ${range.max}`);
 }
 

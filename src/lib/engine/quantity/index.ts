@@ -25,4 +25,4 @@ export {
 	type Shown
 } from './format';
 export { editSize, editText } from './edit-text';
-export { plainSigns, plainText, quoted } from './plain-text';
+export { plainSigns, plainText, quoted, refusal, sentence } from './plain-text';

@@ -1,6 +1,6 @@
 import { Decimal } from './decimal';
 import { shortDigits } from './digits';
-import { plainText, quoted } from './plain-text';
+import { plainText, refusal } from './plain-text';
 import type { Reading, UnitSystem } from './reading';
 import { readSum, type Sum } from './sum';
 import type { TermGrammar } from './term';
@@ -39,9 +39,9 @@ const LEAST = 1e-12; // of any SI value but zero
 /** Reads one figure of this kind; the value is SI. Never throws. */
 export function readMeasure(measure: Measure, text: string, units: UnitSystem): Reading<number> {
 	const expected = `${measure.noun}, such as ${measure.example[units]}`;
-	const refuse = (why: string): Reading<number> => ({ ok: false, message: `${quoted(text)}: ${why}`, expected });
+	const refuse = (why: string): Reading<number> => ({ ok: false, message: refusal(text, why), expected });
 	const plain = plainText(text);
-	if (plain === '') return { ok: false, message: 'nothing is typed', expected };
+	if (plain === '') return { ok: false, message: 'Nothing is typed.', expected };
 	if (plain.length > LONGEST) return refuse('too long for a figure');
 	const bare = plain.replace(/ ?\bper\b ?/, '/').replace(measure.idle ?? /$^/, '');
 	const result = readSum(bare, measure, units);

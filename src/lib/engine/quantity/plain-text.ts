@@ -37,6 +37,20 @@ export function plainText(text: string): string {
 	return plainSigns(text).toLowerCase().trim();
 }
 
+/** A message as a sentence: it ends with one full stop. */
+export function sentence(text: string): string {
+	const plain = text.trim();
+	const said = /^[a-z][a-z]/.test(plain) ? plain.charAt(0).toUpperCase() + plain.slice(1) : plain;
+	return /[.!?…]$/.test(said) ? said : `${said}.`;
+}
+
+/** Why a typed text is not taken, as a sentence that names it once. */
+export function refusal(typed: string, why: string): string {
+	const name = quoted(typed);
+	const isNamed = why.toLowerCase().startsWith(name.toLowerCase());
+	return sentence(isNamed ? name + why.slice(name.length) : `${name}: ${why}`);
+}
+
 /** What was typed, as quoted back in a message; long texts are cut. */
 export function quoted(text: string): string {
 	const typed = text.replace(/\s+/g, ' ').trim();

@@ -160,7 +160,7 @@ describe('what is no size', () => {
 	});
 
 	it.each(['', '   ', '\u00a0'])('nothing typed is refused', (text) => {
-		expect(readSize(text, 'IP')).toMatchObject({ ok: false, message: 'nothing is typed' });
+		expect(readSize(text, 'IP')).toMatchObject({ ok: false, message: 'Nothing is typed.' });
 	});
 });
 

@@ -3,7 +3,7 @@ import { Decimal } from './decimal';
 import { shortDigits } from './digits';
 import { withLabel } from './measure';
 import { withoutFractions } from './mixed-fractions';
-import { plainText, quoted } from './plain-text';
+import { plainText, quoted, refusal } from './plain-text';
 import type { Reading, UnitSystem } from './reading';
 import { withoutNotes } from './size-notes';
 import { readSum, type Sum } from './sum';
@@ -38,9 +38,9 @@ export function readSize(text: string, units: UnitSystem): Reading<Size> {
 		units === 'SI'
 			? 'a size, such as 600x350, ø200, oval 510x255 or 12"'
 			: 'a size, such as 24x12, 12"ø, 20x10 FO or 315 mm';
-	const refuse = (why: string): Reading<Size> => ({ ok: false, message: `${quoted(text)}: ${why}`, expected });
+	const refuse = (why: string): Reading<Size> => ({ ok: false, message: refusal(text, why), expected });
 	const plain = plainText(text);
-	if (plain === '') return { ok: false, message: 'nothing is typed', expected };
+	if (plain === '') return { ok: false, message: 'Nothing is typed.', expected };
 	if (plain.length > 100) return refuse('too long for a size');
 	const { size: bareText, notes } = withoutNotes(withoutFractions(plain, units));
 	const sides = sidesOf(bareText, units);

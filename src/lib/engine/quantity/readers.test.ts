@@ -188,7 +188,7 @@ describe('what is no figure', () => {
 	});
 
 	it('names the unit that belongs elsewhere', () => {
-		expect(readers.flow('20 Pa', 'SI')).toMatchObject({ message: '“20 Pa”: Pa is not a unit of a flow' });
+		expect(readers.flow('20 Pa', 'SI')).toMatchObject({ message: '“20 Pa”: Pa is not a unit of a flow.' });
 	});
 
 	it('is never a throw, and never a value that is not finite', () => {

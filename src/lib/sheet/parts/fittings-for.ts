@@ -1,4 +1,11 @@
-import { fittingEntry, type CatalogueEntry, type FittingParameter, type Junction, type RowSize } from '$lib/engine';
+import {
+	fittingEntry,
+	sentence,
+	type CatalogueEntry,
+	type FittingParameter,
+	type Junction,
+	type RowSize
+} from '$lib/engine';
 import { parameterWords } from './describe-part';
 import type { DocumentEquipment, DocumentFitting, DocumentParts, PartFitting, PartProblem, Parts } from './parts';
 
@@ -57,7 +64,8 @@ function fromCatalogue(part: PartFitting, size: RowSize): Suited {
 			return problem(part, `${entry.name} has no ${parameterWords({ [name]: value })[0]}`, takes(entry));
 		}
 		const fault = faultOf(known, value);
-		if (fault !== null) return problem(part, `${part.name}: ${known.label} ${value} ${fault}`, takes(entry));
+		if (fault !== null)
+			return problem(part, `${part.name}: ${known.label.toLowerCase()} ${value} ${fault}`, takes(entry));
 		parameters[name] = value;
 	}
 	return { ok: true, fitting: { kind: entry.key, ...common(part), ...parameters } };
@@ -92,10 +100,10 @@ function unsuited(part: PartFitting, size: RowSize): Suited {
 
 function faultOf(parameter: FittingParameter, value: number | string): string | null {
 	if (parameter.options !== undefined) {
-		return parameter.options.includes(value) ? null : `is not one of ${parameter.options.join(', ')}`;
+		return parameter.options.includes(value) ? null : 'is none of the choices';
 	}
 	if (typeof value !== 'number') return 'is not a figure';
-	return value < parameter.min || value > parameter.max ? `is outside ${parameter.min} to ${parameter.max}` : null;
+	return value < parameter.min || value > parameter.max ? 'is outside the catalogue’s range' : null;
 }
 
 function takes(entry: CatalogueEntry): string {
@@ -108,5 +116,5 @@ function takes(entry: CatalogueEntry): string {
 }
 
 function problem(part: PartFitting, message: string, expected: string): Suited {
-	return { ok: false, problem: { part: part.name, message, expected } };
+	return { ok: false, problem: { part: part.name, message: sentence(message), expected } };
 }

@@ -1,4 +1,4 @@
-import type { Picture, UnitSystem } from '$lib/engine';
+import { quoted, refusal, type Picture, type UnitSystem } from '$lib/engine';
 import { takeAmounts, type Amounts } from './amounts';
 import { findWord, nearestWords, type Role, type Word } from './lexicon';
 import type { PartEquipment, PartFitting, PartWord } from './parts';
@@ -34,11 +34,12 @@ function unknownWord(typed: string): PartReading {
 	if (/^\d*[.,]?\d+$/.test(typed))
 		return {
 			ok: false,
-			message: `“${typed}” is a figure without a sign`,
+			message: `${quoted(typed)} is a figure without a sign.`,
 			expected: `${typed} Pa for a pressure, or C${typed} for a coefficient`
 		};
-	if (/\d/.test(typed)) return { ok: false, message: `“${typed}” is not understood`, expected: exampleOf('elbow') };
-	const message = `“${typed}” is not a known part`;
+	if (/\d/.test(typed))
+		return { ok: false, message: `${quoted(typed)} is not understood.`, expected: exampleOf('elbow') };
+	const message = `${quoted(typed)} is not a known part.`;
 	return { ok: false, message, expected: `known words nearest to it: ${nearestWords(typed).join(', ')}` };
 }
 
@@ -52,7 +53,7 @@ function assembled(
 ): PartReading {
 	const refuse = (message: string, expected: string): PartReading => ({
 		ok: false,
-		message: `“${typed}”: ${message}`,
+		message: refusal(typed, message),
 		expected
 	});
 	const { coefficient, pressure, count, parameters, toBeConfirmed } = amounts;
@@ -69,7 +70,8 @@ function assembled(
 		return { ok: true, slot: 'junction', part: fitting('fixed') };
 	}
 	if (pressure !== null) {
-		if (!pressure.ok) return refuse(pressure.message, pressure.expected);
+		// The figure alone is named by its own reading; here the part is.
+		if (!pressure.ok) return refuse(pressure.message.replace(/^“[^”]*”: /, ''), pressure.expected);
 		if (count > MOST.equipment) return refuse('the count is too great', `at most ${MOST.equipment}`);
 		if (amounts.exponent !== null && amounts.exponent > 4) return refuse('the exponent is too great', 'at most 4');
 		const part = { name, loss: pressure.value, exponent: amounts.exponent ?? 2, picture, toBeConfirmed };

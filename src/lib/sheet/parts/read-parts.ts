@@ -1,4 +1,4 @@
-import { plainSigns, type Reading, type UnitSystem } from '$lib/engine';
+import { plainSigns, quoted, type Reading, type UnitSystem } from '$lib/engine';
 import { describePart, describeSeveral } from './describe-part';
 import type { PartEquipment, PartFitting, Parts } from './parts';
 import { readPart } from './read-part';
@@ -15,9 +15,10 @@ const EXPECTED = 'parts between commas, such as 2x elbow r1.0 C0.23, silencer 25
  * from the catalogue where that has it. An empty text is a row without parts. Never throws.
  */
 export function readParts(text: string, units: UnitSystem): Reading<Parts> {
-	if (text.length > LONGEST) return { ok: false, message: 'the text is too long for one row', expected: EXPECTED };
+	if (text.length > LONGEST) return { ok: false, message: 'The text is too long for one row.', expected: EXPECTED };
 	const pieces = splitParts(plainSigns(text.replace(/[\r\n]+/g, ';')));
-	if (pieces.length > MOST) return { ok: false, message: `more than ${MOST} parts in one row`, expected: EXPECTED };
+	if (pieces.length > MOST)
+		return { ok: false, message: `There are more than ${MOST} parts in one row.`, expected: EXPECTED };
 	let junction: PartFitting | null = null;
 	const fittings: PartFitting[] = [];
 	const equipment: PartEquipment[] = [];
@@ -28,14 +29,14 @@ export function readParts(text: string, units: UnitSystem): Reading<Parts> {
 		else if (reading.slot === 'fitting') fittings.push(reading.part);
 		else if (junction === null) junction = reading.part;
 		else {
-			const message = `“${piece}” is a second junction: a row has one, at its fan end`;
-			return { ok: false, message, expected: 'put the other junction in the row that starts there' };
+			const message = `${quoted(piece)} is a second junction: a row has one, at its fan end.`;
+			return { ok: false, message, expected: 'the other junction in the row that starts there' };
 		}
 	}
 	if (equipment.length > MOST_LOSSES)
 		return {
 			ok: false,
-			message: `${equipment.length} losses of equipment in one row`,
+			message: `There are ${equipment.length} losses of equipment in one row.`,
 			expected: `at most ${MOST_LOSSES}`
 		};
 	const parts: Parts = { junction, fittings, equipment };

@@ -19,7 +19,9 @@ export const actions: Actions = {
 		const { problems, uncounted } = saved.solved;
 		const first =
 			problems[0]?.message ??
-			(uncounted.length ? `${uncounted.length} rows do not count yet.` : 'The sheet has no rows.');
+			(uncounted.length
+				? `${uncounted.length === 1 ? '1 row does' : `${uncounted.length} rows do`} not count yet.`
+				: 'The sheet has no rows.');
 		return message(form, `Not saved: a version stands for the whole sheet. ${first}`, { status: 409 });
 	}
 };
