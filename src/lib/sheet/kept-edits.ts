@@ -1,14 +1,14 @@
-import { z } from 'zod';
 import { sentEditSchema, type SentEdit } from './edit';
 
 const key = (designId: string) => `evendraft/unsent/${designId}`;
-const storedSchema = z.array(sentEditSchema);
 
 /** Edits of a design that this device has not yet seen accepted; they outlive a reload and a closed browser. */
 export function readKept(designId: string): SentEdit[] {
 	try {
-		const stored = storedSchema.safeParse(JSON.parse(localStorage.getItem(key(designId)) ?? '[]'));
-		return stored.success ? stored.data : [];
+		const stored: unknown = JSON.parse(localStorage.getItem(key(designId)) ?? '[]');
+		if (!Array.isArray(stored)) return [];
+		// One that cannot be read takes no other along.
+		return stored.flatMap((one) => sentEditSchema.safeParse(one).data ?? []);
 	} catch {
 		return [];
 	}

@@ -97,6 +97,7 @@ export class OpenSheet {
 	/** Starts the worker and sends what an earlier visit kept. In the browser only. Returns the end of it. */
 	start(): () => void {
 		this.#figures.start(() => this.#sheet);
+		this.outbox.recall();
 		const kept = readKept(this.designId);
 		for (const { edit } of kept) {
 			const entry = entryOf(edit);

@@ -4,6 +4,7 @@ import type { SentEdit } from './edit';
 import { keep, readKept } from './kept-edits';
 import { Outbox } from './outbox.svelte';
 import type { EditsReply } from './server-reply';
+import { readSetAside, setAsideWords } from './set-aside';
 
 const DESIGN = 'design-1';
 
@@ -215,6 +216,104 @@ describe('the outbox', () => {
 	});
 });
 
+describe('an edit that the server can never take', () => {
+	/** Takes messages but those with one of these edits. */
+	const without = (server: ReturnType<typeof serverOf>, bad: readonly number[], status = 422) => {
+		const posts: number[] = [];
+		const send: typeof fetch = async (address, init) => {
+			const { edits } = JSON.parse(String(init?.body)) as Posted;
+			posts.push(edits.length);
+			const isBad = edits.some(({ id }) => bad.some((n) => id === rowId(n)));
+			return isBad ? Response.json({ title: 'Not of the form' }, { status }) : server.send(address, init);
+		};
+		return { posts, send };
+	};
+	const words = 'Not taken by the server: Not of the form. It was “2”.';
+
+	it.each([400, 413, 422])('is set aside at an answer of %d, and those behind it are sent', async (status) => {
+		const server = serverOf();
+		const { box, replies } = boxOf(without(server, [2], status).send);
+		box.fill([edit(1), edit(2), edit(3)]);
+		await settled();
+		expect(server.log).toEqual([rowId(1), rowId(3)]);
+		expect(box.setAside).toEqual([{ ...edit(2), reason: 'Not of the form' }]);
+		expect([box.state, box.reason, box.unsent, readKept(DESIGN)]).toEqual(['refused', words, [], []]);
+		// The sheet is told which edit did not go in, so that it leaves the screen.
+		expect(replies.map(({ sent }) => sent)).toContainEqual([rowId(2)]);
+	});
+
+	it('is found among two hundred in few messages', async () => {
+		const server = serverOf();
+		const { posts, send } = without(server, [137]);
+		const { box } = boxOf(send);
+		box.fill(Array.from({ length: 200 }, (_, n) => edit(n)));
+		await settled();
+		expect(server.log).toEqual(Array.from({ length: 200 }, (_, n) => rowId(n)).filter((id) => id !== rowId(137)));
+		expect(idsOf(box.setAside)).toEqual([rowId(137)]);
+		expect(posts.length).toBeLessThan(25);
+	});
+
+	it('is one of several, each set aside by itself', async () => {
+		const server = serverOf();
+		const { box } = boxOf(without(server, [0, 7, 8, 19]).send);
+		box.fill(Array.from({ length: 20 }, (_, n) => edit(n)));
+		await settled();
+		expect(idsOf(box.setAside)).toEqual([0, 7, 8, 19].map(rowId));
+		expect(server.log).toHaveLength(16);
+	});
+
+	it('outlives a reload, and is told of until a person puts it away', async () => {
+		const { box } = boxOf(without(serverOf(), [2]).send);
+		box.put(edit(2));
+		await settled();
+		const again = boxOf(serverOf().send).box;
+		again.recall();
+		expect([again.state, again.reason, idsOf(again.setAside)]).toEqual(['refused', words, [rowId(2)]]);
+		again.put(edit(5));
+		await settled();
+		expect([again.state, again.reason]).toEqual(['refused', words]);
+		again.letGo(rowId(2));
+		expect([again.state, again.reason, again.setAside]).toEqual(['saved', '', []]);
+		expect(readSetAside(DESIGN)).toEqual([]);
+	});
+
+	it('is not blamed where the server takes no message at all', async () => {
+		const server = serverOf();
+		const refuse: Answer = () => Response.json({ title: 'This is not JSON.' }, { status: 400 });
+		server.answers.push(refuse, refuse);
+		const { box } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		expect([box.state, box.reason, box.setAside]).toEqual(['kept', 'This is not JSON.', []]);
+		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1)]);
+		await vi.advanceTimersByTimeAsync(500);
+		expect([box.state, server.log]).toEqual(['saved', [rowId(1)]]);
+	});
+
+	it('waits where the line is cut before it is set aside', async () => {
+		const server = serverOf();
+		server.answers.push(
+			() => Response.json({ title: 'Not of the form' }, { status: 422 }),
+			() => Promise.reject(new TypeError('failed'))
+		);
+		const { box } = boxOf(server.send);
+		box.put(edit(1));
+		await settled();
+		expect([box.state, box.setAside, idsOf(readKept(DESIGN))]).toEqual(['kept', [], [rowId(1)]]);
+	});
+
+	it('is told of with what was typed, also of several cells', () => {
+		const wordsOf = (one: SentEdit['edit']) => setAsideWords({ id: rowId(1), edit: one, reason: 'Too large.' });
+		const sets = ['24x12', '5', 'a', 'b'].map((typed, n) => ({
+			...{ kind: 'set' as const, row: rowId(n), field: 'tag', typed, units: 'SI' as const }
+		}));
+		expect(wordsOf({ kind: 'batch', edits: sets })).toBe(
+			'Not taken by the server: Too large. It was “24x12”, “5”, “a” and 1 more.'
+		);
+		expect(wordsOf({ kind: 'delete', rows: [rowId(1)] })).toContain('It was a deletion of rows.');
+	});
+});
+
 describe('edits kept on a device', () => {
 	it('outlive a reload, and are sent by the next visit in their order', async () => {
 		const away = boxOf(() => Promise.reject(new TypeError('failed')));
@@ -252,6 +351,11 @@ describe('edits kept on a device', () => {
 		localStorage.setItem(`evendraft/unsent/${DESIGN}`, text);
 		expect(readKept(DESIGN)).toEqual([]);
 		expect(keep(DESIGN, [edit(1)])).toBe(true);
+		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1)]);
+	});
+
+	it('are not lost with one that cannot be read', () => {
+		localStorage.setItem(`evendraft/unsent/${DESIGN}`, JSON.stringify([{ id: 'x' }, edit(1)]));
 		expect(idsOf(readKept(DESIGN))).toEqual([rowId(1)]);
 	});
 

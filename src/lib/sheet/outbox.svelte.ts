@@ -1,6 +1,7 @@
 import type { SentEdit } from './edit';
 import { keep } from './kept-edits';
 import type { EditsReply } from './server-reply';
+import { keepSetAside, readSetAside, setAsideWords, type SetAside } from './set-aside';
 
 export type SendState = 'saved' | 'saving' | 'kept' | 'refused';
 
@@ -8,6 +9,8 @@ export type SendState = 'saved' | 'saving' | 'kept' | 'refused';
 const WAITS = [500, 1_000, 2_000, 5_000, 10_000];
 /** Edits in one message, so that a large paste stays below the server's limit. */
 const MOST_AT_ONCE = 200;
+/** Answers that the same message would get for ever: it is malformed, too large or not of the form. */
+const NEVER_TAKEN = [400, 413, 422];
 
 interface Options {
 	readonly designId: string;
@@ -17,13 +20,25 @@ interface Options {
 	readonly send?: typeof fetch;
 }
 
-/** Carries edits to the server in their order, each until it is accepted or refused. Nothing leaves before that. */
+const NO_ROOM = 'This device has no room to keep edits; leave the page open until they are saved.';
+
+/** A message that the server will never take. */
+interface NotTaken {
+	readonly notTaken: string;
+}
+
+/**
+ * Carries edits to the server in their order, each until it is accepted or refused. Nothing leaves before that. An edit
+ * that the server can never take is set aside, so that it does not hold up those behind it.
+ */
 export class Outbox {
 	#options: Options;
 	#unsent = $state.raw<readonly SentEdit[]>([]);
 	#state = $state<SendState>('saved');
 	#savedAt = $state<Date | null>(null);
 	#reason = $state('');
+	#setAside = $state.raw<readonly SetAside[]>([]);
+	#atOnce = MOST_AT_ONCE;
 	#running = false;
 	#stopped = false;
 	#tries = 0;
@@ -49,6 +64,23 @@ export class Outbox {
 		return this.#reason;
 	}
 
+	/** Edits that the server did not take, with why; kept on this device. */
+	get setAside() {
+		return this.#setAside;
+	}
+
+	/** Brings back what was set aside on an earlier visit. In the browser only. */
+	recall(): void {
+		this.#setAside = readSetAside(this.#options.designId);
+		if (!this.#unsent.length) this.#rest();
+	}
+
+	/** Forgets an edit that was set aside, when a person has seen it. */
+	letGo(id: string): void {
+		this.#keepAside(this.#setAside.filter((one) => one.id !== id));
+		if (!this.#unsent.length) this.#rest();
+	}
+
 	/** Puts an edit last and sends it as soon as those before it are through. */
 	put(edit: SentEdit): void {
 		this.fill([...this.#unsent, edit]);
@@ -58,8 +90,11 @@ export class Outbox {
 	fill(edits: readonly SentEdit[]): void {
 		this.#unsent = edits;
 		const kept = keep(this.#options.designId, edits);
-		if (this.#state !== 'kept') this.#state = edits.length ? 'saving' : 'saved';
-		if (!kept) this.#reason = 'This device has no room to keep edits; leave the page open until they are saved.';
+		if (this.#state !== 'kept') {
+			if (edits.length) this.#state = 'saving';
+			else this.#rest();
+		}
+		if (!kept) this.#reason = NO_ROOM;
 		void this.flush();
 	}
 
@@ -82,22 +117,62 @@ export class Outbox {
 	}
 
 	async #sendSome(): Promise<boolean> {
-		const sent = this.#unsent.slice(0, MOST_AT_ONCE);
+		const sent = this.#unsent.slice(0, this.#atOnce);
 		const reply = await this.#post(sent);
 		if (!reply) return false;
+		const [first] = sent;
+		if ('notTaken' in reply) {
+			// Of several, the half that is taken goes its way; in the end the one at fault stands alone.
+			if (!first || sent.length > 1) this.#atOnce = Math.ceil(sent.length / 2);
+			else return this.#putAside(first, reply.notTaken);
+			return true;
+		}
+		this.#accept(reply, sent);
+		return true;
+	}
+
+	#accept(reply: EditsReply, sent: readonly SentEdit[]): void {
 		this.#tries = 0;
 		this.#options.onreply(reply, sent);
 		const gone = new Set(sent.map(({ id }) => id));
 		this.#unsent = this.#unsent.filter(({ id }) => !gone.has(id));
 		keep(this.#options.designId, this.#unsent, gone);
-		const [refused] = reply.refused;
-		this.#reason = refused?.reason ?? '';
-		this.#state = refused ? 'refused' : this.#unsent.length ? 'saving' : 'saved';
 		this.#savedAt = new Date();
+		const refused = reply.refused.find(({ id }) => !this.#setAside.some((one) => one.id === id));
+		if (this.#unsent.length && !refused) {
+			this.#state = 'saving';
+			this.#reason = '';
+		} else this.#rest(refused?.reason);
+	}
+
+	/** Sets one edit aside, unless the server takes no message at all: then the edit is not at fault, and waits. */
+	async #putAside(edit: SentEdit, reason: string): Promise<boolean> {
+		const reply = await this.#post([]);
+		if (!reply) return false;
+		if ('notTaken' in reply) {
+			this.#wait(reply.notTaken);
+			return false;
+		}
+		this.#atOnce = MOST_AT_ONCE;
+		this.#keepAside([...this.#setAside.filter(({ id }) => id !== edit.id), { ...edit, reason }]);
+		this.#accept({ ...reply, refused: [...reply.refused, { id: edit.id, reason }] }, [edit]);
 		return true;
 	}
 
-	async #post(edits: readonly SentEdit[]): Promise<EditsReply | null> {
+	#keepAside(edits: readonly SetAside[]): void {
+		this.#setAside = edits;
+		if (!keepSetAside(this.#options.designId, edits)) this.#reason = NO_ROOM;
+	}
+
+	/** The state when nothing is under way. */
+	#rest(refused = ''): void {
+		const last = this.#setAside.at(-1);
+		this.#reason = refused || (last ? setAsideWords(last) : '');
+		this.#state = this.#reason ? 'refused' : 'saved';
+		this.#atOnce = MOST_AT_ONCE;
+	}
+
+	async #post(edits: readonly SentEdit[]): Promise<EditsReply | NotTaken | null> {
 		const send = this.#options.send ?? fetch;
 		try {
 			const answer = await send(`/api/v1/designs/${this.#options.designId}/edits`, {
@@ -108,6 +183,7 @@ export class Outbox {
 			const reply: unknown = answer.ok ? await answer.json() : null;
 			if (isReply(reply)) return reply;
 			if (answer.ok) throw new TypeError('no reply to edits');
+			if (NEVER_TAKEN.includes(answer.status)) return { notTaken: await reasonOf(answer) };
 			this.#wait(answer.status === 401 ? 'You are signed out. Sign in again in another tab.' : await reasonOf(answer));
 		} catch {
 			this.#wait('The server cannot be reached.');
