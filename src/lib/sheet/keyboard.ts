@@ -34,7 +34,7 @@ export function pressOnGrid(grid: RunGrid, event: KeyboardEvent): boolean {
 			case 'Tab':
 				return stepOut(grid, event.shiftKey ? -1 : 1);
 			case 'Enter':
-				selection.move(event.shiftKey ? -1 : 1, 0);
+				selection.line(event.shiftKey ? -1 : 1);
 				break;
 			case 'F2':
 				grid.edit(null);
@@ -118,7 +118,7 @@ export function pressInEditor(grid: RunGrid, event: KeyboardEvent): boolean {
 	}
 	switch (event.key) {
 		case 'Enter':
-			if (grid.accept()) selection.move(event.shiftKey ? -1 : 1, 0);
+			if (grid.accept()) selection.line(event.shiftKey ? -1 : 1);
 			return true;
 		case 'Tab':
 			if (grid.accept()) selection.step(event.shiftKey ? -1 : 1);

@@ -70,6 +70,31 @@ describe('moving in the grid', () => {
 		expect(grid.activeRow).toBeUndefined();
 	});
 
+	it('goes by Enter to the column where a run of Tab began, and not after the hands went elsewhere', () => {
+		const grid = gridOf();
+		go(grid, 0, 'size');
+		press(grid, '4', 'Tab', '6', 'Tab', '1', 'Enter');
+		expect(at(grid)).toEqual([1, 'size']);
+		press(grid, 'Tab', 'ArrowDown', 'Enter');
+		expect(at(grid)).toEqual([3, 'length']);
+	});
+
+	it('says why a cell takes no text, until the hands go on', () => {
+		const grid = gridOf();
+		go(grid, 0, 'flow');
+		press(grid, '5');
+		expect(grid.editing).toBeNull();
+		expect(grid.notice).toMatch(/^Rows join A: its flow is their sum\./);
+		press(grid, 'ArrowDown');
+		expect(grid.notice).toBe('');
+		go(grid, 1, 'velocity');
+		press(grid, '5');
+		expect(grid.notice).toBe('This column is computed.');
+		const reader = gridOf(ROWS, false);
+		press(reader, 'x');
+		expect(reader.notice).toBe('You may read this sheet, not write in it.');
+	});
+
 	it('goes on by Tab at the end of a row, and leaves the grid at its two ends', () => {
 		const grid = gridOf();
 		expect(press(grid, 'Shift+Tab')).toBe(false);

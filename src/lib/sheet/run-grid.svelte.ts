@@ -43,8 +43,7 @@ export class RunGrid {
 	readonly mayEdit: boolean;
 	#editing = $state.raw<Editing | null>(null);
 	#optional = $state.raw<ReadonlySet<string>>(new Set());
-	/** Told to the person: a refused paste and the like. */
-	notice = $state('');
+	#notice = $state.raw({ text: '', row: 0, column: 0 });
 
 	constructor(open: GridSource, mayEdit: boolean) {
 		this.open = open;
@@ -60,6 +59,15 @@ export class RunGrid {
 	);
 	get optional() {
 		return this.#optional;
+	}
+	/** Told to the person, until the hands go on: a refused paste and the like. */
+	get notice(): string {
+		const { text, row, column } = this.#notice;
+		const { active } = this.selection;
+		return active.row === row && active.column === column ? text : '';
+	}
+	set notice(text: string) {
+		this.#notice = { ...this.selection.active, text };
 	}
 	get editing(): Editing | null {
 		const now = this.#editing;
@@ -110,7 +118,11 @@ export class RunGrid {
 	/** Opens the editor on the active cell. */
 	edit(text: string | null): void {
 		const field = this.activeField;
-		if (!this.mayEdit || !field || !this.isWritable(this.activeRow, field)) return;
+		const refusal = this.#refusal();
+		if (refusal || !field) {
+			this.notice = refusal;
+			return;
+		}
 		const row = this.activeRow;
 		const kept = row ? textToEdit(row, field, this.open.units) : '';
 		this.#editing = {
@@ -121,6 +133,16 @@ export class RunGrid {
 			mode: text === null ? 'amend' : 'replace'
 		};
 		this.type(this.#editing.text);
+	}
+
+	/** Why the active cell takes no text; blank where it does. */
+	#refusal(): string {
+		const [field, row] = [this.activeField, this.activeRow];
+		if (!this.mayEdit) return 'You may read this sheet, not write in it.';
+		if (!field) return 'This column is computed.';
+		if (this.isWritable(row, field)) return '';
+		const tag = row ? valueOf(row, 'tag') : '';
+		return `Rows join ${tag}: its ${field === 'flow' ? 'flow is their sum' : 'end is not an outlet'}. Type at the ends of the run.`;
 	}
 
 	/** Flow, outlet and room belong to the ends of runs; what stands in the middle already can still be taken out. */

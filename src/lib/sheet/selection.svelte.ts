@@ -51,8 +51,12 @@ export class Selection {
 		return row >= top && row <= bottom;
 	}
 
+	/** The column where a run of Tab began, to which Enter goes back. */
+	#runBegan: number | null = null;
+
 	/** Goes to a place; with `extend` the anchor stays. */
 	go(place: Place, extend = false): void {
+		this.#runBegan = null;
 		this.#active = this.#clamped(place);
 		if (!extend) this.#anchor = this.#active;
 	}
@@ -62,8 +66,21 @@ export class Selection {
 		this.go({ row: row + down, column: column + right }, extend);
 	}
 
+	/** Down or up as Enter does: after a run of Tab, in the column where it began. */
+	line(by: 1 | -1): void {
+		const { row, column } = this.active;
+		this.go({ row: row + by, column: this.#runBegan ?? column });
+	}
+
 	/** To the next cell as Tab does: at the end of a row, on to the next one. */
 	step(by: 1 | -1): void {
+		const { row, column } = this.active;
+		const began = this.#runBegan ?? column;
+		this.#step(by);
+		this.#runBegan = this.active.row === row ? began : null;
+	}
+
+	#step(by: 1 | -1): void {
 		const { row, column } = this.active;
 		const last = this.#bounds.columns().length - 1;
 		if (by > 0 && column === last) this.go({ row: row + 1, column: 0 });
