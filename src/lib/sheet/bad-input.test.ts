@@ -5,7 +5,7 @@ import { BAD_CELLS, BAD_SETTINGS, GOOD, MAIN, TRIED } from '../../../tests/sheet
 import { readBlock } from './clipboard';
 import { editsBodySchema, editSchema, sentEditSchema } from './edit';
 import { entryOf } from './entry';
-import { MOST_ROWS, valueOf, type RowField, type SettingField } from './sheet';
+import { MOST_ROWS, valueOf } from './sheet';
 import { isComplete, solveSheet } from './solve-sheet';
 
 /** Everything typed stays in its cell, and sound rows keep their figures. */
