@@ -40,14 +40,14 @@ export const COLUMNS: readonly Column[] = [
 	entered('tag', 'Section', 116, 'Tag of the duct section', { align: 'left' }),
 	entered('joins', 'Joins', 44, 'Tag of the row on the fan’s side; blank where it meets the fan', { align: 'left' }),
 	entered('side', 'Side', 50, 'Supply, return, exhaust or outdoor; blank as the row it joins', { align: 'left' }),
-	entered('serves', 'Serves', 106, 'Room served, or from where to where', { align: 'left', grows: true }),
+	entered('serves', 'Serves', 80, 'Room served, or from where to where', { align: 'left', grows: true }),
 	entered('flow', 'Flow', 54, 'Design flow of the outlet; sums elsewhere', { quantity: 'flow' }),
 	entered('size', 'Size', 84, 'Inside size', { quantity: 'size', align: 'left' }),
 	entered('length', 'Length', 48, 'On the centre line, rigid duct', { quantity: 'length' }),
 	entered('rise', 'Rise', 42, 'Far end over the fan end', { quantity: 'length', optional: true }),
 	entered('flex', 'Flex.', 42, 'Length of flexible duct', { quantity: 'length' }),
 	entered('material', 'Material', 96, 'Blank as in the basis of design', { align: 'left', optional: true }),
-	entered('parts', 'Parts', 116, 'Junction at the fan end, fittings and equipment', { align: 'left' }),
+	entered('parts', 'Parts', 104, 'Junction at the fan end, fittings and equipment', { align: 'left' }),
 	entered('outlet', 'Outlet', 52, 'Total-pressure loss of the outlet at its flow; blank is an open end', {
 		quantity: 'pressure'
 	}),
