@@ -37,6 +37,7 @@ describe('the outlet cell', () => {
 
 	it.each([
 		['grille', '“grille” lacks its loss', 'grille 25 Pa, or grille C 1.2'],
+		['valve E1', '“valve E1” lacks its loss', 'valve E1 25 Pa'],
 		['Pa 25', '“Pa 25”', 'grille 25 Pa'],
 		['grille -5', '“-5”', 'a pressure'],
 		['louvre C -1', 'cannot be negative', 'C 1.2'],

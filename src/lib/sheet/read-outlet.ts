@@ -5,7 +5,7 @@ import type { OutletLoss } from './sheet';
 const OPEN = /^(open|open end|o)$/i;
 const BASIS = /\b(total|static|tp|sp)\b/gi;
 /** Words that begin with a letter, before a figure or at the end. */
-const WORDS = /^([a-z][^\d"]*?(?: [a-z]{1,4}-?\d{1,4}(?= ))?)(?= -?[\d.,]| c ?[=:]? ?-?[\d.,]|$)/i;
+const WORDS = /^([a-z][^\d"]*?(?: [a-z]{1,4}-?\d{1,4}(?= |$))?)(?= -?[\d.,]| c ?[=:]? ?-?[\d.,]|$)/i;
 const COEFFICIENT = /^c ?[=:]? ?(-?\d*[.,]?\d+)$/i;
 const MOST_COEFFICIENT = 1_000_000;
 const LONGEST = 60; // characters of the words

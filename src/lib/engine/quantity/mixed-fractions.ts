@@ -17,6 +17,12 @@ export function withoutFractions(plain: string, units: UnitSystem): string {
 		const part = new Decimal(over).div(under);
 		const isMixed = whole !== undefined && inInches && part.lt(1);
 		const isAlone = whole === undefined && INCHES_FOLLOW.test(plain.slice(at + all.length));
-		return isMixed || isAlone ? part.plus(whole ?? 0).toFixed() : all;
+		// Six decimals hold a sixty-fourth, and are never taken for thousands as three could be.
+		return isMixed || isAlone ? part.plus(whole ?? 0).toFixed(6) : all;
 	});
+}
+
+/** Whether a mixed fraction stands in a text that does not say it is in inches. */
+export function lacksInchSign(plain: string, units: UnitSystem): boolean {
+	return units === 'SI' && !plain.startsWith('=') && !INCHES.test(plain) && /\d(?: ?- ?| )\d+\/\d/.test(plain);
 }

@@ -40,7 +40,7 @@ export function plainText(text: string): string {
 /** A message as a sentence: it ends with one full stop. */
 export function sentence(text: string): string {
 	const plain = text.trim();
-	const said = /^[a-z][a-z]/.test(plain) ? plain.charAt(0).toUpperCase() + plain.slice(1) : plain;
+	const said = /^(?:a |[a-z]{2})/.test(plain) ? plain.charAt(0).toUpperCase() + plain.slice(1) : plain;
 	return /[.!?…]$/.test(said) ? said : `${said}.`;
 }
 

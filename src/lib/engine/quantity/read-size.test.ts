@@ -44,6 +44,7 @@ const shorthand: [string, UnitSystem, Size][] = [
 	['1/2"', 'SI', round(0.0127)],
 	['17 1/2"x9 3/8"', 'SI', rect(0.4445, 0.238125)],
 	['17-1/2 x 9-3/8 in', 'SI', rect(0.4445, 0.238125)],
+	['9-3/8 in', 'SI', round(0.238125)],
 	['17½” × 9⅜”', 'SI', rect(0.4445, 0.238125)],
 	['17 1/2 x 9 3/8', 'IP', rect(0.4445, 0.238125)],
 	['oval 20 1/4"x10"', 'IP', oval(0.51435, 0.254)],
@@ -76,6 +77,20 @@ const shorthand: [string, UnitSystem, Size][] = [
 	['12" sq', 'IP', rect(0.3048, 0.3048)],
 	['2\'-0"x1\'-0"', 'IP', rect(0.6096, 0.3048)]
 ];
+
+describe('a fraction of an inch', () => {
+	it('is said as a decimal, without doubt of the point, and offered again as it was typed', () => {
+		const reading = understood('9-3/8 in', 'SI');
+		expect(reading.words).toContain('9.375 in');
+		expect(reading.why).not.toContain('point');
+		expect(reading.other).toBe('9-3/8 in x 9-3/8 in');
+		expect(readSize(reading.other ?? '', 'SI')).toMatchObject({ value: rect(0.238125, 0.238125) });
+	});
+
+	it.each(['17 1/2', '12 1/2 x 8', '17-1/2'])('%s is asked for its sign in a metric design', (text) =>
+		expect(readSize(text, 'SI')).toMatchObject({ ok: false, message: expect.stringContaining('needs its sign') })
+	);
+});
 
 describe('trade shorthand of sizes', () => {
 	it.each(shorthand)('%s in %s', (text, units, size) => {

@@ -2,7 +2,7 @@ import type { Size } from '../shape';
 import { Decimal } from './decimal';
 import { shortDigits } from './digits';
 import { withLabel } from './measure';
-import { withoutFractions } from './mixed-fractions';
+import { lacksInchSign, withoutFractions } from './mixed-fractions';
 import { plainText, quoted, refusal } from './plain-text';
 import type { Reading, UnitSystem } from './reading';
 import { withoutNotes } from './size-notes';
@@ -44,7 +44,8 @@ export function readSize(text: string, units: UnitSystem): Reading<Size> {
 	if (plain.length > 100) return refuse('too long for a size');
 	const { size: bareText, notes } = withoutNotes(withoutFractions(plain, units));
 	const sides = sidesOf(bareText, units);
-	if (typeof sides === 'string') return refuse(sides);
+	if (typeof sides === 'string')
+		return refuse(lacksInchSign(plain, units) ? 'a fraction of an inch needs its sign, such as 17 1/2"' : sides);
 	const metres: number[] = [];
 	for (const sum of sides.sums) {
 		const si = toSI(sum.value, sum.unit ?? sides.unit);
@@ -53,7 +54,7 @@ export function readSize(text: string, units: UnitSystem): Reading<Size> {
 		metres.push(si.toNumber());
 	}
 	const [width = 0, height = 0] = metres;
-	const other = otherOf(bareText, sides, metres, units);
+	const other = otherOf(withoutNotes(plain).size, sides, metres, units);
 	return {
 		ok: true,
 		value: sides.shape === 'round' ? { shape: 'round', diameter: width } : { shape: sides.shape, width, height },

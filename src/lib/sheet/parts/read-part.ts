@@ -146,7 +146,9 @@ function kindOf(word: PartWord, roles: ReadonlySet<Role>): string | null {
 }
 
 function exampleOf(word: PartWord): string {
-	return word === 'elbow' ? 'such as 2 x elbow r1.0 or elbow C0.23' : 'such as damper C0.2 or silencer 25 Pa';
+	return word === 'elbow'
+		? 'a part, such as 2 x elbow r1.0 or elbow C0.23'
+		: 'a part, such as damper C0.2 or silencer 25 Pa';
 }
 
 function nameOf(

@@ -160,18 +160,18 @@ describe('what a Parts cell says of what it read', () => {
 		const { value, words, why } = understood('2 FD 8 Pa');
 		expect(value.equipment.map(({ loss }) => loss)).toEqual([8, 8]);
 		expect(words).toBe('2 × Fire damper, 8.0 Pa each, 16.0 Pa together');
-		expect(why).toBe('a pressure behind a count is that of each');
+		expect(why).toBe('A pressure behind a count is that of each.');
 		expect(understood('FD 8 Pa; FD 8 Pa').words).toBe('Fire damper, 8.0 Pa; Fire damper, 8.0 Pa');
 	});
 
 	it.each([
 		[
 			'elbow',
-			'elbow: from the catalogue, at r 1.5, 90° in round duct, r 1, 90° in rectangular duct; for others type elbow r1.5 45° or elbow C0.23'
+			'Elbow: from the catalogue, at r 1.5, 90° in round duct or r 1, 90° in rectangular duct; for others type elbow r1.5 45° or elbow C0.23.'
 		],
-		['elbow r2', 'elbow: from the catalogue, at 90°; for others type elbow r1.5 45° or elbow C0.23'],
-		['damper', 'damper: from the catalogue, at open, 0°; for others type damper 20° or damper C0.2'],
-		['elbow r1.5 45°', 'elbow: without a coefficient, from the catalogue']
+		['elbow r2', 'Elbow: from the catalogue, at 90°; for others type elbow r1.5 45° or elbow C0.23.'],
+		['damper', 'Damper: from the catalogue, fully open; for others type damper 20° or damper C0.2.'],
+		['elbow r1.5 45°', 'Elbow: without a coefficient, from the catalogue.']
 	])('says what “%s” is computed with, and how to type another figure', (text, why) =>
 		expect(understood(text).why).toBe(why)
 	);

@@ -1,4 +1,4 @@
-import { plainSigns, quoted, type Reading, type UnitSystem } from '$lib/engine';
+import { plainSigns, quoted, sentence, type Reading, type UnitSystem } from '$lib/engine';
 import { describePart, describeSeveral } from './describe-part';
 import type { PartEquipment, PartFitting, Parts } from './parts';
 import { readPart } from './read-part';
@@ -65,9 +65,9 @@ function whyOf({ fittings, equipment }: Parts): string | null {
 		said.add(
 			assumed === null
 				? `${name}: without a coefficient, from the catalogue`
-				: `${name}: from the catalogue, at ${assumed}; for others type ${exampleOf(part)}`
+				: `${name}: from the catalogue, ${assumed}; for others type ${exampleOf(part)}`
 		);
 	}
 	if (equipment.some((one, at) => one === equipment[at + 1])) said.add('a pressure behind a count is that of each');
-	return said.size === 0 ? null : [...said].join('. ');
+	return said.size === 0 ? null : [...said].map(sentence).join(' ');
 }

@@ -72,9 +72,9 @@ export function assumedOf(part: PartFitting): string | null {
 	});
 	const [first] = sets;
 	if (!first) return null;
-	if (sets.every(({ words }) => words === first.words))
-		return part.word === 'damper' ? `open, ${first.words}` : first.words;
-	return sets.map(({ shape, words }) => `${words} in ${shape} duct`).join(', ');
+	if (part.word === 'damper') return 'fully open';
+	if (sets.every(({ words }) => words === first.words)) return `at ${first.words}`;
+	return `at ${sets.map(({ shape, words }) => `${words} in ${shape} duct`).join(' or ')}`;
 }
 
 /** How to type other figures of a part of the catalogue. */
