@@ -1,10 +1,11 @@
 import { areaChanges } from './area-changes';
 import { dampers } from './dampers';
-import type { FittingDefinition } from './definition';
+import type { FittingDefinition, JunctionDefinition } from './definition';
 import { elbowsRectangular } from './elbows-rectangular';
 import { elbowsRound } from './elbows-round';
 import { entries } from './entries';
 import { exits } from './exits';
+import { junctions } from './junctions';
 import { screens } from './screens';
 import type { CatalogueEntry } from './types';
 
@@ -20,12 +21,19 @@ const definitions: readonly FittingDefinition[] = [
 
 const byKey: ReadonlyMap<string, FittingDefinition> = new Map(definitions.map((one) => [one.entry.key, one]));
 
-/** Every fitting, in the order of the families. */
-export const catalogue: readonly CatalogueEntry[] = definitions.map((one) => one.entry);
+const junctionByKey: ReadonlyMap<string, JunctionDefinition> = new Map(junctions.map((one) => [one.entry.key, one]));
 
-/** The fitting of a key, or null. */
+/** Every fitting and junction, in the order of the families. */
+export const catalogue: readonly CatalogueEntry[] = [...definitions, ...junctions].map((one) => one.entry);
+
+/** The fitting or junction of a key, or null. */
 export function fittingEntry(key: string): CatalogueEntry | null {
-	return findDefinition(key)?.entry ?? null;
+	return (findDefinition(key) ?? findJunction(key))?.entry ?? null;
+}
+
+/** The junction of a key with its coefficient function, or null. */
+export function findJunction(key: string): JunctionDefinition | null {
+	return junctionByKey.get(key) ?? null;
 }
 
 /** The fitting of a key with its coefficient function, or null. */

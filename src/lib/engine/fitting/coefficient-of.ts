@@ -1,6 +1,7 @@
-import { findDefinition } from './catalogue';
+import { findDefinition, findJunction } from './catalogue';
+import type { Definition } from './definition';
 import { readParameters } from './parameters';
-import type { CoefficientResult, FittingContext, FittingParameters } from './types';
+import type { CoefficientResult, FittingContext, FittingParameters, JunctionContext } from './types';
 
 /** Below this Reynolds number no source of the catalogue was measured. */
 const TURBULENT = 4_000;
@@ -19,17 +20,56 @@ const TURBULENT = 4_000;
 export function coefficientOf(kind: string, parameters: FittingParameters, context: FittingContext): CoefficientResult {
 	const definition = findDefinition(kind);
 	if (!definition) throw new Error(`the catalogue has no fitting ${kind}`);
-	const { entry } = definition;
+	return resultOf(definition, parameters, context, (notes) => {
+		if (!definition.entry.shapes.includes(context.size.shape))
+			notes.unshift(`the source is not for ${context.size.shape} ducts`);
+		if (context.reynolds < TURBULENT) notes.push(turbulentNote(context.reynolds, notes));
+	});
+}
+
+/**
+ * Coefficient of one stream of a junction, on the velocity pressure of the common leg. Negative where the other stream
+ * gives more than this one loses.
+ *
+ * @param kind key of the catalogue, of an entry whose place is a junction
+ * @param parameters those of the entry [-, °]; flows and areas are not among them
+ * @param context the node as this stream sees it
+ * @returns coefficient on the common leg [-] with method, source and what lies outside the range
+ * @throws {Error} when the catalogue has no such junction
+ * @source That of the entry
+ * @check fixtures/published/junctions-diverging.json
+ */
+export function junctionCoefficientOf(
+	kind: string,
+	parameters: FittingParameters,
+	context: JunctionContext
+): CoefficientResult {
+	const definition = findJunction(kind);
+	if (!definition) throw new Error(`the catalogue has no junction ${kind}`);
+	return resultOf(definition, parameters, context, (notes) => {
+		if (!definition.entry.shapes.includes(context.size.shape))
+			notes.unshift(`the source is not for ${context.size.shape} ducts`);
+	});
+}
+
+/** By the method that the parameters name, or the entry's own. */
+function resultOf<Context>(
+	{ entry, coefficient: standard, rivals = {} }: Definition<Context>,
+	parameters: FittingParameters,
+	context: Context,
+	look: (notes: string[]) => void
+): CoefficientResult {
 	const notes: string[] = [];
 	const note = (text: string) => void (notes.includes(text) || notes.push(text));
-	if (!entry.shapes.includes(context.size.shape)) note(`the source is not for ${context.size.shape} ducts`);
+	const rival = entry.rivals?.find(({ key }) => key === parameters.method);
 	const values = readParameters(entry, parameters, note);
-	const coefficient = definition.coefficient(values, context, note);
-	if (context.reynolds < TURBULENT) note(turbulentNote(context.reynolds, notes));
+	const coefficient = ((rival && rivals[rival.key]) ?? standard)(values, context, note);
+	look(notes);
+	const { method, source, known, uncertainty } = rival ?? entry;
 	return {
 		coefficient: coefficient === 0 ? 0 : coefficient, // never -0
-		method: entry.method,
-		source: entry.source,
+		methodKey: rival?.key ?? entry.standardMethod ?? null,
+		...{ method, source, known, uncertainty },
 		parameters: Object.fromEntries(
 			entry.parameters.map(({ name, options, default: standard }) => [
 				name,

@@ -1,5 +1,5 @@
 export { catalogue, fittingEntry } from './catalogue';
-export { coefficientOf } from './coefficient-of';
+export { coefficientOf, junctionCoefficientOf } from './coefficient-of';
 export { lossAtDensity, meanFilterLoss, ratedLoss } from './rated-loss';
 export { coefficientOnLeg } from './reference-change';
 export type {
@@ -9,6 +9,9 @@ export type {
 	FittingContext,
 	FittingParameter,
 	FittingParameters,
+	JunctionContext,
 	Known,
+	Leg,
+	Method,
 	Picture
 } from './types';

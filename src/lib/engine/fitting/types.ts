@@ -35,7 +35,31 @@ export type Picture =
 	| 'grille';
 
 export type Family =
-	'elbows-round' | 'elbows-rectangular' | 'area-changes' | 'entries' | 'exits' | 'dampers' | 'screens';
+	| 'elbows-round'
+	| 'elbows-rectangular'
+	| 'elbows-oval'
+	| 'offsets'
+	| 'area-changes'
+	| 'entries'
+	| 'exits'
+	| 'dampers'
+	| 'screens'
+	| 'equipment'
+	| 'system-effect'
+	| 'junctions-diverging'
+	| 'junctions-converging';
+
+/** One author's way to a coefficient: some fittings have several, which differ. */
+export interface Method {
+	/** As a design names it: the author in small letters, as `idelchik`. */
+	readonly key: string;
+	readonly range: string;
+	readonly method: string;
+	readonly source: string;
+	readonly known: Known;
+	/** Fraction of the coefficient */
+	readonly uncertainty: number;
+}
 
 /** A fitting of the catalogue, as plain data. */
 export interface CatalogueEntry {
@@ -44,8 +68,16 @@ export interface CatalogueEntry {
 	readonly family: Family;
 	readonly shapes: readonly Shape[];
 	readonly parameters: readonly FittingParameter[];
+	/** Where it stands: along a row if absent, or where the row joins another. */
+	readonly place?: 'junction';
 	/** The leg on whose velocity pressure the source gives C */
-	readonly reference: 'row' | 'smaller leg';
+	readonly reference: 'row' | 'smaller leg' | 'common leg';
+	/** Key of the method that the keys below describe, where there are rivals */
+	readonly standardMethod?: string;
+	/** Other authors' methods, which a design may choose instead */
+	readonly rivals?: readonly Method[];
+	/** The parameter along which the coefficient is drawn, and values of the others where they are not the defaults */
+	readonly plot?: { readonly along: string; readonly at?: Readonly<Record<string, number | string>> };
 	readonly range: string;
 	readonly method: string;
 	readonly source: string;
@@ -65,9 +97,39 @@ export interface FittingContext {
 	readonly frictionFactor: number;
 }
 
+/** Which stream of a junction a row is. */
+export type Leg = 'straight' | 'branch';
+
+/** A junction as one of its streams sees it. Ratios are taken from the sheet, never typed. */
+export interface JunctionContext {
+	/** Away from the fan the common stream divides; toward it the streams unite. */
+	readonly direction: 'diverging' | 'converging';
+	readonly leg: Leg;
+	/** Flow of this leg over that of the common leg [-], by mass */
+	readonly flowRatio: number;
+	/** Flow of all branches together over that of the common leg [-]; of this one where this is a branch */
+	readonly branchFlowRatio: number;
+	/** Area of this leg over that of the common leg [-] */
+	readonly areaRatio: number;
+	/** Area of the branch over that of the common leg [-]; for the straight leg that of the branch with the greatest flow */
+	readonly branchAreaRatio: number;
+	/** Area of the straight leg over that of the common leg [-]; null where nothing goes straight on */
+	readonly straightAreaRatio: number | null;
+	/** How many branches stand at the node */
+	readonly branches: number;
+	/** Inside size of the common leg and of this one [m] */
+	readonly commonSize: Size;
+	readonly size: Size;
+}
+
 export interface CoefficientResult {
-	/** On the row's own velocity pressure [-] */
+	/** On the velocity pressure of the row, for a junction on that of the common leg [-] */
 	readonly coefficient: number;
+	/** Key of the method, where the entry has several */
+	readonly methodKey: string | null;
+	readonly known: Known;
+	/** Fraction of the coefficient */
+	readonly uncertainty: number;
 	readonly method: string;
 	readonly source: string;
 	/** All parameters of the entry as used, defaults included */

@@ -4,11 +4,17 @@ import type { PageServerLoad } from './$types';
 const FAMILIES: Readonly<Record<Family, string>> = {
 	'elbows-round': 'Round elbows',
 	'elbows-rectangular': 'Rectangular elbows',
+	'elbows-oval': 'Oval elbows',
+	offsets: 'Offsets',
 	'area-changes': 'Changes of size',
 	entries: 'Entries',
 	exits: 'Exits',
 	dampers: 'Dampers',
-	screens: 'Screens and plates'
+	screens: 'Screens, plates and obstructions',
+	'junctions-diverging': 'Junctions where a stream divides',
+	'junctions-converging': 'Junctions where streams unite',
+	equipment: 'Equipment and terminals',
+	'system-effect': 'System effect at the fan'
 };
 
 const families = (Object.keys(FAMILIES) as Family[]).map((family) => ({
