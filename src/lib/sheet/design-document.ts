@@ -31,16 +31,16 @@ export function documentOf(sheet: Sheet): SheetDocument {
 	const problems: SheetProblem[] = settingProblems(sheet);
 	const links = linksOf(sheet.rows, problems);
 	const sides = new Map<string, FoundSide>();
-	const drafts = new Map<string, DesignRow>();
+	const counted = new Map<string, DesignRow>();
 	for (const row of links.fromFan) {
 		sides.set(row.id, sideOf(row, links, sides));
-		const draft = draftRow(sheet, row, links, sides, problems);
+		const draft = keptDraft(sheet, row, links, sides, problems);
 		const parent = links.parent.get(row.id);
-		if (draft && (parent === null || (parent && drafts.has(parent.id)))) drafts.set(row.id, draft);
+		if (draft && (parent === null || (parent && counted.has(parent.id)))) counted.set(row.id, draft);
 	}
-	prune(links, drafts, problems);
-	const rows = sheet.rows.flatMap((row) => drafts.get(row.id) ?? []);
-	const uncounted = new Set(sheet.rows.map(({ id }) => id).filter((id) => !drafts.has(id)));
+	prune(links, counted, problems);
+	const rows = sheet.rows.flatMap((row) => counted.get(row.id) ?? []);
+	const uncounted = new Set(sheet.rows.map(({ id }) => id).filter((id) => !counted.has(id)));
 	return { document: rows.length ? { ...frameOf(sheet), rows } : null, problems, uncounted };
 }
 
@@ -90,6 +90,27 @@ function criteriaOf(sheet: Sheet): Criteria | null {
 		return value === null ? [] : [[field, value] as const];
 	});
 	return given.length ? (Object.fromEntries(given) as Criteria) : null;
+}
+
+/** Rows as the document held them the last time, and what they depended on beside their own cells. */
+const drafts = new WeakMap<SheetRow, { readonly on: string; readonly draft: DesignRow }>();
+
+/** A row never changes, so that after an edit of one row the others need not be read anew. */
+function keptDraft(
+	sheet: Sheet,
+	row: SheetRow,
+	links: Links,
+	sides: ReadonlyMap<string, FoundSide>,
+	problems: SheetProblem[]
+): DesignRow | null {
+	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
+	const meetsFan = !links.parent.get(row.id);
+	const on = `${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')}`;
+	const kept = drafts.get(row);
+	if (kept?.on === on) return kept.draft;
+	const draft = draftRow(sheet, row, links, sides, problems);
+	if (draft) drafts.set(row, { on, draft });
+	return draft;
 }
 
 /** One row as the document holds it; null, with problems, when its own cells do not suffice. */

@@ -95,7 +95,8 @@ export class Outbox {
 			else this.#rest();
 		}
 		if (!kept) this.#reason = NO_ROOM;
-		void this.flush();
+		// After the frame in which the edit is shown: sending takes some milliseconds of the page.
+		setTimeout(() => void this.flush());
 	}
 
 	/** Tries now, as when the network comes back. */
