@@ -20,12 +20,15 @@ function rowOf(size: Size, reynolds = 300_000): FittingContext {
 const round = rowOf(SIZES.round);
 const square = rowOf(SIZES.rectangular);
 
+/** Those along a row; a junction sees other legs and has tests of its own. */
+const inRows = catalogue.filter((entry) => entry.place !== 'junction');
+
 describe('the catalogue', () => {
 	it('has keys of their own, which find their entry', () => {
 		expect(new Set(catalogue.map((one) => one.key)).size).toBe(catalogue.length);
 		for (const entry of catalogue) {
 			expect(fittingEntry(entry.key)).toBe(entry);
-			expect(entry.key).toMatch(/^[a-z]+(-[a-z]+)+$/);
+			expect(entry.key).toMatch(/^[a-z]+(-[a-z]+)*$/);
 		}
 		expect(fittingEntry('constructor')).toBeNull();
 		expect(fittingEntry('fixed')).toBeNull();
@@ -50,7 +53,7 @@ describe('the catalogue', () => {
 		expect(entry.known === 'from memory').toBe(/from memory/.test(`${entry.source} ${entry.method}`));
 	});
 
-	it.each(catalogue.map((entry) => [entry.key, entry] as const))('%s has a loss at every limit', (key, entry) => {
+	it.each(inRows.map((entry) => [entry.key, entry] as const))('%s has a loss at every limit', (key, entry) => {
 		for (const shape of entry.shapes)
 			for (const reynolds of [1e-3, 3_000, 1e5, 1e7])
 				for (const pick of ['default', 'min', 'max'] as const) {
@@ -64,7 +67,7 @@ describe('the catalogue', () => {
 				}
 	});
 
-	it.each(catalogue.map((entry) => [entry.key, entry] as const))('%s stands by its defaults', (key, entry) => {
+	it.each(inRows.map((entry) => [entry.key, entry] as const))('%s stands by its defaults', (key, entry) => {
 		const shape = entry.shapes[0] ?? 'round';
 		const defaults = Object.fromEntries(entry.parameters.map((one) => [one.name, one.default]));
 		const result = coefficientOf(key, {}, rowOf(SIZES[shape]));
