@@ -214,7 +214,8 @@ describe('the path from sign-up to the PDF', () => {
 		expect(await sheet.duty.innerText()).not.toBe(shown.duty);
 		await page.goto(`/designs/${designId}/versions/1`);
 		await page.getByRole('button', { name: 'Restore into the sheet' }).click();
-		await page.waitForURL('**/sheet');
+		await page.getByRole('button', { name: 'Restore P01' }).click();
+		await page.waitForURL('**/sheet?restored=P01*');
 		await sheet.awake();
 		expect(await figures()).toEqual(shown.figures);
 		expect(await sheet.duty.innerText()).toBe(shown.duty);

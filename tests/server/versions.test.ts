@@ -7,7 +7,7 @@ import type { FirmScope } from '../../src/lib/server/auth/scope';
 import { changeDesign } from '../../src/lib/server/designs/change-design';
 import { openDesign } from '../../src/lib/server/designs/find-design';
 import { reportOfSheet, reportOfVersion } from '../../src/lib/server/versions/report-of';
-import { restoreVersion } from '../../src/lib/server/versions/restore-version';
+import { putBack, restoreVersion } from '../../src/lib/server/versions/restore-version';
 import { saveVersion } from '../../src/lib/server/versions/save-version';
 import { listVersions, openVersion } from '../../src/lib/server/versions/versions';
 import { ORIGIN } from './support/browser';
@@ -41,8 +41,8 @@ describe('a version', () => {
 		expect(await save(designId, 'longer')).toMatchObject({ ok: true, number: 2, revision: 'P02' });
 		const lines = await listVersions(ours, designId);
 		expect(lines.map(({ revision, note, seq, by }) => [revision, note, seq, by])).toEqual([
-			['P02', 'longer', 3, 'ours@example.test'],
-			['P01', 'first issue', 2, 'ours@example.test']
+			['P02', 'longer', 3, 'Some Person'],
+			['P01', 'first issue', 2, 'Some Person']
 		]);
 		const [first, second] = [await version(designId, 1), await version(designId, 2)];
 		expect(second.sheet).toEqual(await sheetOf(designId));
@@ -187,7 +187,7 @@ describe('a version that is restored', () => {
 			sent(write(null, 'elevation', '900 m'))
 		]);
 		expect(await save(designId)).toMatchObject({ ok: true, revision: 'P02' });
-		expect(await restoreVersion(ours, designId, 1)).toBe('done');
+		expect(await restoreVersion(ours, designId, 1)).toEqual({ from: 'P01', before: 5 });
 		expect(await save(designId)).toMatchObject({ ok: true, revision: 'P03' });
 		const [first, second, third] = [await version(designId, 1), await version(designId, 2), await version(designId, 3)];
 		expect(third.document).toEqual(first.document);
@@ -202,9 +202,22 @@ describe('a version that is restored', () => {
 		expect((await sheetOf(designId))?.rows[2]?.cells.length?.typed).toBe('15');
 	});
 
+	it('gives way again to what stood there before, whatever the log holds since', async () => {
+		const { designId, ids } = await treeDesign(ours);
+		await save(designId);
+		await append(ours, designId, [sent({ kind: 'delete', rows: [ids[2] ?? ''] })]);
+		const stood = await sheetOf(designId);
+		const restored = await restoreVersion(ours, designId, 1);
+		expect(await sheetOf(designId)).not.toEqual(stood);
+		expect(await putBack(ours, designId, restored?.before ?? 0)).toEqual({ from: 'edit 3', before: 4 });
+		expect(await sheetOf(designId)).toEqual(stood);
+		expect(await putBack(ours, designId, 99)).toBeNull();
+		expect((await logOf(ours, designId)).map(({ seq }) => seq)).toEqual([1, 2, 3, 4, 5]);
+	});
+
 	it('that does not exist restores nothing', async () => {
 		const { designId } = await treeDesign(ours);
-		expect(await restoreVersion(ours, designId, 7)).toBe('absent');
+		expect(await restoreVersion(ours, designId, 7)).toBeNull();
 		expect(await logOf(ours, designId)).toHaveLength(2);
 	});
 });
@@ -215,7 +228,7 @@ describe('an archived design', () => {
 		await save(designId);
 		await changeDesign(ours, designId, { archived: true });
 		expect(await save(designId)).toEqual({ ok: false, reason: 'absent' });
-		expect(await restoreVersion(ours, designId, 1)).toBe('absent');
+		expect(await restoreVersion(ours, designId, 1)).toBeNull();
 		expect(await version(designId, 1)).toMatchObject({ revision: 'P01' });
 		expect(await logOf(ours, designId)).toHaveLength(2);
 	});
@@ -231,7 +244,8 @@ describe("another firm's design", () => {
 		expect(await reportOfSheet(theirs, designId, print, 'T')).toBeNull();
 		expect(await reportOfVersion(theirs, designId, 1, print)).toBeNull();
 		expect(await saveVersion(theirs, designId, NOTE)).toEqual({ ok: false, reason: 'absent' });
-		expect(await restoreVersion(theirs, designId, 1)).toBe('absent');
+		expect(await restoreVersion(theirs, designId, 1)).toBeNull();
+		expect(await putBack(theirs, designId, 2)).toBeNull();
 		expect(await saveVersion(theirs, randomUUID(), NOTE)).toEqual({ ok: false, reason: 'absent' });
 		expect(await reportOfVersion(ours, designId, 1, print)).not.toBeNull();
 		expect(await listVersions(ours, designId)).toHaveLength(1);

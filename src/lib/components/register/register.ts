@@ -17,6 +17,8 @@ export interface RegisterDesign {
 	readonly designId: string;
 	readonly name: string;
 	readonly service: string;
+	/** The last edit of the working sheet. */
+	readonly headSeq: number;
 	readonly figures: {
 		readonly rows: number;
 		readonly side: Side | null;
@@ -30,5 +32,7 @@ export interface RegisterDesign {
 		readonly revision: string;
 		readonly status: 'work-in-progress' | 'issued-for-review';
 		readonly savedAt: Date;
+		/** The last edit that is in it. */
+		readonly seq: number;
 	}[];
 }

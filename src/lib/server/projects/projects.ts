@@ -96,7 +96,8 @@ export function listRegister(scope: FirmScope, show: 'current' | 'archived') {
 				designId: version.designId,
 				revision: version.revision,
 				status: version.status,
-				savedAt: version.savedAt
+				savedAt: version.savedAt,
+				seq: version.seq
 			})
 			.from(version)
 			.where(eq(version.firmId, scope.firmId))
@@ -114,6 +115,7 @@ export function listRegister(scope: FirmScope, show: 'current' | 'archived') {
 						name: of.name,
 						service: of.service,
 						archivedAt: of.archivedAt,
+						headSeq: of.headSeq,
 						figures: of.figures as DesignFigures | null,
 						revisions: revisions.filter(({ designId }) => designId === of.designId)
 					}))

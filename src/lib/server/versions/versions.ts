@@ -1,10 +1,13 @@
-import { and, desc, eq } from 'drizzle-orm';
+import { and, desc, eq, sql } from 'drizzle-orm';
 import type { DesignDocument, Solution } from '$lib/engine';
 import type { Sheet } from '$lib/sheet/sheet';
 import type { FirmScope } from '../auth/scope';
 import { inFirm } from '../db';
 import { user, version } from '../db/schema';
 import type { DesignHeading } from '../designs/find-design';
+
+/** As a person signs, or the address where no name was given. */
+const nameOf = sql<string>`coalesce(nullif(trim(${user.name}), ''), ${user.email})`;
 
 /** The saved versions of a design, newest first, without their contents. */
 export function listVersions(scope: FirmScope, designId: string) {
@@ -19,7 +22,7 @@ export function listVersions(scope: FirmScope, designId: string) {
 				sha256: version.sha256,
 				engineVersion: version.engineVersion,
 				savedAt: version.savedAt,
-				by: user.email
+				by: nameOf
 			})
 			.from(version)
 			.innerJoin(user, eq(user.id, version.userId))
@@ -34,7 +37,7 @@ export type VersionLine = Awaited<ReturnType<typeof listVersions>>[number];
 export function openVersion(scope: FirmScope, designId: string, number: number) {
 	return inFirm(scope, async (tx) => {
 		const [row] = await tx
-			.select({ saved: version, by: user.email })
+			.select({ saved: version, by: nameOf })
 			.from(version)
 			.innerJoin(user, eq(user.id, version.userId))
 			.where(and(eq(version.firmId, scope.firmId), eq(version.designId, designId), eq(version.number, number)));

@@ -15,7 +15,7 @@ export const load: PageServerLoad = async ({ locals, params }) => {
 export const actions: Actions = {
 	restore: async ({ locals, params }) => {
 		const done = await restoreVersion(requireEditor(locals), params.designId, numberOf(params.number));
-		if (done === 'absent') error(404, 'No such version');
-		redirect(303, `/designs/${params.designId}/sheet`);
+		if (!done) error(404, 'No such version');
+		redirect(303, `/designs/${params.designId}/sheet?restored=${done.from}&before=${done.before}`);
 	}
 };
