@@ -37,7 +37,7 @@ const FAST_LOSS = [0, 0.07, 0.39, 0.9, 1.78, 3.2];
  * @param angle between branch and straight leg [°], 15 to 90
  * @returns C on the velocity pressure of the common leg [-]
  * @source Idelchik, Handbook of Hydraulic Resistance, 3rd ed., p. 417 and table 7-2
- * @check none: no value was found in print; held to the exact limit of equal speeds and to the mass-weighted loss
+ * @check none: no value of C was found in print; held to the printed additions, to momentum and to energy by tests
  */
 export function branchConvergingAddingIdelchik(q: number, a: number, s: number, angle: number): number {
 	const x = q / a;
@@ -56,7 +56,7 @@ export function branchConvergingAddingIdelchik(q: number, a: number, s: number, 
  * @param angle between branch and straight leg [°], 15 to 90
  * @returns C on the velocity pressure of the common leg [-]
  * @source Idelchik, Handbook of Hydraulic Resistance, 3rd ed., p. 417 and table 7-2
- * @check none: no value was found in print; held to the exact limit of equal speeds and to the mass-weighted loss
+ * @check none: no value of C was found in print; held to the printed additions, to momentum and to energy by tests
  */
 export function straightConvergingAddingIdelchik(q: number, a: number, s: number, angle: number): number {
 	const v = (1 - q) / s;
@@ -74,7 +74,7 @@ export function straightConvergingAddingIdelchik(q: number, a: number, s: number
  * @param angle between branch and straight leg [°], 15 to 90
  * @returns C on the velocity pressure of the common leg [-]
  * @source Idelchik, Handbook of Hydraulic Resistance, 3rd ed., p. 418 and table 7-5
- * @check none: no value was found in print; held to x = 0 and to the square of the angle's sine at 90°
+ * @check none: no value of C was found in print; held to the printed factors by a test
  */
 export function branchDivergingAddingIdelchik(q: number, a: number, angle: number): number {
 	const x = q / a;
