@@ -251,7 +251,10 @@ describe('the pages of a design', () => {
 		for (const visitor of [viewer, stranger]) expect((await restore(visitor)).status).toBe(404);
 		expect((await restore(engineer, '2')).status).toBe(404);
 		expect(await logOf(ours, designId)).toHaveLength(2);
-		expect(await restore(engineer)).toMatchObject({ status: 303, location: `/designs/${designId}/sheet?restored=P01&before=2` });
+		expect(await restore(engineer)).toMatchObject({
+			status: 303,
+			location: `/designs/${designId}/sheet?restored=P01&before=2`
+		});
 		expect(await logOf(ours, designId)).toHaveLength(3);
 	});
 
