@@ -45,7 +45,8 @@ function fittingProblems(fitting: unknown, path: readonly Step[], problems: Prob
 		return;
 	}
 	const entry = fittingEntry(kind);
-	if (entry === null) {
+	// A junction sees other legs than its own row: it has its own place in a row.
+	if (entry === null || entry.place === 'junction') {
 		problems.push(
 			fault('unknown-fitting', [...path, 'kind'], `is ${shown(kind)}`, '"fixed" or a key of the catalogue of fittings')
 		);

@@ -32,8 +32,13 @@ describe('methods beside one another', () => {
 	it('Crane is Idelchik where streams unite, but for the printed 1.74 and 1.41: 0.008 q^2/a at most', () => {
 		for (const a of areas)
 			for (const q of flows)
-				for (const angle of [30, 45, 60, 90]) {
-					const allowed = (0.008 * q * q) / a + 1e-9;
+				for (const [angle, F] of [
+					[30, 1.74],
+					[45, 1.41],
+					[60, 1],
+					[90, 0]
+				] as const) {
+					const allowed = (Math.abs(F - 2 * Math.cos((angle * Math.PI) / 180)) * q * q) / a + 1e-9;
 					for (const [one, other] of [
 						[branchConvergingCrane2009, branchConvergingIdelchik],
 						[straightConvergingCrane2009, straightConvergingIdelchik]

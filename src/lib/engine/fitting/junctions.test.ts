@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { validateDocument } from '../document';
 import type { Size } from '../shape';
 import { catalogue, fittingEntry, junctionCoefficientOf, type JunctionContext } from '.';
 import { branchConvergingCrane2009, straightConvergingCrane2009 } from './junction-crane';
@@ -261,6 +262,20 @@ describe('the other junctions', () => {
 			4.5,
 			2
 		);
+		expect(value('plenum', { areaRatio: 0.001 }, viewOf('diverging', 'branch', { q: 0.6, a: 0.3 }))).toBeCloseTo(3, 2);
 		expect(value('plenum', { areaRatio: 1 }, viewOf('diverging', 'straight', { q: 0, a: 0.5 }))).toBe(0);
+	});
+});
+
+describe('a junction among the fittings along a row', () => {
+	it.each(entries.map((entry) => entry.key))('is refused: %s', (kind) => {
+		const size = { shape: 'round', diameter: 0.3 };
+		const row = { tag: 'S1', joins: null, side: 'supply', size, length: 4, outlet: { flow: 0.3, loss: 25 } };
+		const document = {
+			format: 'evendraft/design@1',
+			air: { temperature: 20 },
+			rows: [{ ...row, fittings: [{ kind }] }]
+		};
+		expect(validateDocument(document)).toMatchObject({ ok: false, problems: [{ code: 'unknown-fitting' }] });
 	});
 });
