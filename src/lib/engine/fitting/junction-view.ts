@@ -44,8 +44,8 @@ export function noteForms(context: JunctionContext, junction: Branching, note: N
 	noteWidths(junction, note);
 	const w = addingShare(a, s);
 	const v = (1 - q) / s;
-	if (w > 0 && direction === 'converging') noteOutside(a, { min: 0, max: 0.5 }, 'Ab/Ac of the additions', note);
-	if (w > 0 && direction === 'diverging' && context.leg === 'straight' && v > 1 + 1e-9)
+	if (w > NEAR && direction === 'converging') noteOutside(a, { min: 0, max: 0.5 }, 'Ab/Ac of the additions', note);
+	if (w > NEAR && direction === 'diverging' && context.leg === 'straight' && v > 1 + 1e-9)
 		note(
 			`Vs/Vc ${shortFigure(v, SPEED)} is above 1, where the values${v > 2 ? ', held from 2 on,' : ''} are from memory`
 		);

@@ -32,7 +32,7 @@ const bullhead: JunctionDefinition = {
 		parameters: [choiceParameter('edges', 'Edges where the stream divides', 'sharp', ['sharp', 'rounded'])],
 		range:
 			'two opposite legs of one size at 90° to the common one, flow ratio 0 to 1, area ratio 0.1 to 1; the value of rounded ' +
-			'edges is remembered, not read. Uniting: edges do not count; steps smoothed over 0.04 above Ab/Ac 0.35, Qb/Qc 0.4',
+			'edges is from memory. Uniting: edges do not count; steps smoothed over 0.04 above Ab/Ac 0.35, Qb/Qc 0.4',
 		method: 'Idelchik, symmetrical tee',
 		source: idelchik('7-29'),
 		uncertainty: 0.4,

@@ -33,7 +33,7 @@ const tee: JunctionDefinition = {
 		name: 'Tee, 90°',
 		parameters: [],
 		rivals: [CRANE, BASSETT, GARDEL, GENERAL],
-		range: `${FORMS}. Dividing, a branch as high as the common leg: remembered, not read`,
+		range: `${FORMS}. Dividing, a branch as high as the common leg: from memory`,
 		method: 'Idelchik, both streams',
 		source: idelchik('7-1 to 7-4, 7-20, 7-21'),
 		uncertainty: 0.4,

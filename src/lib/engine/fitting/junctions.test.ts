@@ -142,6 +142,12 @@ describe('a tee or wye of the sheet', () => {
 		expect(noteOf('wye', { angle: 30 }, between)).toContain('lie between');
 	});
 
+	it('takes a straight leg that is nearly as wide as the common one without a word', () => {
+		for (const direction of ['diverging', 'converging'] as const)
+			for (const leg of ['branch', 'straight'] as const)
+				expect(noteOf('tee', {}, viewOf(direction, leg, { q: 0.3, a: 0.8, s: 0.95 }))).toBe('');
+	});
+
 	it('sees the height of a rectangular branch: free up to two thirds, then less and less', () => {
 		const rectangle = (width: number, height: number): Size => ({ shape: 'rectangular', width, height });
 		const view = { ...viewOf('diverging', 'branch', { q: 0.4, a: 0.5 }), commonSize: rectangle(0.6, 0.6) };
