@@ -5,6 +5,7 @@ export { coefficientOnLeg } from './reference-change';
 export type {
 	CatalogueEntry,
 	CoefficientResult,
+	Drawing,
 	Family,
 	FittingContext,
 	FittingParameter,

@@ -34,6 +34,44 @@ export type Picture =
 	| 'diffuser'
 	| 'grille';
 
+/** A drawing of the part itself, larger and closer than the symbol of the sheet. */
+export type Drawing =
+	| 'elbow'
+	| 'elbow-rectangular'
+	| 'segmented'
+	| 'mitre'
+	| 'vaned'
+	| 'splitter'
+	| 'offset'
+	| 'step'
+	| 'transition'
+	| 'pyramid'
+	| 'square-to-round'
+	| 'one-sided'
+	| 'entry'
+	| 'bellmouth'
+	| 'hood'
+	| 'cap'
+	| 'louvre'
+	| 'exit'
+	| 'exit-diffuser'
+	| 'damper'
+	| 'blades'
+	| 'gate'
+	| 'firedamper'
+	| 'screen'
+	| 'plate'
+	| 'obstruction'
+	| 'fan-inlet'
+	| 'fan-outlet'
+	| 'tee'
+	| 'wye'
+	| 'shoe'
+	| 'conical'
+	| 'cross'
+	| 'bullhead'
+	| 'plenum';
+
 export type Family =
 	| 'elbows-round'
 	| 'elbows-rectangular'
@@ -85,6 +123,8 @@ export interface CatalogueEntry {
 	/** Fraction of the coefficient */
 	readonly uncertainty: number;
 	readonly picture: Picture;
+	/** The close drawing, where there is one */
+	readonly drawing?: Drawing;
 	readonly caution: string | null;
 }
 
