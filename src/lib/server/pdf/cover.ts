@@ -57,7 +57,13 @@ function headOf({ heading: { kind, title, place, identity, stamp: status }, basi
 			],
 			columnGap: 16
 		},
-		{ columns: [pairs(identity, half), pairs(basis, half)], columnGap: GAP, margin: [0, 12, 0, 0] }
+		{
+			columns: [
+				{ width: half, stack: [heading('Record', 6), pairs(identity, half)] },
+				{ width: half, stack: [heading('Basis of design', 6), pairs(basis, half)] }
+			],
+			columnGap: GAP
+		}
 	];
 }
 

@@ -10,7 +10,7 @@ import { sheetOf, type Sheet } from './paper';
 import { partsPages } from './parts-pages';
 import { printable } from './printable';
 import { schedulePages } from './schedule-pages';
-import { COVER_FOOT, coverFoot } from './seal-box';
+import { coverFoot, coverFootHeight } from './seal-box';
 import { sourcesPages } from './sources-pages';
 
 /** The pages of a report for pdfmake. Made anew for each print, since pdfmake writes into what it is given. */
@@ -19,7 +19,7 @@ export function definitionOf(report: Report, printedAt: Date): TDocumentDefiniti
 	const text = sheetOf(report.paper, 'text');
 	const wide = sheetOf(report.paper, 'schedule');
 	const [left, top, right, bottom] = text.margins;
-	const cover: Sheet = { ...text, margins: [left, top, right, bottom + COVER_FOOT] };
+	const cover: Sheet = { ...text, margins: [left, top, right, bottom + coverFootHeight(text)] };
 
 	const section = (sheet: Sheet, name: string, content: Content[], first: Content | null = null): ContentSection => ({
 		section: content,

@@ -4,16 +4,19 @@ import { STRONG } from './fonts';
 import { footOrigin, type Sheet } from './paper';
 import { narrow, sans } from './printable';
 
-const HEIGHT = 100;
+/** Upright paper below this height [pt] has a lower box, so that the cover stays one page. */
+const SHORT = 800;
+const heightOn = (sheet: Sheet) => (!sheet.wide && sheet.height < SHORT ? 62 : 100);
 /** Height that the foot of the cover takes above the title block [pt]. */
-export const COVER_FOOT = HEIGHT + 8;
+export const coverFootHeight = (sheet: Sheet): number => heightOn(sheet) + 8;
 const SEAL = 240;
 const GAP = 20;
 
 /** At the foot of the cover: the hash of what was saved, and an empty box for a professional's own seal. */
 export function coverFoot(sheet: Sheet, { title, text, code, line }: Verification): Content {
 	const { left, width } = sheet.content;
-	const top = sheet.blockTop - HEIGHT - 9 - footOrigin(sheet);
+	const height = heightOn(sheet);
+	const top = sheet.blockTop - height - 9 - footOrigin(sheet);
 	const sealLeft = left + width - SEAL;
 	const start = sheet.wide ? left + (width + 34) / 2 : left;
 	const room = sealLeft - GAP - start;
@@ -45,7 +48,7 @@ export function coverFoot(sheet: Sheet, { title, text, code, line }: Verificatio
 		stack: [
 			{ columns: [{ width: room, stack: lines }], absolutePosition: { x: start, y: top } },
 			{
-				canvas: [{ type: 'rect', x: 0, y: 0, w: SEAL, h: HEIGHT, lineWidth: 0.75, dash }],
+				canvas: [{ type: 'rect', x: 0, y: 0, w: SEAL, h: height, lineWidth: 0.75, dash }],
 				absolutePosition: { x: sealLeft, y: top }
 			},
 			{
@@ -62,7 +65,7 @@ export function coverFoot(sheet: Sheet, { title, text, code, line }: Verificatio
 						})
 					}
 				],
-				absolutePosition: { x: sealLeft + 8, y: top + HEIGHT - 16 }
+				absolutePosition: { x: sealLeft + 8, y: top + height - 16 }
 			}
 		]
 	};
