@@ -44,6 +44,7 @@ export const SERVICE: Readonly<Record<Service, string>> = {
 export const RULE: Readonly<Record<FlagRule, string>> = {
 	'reynolds-transition': 'Flow between laminar and turbulent',
 	'no-junction-loss': 'Junction without a loss',
+	'junction-at-fan': 'Junction at the fan',
 	'velocity-main': 'Velocity in mains',
 	'velocity-run-out': 'Velocity in run-outs',
 	'friction-rate': 'Friction rate',
@@ -55,6 +56,8 @@ export const RULE: Readonly<Record<FlagRule, string>> = {
 	'coefficient-range': 'Coefficient outside the range of its source',
 	'to-be-confirmed': 'To be confirmed',
 	'fan-flows-differ': 'Flows of the two sides of the fan',
+	'temperature-mix': 'Temperature of united streams',
+	condensation: 'Air below its dew point',
 	'service-caution': 'Special service',
 	'fire-damper-caution': 'Fire or smoke damper',
 	'negative-loss': 'Section with a gain of pressure',

@@ -1,3 +1,4 @@
+export { airAtTemperature, type AirCondition } from './air-at-temperature';
 export { airState, type AirSpec, type AirState } from './air-state';
 export { AIR_PRESSURE, AIR_TEMPERATURE, RELATIVE_HUMIDITY, humidAirDensity } from './humid-air-density';
 export { SATURATION_TEMPERATURE, saturationPressure } from './saturation-pressure';

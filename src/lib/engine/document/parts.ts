@@ -1,18 +1,31 @@
-import { fittingEntry, type CatalogueEntry } from '../fitting';
+import { catalogue, fittingEntry, type CatalogueEntry } from '../fitting';
 import { findMaterial, materials } from '../friction';
 import { fault, isRecord, rowsOf, shown, textAt, type Step } from './fault';
 import type { Problem } from './types';
 
 /** Keys of a fitting that are no parameters of its kind. */
-const OWN_KEYS: readonly string[] = ['kind', 'count', 'name', 'toBeConfirmed', 'id', 'note'];
+const OWN_KEYS: readonly string[] = ['kind', 'count', 'name', 'toBeConfirmed', 'id', 'note', 'method'];
+const JUNCTION_KEYS: readonly string[] = [...OWN_KEYS, 'leg', 'coefficient'];
 
 /** What is wrong with materials, fittings and junctions beyond their schema: keys and parameters of the catalogue. */
 export function partProblems(document: unknown): Problem[] {
 	const problems: Problem[] = [];
 	materialProblem(document, [], problems);
 	fanProblems(document, problems);
+	methodsProblems(document, problems);
+	const air = isRecord(document) ? document.air : null;
+	const byDensity = isRecord(air) && air.density !== undefined;
 	rowsOf(document).forEach((row, i) => {
 		if (!isRecord(row)) return;
+		if (byDensity && row.temperature !== undefined)
+			problems.push(
+				fault(
+					'temperature-unknown',
+					['rows', i, 'temperature'],
+					'cannot be used: the air of the design is given by its density',
+					'air by its temperature, humidity and elevation; or no temperature of rows'
+				)
+			);
 		materialProblem(row, ['rows', i], problems);
 		if (Array.isArray(row.fittings))
 			row.fittings.forEach((one, k) => fittingProblems(one, ['rows', i, 'fittings', k], problems));
@@ -31,9 +44,40 @@ function materialProblem(holder: unknown, path: readonly Step[], problems: Probl
 function junctionProblems(junction: unknown, path: readonly Step[], problems: Problem[]): void {
 	const kind = textAt(junction, 'kind');
 	if (kind === null || !isRecord(junction)) return;
-	if (kind !== 'fixed') problems.push(fault('unknown-fitting', [...path, 'kind'], `is ${shown(kind)}`, '"fixed"'));
-	else if (junction.coefficient === undefined)
-		problems.push(fault('parameter-missing', [...path, 'coefficient'], 'is missing', 'a number'));
+	if (kind === 'fixed') {
+		if (junction.coefficient === undefined)
+			problems.push(fault('parameter-missing', [...path, 'coefficient'], 'is missing', 'a number'));
+		return;
+	}
+	const entry = fittingEntry(kind);
+	if (entry?.place !== 'junction') {
+		const keys = catalogue.flatMap((one) => (one.place === 'junction' ? one.key : [])).join(', ');
+		problems.push(fault('unknown-fitting', [...path, 'kind'], `is ${shown(kind)}`, `"fixed" or one of ${keys}`));
+		return;
+	}
+	methodProblem(entry, junction.method, [...path, 'method'], problems);
+	for (const [key, value] of Object.entries(junction))
+		if (!JUNCTION_KEYS.includes(key)) parameterProblem(entry, key, value, [...path, key], problems);
+}
+
+/** A method must be one that the entry has. */
+function methodProblem(entry: CatalogueEntry, method: unknown, path: readonly Step[], problems: Problem[]): void {
+	if (typeof method !== 'string') return;
+	const known = [entry.standardMethod ?? [], ...(entry.rivals ?? []).map(({ key }) => key)].flat();
+	if (known.includes(method)) return;
+	const expected = known.length ? `one of ${known.join(', ')}` : `no method: ${entry.key} has one alone`;
+	problems.push(fault('unknown-method', path, `is ${shown(method)}`, expected));
+}
+
+function methodsProblems(document: unknown, problems: Problem[]): void {
+	const methods = isRecord(document) ? document.methods : null;
+	if (!isRecord(methods)) return;
+	for (const [key, method] of Object.entries(methods)) {
+		const entry = fittingEntry(key);
+		if (entry) methodProblem(entry, method, ['methods', key], problems);
+		else
+			problems.push(fault('unknown-fitting', ['methods', key], 'is no key of the catalogue', 'a key of the catalogue'));
+	}
 }
 
 function fittingProblems(fitting: unknown, path: readonly Step[], problems: Problem[]): void {
@@ -52,6 +96,7 @@ function fittingProblems(fitting: unknown, path: readonly Step[], problems: Prob
 		);
 		return;
 	}
+	methodProblem(entry, fitting.method, [...path, 'method'], problems);
 	for (const [key, value] of Object.entries(fitting))
 		if (!OWN_KEYS.includes(key)) parameterProblem(entry, key, value, [...path, key], problems);
 }

@@ -20,6 +20,7 @@ const tag = z.string().min(1).max(LIMITS.tag);
 const count = z.int().min(1).max(LIMITS.count).describe('how many of it');
 const toBeConfirmed = z.boolean().describe('the value is not settled yet');
 const coefficient = either(LIMITS.coefficient, "coefficient on the row's own velocity pressure");
+const method = z.string().min(1).describe('key of one of the methods of the kind, by its author');
 const exponent = upTo(LIMITS.exponent, 'loss grows with flow to this power; 2 if absent');
 const dimension = between(LIMITS.size, 'm, inside');
 const roughness = upTo(LIMITS.roughness, 'absolute roughness, m');
@@ -59,14 +60,21 @@ export const fanSchema = open({
 export const fittingSchema = open({
 	kind: z.string().min(1).describe("'fixed', or a key of the catalogue; its parameters stand beside it"),
 	coefficient: coefficient.optional(),
+	method: method.optional(),
 	count: count.optional(),
 	name: text.optional(),
 	toBeConfirmed: toBeConfirmed.optional()
 });
 
+/**
+ * Where the row joins another one: `fixed` carries its own coefficient on the row's velocity pressure; any other kind is
+ * a junction of the catalogue, whose flows and areas are those of the rows.
+ */
 export const junctionSchema = open({
-	kind: z.string().min(1).describe("'fixed'"),
+	kind: z.string().min(1).describe("'fixed', or a key of the catalogue whose place is a junction"),
 	coefficient: coefficient.optional(),
+	leg: z.enum(['straight', 'branch']).describe("which stream the row is; 'branch' if absent").optional(),
+	method: method.optional(),
 	name: text.optional(),
 	toBeConfirmed: toBeConfirmed.optional()
 });
@@ -102,6 +110,10 @@ export const rowSchema = open({
 	serves: text.optional(),
 	size: sizeSchema,
 	length: upTo(LIMITS.length, 'centre line, m'),
+	temperature: between(
+		LIMITS.temperature,
+		'degC, of the air in the row; that of the row it joins if absent'
+	).optional(),
 	rise: either(LIMITS.rise, 'elevation of the far end less that of the fan end, m').optional(),
 	roughness: roughness.optional(),
 	material: material.optional(),
@@ -125,11 +137,20 @@ export const designSchema = open({
 	format: z.literal(DESIGN_FORMAT),
 	title: text.optional(),
 	air: airSchema,
+	flowBasis: z
+		.enum(['actual', 'standard'])
+		.describe("'actual' if absent; 'standard': flows of outlets are those of air of the standard density")
+		.optional(),
+	standardDensity: between(LIMITS.density, 'kg/m3, of standard flows; 1.204 if absent').optional(),
 	surroundings: airSchema.describe('for thermal gravity; the same air if absent').optional(),
 	fan: fanSchema.optional(),
 	roughness: roughness.optional(),
 	material: material.optional(),
 	criteria: criteriaSchema.optional(),
+	methods: z
+		.record(z.string(), z.string())
+		.describe('for keys of the catalogue, the method that counts where a fitting names none')
+		.optional(),
 	service: z
 		.enum(['general', 'kitchen-grease', 'laboratory', 'hazardous', 'smoke-control'])
 		.describe("'general' if absent")

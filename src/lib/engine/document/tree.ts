@@ -21,6 +21,7 @@ export function readTree(document: unknown): Tree {
 	const rings = ringProblems(rows, parents, problems);
 	outletProblems(rows, parents, problems);
 	sideProblems(rows, parents, problems);
+	straightProblems(rows, parents, problems);
 	if (!rings) depthProblem(parents, problems);
 	return { parents, problems };
 }
@@ -114,6 +115,27 @@ function sideProblems(rows: readonly unknown[], parents: Int32Array, problems: P
 		const message = `is ${side}, but the row it joins is ${other}`;
 		const expected = other === 'supply' ? 'supply' : 'return, exhaust or outdoor';
 		problems.push(fault('side-differs', ['rows', i, 'side'], message, expected));
+	});
+}
+
+/** At a node one stream at most goes straight on. */
+function straightProblems(rows: readonly unknown[], parents: Int32Array, problems: Problem[]): void {
+	const straight = new Map<number, number>();
+	rows.forEach((row, i) => {
+		const parent = parents[i] ?? -1;
+		const junction = isRecord(row) ? row.junction : null;
+		if (parent < 0 || !isRecord(junction) || junction.kind === 'fixed' || junction.leg !== 'straight') return;
+		const other = straight.get(parent);
+		if (other === undefined) straight.set(parent, i);
+		else
+			problems.push(
+				fault(
+					'two-straight',
+					['rows', i, 'junction', 'leg'],
+					`is straight, and so is ${shown(textAt(rows[other], 'tag'))} at the same node`,
+					'one straight leg at a node; the others are branches'
+				)
+			);
 	});
 }
 

@@ -63,6 +63,9 @@ export type ProblemCode =
 	| 'fan-curve'
 	| 'unknown-material'
 	| 'unknown-fitting'
+	| 'unknown-method'
+	| 'temperature-unknown'
+	| 'two-straight'
 	| 'parameter-missing'
 	| 'parameter-unknown'
 	| 'parameter-range'
@@ -102,9 +105,23 @@ export interface Item {
 	/** Of all pieces [Pa]; a gain by thermal gravity is negative. */
 	readonly loss: number;
 	readonly source: string | null;
+	/** For a coefficient that its source gives on another velocity pressure than the row's own. */
+	readonly reference?: ReferenceLeg;
 	/** What the catalogue says of it, for a fitting that comes from there. */
 	readonly catalogue: CatalogueUse | null;
 	readonly toBeConfirmed: boolean;
+}
+
+/** The leg of a junction to whose velocity pressure its source refers. */
+export interface ReferenceLeg {
+	readonly leg: 'common';
+	/** Tag of the row that is the leg. */
+	readonly row: string;
+	readonly coefficient: number;
+	readonly velocityPressure: number; // Pa
+	/** Flow and area of this leg over those of the common one. */
+	readonly flowRatio: number;
+	readonly areaRatio: number;
 }
 
 /** A fitting of the catalogue as it was used: enough to compute its coefficient again. */
@@ -113,6 +130,8 @@ export interface CatalogueUse {
 	readonly parameters: { readonly [name: string]: number | string };
 	/** The parameters in words, as 'r/D 1, 90°'. */
 	readonly words: string;
+	/** Key of the method, where the entry has several. */
+	readonly methodKey?: string;
 	readonly method: string;
 	readonly known: string;
 	/** Fraction of the coefficient. */
@@ -125,7 +144,11 @@ export interface CatalogueUse {
 /** A row solved. Pressures are gauge, at [fan end, far end]. */
 export interface SolvedRow {
 	readonly side: Side;
-	readonly flow: number; // m3/s
+	readonly flow: number; // m3/s, actual, of the air in the row
+	readonly massFlow: number; // kg/s
+	readonly density: number; // kg/m3
+	/** Where it differs from that of the design [degC]. */
+	readonly temperature?: number;
 	readonly area: number; // m2
 	readonly hydraulicDiameter: number; // m
 	readonly velocity: number; // m/s
@@ -163,6 +186,7 @@ export interface Path {
 export type FlagRule =
 	| 'reynolds-transition'
 	| 'no-junction-loss'
+	| 'junction-at-fan'
 	| 'velocity-main'
 	| 'velocity-run-out'
 	| 'friction-rate'
@@ -174,6 +198,8 @@ export type FlagRule =
 	| 'coefficient-range'
 	| 'to-be-confirmed'
 	| 'fan-flows-differ'
+	| 'temperature-mix'
+	| 'condensation'
 	| 'service-caution'
 	| 'fire-damper-caution'
 	| 'negative-loss'

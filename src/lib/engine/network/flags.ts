@@ -1,9 +1,11 @@
 import type { DesignDocument, Flag } from '../document/types';
+import { airFlags } from './air-flags';
 import type { RangeNote } from './items';
 import type { Network } from './network';
 import { unreadKeyFlags } from './unread-keys';
 import { rowFlags } from './row-flags';
 import { partFlags } from './part-flags';
+import type { RowAir } from './row-airs';
 import type { RowLoss } from './row-loss';
 import { serviceFlags } from './service-flags';
 
@@ -19,7 +21,8 @@ export function flagsOf(
 	notes: ReadonlyMap<string, readonly RangeNote[]>,
 	totals: { readonly supplyFlow: number; readonly returnFlow: number },
 	duty: number,
-	density: number
+	density: number,
+	airs: readonly RowAir[]
 ): readonly Flag[] {
 	const flags: Flag[] = [
 		...serviceFlags(document),
@@ -28,6 +31,7 @@ export function flagsOf(
 		...densityFlags(document, density)
 	];
 	unreadKeyFlags(document, flags);
+	airFlags(document, network, losses, airs, flags);
 	const outlets = { supply: 0, other: 0 };
 	for (const { side, outlet } of network.rows) if (outlet) outlets[side === 'supply' ? 'supply' : 'other']++;
 	network.rows.forEach((row, place) => {

@@ -1,8 +1,26 @@
-import type { CatalogueUse, DesignRow, Equipment, Fitting, Item, Junction, Outlet } from '../document/types';
-import { coefficientOf, fittingEntry, ratedLoss, type CatalogueEntry, type CoefficientResult } from '../fitting';
+import type {
+	CatalogueUse,
+	DesignDocument,
+	DesignRow,
+	Equipment,
+	Fitting,
+	Item,
+	Junction,
+	Outlet,
+	ReferenceLeg
+} from '../document/types';
+import {
+	coefficientOf,
+	fittingEntry,
+	junctionCoefficientOf,
+	ratedLoss,
+	type CatalogueEntry,
+	type CoefficientResult
+} from '../fitting';
 import { COLEBROOK_ROUGHNESS, regime } from '../friction';
 import { parametersInWords } from './parameters-in-words';
 import type { Hydraulics } from './hydraulics';
+import type { JunctionView } from './junction-views';
 
 const BY_HAND = 'entered by hand';
 /** Times the rigid friction rate, where the design names no factor; illustrative, for a length not fully stretched. */
@@ -50,12 +68,67 @@ export function flexibleItem(
 	return item('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, { source });
 }
 
-export function junctionItem(junction: Junction, { velocityPressure }: Hydraulics): Item {
-	const { coefficient = 0, kind, name = 'Junction', toBeConfirmed } = junction;
-	return item('junction', name, coefficient * velocityPressure, { kind, coefficient, source: BY_HAND, toBeConfirmed });
+/**
+ * What a junction costs the stream of its row. A coefficient of the catalogue is on the velocity pressure of the common
+ * leg; the item gives it on the row's own, and the other beside it.
+ */
+export function junctionItem(
+	junction: Junction,
+	{ velocityPressure }: Hydraulics,
+	view: (JunctionView & { readonly tag: string }) | undefined,
+	methods: DesignDocument['methods'],
+	notes: RangeNote[]
+): Item {
+	const { coefficient: given = 0, kind, toBeConfirmed } = junction;
+	const entry = kind === 'fixed' || !view ? null : fittingEntry(kind);
+	if (!entry || !view) {
+		// Where a row meets the fan there is no node: a flag says so.
+		const coefficient = kind === 'fixed' ? given : 0;
+		const { name = 'Junction' } = junction;
+		return item('junction', name, coefficient * velocityPressure, {
+			...{ kind, coefficient, source: BY_HAND, toBeConfirmed }
+		});
+	}
+	const { context, tag } = view;
+	const name = junction.name ?? `${entry.name}, ${context.leg}`;
+	const result = junctionCoefficientOf(kind, withMethod(junction, methods), context);
+	noteRange(name, result, notes);
+	const loss = result.coefficient * view.velocityPressure;
+	return item('junction', name, loss, {
+		...{ kind, coefficient: loss / velocityPressure, source: result.source, toBeConfirmed },
+		catalogue: useOf(entry, result),
+		reference: {
+			leg: 'common',
+			row: tag,
+			coefficient: result.coefficient,
+			velocityPressure: view.velocityPressure,
+			flowRatio: context.flowRatio,
+			areaRatio: context.areaRatio
+		}
+	});
 }
 
-export function fittingItem(fitting: Fitting, row: DesignRow, hydraulics: Hydraulics, notes: RangeNote[]): Item {
+/** The parameters with the method that the design has chosen for the kind, where the fitting names none of its own. */
+function withMethod<F extends { readonly kind: string; readonly method?: string | undefined }>(
+	fitting: F,
+	methods: DesignDocument['methods']
+): F {
+	const chosen = methods && Object.hasOwn(methods, fitting.kind) ? methods[fitting.kind] : undefined;
+	return fitting.method === undefined && chosen !== undefined ? { ...fitting, method: chosen } : fitting;
+}
+
+function noteRange(name: string, { inRange, rangeNote }: CoefficientResult, notes: RangeNote[]): void {
+	if (!inRange || rangeNote !== null)
+		notes.push({ name, inRange, note: rangeNote ?? 'outside the range of its source' });
+}
+
+export function fittingItem(
+	fitting: Fitting,
+	row: DesignRow,
+	hydraulics: Hydraulics,
+	methods: DesignDocument['methods'],
+	notes: RangeNote[]
+): Item {
 	const { kind, count = 1, toBeConfirmed } = fitting;
 	const pv = hydraulics.velocityPressure;
 	if (kind === 'fixed') {
@@ -67,10 +140,9 @@ export function fittingItem(fitting: Fitting, row: DesignRow, hydraulics: Hydrau
 	const name = fitting.name ?? entry?.name ?? kind;
 	const { reynolds, velocity, relativeRoughness, frictionFactor } = hydraulics;
 	const context = { size: row.size, reynolds, velocity, relativeRoughness, frictionFactor };
-	const result = coefficientOf(kind, fitting, context);
-	const { coefficient, source, inRange, rangeNote } = result;
-	if (!inRange || rangeNote !== null)
-		notes.push({ name, inRange, note: rangeNote ?? 'outside the range of its source' });
+	const result = coefficientOf(kind, withMethod(fitting, methods), context);
+	const { coefficient, source } = result;
+	noteRange(name, result, notes);
 	const catalogue = entry === null ? null : useOf(entry, result);
 	return item('fitting', name, coefficient * count * pv, {
 		kind,
@@ -82,9 +154,14 @@ export function fittingItem(fitting: Fitting, row: DesignRow, hydraulics: Hydrau
 	});
 }
 
-function useOf(entry: CatalogueEntry, { parameters, method, rangeNote }: CoefficientResult): CatalogueUse {
-	const { known, uncertainty, caution } = entry;
-	return { parameters, words: parametersInWords(entry, parameters), method, known, uncertainty, rangeNote, caution };
+function useOf(entry: CatalogueEntry, result: CoefficientResult): CatalogueUse {
+	const { parameters, methodKey, method, known, uncertainty, rangeNote } = result;
+	return {
+		parameters,
+		words: parametersInWords(entry, parameters),
+		...(methodKey !== null && { methodKey }),
+		...{ method, known, uncertainty, rangeNote, caution: entry.caution }
+	};
 }
 
 /** Without the flow it was given at, a loss is that at the design flow. */
@@ -108,7 +185,7 @@ export function gravityItem(gain: number): Item {
 
 type More = {
 	readonly [K in 'kind' | 'count' | 'coefficient' | 'source' | 'catalogue' | 'toBeConfirmed']?: Item[K] | undefined;
-};
+} & { readonly reference?: ReferenceLeg };
 
 function item(part: Item['part'], name: string, loss: number, more: More): Item {
 	const {
@@ -121,5 +198,10 @@ function item(part: Item['part'], name: string, loss: number, more: More): Item 
 	} = more;
 	// Adding 0 turns -0 into 0.
 	const figure = coefficient === null ? null : coefficient + 0;
-	return { part, name, kind, count, coefficient: figure, loss: loss + 0, source, catalogue, toBeConfirmed };
+	const { reference } = more;
+	return {
+		...{ part, name, kind, count, coefficient: figure, loss: loss + 0, source },
+		...(reference && { reference }),
+		...{ catalogue, toBeConfirmed }
+	};
 }

@@ -58,6 +58,14 @@ export function rowFlags(
 			message: 'No loss is counted where this row joins another.',
 			basis: 'the row names no junction'
 		});
+	if (row.joins === null && row.junction !== undefined && row.junction.kind !== 'fixed')
+		flags.push({
+			rule: 'junction-at-fan',
+			row: row.tag,
+			severity: 'caution',
+			message: 'This row meets the fan, where no stream divides or unites: its junction is not counted.',
+			basis: 'a junction stands where a row joins another'
+		});
 	if (solved.loss < 0)
 		flags.push({
 			rule: 'negative-loss',

@@ -1,6 +1,7 @@
 import { airState, type AirSpec, type AirState } from '../air';
 import type { DesignAir, DesignDocument, DesignRow } from '../document/types';
 import { DEFAULT_MATERIAL, findMaterial } from '../friction';
+import { STANDARD_DENSITY } from './flows';
 
 /** What holds for all rows of a design. */
 export interface Settings {
@@ -8,6 +9,9 @@ export interface Settings {
 	/** Density of the air around the duct [kg/m3], for thermal gravity. */
 	readonly surroundings: number;
 	readonly roughnessOf: (row: DesignRow) => number;
+	readonly methods: DesignDocument['methods'];
+	/** Density of standard flows [kg/m3]; null where flows are actual ones. */
+	readonly standard: number | null;
 }
 
 /** @throws {OutOfRangeError} when the air leaves the range of a formula of its state */
@@ -16,7 +20,8 @@ export function settingsOf(document: DesignDocument): Settings {
 	const surroundings = document.surroundings === undefined ? air : airState(specOf(document.surroundings));
 	const general = roughnessIn(document) ?? findMaterial(DEFAULT_MATERIAL)?.roughness ?? 0;
 	const roughnessOf = (row: DesignRow) => roughnessIn(row) ?? general;
-	return { air, surroundings: surroundings.density, roughnessOf };
+	const standard = document.flowBasis === 'standard' ? (document.standardDensity ?? STANDARD_DENSITY) : null;
+	return { air, surroundings: surroundings.density, roughnessOf, methods: document.methods, standard };
 }
 
 /** A given density goes before a temperature that stands beside it. */

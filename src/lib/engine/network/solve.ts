@@ -4,12 +4,15 @@ import { OutOfRangeError } from '../errors';
 import { shortFigure } from '../short-figure';
 import { ENGINE_VERSION } from '../version';
 import { flagsOf } from './flags';
-import { designFlows } from './flows';
-import { buildNetwork } from './network';
+import { designFlows, type RowFlows } from './flows';
+import { hydraulicsOf, type Hydraulics } from './hydraulics';
+import { junctionViews } from './junction-views';
+import { buildNetwork, type Network } from './network';
 import { lossesFromFan, pathsOf } from './paths';
 import { fanDuty, totalsOf } from './fan-duty';
 import type { RangeNote } from './items';
 import { placePressures } from './pressures';
+import { isUniform, rowAirs, type RowAir } from './row-airs';
 import { rowLoss, type RowLoss } from './row-loss';
 import { settingsOf, type Settings } from './settings';
 
@@ -27,15 +30,37 @@ export function solveDesign(document: DesignDocument): SolveResult {
 	const settings = settingsOrProblem(document);
 	if ('code' in settings) return { ok: false, problems: [settings] };
 
-	const flows = designFlows(network);
+	const airs = airsOrProblem(network, document, settings);
+	if ('code' in airs) return { ok: false, problems: locate([airs], document) };
+	const uniform = isUniform(airs);
+	const flows = designFlows(network, { airs, uniform, standard: settings.standard, leaks: null });
 	const notes = new Map<string, readonly RangeNote[]>();
 	const rowLosses: RowLoss[] = [];
 	const problems: Problem[] = [];
+	const hydraulics: Hydraulics[] = [];
+	network.rows.forEach((row, place) => {
+		const air = airs[place] ?? { ...settings.air, temperature: null, condenses: false };
+		const found = orProblem(() => hydraulicsOf(row, flows.farEnd[place] ?? 0, air, settings), place);
+		if ('code' in found) problems.push(found);
+		else hydraulics.push(found);
+	});
+	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
+	const masses = massFlowsOf(airs, flows);
+	const views = junctionViews(network, hydraulics, masses);
 	network.rows.forEach((row, place) => {
 		const ofRow: RangeNote[] = [];
-		const solved = lossOrProblem(() => rowLoss(row, flows[place] ?? 0, settings, ofRow), place);
-		if ('code' in solved) problems.push(solved);
-		else rowLosses.push(solved);
+		const view = views[place];
+		const tag = view && (network.rows[view.common]?.tag ?? '');
+		const own = hydraulics[place];
+		const solved =
+			own &&
+			orProblem(
+				() => rowLoss(row, own, view && tag !== undefined ? { ...view, tag } : undefined, settings, ofRow),
+				place
+			);
+		if (solved && 'code' in solved) problems.push(solved);
+		else if (solved && Number.isFinite(solved.loss)) rowLosses.push(solved);
+		else problems.push(tooGreat(place));
 		if (ofRow.length > 0) notes.set(row.tag, ofRow);
 	});
 	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
@@ -46,9 +71,11 @@ export function solveDesign(document: DesignDocument): SolveResult {
 	);
 	const { paths, required, index, spares } = pathsOf(network, along);
 	placePressures(network, along, required, spares, rowLosses);
-	const totals = totalsOf(network, flows);
+	const totals = totalsOf(network, flows.fanEnd);
+	// By mass where the densities differ; by volume, with not a bit of difference, where they do not.
+	const balance = uniform ? totals : totalsOf(network, masses.leg);
 	const fan = fanDuty(network, rowLosses, required, totals);
-	const flags = flagsOf(document, network, rowLosses, notes, totals, fan.totalPressure, settings.air.density);
+	const flags = flagsOf(document, network, rowLosses, notes, balance, fan.totalPressure, settings.air.density, airs);
 	return {
 		ok: true,
 		solution: {
@@ -74,11 +101,26 @@ function settingsOrProblem(document: DesignDocument): Settings | Problem {
 	}
 }
 
-function lossOrProblem(solve: () => RowLoss, place: number): RowLoss | Problem {
+function airsOrProblem(network: Network, document: DesignDocument, settings: Settings): readonly RowAir[] | Problem {
 	try {
-		const solved = solve();
-		if (Number.isFinite(solved.loss)) return solved;
-		return fault('too-great', ['rows', place], 'loses more than a number can tell', 'a row of usual size and flow');
+		return rowAirs(network, document, settings.air);
+	} catch (error) {
+		return outsideProblem(error, ['rows']);
+	}
+}
+
+/** Of each row at the node where it joins, and of the common leg there [kg/s]. */
+function massFlowsOf(airs: readonly RowAir[], { fanEnd, farEnd }: RowFlows) {
+	const mass = (flows: Float64Array) => flows.map((flow, place) => flow * (airs[place]?.density ?? 1));
+	return { leg: mass(fanEnd), common: mass(farEnd) };
+}
+
+const tooGreat = (place: number): Problem =>
+	fault('too-great', ['rows', place], 'loses more than a number can tell', 'a row of usual size and flow');
+
+function orProblem<T extends object>(find: () => T, place: number): T | Problem {
+	try {
+		return find();
 	} catch (error) {
 		return outsideProblem(error, ['rows', place]);
 	}
