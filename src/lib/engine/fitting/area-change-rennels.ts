@@ -1,4 +1,4 @@
-// Cones by Rennels & Hudson, for comparison; the catalogue uses Idelchik's.
+// Area changes by Rennels & Hudson, beside those of Idelchik.
 import { PI, pow, radians, sin, tan } from '../arithmetic';
 import { coneFriction } from './area-change-idelchik';
 
@@ -56,4 +56,18 @@ export function conicalContractionRennels2012(angle: number, areaRatio: number, 
 	const l = 1 + 0.622 * pow(angle / 180, 0.8) * (1 - 0.215 * areaRatio - 0.785 * b5);
 	const local = 0.0696 * sin(radians(angle / 2)) * (1 - b5) * l * l + (l - 1) * (l - 1);
 	return local + coneFriction(angle, areaRatio, f);
+}
+
+/**
+ * Sudden contraction: a conical one of 180° without friction.
+ *
+ *   K = 0.0696 (1 - b^5) l^2 + (l - 1)^2, l = 1 + 0.622 (1 - 0.215 b^2 - 0.785 b^5), b = smaller/larger diameter
+ *
+ * @param areaRatio b^2, smaller/larger area [-], 0 to 1
+ * @returns K on the velocity pressure in the smaller leg [-]
+ * @source Rennels & Hudson, Pipe Flow (2012)
+ * @check none: Idelchik's formula lies within 20 % from b^2 0 to 0.8, in a test
+ */
+export function suddenContractionRennels2012(areaRatio: number): number {
+	return conicalContractionRennels2012(180, areaRatio, 0);
 }

@@ -3,12 +3,14 @@ import { describe, expect, it } from 'vitest';
 import published from '../../../../fixtures/published/area-changes.json';
 import { describePublished, type Given } from '../../../../fixtures/published/published-checks';
 import {
+	coneFriction,
 	conicalContractionIdelchik,
 	conicalExpansionIdelchik,
 	suddenContractionIdelchik,
 	suddenExpansion
 } from './area-change-idelchik';
 import { conicalContractionRennels2012, conicalExpansionRennels2012 } from './area-change-rennels';
+import { conicalExpansionTableIdelchik } from './area-change-tables';
 import { coefficientOfLeg, coefficientOnLeg } from './reference-change';
 
 const angle = (given: Given) => given.number('included_angle');
@@ -23,6 +25,12 @@ describePublished('area changes against published values', published, {
 	'fitting.sudden-contraction': (given) => suddenContractionIdelchik(given.number('A_small_over_A_large')),
 	'fitting.conical-expansion.idelchik': (given) =>
 		conicalExpansionIdelchik(angle(given), 1 / given.number('A2_over_A1')),
+	// The author holds the friction of the cone at that of 20°.
+	'fitting.conical-expansion.idelchik-table': (given) => {
+		const a = given.number('A1_over_A2');
+		const friction = coneFriction(Math.min(angle(given), 20), a, given.number('fd'));
+		return conicalExpansionTableIdelchik(angle(given), a) + friction;
+	},
 	'fitting.conical-expansion.rennels': (given) =>
 		conicalExpansionRennels2012(angle(given), areaRatioOf(given), given.number('fd')),
 	'fitting.conical-contraction.idelchik': (given) =>

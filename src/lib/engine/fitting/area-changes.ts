@@ -8,9 +8,16 @@ import {
 } from './area-change-idelchik';
 import type { FittingDefinition } from './definition';
 import { choiceParameter, numberParameter } from './parameters';
+import {
+	conicalContractionRennels2012,
+	conicalExpansionRennels2012,
+	suddenContractionRennels2012
+} from './area-change-rennels';
+import { conicalExpansionTableIdelchik } from './area-change-tables';
 import { coefficientOfLeg } from './reference-change';
-import { idelchik } from './sources';
-import type { CatalogueEntry } from './types';
+import { RENNELS, RENNELS_METHOD, idelchik } from './sources';
+import { transitions } from './transitions';
+import type { CatalogueEntry, Method } from './types';
 
 const areaRatio = numberParameter('areaRatio', 'Smaller over larger area', '', 0.5, { min: 0.01, max: 1 });
 const angle = numberParameter('angle', 'Included angle', '°', 30, CONE_ANGLE);
@@ -20,7 +27,26 @@ const legOf = (standard: 'smaller' | 'larger') =>
 const CONE_NOTE = 'The wall friction of the cone is in the coefficient: leave its length out of the row.';
 
 type AreaChange = Pick<CatalogueEntry, 'key' | 'name' | 'parameters' | 'range' | 'method' | 'source' | 'uncertainty'> &
-	Pick<CatalogueEntry, 'caution'>;
+	Pick<CatalogueEntry, 'caution' | 'plot' | 'drawing' | 'rivals' | 'standardMethod'>;
+
+const SUDDEN = { plot: { along: 'areaRatio' }, drawing: 'step' } as const;
+const GRADUAL = { plot: { along: 'angle' }, drawing: 'transition' } as const;
+const byRennels = (range: string, uncertainty: number): Method => ({
+	key: 'rennels',
+	range,
+	method: RENNELS_METHOD,
+	source: RENNELS,
+	known: 'published formula',
+	uncertainty
+});
+const TABLE: Method = {
+	key: 'idelchik-table',
+	range: 'cones of 3 to 180° included, area ratio to 0.6, beyond it straight to nothing; friction of 20° held above',
+	method: 'Idelchik, table and wall friction',
+	source: idelchik('5-2'),
+	known: 'published table, interpolated',
+	uncertainty: 0.3
+};
 
 function entryOf(change: AreaChange): CatalogueEntry {
 	return {
@@ -35,6 +61,7 @@ function entryOf(change: AreaChange): CatalogueEntry {
 
 const suddenWider: FittingDefinition = {
 	entry: entryOf({
+		...SUDDEN,
 		key: 'sudden-expansion',
 		name: 'Sudden expansion',
 		parameters: [areaRatio, legOf('larger')],
@@ -52,6 +79,9 @@ const suddenWider: FittingDefinition = {
 
 const suddenNarrower: FittingDefinition = {
 	entry: entryOf({
+		...SUDDEN,
+		standardMethod: 'idelchik',
+		rivals: [byRennels('any area ratio, turbulent flow, sharp edge', 0.15)],
 		key: 'sudden-contraction',
 		name: 'Sudden contraction',
 		parameters: [areaRatio, legOf('smaller')],
@@ -64,11 +94,41 @@ const suddenNarrower: FittingDefinition = {
 	coefficient(values) {
 		const a = values.number('areaRatio');
 		return coefficientOfLeg(suddenContractionIdelchik(a), a, values.choice('leg'));
+	},
+	rivals: {
+		rennels(values) {
+			const a = values.number('areaRatio');
+			return coefficientOfLeg(suddenContractionRennels2012(a), a, values.choice('leg'));
+		}
 	}
 };
 
+const PYRAMID_NOTE = 'the formula is for cones; a pyramid loses some 1.25 to 1.4 times as much (from memory)';
+const CONE_ONLY = 'the formula is for cones';
+/** Included angle up to which the table's author gives the friction of a cone [°]. */
+const FRICTION_ANGLE = 20;
+
+/** A formula of angle [°], area ratio and friction factor, put on the row's own leg; the note where the duct is not round. */
+function onLeg(
+	notRound: string,
+	smaller: (angle: number, areaRatio: number, f: number) => number
+): FittingDefinition['coefficient'] {
+	return (values, { size, frictionFactor }, note) => {
+		if (size.shape !== 'round') note(notRound);
+		const a = values.number('areaRatio');
+		return coefficientOfLeg(smaller(values.number('angle'), a, frictionFactor), a, values.choice('leg'));
+	};
+}
+
+function conicalExpansionByTable(d: number, a: number, f: number): number {
+	return conicalExpansionTableIdelchik(d, a) + coneFriction(Math.min(d, FRICTION_ANGLE), a, f);
+}
+
 const cone: FittingDefinition = {
 	entry: entryOf({
+		...GRADUAL,
+		standardMethod: 'idelchik',
+		rivals: [TABLE, byRennels('cones, any angle; wall friction to 60°', 0.3)],
 		key: 'gradual-expansion',
 		name: 'Gradual expansion',
 		parameters: [areaRatio, angle, legOf('larger')],
@@ -78,18 +138,18 @@ const cone: FittingDefinition = {
 		uncertainty: 0.3,
 		caution: CONE_NOTE
 	}),
-	coefficient(values, { size, frictionFactor }, note) {
-		const a = values.number('areaRatio');
-		const d = values.number('angle');
-		if (size.shape !== 'round')
-			note('the formula is for cones; a pyramid loses some 1.25 to 1.4 times as much (from memory)');
-		const smaller = conicalExpansionIdelchik(d, a) + coneFriction(d, a, frictionFactor);
-		return coefficientOfLeg(smaller, a, values.choice('leg'));
+	coefficient: onLeg(PYRAMID_NOTE, (d, a, f) => conicalExpansionIdelchik(d, a) + coneFriction(d, a, f)),
+	rivals: {
+		'idelchik-table': onLeg(PYRAMID_NOTE, conicalExpansionByTable),
+		rennels: onLeg(PYRAMID_NOTE, conicalExpansionRennels2012)
 	}
 };
 
 const nozzle: FittingDefinition = {
 	entry: entryOf({
+		...GRADUAL,
+		standardMethod: 'idelchik',
+		rivals: [byRennels('cones, any angle', 0.25)],
 		key: 'gradual-contraction',
 		name: 'Gradual contraction',
 		parameters: [areaRatio, angle, legOf('smaller')],
@@ -99,13 +159,8 @@ const nozzle: FittingDefinition = {
 		uncertainty: 0.25,
 		caution: CONE_NOTE
 	}),
-	coefficient(values, { size, frictionFactor }, note) {
-		const a = values.number('areaRatio');
-		const d = values.number('angle');
-		if (size.shape !== 'round') note('the formula is for cones');
-		const smaller = conicalContractionIdelchik(d, a) + coneFriction(d, a, frictionFactor);
-		return coefficientOfLeg(smaller, a, values.choice('leg'));
-	}
+	coefficient: onLeg(CONE_ONLY, (d, a, f) => conicalContractionIdelchik(d, a) + coneFriction(d, a, f)),
+	rivals: { rennels: onLeg(CONE_ONLY, conicalContractionRennels2012) }
 };
 
-export const areaChanges: readonly FittingDefinition[] = [suddenWider, suddenNarrower, cone, nozzle];
+export const areaChanges: readonly FittingDefinition[] = [suddenWider, suddenNarrower, cone, nozzle, ...transitions];

@@ -1,6 +1,7 @@
-// Other methods for round bends, for comparison; the catalogue uses those of Idelchik and of SMACNA.
+// Other authors' methods for round bends, beside those of Idelchik and of SMACNA.
 import { PI, pow, radians, sin } from '../arithmetic';
 import { requireInRange, type Range } from '../errors';
+import { interpolate } from './interpolate';
 
 /**
  * Smooth round bend, wall friction along the arc included.
@@ -36,23 +37,44 @@ export function mitreRennels2012(angle: number): number {
 	return 0.42 * s + 2.56 * s * s * s;
 }
 
-const ITO_CURVED: Range = { min: 91, max: Number.MAX_VALUE };
+/** Re (D/2r)^2 from which the bend is turbulent by this method [-]. */
+export const ITO_CURVED: Range = { min: 91, max: Number.MAX_VALUE };
+const ITO_ANGLES = [45, 90, 180];
 
 /**
- * Smooth round bend of 90° with smooth walls, wall friction along the arc included.
+ * Smooth round bend with smooth walls, wall friction along the arc included.
  *
- *   K = 0.00241 k 90 Re^-0.17 (2r/D)^0.84 for Re (D/2r)^2 above 91; k = 0.95 + 17.2 (2r/D)^-1.96, or 1 when 2r/D >= 19.7
+ *   K = 0.00241 k a Re^-0.17 (2r/D)^0.84 for Re (D/2r)^2 above 91; with R = 2r/D
+ *   k = 1 + 14.2 R^-1.47 (45°), 0.95 + 17.2 R^-1.96 or 1 when R >= 19.7 (90°), 1 + 116 R^-4.52 (180°); straight between
  *
  * @param radiusRatio r/D [-], from 0.5
  * @param Re Reynolds number [-]
+ * @param angle a [°], 45 to 180; k of 45° is held below
  * @returns K on the velocity pressure in the bend [-]
  * @throws {OutOfRangeError} when Re (D/2r)^2 leaves its range
  * @source Ito, Pressure losses in smooth pipe bends (1960), from memory; agrees with its checks
  * @check fixtures/published/elbows.json
  */
-export function bendIto1960(radiusRatio: number, Re: number): number {
+export function bendIto1960(radiusRatio: number, Re: number, angle: number): number {
 	const R = 2 * radiusRatio;
 	requireInRange('bendIto1960', 'Re (D/2r)^2', Re / (R * R), ITO_CURVED);
-	const k = R < 19.7 ? 0.95 + 17.2 * pow(R, -1.96) : 1;
-	return 0.00241 * k * 90 * pow(Re, -0.17) * pow(R, 0.84);
+	const square = R < 19.7 ? 0.95 + 17.2 * pow(R, -1.96) : 1;
+	const k = interpolate(ITO_ANGLES, [1 + 14.2 * pow(R, -1.47), square, 1 + 116 * pow(R, -4.52)], angle);
+	return 0.00241 * k * angle * pow(Re, -0.17) * pow(R, 0.84);
+}
+
+/**
+ * Wall friction along the centre line of a bend, which some authors count with it.
+ *
+ *   K = f a r/D
+ *
+ * @param angle a [°]
+ * @param radiusRatio r/D [-]
+ * @param f Darcy friction factor [-]
+ * @returns K on the velocity pressure in the bend [-]
+ * @source Definition of the friction factor
+ * @check none: it is the friction of a duct as long as the arc
+ */
+export function arcFriction(angle: number, radiusRatio: number, f: number): number {
+	return f * radians(angle) * radiusRatio;
 }

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { frictionFactor } from '../friction';
 import type { Size } from '../shape';
-import { catalogue, coefficientOf, fittingEntry, type FittingContext } from '.';
+import { catalogue, coefficientOf, fittingEntry, type CatalogueEntry, type FittingContext } from '.';
 import { conicalExpansionIdelchik } from './area-change-idelchik';
 import { roundElbowSmacna } from './elbow-tables';
 
@@ -22,6 +22,16 @@ const square = rowOf(SIZES.rectangular);
 
 /** Those along a row; a junction sees other legs and has tests of its own. */
 const inRows = catalogue.filter((entry) => entry.place !== 'junction');
+
+/** Each rival method of an entry, but none where there is only one. */
+const rivalled = inRows.flatMap((entry) => (entry.rivals ?? []).map((rival) => [entry.key, rival.key, entry] as const));
+
+const PICKS = ['default', 'min', 'max'] as const;
+/** All parameters at one end, a choice at its first or last. */
+const at = (entry: CatalogueEntry, pick: (typeof PICKS)[number]) =>
+	Object.fromEntries(
+		entry.parameters.map((one) => [one.name, one.options ? one.options.at(pick === 'max' ? -1 : 0) : one[pick]])
+	);
 
 describe('the catalogue', () => {
 	it('has keys of their own, which find their entry', () => {
@@ -50,17 +60,42 @@ describe('the catalogue', () => {
 				expect(Number(parameter.default)).toBeLessThanOrEqual(parameter.max);
 			}
 		}
-		expect(entry.known === 'from memory').toBe(/from memory/.test(`${entry.source} ${entry.method}`));
+		for (const one of [entry, ...(entry.rivals ?? [])])
+			expect(one.known === 'from memory', one.method).toBe(/from memory/.test(`${one.source} ${one.method}`));
+	});
+
+	it.each(inRows.map((entry) => [entry.key, entry] as const))(
+		'%s is drawn, and plotted along a figure',
+		(_key, entry) => {
+			expect(entry.drawing).toBeTruthy();
+			const figures = entry.parameters
+				.filter((one) => !one.options && one.name !== 'coefficient')
+				.map((one) => one.name);
+			// What is entered by hand is its own plot.
+		if (figures.length > 0 && entry.known !== 'entered by hand') expect(figures).toContain(entry.plot?.along);
+			else expect(entry.plot).toBeUndefined();
+		}
+	);
+
+	it.each(rivalled)('%s by %s is whole, and has a loss at every limit', (key, method, entry) => {
+		expect(entry.standardMethod).not.toBe(method);
+		for (const shape of entry.shapes)
+			for (const reynolds of [1e-3, 3_000, 1e5, 1e7])
+				for (const pick of PICKS) {
+					const result = coefficientOf(key, { ...at(entry, pick), method }, rowOf(SIZES[shape], reynolds));
+					expect(result.methodKey).toBe(method);
+					expect(Number.isFinite(result.coefficient)).toBe(true);
+					expect(result.coefficient).toBeGreaterThanOrEqual(0);
+				}
+		const standard = coefficientOf(key, {}, rowOf(SIZES[entry.shapes[0] ?? 'round']));
+		expect(standard.methodKey).toBe(entry.standardMethod);
 	});
 
 	it.each(inRows.map((entry) => [entry.key, entry] as const))('%s has a loss at every limit', (key, entry) => {
 		for (const shape of entry.shapes)
 			for (const reynolds of [1e-3, 3_000, 1e5, 1e7])
-				for (const pick of ['default', 'min', 'max'] as const) {
-					const parameters = Object.fromEntries(
-						entry.parameters.map((one) => [one.name, one.options ? one.options.at(pick === 'max' ? -1 : 0) : one[pick]])
-					);
-					const { coefficient } = coefficientOf(key, parameters, rowOf(SIZES[shape], reynolds));
+				for (const pick of PICKS) {
+					const { coefficient } = coefficientOf(key, at(entry, pick), rowOf(SIZES[shape], reynolds));
 					expect(Number.isFinite(coefficient)).toBe(true);
 					expect(coefficient).toBeGreaterThanOrEqual(0);
 					expect(Object.is(coefficient, -0)).toBe(false);
@@ -72,7 +107,12 @@ describe('the catalogue', () => {
 		const defaults = Object.fromEntries(entry.parameters.map((one) => [one.name, one.default]));
 		const result = coefficientOf(key, {}, rowOf(SIZES[shape]));
 		expect(result).toEqual(coefficientOf(key, defaults, rowOf(SIZES[shape])));
-		expect(result).toMatchObject({ inRange: true, rangeNote: null, source: entry.source, method: entry.method });
+		expect(result).toMatchObject({ source: entry.source, method: entry.method });
+		// Two elbows always act on one another, and what nobody has entered cannot stand for itself.
+		if (entry.family === 'offsets') expect(result.rangeNote).toContain('interaction of the two elbows is taken as 1');
+		else if (entry.known === "maker's data" || entry.known === 'entered by hand')
+			expect(result).toMatchObject({ coefficient: 0, rangeNote: expect.stringContaining('is entered, so that no') });
+		else expect(result).toMatchObject({ inRange: true, rangeNote: null });
 	});
 });
 

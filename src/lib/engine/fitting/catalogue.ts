@@ -1,22 +1,28 @@
 import { areaChanges } from './area-changes';
 import { dampers } from './dampers';
 import type { FittingDefinition, JunctionDefinition } from './definition';
+import { elbowsOval } from './elbows-oval';
 import { elbowsRectangular } from './elbows-rectangular';
 import { elbowsRound } from './elbows-round';
 import { entries } from './entries';
 import { exits } from './exits';
 import { junctions } from './junctions';
+import { offsets } from './offsets';
 import { screens } from './screens';
+import { systemEffects } from './system-effect';
 import type { CatalogueEntry } from './types';
 
 const definitions: readonly FittingDefinition[] = [
 	...elbowsRound,
 	...elbowsRectangular,
+	...elbowsOval,
+	...offsets,
 	...areaChanges,
 	...entries,
 	...exits,
 	...dampers,
-	...screens
+	...screens,
+	...systemEffects
 ];
 
 const byKey: ReadonlyMap<string, FittingDefinition> = new Map(definitions.map((one) => [one.entry.key, one]));

@@ -1,7 +1,7 @@
 import { pow } from '../arithmetic';
 
 /** Approach velocity of the formula, 1000 fpm [m/s]. */
-const REFERENCE_VELOCITY = 5.08;
+export const REFERENCE_VELOCITY = 5.08;
 
 export interface OpenDamper {
 	/** Free area over duct area [-] */
@@ -30,4 +30,19 @@ export function openBladeDamper(blades: 'parallel' | 'opposed', Ad: number, Au: 
 	const reference = freeRatio > 0.5 ? 3.114 * (pow(freeRatio, -4.274) - 1) : 11.64 * (pow(freeRatio, -2.562) - 1);
 	const ratio = V / REFERENCE_VELOCITY;
 	return { freeRatio, loss: reference * ratio * ratio };
+}
+
+/** Density of the formula's air, 0.075 lb/ft3 [kg/m3]. */
+const REFERENCE_DENSITY = 1.2014;
+
+/**
+ * The same as a coefficient; nothing where the formula, of a damper larger than it was made for, would give a gain.
+ *
+ * @param damper what openBladeDamper gives at 5.08 m/s: free-area ratio [-] and loss [Pa]
+ * @returns C on the velocity pressure in the duct [-]
+ * @source Definition of the loss coefficient
+ * @check fixtures/published/dampers.json
+ */
+export function openDamperCoefficient(damper: OpenDamper): number {
+	return Math.max(0, damper.loss / (0.5 * REFERENCE_DENSITY * REFERENCE_VELOCITY * REFERENCE_VELOCITY));
 }

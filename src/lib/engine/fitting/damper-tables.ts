@@ -46,3 +46,26 @@ export function butterflyDamper(angle: number, section: 'round' | 'rectangular')
 export function bladeDamper(angle: number, blades: 'parallel' | 'opposed'): number {
 	return exp(interpolate(BLADES_ANGLES, blades === 'parallel' ? LOG_PARALLEL : LOG_OPPOSED, angle));
 }
+
+/** Openings of the gate tables, height over that of the duct [-]. */
+export const GATE_OPENING: Range = { min: 0.2, max: 1 };
+const GATE_OPENINGS = [0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9];
+const GATE_ROUND = logarithms([35, 10, 4.6, 2.1, 0.98, 0.44, 0.17, 0.06]);
+const GATE_RECTANGULAR = logarithms([45, 18, 8.1, 4, 2.1, 0.95, 0.39, 0.09]);
+const LAST_OPENING = 0.9;
+
+/**
+ * Gate or slide damper.
+ *
+ *   ln C is taken as a straight line between the points of the table, C as one from the last of them to nothing
+ *
+ * @param opening free height over that of the duct [-], 0.2 to 1
+ * @param section round or rectangular
+ * @returns C on the velocity pressure in the duct [-]
+ * @source Idelchik, Handbook of Hydraulic Resistance, gate valves, from memory
+ * @check none: no checked value is at hand
+ */
+export function gateDamper(opening: number, section: 'round' | 'rectangular'): number {
+	const C = exp(interpolate(GATE_OPENINGS, section === 'round' ? GATE_ROUND : GATE_RECTANGULAR, opening));
+	return opening <= LAST_OPENING ? C : (C * (1 - opening)) / (1 - LAST_OPENING);
+}

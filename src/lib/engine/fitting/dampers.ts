@@ -1,5 +1,6 @@
 import type { Range } from '../errors';
 import { BLADES_ANGLE, BUTTERFLY_ANGLE, bladeDamper, butterflyDamper } from './damper-tables';
+import { dampersStill } from './dampers-still';
 import type { FittingDefinition } from './definition';
 import { numberParameter } from './parameters';
 
@@ -14,12 +15,14 @@ const butterfly: FittingDefinition = {
 		shapes: ['round', 'rectangular', 'oval'],
 		parameters: [openAngle(BUTTERFLY_ANGLE)],
 		reference: 'row',
+		plot: { along: 'angle' },
 		range: '0 to 60° from open',
 		method: 'Table of the angle, log-linear between',
 		source: 'SMACNA, HVAC Systems Duct Design, after Idelchik, from memory',
 		known: 'from memory',
 		uncertainty: 0.4,
 		picture: 'damper',
+		drawing: 'damper',
 		caution: CAUTION
 	},
 	coefficient(values, { size }, note) {
@@ -37,16 +40,23 @@ function bladed(blades: 'parallel' | 'opposed'): FittingDefinition {
 			shapes: ['rectangular'],
 			parameters: [openAngle(BLADES_ANGLE)],
 			reference: 'row',
+			plot: { along: 'angle' },
 			range: '0 to 80° from open, total blade length over perimeter of 0.3',
 			method: 'Table of the angle, log-linear between',
 			source: 'SMACNA, HVAC Systems Duct Design, multi-blade dampers, from memory',
 			known: 'from memory',
 			uncertainty: 0.4,
 			picture: 'damper',
+			drawing: 'blades',
 			caution: CAUTION
 		},
 		coefficient: (values) => bladeDamper(values.number('angle'), blades)
 	};
 }
 
-export const dampers: readonly FittingDefinition[] = [butterfly, bladed('parallel'), bladed('opposed')];
+export const dampers: readonly FittingDefinition[] = [
+	butterfly,
+	bladed('parallel'),
+	bladed('opposed'),
+	...dampersStill
+];

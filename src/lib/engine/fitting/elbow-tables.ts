@@ -17,6 +17,10 @@ const THREE: SegmentTable = { radii: [0.5, 0.75, 1, 1.5, 2], coefficients: [0.98
 const FOUR: SegmentTable = { radii: [0.75, 1, 1.5, 2], coefficients: [0.5, 0.37, 0.27, 0.24] };
 const FIVE: SegmentTable = { radii: [0.75, 1, 1.5, 2], coefficients: [0.46, 0.33, 0.24, 0.19] };
 
+/** Radii of the die-stamped elbows [-]. */
+export const STAMPED_RADIUS: Range = { min: 0.5, max: 2.5 };
+/** Radii of the rectangular elbows [-]. */
+export const RECTANGULAR_RADIUS: Range = { min: 0.5, max: 2 };
 /** Angles of the tabulated factor [°]. */
 export const TABLE_ANGLE: Range = { min: 20, max: 180 };
 /** Radii of the segmented elbows, by number of pieces [-]. */

@@ -1,4 +1,4 @@
-import type { Shape, Size } from '../shape';
+import type { Shape } from '../shape';
 import {
 	BEND_ANGLE,
 	BEND_ASPECT,
@@ -8,26 +8,26 @@ import {
 	bendIdelchik,
 	bendReynoldsFactorIdelchik
 } from './bend-idelchik';
-import type { FittingDefinition, Note } from './definition';
-import { mitreReynoldsFactorSmacna } from './elbow-tables';
+import type { FittingDefinition } from './definition';
+import { aspectInPlane, plane } from './elbow-aspect';
+import {
+	RECTANGULAR_RADIUS,
+	TABLE_ANGLE,
+	elbowAngleFactorSmacna,
+	mitreReynoldsFactorSmacna,
+	rectangularElbowSmacna
+} from './elbow-tables';
+import { elbowsRectangularVaned } from './elbows-rectangular-vaned';
 import { MITRE_ANGLE, MITRE_ASPECT, mitreAspectFactorIdelchik, mitreIdelchik } from './mitre-idelchik';
-import { choiceParameter, heldWithin, noteOutside, numberParameter } from './parameters';
-import { SMACNA_ELBOWS, idelchik } from './sources';
-import { oneSplitterSmacna, splitterVanes } from './splitter-vanes';
+import { heldWithin, noteOutside, numberParameter } from './parameters';
+import { rectangularMitreSmacna } from './mitre-tables';
+import { SMACNA_ELBOWS, SMACNA_MEMORY, idelchik } from './sources';
 import type { FittingParameter } from './types';
 
 const shapes: readonly Shape[] = ['rectangular', 'oval'];
-const plane = choiceParameter('plane', 'Side in the plane of the bend', 'width', ['width', 'height']);
 const angle = (max: number): FittingParameter => numberParameter('angle', 'Angle', '°', 90, { min: 0, max });
 const radiusRatio = (standard: number, max: number): FittingParameter =>
 	numberParameter('radiusRatio', 'Radius to centre line over side in the plane', '', standard, { min: 0.5, max });
-
-/** H/W: the side parallel to the axis of the bend over the side in its plane. */
-function aspectOf(size: Size, inPlane: string, note: Note): number {
-	if (size.shape === 'round') return 1;
-	if (size.shape === 'oval') note('the method for rectangles stands in for a flat oval');
-	return inPlane === 'width' ? size.height / size.width : size.width / size.height;
-}
 
 const smooth: FittingDefinition = {
 	entry: {
@@ -37,6 +37,18 @@ const smooth: FittingDefinition = {
 		shapes,
 		parameters: [radiusRatio(1, 10), angle(BEND_ANGLE.max), plane],
 		reference: 'row',
+		standardMethod: 'idelchik',
+		rivals: [
+			{
+				key: 'smacna',
+				range: 'r/W 0.5 to 2, H/W 0.25 to 8, 20 to 180°, Re from 10 000; beyond, the nearer end',
+				method: 'Table for 90° with angle factor of round elbows and Reynolds factor of Idelchik',
+				source: SMACNA_MEMORY,
+				known: 'from memory',
+				uncertainty: 0.3
+			}
+		],
+		plot: { along: 'radiusRatio' },
 		range:
 			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1; r/W 0.5 to 3, H/W 0.25 to 8, Re from 10 000; wall friction along the arc belongs to the length of the row',
 		method: 'Idelchik, A1 B1 C1 with Reynolds factor; C1 from memory',
@@ -44,15 +56,26 @@ const smooth: FittingDefinition = {
 		known: 'from memory',
 		uncertainty: 0.3,
 		picture: 'elbow',
+		drawing: 'elbow-rectangular',
 		caution: 'Published methods for this elbow differ by 30 to 50 %.'
 	},
 	coefficient(values, context, note) {
 		const R = values.number('radiusRatio');
 		noteOutside(R, BEND_RADIUS, 'r/W', note);
-		const aspect = heldWithin(aspectOf(context.size, values.choice('plane'), note), BEND_ASPECT, 'H/W', note);
+		const aspect = heldWithin(aspectInPlane(context.size, values.choice('plane'), note), BEND_ASPECT, 'H/W', note);
 		const Re = heldWithin(context.reynolds, BEND_REYNOLDS, 'Reynolds number', note);
 		const square = bendIdelchik(values.number('angle'), R);
 		return square * bendAspectFactorIdelchik(aspect) * bendReynoldsFactorIdelchik(R, Re);
+	},
+	rivals: {
+		smacna(values, context, note) {
+			const R = heldWithin(values.number('radiusRatio'), RECTANGULAR_RADIUS, 'r/W', note);
+			const d = values.number('angle');
+			noteOutside(d, TABLE_ANGLE, 'angle', note);
+			const aspect = heldWithin(aspectInPlane(context.size, values.choice('plane'), note), BEND_ASPECT, 'H/W', note);
+			const Re = heldWithin(context.reynolds, BEND_REYNOLDS, 'Reynolds number', note);
+			return rectangularElbowSmacna(R, aspect) * elbowAngleFactorSmacna(d) * bendReynoldsFactorIdelchik(R, Re);
+		}
 	}
 };
 
@@ -64,6 +87,18 @@ const mitred: FittingDefinition = {
 		shapes,
 		parameters: [angle(120), plane],
 		reference: 'row',
+		standardMethod: 'idelchik',
+		rivals: [
+			{
+				key: 'smacna',
+				range: '20 to 90°, H/W 0.25 to 8, Re from 10 000',
+				method: 'Table of angle and aspect with Reynolds factor',
+				source: SMACNA_ELBOWS,
+				known: 'published table, interpolated',
+				uncertainty: 0.2
+			}
+		],
+		plot: { along: 'angle' },
 		range: 'angle 20 to 90°, H/W 0.25 to 8, Re from 10 000',
 		method:
 			'factors from memory, which agree with the SMACNA table; Idelchik, sine form, with the Reynolds factor of the SMACNA table',
@@ -71,60 +106,24 @@ const mitred: FittingDefinition = {
 		known: 'from memory',
 		uncertainty: 0.2,
 		picture: 'elbow',
+		drawing: 'mitre',
 		caution: null
 	},
 	coefficient(values, context, note) {
 		const d = values.number('angle');
 		noteOutside(d, MITRE_ANGLE, 'angle', note);
-		const aspect = heldWithin(aspectOf(context.size, values.choice('plane'), note), MITRE_ASPECT, 'H/W', note);
+		const aspect = heldWithin(aspectInPlane(context.size, values.choice('plane'), note), MITRE_ASPECT, 'H/W', note);
 		const Re = heldWithin(context.reynolds, BEND_REYNOLDS, 'Reynolds number', note);
 		return mitreIdelchik(d) * mitreAspectFactorIdelchik(aspect) * mitreReynoldsFactorSmacna(Re);
-	}
-};
-
-const vaned: FittingDefinition = {
-	entry: {
-		key: 'rectangular-elbow-vaned',
-		name: 'Rectangular elbow, mitred, with turning vanes',
-		family: 'elbows-rectangular',
-		shapes,
-		parameters: [],
-		reference: 'row',
-		range: '90°, single-thickness vanes; 0.12 to 0.18 by vane radius and spacing, other printings 0.11 to 0.33',
-		method: 'One value for vanes of 114 mm radius, 57 mm apart',
-		source: 'SMACNA, HVAC Systems Duct Design, elbow with turning vanes, from memory',
-		known: 'from memory',
-		uncertainty: 0.5,
-		picture: 'elbow',
-		caution: 'A value from memory: enter the coefficient of the vanes that are built in, if it is known.'
 	},
-	coefficient(_values, context, note) {
-		aspectOf(context.size, 'width', note);
-		return 0.15;
+	rivals: {
+		smacna(values, context, note) {
+			const d = heldWithin(values.number('angle'), MITRE_ANGLE, 'angle', note);
+			const aspect = heldWithin(aspectInPlane(context.size, values.choice('plane'), note), MITRE_ASPECT, 'H/W', note);
+			const Re = heldWithin(context.reynolds, BEND_REYNOLDS, 'Reynolds number', note);
+			return rectangularMitreSmacna(d, aspect) * mitreReynoldsFactorSmacna(Re);
+		}
 	}
 };
 
-const splitter: FittingDefinition = {
-	entry: {
-		key: 'rectangular-elbow-splitter',
-		name: 'Rectangular elbow, smooth radius, one splitter vane',
-		family: 'elbows-rectangular',
-		shapes,
-		parameters: [radiusRatio(0.75, 1), plane],
-		reference: 'row',
-		range: '90°, r/W 0.55 to 1, H/W 0.25 to 8, vane by the curve ratio',
-		method: 'Table of curve ratio and aspect',
-		source: 'SMACNA, HVAC Systems Duct Design, elbow with splitter vanes, from memory',
-		known: 'from memory',
-		uncertainty: 0.4,
-		picture: 'elbow',
-		caution: null
-	},
-	coefficient(values, context, note) {
-		const R = heldWithin(values.number('radiusRatio'), { min: 0.55, max: 1 }, 'r/W', note);
-		const aspect = heldWithin(aspectOf(context.size, values.choice('plane'), note), BEND_ASPECT, 'H/W', note);
-		return oneSplitterSmacna(splitterVanes(1, R - 0.5, 1).curveRatio, aspect);
-	}
-};
-
-export const elbowsRectangular: readonly FittingDefinition[] = [smooth, mitred, vaned, splitter];
+export const elbowsRectangular: readonly FittingDefinition[] = [smooth, mitred, ...elbowsRectangularVaned];

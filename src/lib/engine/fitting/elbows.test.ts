@@ -3,7 +3,9 @@ import { describe, expect, it } from 'vitest';
 import published from '../../../../fixtures/published/elbows.json';
 import { describePublished, type Given } from '../../../../fixtures/published/published-checks';
 import { OutOfRangeError } from '../errors';
+import { frictionFactor } from '../friction';
 import { bendAspectFactorIdelchik, bendIdelchik, bendReynoldsFactorIdelchik } from './bend-idelchik';
+import { bendMiller } from './bend-miller';
 import { bendIto1960, bendRennels2012, mitreRennels2012 } from './bend-rivals';
 import {
 	elbowAngleFactorSmacna,
@@ -42,8 +44,12 @@ describePublished('elbows against published values', published, {
 		bendReynoldsFactorIdelchik(given.number('R0_over_D'), given.number('Re')),
 	'fitting.elbow-round-smooth.rennels': (given) =>
 		bendRennels2012(angle(given), given.number('r_over_D'), given.number('fd')),
-	'fitting.elbow-round-smooth.ito': (given) =>
-		angle(given) === 90 ? bendIto1960(given.number('r_over_D'), given.number('Re')) : NaN,
+	'fitting.elbow-round-smooth.ito': (given) => bendIto1960(given.number('r_over_D'), given.number('Re'), angle(given)),
+	'fitting.elbow-round-smooth.miller': (given) => {
+		const Re = given.number('Re');
+		const factor = (eps: number) => frictionFactor({ reynolds: Re, relativeRoughness: eps / given.number('D') });
+		return bendMiller(given.number('r_over_D'), angle(given), Re, factor(given.number('eps')), factor(0));
+	},
 	'fitting.elbow-round-mitred.rennels': (given) => mitreRennels2012(angle(given))
 });
 
@@ -71,7 +77,7 @@ describe('the angle factor of smooth bends', () => {
 
 describe('the method of Ito', () => {
 	it('refuses what flows too slowly for a turbulent bend', () => {
-		expect(() => bendIto1960(10, 30_000)).toThrow(OutOfRangeError);
+		expect(() => bendIto1960(10, 30_000, 90)).toThrow(OutOfRangeError);
 	});
 });
 

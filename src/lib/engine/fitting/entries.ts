@@ -1,4 +1,5 @@
 import type { FittingDefinition } from './definition';
+import { entryHoods } from './entry-hoods';
 import {
 	BELLMOUTH_RADIUS,
 	EDGE_THICKNESS,
@@ -7,6 +8,7 @@ import {
 	angledEntryIdelchik,
 	freeBellmouthIdelchik,
 	projectingEntryIdelchik,
+	roundedEntryIdelchik,
 	roundedEntryRennels2012
 } from './entry-formulas';
 import { noteOutside, numberParameter } from './parameters';
@@ -14,10 +16,11 @@ import { RENNELS, idelchik } from './sources';
 import type { CatalogueEntry } from './types';
 
 type EntryFitting = Pick<CatalogueEntry, 'key' | 'name' | 'parameters' | 'range' | 'method' | 'source' | 'known'> &
-	Pick<CatalogueEntry, 'uncertainty'>;
+	Pick<CatalogueEntry, 'uncertainty' | 'plot' | 'drawing' | 'rivals' | 'standardMethod'>;
 
 function entryOf(fitting: EntryFitting): CatalogueEntry {
 	return {
+		drawing: 'entry',
 		...fitting,
 		family: 'entries',
 		shapes: ['round', 'rectangular', 'oval'],
@@ -66,6 +69,7 @@ const projecting: FittingDefinition = {
 			numberParameter('lengthRatio', 'Projection over diameter', '', 0.5, { min: 0, max: 100 })
 		],
 		range: 'edge thickness to 0.05 D, projection to 1 D; beyond, the last value',
+		plot: { along: 'lengthRatio' },
 		method: 'Table of thickness and projection',
 		source: idelchik('3-1'),
 		known: 'published table, interpolated',
@@ -83,7 +87,9 @@ const bellmouth: FittingDefinition = {
 		key: 'entry-bellmouth',
 		name: 'Bellmouth entry at a free duct end',
 		parameters: [radiusRatio],
-		range: 'r/D to 0.2; beyond, the last value',
+		plot: { along: 'radiusRatio' },
+		drawing: 'bellmouth',
+		range: 'r/D to 0.2; beyond, the last value; rectangular and oval duct by the hydraulic diameter',
 		method: 'Table of r/D',
 		source: idelchik('3-4'),
 		known: 'published table, interpolated',
@@ -97,13 +103,29 @@ const bellmouthInWall: FittingDefinition = {
 		key: 'entry-bellmouth-in-wall',
 		name: 'Bellmouth entry in a wall',
 		parameters: [radiusRatio],
-		range: 'r/D to 1; older data give less than half at r/D 0.2',
+		plot: { along: 'radiusRatio' },
+		drawing: 'bellmouth',
+		standardMethod: 'rennels',
+		rivals: [
+			{
+				key: 'idelchik',
+				range: 'r/D to 0.2; beyond, the last value',
+				method: 'Table of r/D',
+				source: 'Idelchik, Handbook of Hydraulic Resistance, chapter 3, read at second hand',
+				known: 'published table, interpolated',
+				uncertainty: 0.4
+			}
+		],
+		range: 'r/D to 1; older data give less than half at r/D 0.2; rectangular and oval duct by the hydraulic diameter',
 		method: 'Rennels and Hudson',
 		source: RENNELS,
 		known: 'published formula',
 		uncertainty: 0.4
 	}),
-	coefficient: (values) => roundedEntryRennels2012(values.number('radiusRatio'))
+	coefficient: (values) => roundedEntryRennels2012(values.number('radiusRatio')),
+	rivals: {
+		idelchik: (values) => roundedEntryIdelchik(Math.min(values.number('radiusRatio'), BELLMOUTH_RADIUS.max))
+	}
 };
 
 const angled: FittingDefinition = {
@@ -111,6 +133,7 @@ const angled: FittingDefinition = {
 		key: 'entry-angled',
 		name: 'Entry flush with a wall, at an angle',
 		parameters: [numberParameter('angle', 'Angle between duct and wall', '°', 60, { min: 0, max: 90 })],
+		plot: { along: 'angle' },
 		range: '20 to 90°',
 		method: 'Idelchik, cosine form',
 		source: 'Idelchik, Handbook of Hydraulic Resistance (1966), as recommended by Rennels & Hudson (2012)',
@@ -124,4 +147,12 @@ const angled: FittingDefinition = {
 	}
 };
 
-export const entries: readonly FittingDefinition[] = [flush, plainEnd, projecting, bellmouth, bellmouthInWall, angled];
+export const entries: readonly FittingDefinition[] = [
+	flush,
+	plainEnd,
+	projecting,
+	bellmouth,
+	bellmouthInWall,
+	angled,
+	...entryHoods
+];

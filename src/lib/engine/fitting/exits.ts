@@ -1,5 +1,7 @@
 import { CONE_ANGLE, coneFriction, conicalExpansionIdelchik } from './area-change-idelchik';
 import type { FittingDefinition } from './definition';
+import { flatCap } from './flat-cap';
+import { byMaker } from './makers-data';
 import { numberParameter } from './parameters';
 import { idelchik } from './sources';
 
@@ -34,6 +36,7 @@ const plain: FittingDefinition = {
 		known: 'published formula',
 		uncertainty: 0.05,
 		picture: 'diffuser',
+		drawing: 'exit',
 		caution: CAUTION
 	},
 	coefficient: () => plainExit(1)
@@ -56,6 +59,8 @@ const diffuser: FittingDefinition = {
 		known: 'published formula',
 		uncertainty: 0.3,
 		picture: 'diffuser',
+		drawing: 'exit-diffuser',
+		plot: { along: 'angle' },
 		caution: CAUTION
 	},
 	coefficient(values, { size, frictionFactor }, note) {
@@ -67,4 +72,32 @@ const diffuser: FittingDefinition = {
 	}
 };
 
-export const exits: readonly FittingDefinition[] = [plain, diffuser];
+const MAKERS_CAUTION =
+	'The maker says whether the velocity pressure of the duct is in the coefficient: if it is, add no plain exit.';
+
+export const exits: readonly FittingDefinition[] = [
+	plain,
+	diffuser,
+	flatCap('exhaust', {
+		key: 'exhaust-cap',
+		name: 'Exit under a flat cap',
+		family: 'exits',
+		caution: 'The velocity pressure of the duct is in the coefficient: add no plain exit.'
+	}),
+	byMaker({
+		key: 'exhaust-hood',
+		name: 'Exhaust hood or cowl',
+		family: 'exits',
+		picture: 'louvre',
+		drawing: 'cap',
+		caution: MAKERS_CAUTION
+	}),
+	byMaker({
+		key: 'exhaust-louvre',
+		name: 'Exhaust louvre',
+		family: 'exits',
+		picture: 'louvre',
+		drawing: 'louvre',
+		caution: MAKERS_CAUTION
+	})
+];

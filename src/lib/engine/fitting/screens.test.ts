@@ -1,10 +1,18 @@
 import { describe, expect, it } from 'vitest';
 import { describePublished } from '../../../../fixtures/published/published-checks';
 import published from '../../../../fixtures/published/screens.json';
-import { obstructionIdelchik, thickPlateIdelchik, thinPlateIdelchik, wireScreenIdelchik } from './screen-formulas';
+import {
+	obstructionIdelchik,
+	thickPlateIdelchik,
+	thinPlateBlevins,
+	thinPlateIdelchik,
+	wireScreenBlevins,
+	wireScreenIdelchik
+} from './screen-formulas';
 
 describePublished('screens and plates against published values', published, {
 	'fitting.screen-wire': (given) => wireScreenIdelchik(given.number('free_area_ratio')),
+	'fitting.screen-wire.blevins': (given) => wireScreenBlevins(given.number('free_area_ratio'), given.number('Re')),
 	'fitting.orifice-perforated-plate': (given) =>
 		thickPlateIdelchik(given.number('free_area_ratio'), given.number('l_over_d'), given.number('lambda')),
 	'fitting.perforated-plate-thin': (given) => thinPlateIdelchik(given.number('free_area_ratio')),
