@@ -1,6 +1,7 @@
 import { performance } from 'node:perf_hooks';
 import { solveDesign, validateDocument } from '$lib/engine';
 import { building } from '../../tests/bench/building';
+import { benchFriction } from './bench/friction';
 
 const COUNTS = [500, 1_000, 10_000] as const;
 const WARM_UP_ROWS = 40_000;
@@ -13,7 +14,10 @@ interface Timing {
 	readonly validate_ms: number;
 }
 
-/** Median times of solving and of validating, in one process after a warm-up, the sizes taken in turn. */
+/**
+ * Median times of solving and of validating, in one process after a warm-up, the sizes taken in turn; and how many
+ * friction factors a second.
+ */
 export function bench() {
 	const documents = COUNTS.map((rows) => building(rows));
 	for (const document of documents)
@@ -42,7 +46,13 @@ export function bench() {
 	});
 	const [, thousand, tenThousand] = timings;
 	const ratio = (tenThousand?.perRow_us ?? 0) / (thousand?.perRow_us ?? 1);
-	return { node: process.version, runs: RUNS, solve: timings, perRowAt10000To1000: rounded(ratio) };
+	return {
+		node: process.version,
+		runs: RUNS,
+		solve: timings,
+		perRowAt10000To1000: rounded(ratio),
+		friction: benchFriction()
+	};
 }
 
 function solved(document: Parameters<typeof solveDesign>[0]): void {

@@ -3,6 +3,7 @@
 export { PI, radians } from './degrees';
 export { exp } from './exponential';
 export { asin, atan } from './inverse-trigonometry';
-export { log, log10 } from './logarithm';
+export { log10 } from './logarithm';
 export { pow } from './power';
+export { log, roughLog } from './table-logarithm';
 export { cos, sin, tan } from './trigonometry';

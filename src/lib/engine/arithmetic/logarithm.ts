@@ -41,18 +41,6 @@ function special(x: number): number | null {
 }
 
 /**
- * Natural logarithm, to about half a unit in the last place.
- *
- * @param x argument [-], positive; 0 gives -Infinity, negative NaN
- * @returns ln x [-]
- * @source Abramowitz & Stegun, Handbook of Mathematical Functions (1964), 4.1.27
- * @check none: compared with the platform's own function and pinned bits in arithmetic.test.ts
- */
-export function log(x: number): number {
-	return special(x) ?? logParts(x).hi;
-}
-
-/**
  * Logarithm to base 10, to about half a unit in the last place.
  *
  * @param x argument [-], positive; 0 gives -Infinity, negative NaN
