@@ -70,11 +70,11 @@ export const BAD_CELLS: readonly Answer[] = [
 		'known words nearest to it: elbow, elbows, ell'
 	],
 	[
-		'a junction without its coefficient',
+		'a junction without its stream',
 		'parts',
-		'tee branch',
-		'“tee branch”: a junction needs its coefficient C, that of this row’s own stream on the velocity pressure of this row.',
-		'C, such as tee branch C0.8'
+		'tee',
+		'“tee”: a junction needs to know which stream this row is, or its coefficient C.',
+		'tee branch, tee straight, or tee C0.8'
 	],
 	[
 		'equipment without its loss',

@@ -105,7 +105,8 @@ function keptDraft(
 ): DesignRow | null {
 	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
 	const meetsFan = !links.parent.get(row.id);
-	const on = `${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')}`;
+	const twoStraight = goesStraight(row) && earlierStraight(row, links);
+	const on = `${twoStraight} ${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')}`;
 	const kept = drafts.get(row);
 	if (kept?.on === on) return kept.draft;
 	const draft = draftRow(sheet, row, links, sides, problems);
@@ -146,6 +147,12 @@ function draftRow(
 	const parts = valueOf(row, 'parts');
 	const fitted = parts && size ? fittingsFor(parts, size) : null;
 	for (const { message, expected } of fitted?.problems ?? []) fault('parts', message, expected);
+	if (fitted?.junction && goesStraight(row) && earlierStraight(row, links))
+		fault(
+			'parts',
+			'Another row goes straight on at this junction already.',
+			'one straight way at a junction; the others are branches'
+		);
 	const flow = valueOf(row, 'flow');
 	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
 	if (!isEnd)
@@ -188,6 +195,21 @@ function draftRow(
 				}
 			})
 	};
+}
+
+/** Whether a row is the straight leg of a junction of the catalogue. */
+const goesStraight = (row: SheetRow) => {
+	const junction = valueOf(row, 'parts')?.junction;
+	return (
+		junction !== undefined && junction !== null && junction.kind !== 'fixed' && junction.parameters.leg === 'straight'
+	);
+};
+
+/** Whether a row above it at the same node goes straight on too. */
+function earlierStraight(row: SheetRow, links: Links): boolean {
+	const parent = links.parent.get(row.id);
+	const siblings = (parent && links.children.get(parent.id)) || [];
+	return siblings.slice(0, siblings.indexOf(row)).some(goesStraight);
 }
 
 function terminalOf({ coefficient, description, toBeConfirmed }: OutletLoss): FittingEntry | null {

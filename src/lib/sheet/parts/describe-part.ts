@@ -8,13 +8,15 @@ const LETTERS: Readonly<Record<string, (value: number | string) => string>> = {
 	areaRatio: (value) => `area ratio ${value}`,
 	thicknessRatio: (value) => `t ${value}`,
 	lengthRatio: (value) => `l ${value}`,
-	leg: (value) => `row is the ${value} leg`,
+	leg: (value) => (value === 'straight' || value === 'branch' ? '' : `row is the ${value} leg`),
 	plane: (value) => `${value} in the plane of the bend`
 };
 
 /** The parameters of a fitting as they are said: `r 1, 45°`. */
 export function parameterWords(parameters: PartFitting['parameters']): string[] {
-	return Object.entries(parameters).map(([name, value]) => LETTERS[name]?.(value) ?? `${name} ${value}`);
+	return Object.entries(parameters)
+		.map(([name, value]) => LETTERS[name]?.(value) ?? `${name} ${value}`)
+		.filter((words) => words !== '');
 }
 
 /** A part in words with the key of its symbol. */

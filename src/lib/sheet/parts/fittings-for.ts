@@ -30,7 +30,19 @@ export function fittingsFor(parts: Parts, size: RowSize): DocumentParts {
 		exponent,
 		...(toBeConfirmed ? { toBeConfirmed } : {})
 	}));
-	return { junction: parts.junction === null ? null : junctionOf(parts.junction), fittings, equipment, problems };
+	return { junction: parts.junction && junctionFor(parts.junction, problems), fittings, equipment, problems };
+}
+
+/** With a coefficient as typed; without one from the catalogue, with flows and areas of the rows that meet. */
+function junctionFor(part: PartFitting, problems: PartProblem[]): Junction | null {
+	if (part.kind === 'fixed') return junctionOf(part);
+	const entry = fittingEntry(part.kind);
+	if (!entry) return null;
+	const { leg, ...parameters } = part.parameters;
+	const found = withParameters(part, entry, parameters);
+	if (found.ok) return { ...found.fitting, leg: leg === 'straight' ? 'straight' : 'branch' };
+	problems.push(found.problem);
+	return null;
 }
 
 function junctionOf(part: PartFitting): Junction {
@@ -54,9 +66,13 @@ function common(part: PartFitting) {
 
 function fromCatalogue(part: PartFitting, size: RowSize): Suited {
 	const entry = entryFor(part, size);
-	if (entry === null) return unsuited(part, size);
+	return entry === null ? unsuited(part, size) : withParameters(part, entry, part.parameters);
+}
+
+/** The fitting with what was typed for it, each figure within the range of the entry. */
+function withParameters(part: PartFitting, entry: CatalogueEntry, typed: PartFitting['parameters']): Suited {
 	const parameters: Record<string, number | string> = {};
-	for (const [name, value] of Object.entries(part.parameters)) {
+	for (const [name, value] of Object.entries(typed)) {
 		const known = entry.parameters.find((parameter) => parameter.name === name);
 		if (known === undefined) {
 			// A vaned elbow is always one of 90°: saying so is no fault.

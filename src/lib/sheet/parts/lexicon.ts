@@ -5,6 +5,13 @@ export type Role =
 	| 'elbow'
 	| 'junction'
 	| 'leg'
+	| 'straight'
+	| 'shoe'
+	| 'take-off'
+	| 'wye'
+	| 'cross'
+	| 'bullhead'
+	| 'chamber'
 	| 'damper'
 	| 'special-damper'
 	| 'transition'
@@ -51,9 +58,14 @@ function add(role: Role, picture: Picture | null, list: string) {
 // A word, or `abbreviation=what_is_printed` (nothing after `=` prints nothing). Common practice, spellings of both shores.
 add('elbow', 'elbow', 'elbow elbows=elbow bend bends=bend ell=elbow ells=elbow e=elbow el=elbow');
 add('junction', 'tee', 'tee tees=tee t=tee junction split');
-add('leg', 'tee', 'branch br=branch straight through s=straight b=branch');
-add('junction', 'shoe', 'shoe take-off takeoff=take-off tap');
-add('junction', 'wye', 'wye y=wye');
+add('leg', 'tee', 'branch br=branch b=branch');
+add('straight', 'tee', 'straight through s=straight run');
+add('shoe', 'shoe', 'shoe');
+add('take-off', 'shoe', 'take-off takeoff=take-off tap');
+add('wye', 'wye', 'wye y=wye');
+add('cross', 'tee', 'cross');
+add('bullhead', 'tee', 'bullhead');
+add('chamber', null, 'plenum');
 add('damper', 'damper', 'damper dampers=damper d=damper vcd=volume_damper vd=volume_damper mvd=volume_damper');
 add('special-damper', 'firedamper', 'fd=fire_damper sd=smoke_damper fsd=fire_and_smoke_damper fire smoke');
 add(
@@ -101,7 +113,7 @@ add(
 	'plain',
 	null,
 	'way volume control balancing manual motorised motorized=motorised open single double single-thickness double-thickness ' +
-		'blade blades past main converging diverging long short plenum weather roof exhaust supply return intake inlet outlet ' +
+		'blade blades past main converging diverging long short weather roof exhaust supply return intake inlet outlet ' +
 		'outdoor discharge suction ahu heating cooling heat recovery bag panel carbon duct air room wire bird insect terminal ' +
 		'flow leg plain ceiling floor door transfer jet perforated egg-crate eggcrate=egg-crate round rectangular rect=rectangular oval hepa sound linear slot swirl disc spill and with of the in at for to + &'
 );

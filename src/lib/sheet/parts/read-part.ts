@@ -66,8 +66,15 @@ function assembled(
 		return refuse('the coefficient is too great', `at most ${MOST.coefficient}, such as C0.23`);
 	if (word === 'junction') {
 		if (count > 1) return refuse('a row has one junction, at its fan end', 'the junction without a count');
-		if (coefficient === null) return lacking(word);
-		return { ok: true, slot: 'junction', part: fitting('fixed') };
+		if (pressure !== null)
+			return refuse('a junction has a coefficient, not a pressure', 'tee branch, or tee branch C0.8');
+		if (coefficient !== null) return { ok: true, slot: 'junction', part: fitting('fixed') };
+		const kind = junctionKind(roles, parameters['angle']);
+		const leg = roles.has('straight') ? 'straight' : roles.has('leg') || isTakeOff(roles) ? 'branch' : null;
+		if (leg === null) return lacking(word);
+		const { angle, ...rest } = parameters;
+		const asked = angle === undefined || kind === 'tee' ? rest : { ...rest, angle };
+		return { ok: true, slot: 'junction', part: { ...fitting(kind), parameters: { ...asked, leg } } };
 	}
 	if (pressure !== null) {
 		// The figure alone is named by its own reading; here the part is.
@@ -102,11 +109,14 @@ function assembled(
 	}
 }
 
+const JUNCTIONS: readonly Role[] = ['junction', 'shoe', 'take-off', 'wye', 'cross', 'bullhead'];
+const BESIDE_A_LEG: readonly Role[] = ['leg', 'straight', 'plain', 'transition', 'chamber'];
+
 /** A junction takes what is named beside it; `branch` and `straight` alone are one, `branch damper` is a damper. */
 function wordOf(roles: ReadonlySet<Role>): PartWord | null {
-	if (roles.has('junction')) return 'junction';
-	const legAlone = [...roles].every((role) => role === 'leg' || role === 'plain' || role === 'transition');
-	if (roles.has('leg') && legAlone) return 'junction';
+	if (JUNCTIONS.some((role) => roles.has(role))) return 'junction';
+	const legAlone = [...roles].every((role) => BESIDE_A_LEG.includes(role));
+	if ((roles.has('leg') || roles.has('straight') || roles.has('chamber')) && legAlone) return 'junction';
 	if (roles.has('special-damper')) return 'device';
 	if (roles.has('damper') || roles.has('butterfly')) return 'damper';
 	if (roles.has('elbow')) return 'elbow';
@@ -116,6 +126,20 @@ function wordOf(roles: ReadonlySet<Role>): PartWord | null {
 	if (roles.has('device')) return 'device';
 	return roles.has('mitred') || roles.has('vaned') ? 'elbow' : null;
 }
+
+/** Key of the junction in the catalogue: a tee at another angle than 90° is a wye. */
+function junctionKind(roles: ReadonlySet<Role>, angle: number | string | undefined): string {
+	if (roles.has('bullhead')) return 'bullhead-tee';
+	if (roles.has('cross')) return 'cross';
+	if (roles.has('gradual') && (roles.has('take-off') || roles.has('junction'))) return 'conical-take-off';
+	if (roles.has('shoe')) return 'shoe-take-off';
+	if (roles.has('chamber')) return 'plenum';
+	return roles.has('wye') || (angle !== undefined && angle !== 90) ? 'wye' : 'tee';
+}
+
+/** What only ever is the branch: a take-off, a leg of a bullhead tee, a duct that leaves a plenum. */
+const isTakeOff = (roles: ReadonlySet<Role>) =>
+	(['shoe', 'take-off', 'bullhead', 'chamber'] as const).some((role) => roles.has(role));
 
 /** Kind of the catalogue without its shape, or null where only a coefficient or a pressure can tell. */
 function kindOf(word: PartWord, roles: ReadonlySet<Role>): string | null {
@@ -170,7 +194,9 @@ function pictureOf(known: readonly Word[], roles: ReadonlySet<Role>): Picture {
 	const own = known.filter(
 		(entry) =>
 			entry.picture !== null &&
-			(word === 'device' || entry.role === word || (word === 'junction' && entry.role === 'leg'))
+			(word === 'device' ||
+				entry.role === word ||
+				(word === 'junction' && (JUNCTIONS.includes(entry.role) || entry.role === 'leg' || entry.role === 'straight')))
 	);
 	const special = known.find((entry) => entry.role === 'special-damper');
 	const shaped = own.find((entry) => entry.picture === 'shoe' || entry.picture === 'wye');

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { UnitSystem } from '$lib/engine';
-import { readParts, type Parts } from './index';
+import { fittingsFor, readParts, type Parts } from './index';
 import { EXAMPLES } from './takes';
 
 function understood(text: string, units: UnitSystem = 'SI') {
@@ -155,6 +155,50 @@ describe('the Parts cell', () => {
 	});
 });
 
+describe('a junction without a coefficient', () => {
+	it.each([
+		['tee branch', 'tee', { leg: 'branch' }],
+		['tee(b)', 'tee', { leg: 'branch' }],
+		['1 tee straight', 'tee', { leg: 'straight' }],
+		['90° tee, straight way', 'tee', { leg: 'straight' }],
+		['straight way', 'tee', { leg: 'straight' }],
+		['tee 45° branch', 'wye', { angle: 45, leg: 'branch' }],
+		['wye branch', 'wye', { leg: 'branch' }],
+		['30° wye straight', 'wye', { angle: 30, leg: 'straight' }],
+		['shoe', 'shoe-take-off', { leg: 'branch' }],
+		['45° shoe take-off', 'shoe-take-off', { angle: 45, leg: 'branch' }],
+		['conical take-off', 'conical-take-off', { leg: 'branch' }],
+		['conical tee straight', 'conical-take-off', { leg: 'straight' }],
+		['tap', 'tee', { leg: 'branch' }],
+		['bullhead tee', 'bullhead-tee', { leg: 'branch' }],
+		['cross branch', 'cross', { leg: 'branch' }],
+		['plenum', 'plenum', { leg: 'branch' }]
+	] as const)('%s is %s of the catalogue', (text, kind, parameters) => {
+		const { value, why } = understood(text);
+		expect(value.junction).toMatchObject({ kind, parameters });
+		expect(value.junction?.coefficient).toBeUndefined();
+		expect(why).toContain('with the flows and sizes of the rows that meet');
+	});
+
+	it('stands in the document with its leg, and no coefficient', () => {
+		const { junction, problems } = fittingsFor(understood('30° wye straight?').value, {
+			shape: 'round',
+			diameter: 0.2
+		});
+		expect(problems).toEqual([]);
+		expect(junction).toEqual({
+			...{ kind: 'wye', name: 'Wye straight', toBeConfirmed: true, angle: 30 },
+			leg: 'straight'
+		});
+	});
+
+	it('is named where its figure does not suit', () => {
+		const { junction, problems } = fittingsFor(understood('5° wye branch').value, { shape: 'round', diameter: 0.2 });
+		expect(junction).toBeNull();
+		expect(problems).toHaveLength(1);
+	});
+});
+
 describe('what a Parts cell says of what it read', () => {
 	it('takes a pressure behind a count for that of each, and says both', () => {
 		const { value, words, why } = understood('2 FD 8 Pa');
@@ -182,7 +226,6 @@ describe('what a Parts cell says of what it read', () => {
 
 	it.each([
 		['tee', 'SI'],
-		['tee straight', 'SI'],
 		['transition', 'SI'],
 		['entry', 'IP'],
 		['grille', 'SI'],
@@ -199,9 +242,7 @@ describe('what a Parts cell says of what it read', () => {
 
 describe('what is not understood in a Parts cell', () => {
 	it.each([
-		['tee', '“tee”: a junction needs its coefficient C', 'such as tee branch C0.8'],
-		['tee straight', 'own stream', 'such as tee straight C0.8'],
-		['1 tee(b)', '“1 tee(b)”', 'C0.8'],
+		['tee', '“tee”: a junction needs to know which stream this row is', 'tee branch, tee straight, or tee C0.8'],
 		['2E 1T 1D', '“1T”', 'C0.8'],
 		['silencer', '“silencer”', 'silencer 25 Pa, or silencer C0.6'],
 		['grille', 'the maker states', 'grille 25 Pa, or grille C0.6'],

@@ -56,8 +56,10 @@ function wordsOf({ junction, fittings, equipment }: Parts, units: UnitSystem): s
 }
 
 /** What a person should know of how it was read: what comes from the catalogue, and what a count counts. */
-function whyOf({ fittings, equipment }: Parts): string | null {
+function whyOf({ junction, fittings, equipment }: Parts): string | null {
 	const said = new Set<string>();
+	if (junction && junction.kind !== 'fixed')
+		said.add(`${junction.name.toLowerCase()}: from the catalogue, with the flows and sizes of the rows that meet`);
 	const computed = fittings.filter((part) => part.kind !== 'fixed');
 	for (const part of computed) {
 		const assumed = assumedOf(part);

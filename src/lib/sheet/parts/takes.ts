@@ -5,8 +5,8 @@ import type { PartFitting, PartWord } from './parts';
 
 /** A Parts cell as people fill it, for one who has nothing to go by yet. */
 export const EXAMPLES = {
-	SI: ['elbow r/D 1.5; damper', 'tee branch C0.8; 2 elbow 45°', '2 FD 8 Pa; silencer 25 Pa; transition C0.1'],
-	IP: ['elbow r/D 1.5; damper', 'tee branch C0.8; 2 elbow 45°', '2 FD 0.03 in wg; silencer 0.1 in wg; transition C0.1']
+	SI: ['elbow r/D 1.5; damper', 'tee branch; 2 elbow 45°', '2 FD 8 Pa; silencer 25 Pa; transition C0.1'],
+	IP: ['elbow r/D 1.5; damper', 'tee branch; 2 elbow 45°', '2 FD 0.03 in wg; silencer 0.1 in wg; transition C0.1']
 } as const satisfies Record<UnitSystem, readonly string[]>;
 
 interface Takes {
@@ -22,11 +22,9 @@ interface Takes {
 export function takesOf(word: PartWord, typed: string, units: UnitSystem): Takes {
 	switch (word) {
 		case 'junction': {
-			const leg = /\b(branch|br|b|straight|through|s)\b/i.test(typed) ? '' : ' branch';
 			return {
-				message:
-					'a junction needs its coefficient C, that of this row’s own stream on the velocity pressure of this row',
-				expected: `C, such as ${typed}${leg} C0.8`
+				message: 'a junction needs to know which stream this row is, or its coefficient C',
+				expected: `${typed} branch, ${typed} straight, or ${typed} C0.8`
 			};
 		}
 		case 'transition':
