@@ -66,7 +66,7 @@ export function conicalContractionRennels2012(angle: number, areaRatio: number, 
  * @param areaRatio b^2, smaller/larger area [-], 0 to 1
  * @returns K on the velocity pressure in the smaller leg [-]
  * @source Rennels & Hudson, Pipe Flow (2012)
- * @check none: Idelchik's formula lies within 20 % from b^2 0 to 0.8, in a test
+ * @check none: the spread to Idelchik's formula is recorded in a test
  */
 export function suddenContractionRennels2012(areaRatio: number): number {
 	return conicalContractionRennels2012(180, areaRatio, 0);

@@ -132,7 +132,8 @@ const cone: FittingDefinition = {
 		key: 'gradual-expansion',
 		name: 'Gradual expansion',
 		parameters: [areaRatio, angle, legOf('larger')],
-		range: 'cones; shock term to 60° included, sudden expansion from 90°',
+		range:
+			'cones; shock term to 60° included, sudden expansion from 90°; other authors give half as much at 10° and a quarter more at 60°',
 		method: 'Idelchik, shock term and wall friction',
 		source: idelchik('5-4'),
 		uncertainty: 0.3,

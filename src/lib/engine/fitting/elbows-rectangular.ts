@@ -50,7 +50,7 @@ const smooth: FittingDefinition = {
 		],
 		plot: { along: 'radiusRatio' },
 		range:
-			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1; r/W 0.5 to 3, H/W 0.25 to 8, Re from 10 000; wall friction along the arc belongs to the length of the row',
+			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1, and jumps as the source does: up to 1.42 times at r/W 0.55, 0.83 to 1.09 times at 0.7; r/W 0.5 to 3, H/W 0.25 to 8, Re from 10 000; wall friction along the arc belongs to the length of the row',
 		method: 'Idelchik, A1 B1 C1 with Reynolds factor; C1 from memory',
 		source: idelchik('6-1'),
 		known: 'from memory',

@@ -23,7 +23,7 @@ const smooth: FittingDefinition = {
 		rivals: smoothMethods,
 		plot: { along: 'radiusRatio' },
 		range:
-			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1; r/D 0.5 to 3, angle to 180°, Re from 10 000; wall friction along the arc belongs to the length of the row',
+			'smooth walls; the factor for low Reynolds numbers is carried on above 2e5 until it meets 1, and jumps as the source does: up to 1.42 times at r/D 0.55, 0.83 to 1.09 times at 0.7; r/D 0.5 to 3, angle to 180°, Re from 10 000; wall friction along the arc belongs to the length of the row',
 		method: 'Idelchik, A1 B1 with Reynolds factor',
 		source: idelchik('6-1'),
 		known: 'published formula',

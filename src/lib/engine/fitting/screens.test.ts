@@ -4,7 +4,6 @@ import published from '../../../../fixtures/published/screens.json';
 import {
 	obstructionIdelchik,
 	thickPlateIdelchik,
-	thinPlateBlevins,
 	thinPlateIdelchik,
 	wireScreenBlevins,
 	wireScreenIdelchik
