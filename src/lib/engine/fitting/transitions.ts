@@ -12,7 +12,7 @@ import { equivalentAngle } from './equivalent-angle';
 import { choiceParameter, heldWithin, numberParameter } from './parameters';
 import { coefficientOfLeg } from './reference-change';
 import { SMACNA_MEMORY, idelchik } from './sources';
-import type { CatalogueEntry, FittingContext } from './types';
+import type { CatalogueEntry } from './types';
 
 const areaRatio = numberParameter('areaRatio', 'Smaller over larger area', '', 0.5, { min: 0.01, max: 1 });
 const angle = numberParameter('angle', 'Included angle', '°', 30, CONE_ANGLE);
@@ -21,8 +21,13 @@ const lengthRatio = numberParameter('lengthRatio', 'Length over root of the smal
 	min: 0.05,
 	max: 50
 });
-const change = choiceParameter('change', 'With the flow the area', 'grows', ['grows', 'shrinks']);
-const leg = choiceParameter('leg', 'This row is the leg that is', 'smaller', ['smaller', 'larger']);
+type Change = 'expansion' | 'contraction';
+/** The row after the fitting, unless it is said otherwise. */
+const legAfter = (change: Change) =>
+	choiceParameter('leg', 'This row is the leg that is', change === 'expansion' ? 'larger' : 'smaller', [
+		'smaller',
+		'larger'
+	]);
 const FRICTION_NOTE = 'The wall friction is in the coefficient: leave its length out of the row.';
 
 type Transition = Pick<CatalogueEntry, 'key' | 'name' | 'shapes' | 'parameters' | 'plot' | 'range' | 'method'> &
@@ -35,8 +40,8 @@ const entryOf = (transition: Transition): CatalogueEntry => ({
 });
 
 /** Local loss and friction of an expansion or a contraction by the formulas for cones, on the smaller leg. */
-function asCone(way: string, d: number, a: number, f: number): number {
-	const local = way === 'shrinks' ? conicalContractionIdelchik(d, a) : conicalExpansionIdelchik(d, a);
+function asCone(change: Change, d: number, a: number, f: number): number {
+	const local = change === 'contraction' ? conicalContractionIdelchik(d, a) : conicalExpansionIdelchik(d, a);
 	return local + coneFriction(d, a, f);
 }
 
@@ -45,7 +50,7 @@ const pyramidWider: FittingDefinition = {
 		key: 'pyramidal-expansion',
 		name: 'Pyramidal expansion',
 		shapes: ['rectangular'],
-		parameters: [areaRatio, angle, leg],
+		parameters: [areaRatio, angle, legAfter('expansion')],
 		plot: { along: 'angle' },
 		range: '16 to 180° included, area ratio from 0.1; from 0.5 straight to nothing at 1',
 		method: 'Table of angle and area',
@@ -86,7 +91,7 @@ const pyramidNarrower: FittingDefinition = {
 		key: 'pyramidal-contraction',
 		name: 'Pyramidal contraction',
 		shapes: ['rectangular'],
-		parameters: [areaRatio, angle, leg],
+		parameters: [areaRatio, angle, legAfter('contraction')],
 		plot: { along: 'angle' },
 		range: '3 to 180° included; the local part is that of cones, by the same author',
 		method: 'Idelchik, polynomial and wall friction',
@@ -109,7 +114,7 @@ const pyramidNarrower: FittingDefinition = {
 	}),
 	coefficient(values, { frictionFactor }) {
 		const a = values.number('areaRatio');
-		return coefficientOfLeg(asCone('shrinks', values.number('angle'), a, frictionFactor), a, values.choice('leg'));
+		return coefficientOfLeg(asCone('contraction', values.number('angle'), a, frictionFactor), a, values.choice('leg'));
 	},
 	rivals: {
 		smacna(values, _context, note) {
@@ -120,17 +125,21 @@ const pyramidNarrower: FittingDefinition = {
 	}
 };
 
-function reshaped(key: string, name: string): FittingDefinition {
+const coneAngle = (d: number, note: Note) => heldWithin(d, CONE_ANGLE, 'included angle', note);
+const coneSource = (change: Change) => idelchik(change === 'expansion' ? '5-4' : '5-23');
+
+/** Another shape at the other end; the order of the shapes is in the words alone. */
+function reshaped(key: string, name: string, change: Change): FittingDefinition {
 	return {
 		entry: entryOf({
-			key,
-			name,
+			key: `${key}-${change}`,
+			name: `${name}, ${change}`,
 			shapes: ['round', 'rectangular'],
-			parameters: [areaRatio, lengthRatio, change, leg],
+			parameters: [areaRatio, lengthRatio, legAfter(change)],
 			plot: { along: 'lengthRatio' },
 			range: '3 to 180° of the cone of the same areas and length; the change of shape itself is not counted',
 			method: 'Idelchik, the cone of the same areas and length stands in, with wall friction',
-			source: `${idelchik('5-4')}; ${idelchik('5-23')}`,
+			source: coneSource(change),
 			known: 'published formula',
 			uncertainty: 0.4,
 			drawing: 'square-to-round',
@@ -139,40 +148,44 @@ function reshaped(key: string, name: string): FittingDefinition {
 		coefficient(values, { frictionFactor }, note) {
 			const a = values.number('areaRatio');
 			const d = coneAngle(equivalentAngle(a, values.number('lengthRatio')), note);
-			return coefficientOfLeg(asCone(values.choice('change'), d, a, frictionFactor), a, values.choice('leg'));
+			return coefficientOfLeg(asCone(change, d, a, frictionFactor), a, values.choice('leg'));
 		}
 	};
 }
 
-const coneAngle = (d: number, note: Note) => heldWithin(d, CONE_ANGLE, 'included angle', note);
+function oneSided(change: Change): FittingDefinition {
+	return {
+		entry: entryOf({
+			key: `one-sided-${change}`,
+			name: `Gradual ${change} with one sloping side`,
+			shapes: ['rectangular', 'round', 'oval'],
+			parameters: [areaRatio, slope, legAfter(change)],
+			plot: { along: 'angle' },
+			range: 'slope 1.5 to 90°; the cone of twice that angle stands in',
+			method:
+				'Idelchik, for the cone of twice the angle: the straight side is taken as the middle of a symmetrical one (our reasoning), with wall friction',
+			source: coneSource(change),
+			known: 'published formula',
+			uncertainty: 0.5,
+			drawing: 'one-sided',
+			caution: FRICTION_NOTE
+		}),
+		coefficient(values, { frictionFactor }) {
+			const a = values.number('areaRatio');
+			const smaller = asCone(change, 2 * values.number('angle'), a, frictionFactor);
+			return coefficientOfLeg(smaller, a, values.choice('leg'));
+		}
+	};
+}
 
-const oneSided: FittingDefinition = {
-	entry: entryOf({
-		key: 'one-sided-transition',
-		name: 'Transition with one sloping side',
-		shapes: ['rectangular', 'round', 'oval'],
-		parameters: [areaRatio, slope, change, leg],
-		plot: { along: 'angle' },
-		range: 'slope 1.5 to 90°; the cone of twice that angle stands in',
-		method:
-			'Idelchik, for the cone of twice the angle: the straight side is taken as the middle of a symmetrical one (our reasoning), with wall friction',
-		source: `${idelchik('5-4')}; ${idelchik('5-23')}`,
-		known: 'published formula',
-		uncertainty: 0.5,
-		drawing: 'one-sided',
-		caution: FRICTION_NOTE
-	}),
-	coefficient(values, { frictionFactor }: FittingContext) {
-		const a = values.number('areaRatio');
-		const smaller = asCone(values.choice('change'), 2 * values.number('angle'), a, frictionFactor);
-		return coefficientOfLeg(smaller, a, values.choice('leg'));
-	}
-};
+const CHANGES: readonly Change[] = ['expansion', 'contraction'];
 
 export const transitions: readonly FittingDefinition[] = [
 	pyramidWider,
 	pyramidNarrower,
-	reshaped('rectangular-to-round', 'Transition, rectangular to round'),
-	reshaped('round-to-rectangular', 'Transition, round to rectangular'),
-	oneSided
+	...CHANGES.flatMap((change) => [
+		reshaped('rectangular-to-round', 'Rectangular to round', change),
+		reshaped('round-to-rectangular', 'Round to rectangular', change),
+		oneSided(change)
+	])
 ];
