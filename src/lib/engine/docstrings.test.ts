@@ -5,7 +5,7 @@ import { describe, expect, it } from 'vitest';
 const ROOT = import.meta.dirname;
 const PROJECT = join(ROOT, '../../..');
 /** Rooms whose exported functions are formulas. */
-const ROOMS = ['arithmetic', 'air', 'friction', 'shape', 'fitting'];
+const ROOMS = ['arithmetic', 'air', 'friction', 'shape', 'leakage', 'fitting'];
 /** Exported functions that look up, read or do the bookkeeping of digits: they hold no formula. */
 const NO_FORMULA = [
 	'arithmetic/float-parts.ts scale',
@@ -18,6 +18,7 @@ const NO_FORMULA = [
 	'arithmetic/exponential.ts expOfParts',
 	'friction/friction-factor.ts regime',
 	'friction/materials.ts findMaterial',
+	'leakage/leakage-class.ts findLeakageClass',
 	'fitting/catalogue.ts fittingEntry',
 	'fitting/catalogue.ts findDefinition',
 	'fitting/catalogue.ts findJunction',

@@ -1,23 +1,18 @@
 import { requireInRange } from '../errors';
 import type { AirState } from './air-state';
-import { AIR_TEMPERATURE } from './humid-air-density';
+import { AIR_TEMPERATURE, mixtureDensity } from './humid-air-density';
+import { dewPoint, pressureOf, vapourPressure, type AirCondition } from './moist-air';
 import { saturationPressure } from './saturation-pressure';
-import { standardPressure } from './standard-atmosphere';
 import { sutherlandViscosity } from './viscosity';
 
-/** The condition of air, from which its state at another temperature follows. */
-export interface AirCondition {
-	/** °C */
-	readonly temperature: number;
-	readonly relativeHumidity?: number | undefined;
-	/** m */
-	readonly elevation?: number | undefined;
-	/** Absolute [Pa] */
-	readonly pressure?: number | undefined;
+export interface AirAtTemperature extends AirState {
+	/** 0 to 1 */
+	readonly relativeHumidity: number;
+	/** Colder than its dew point: water falls out */
+	readonly condenses: boolean;
+	/** The same in words, with the dew point; null when nothing condenses */
+	readonly note: string | null;
 }
-
-const DRY_AIR = 287.042; // J/(kg K)
-const VAPOUR = 461.52; // J/(kg K)
 
 /**
  * Air of the same pressure and moisture at another temperature; below the dew point it is saturated.
@@ -26,21 +21,26 @@ const VAPOUR = 461.52; // J/(kg K)
  *
  * @param condition t0 [°C], phi [-], and elevation [m] or pressure p [Pa]
  * @param t temperature [°C], -50 to 80
- * @returns density [kg/m3], viscosity [Pa s], and whether water falls out
- * @throws {OutOfRangeError} when a temperature or the pressure leaves its range
- * @source Ideal-gas mixture; saturation by Hyland & Wexler (1983)
+ * @returns density [kg/m3], viscosity of dry air [Pa s], relative humidity [-], and whether water falls out
+ * @throws {OutOfRangeError} when a temperature, the humidity or the pressure leaves its range
+ * @source Ideal-gas mixture; saturation by Hyland & Wexler (1983), viscosity by Sutherland
  * @check fixtures/published/air.json
  */
-export function airAtTemperature(condition: AirCondition, t: number): AirState & { readonly condenses: boolean } {
+export function airAtTemperature(condition: AirCondition, t: number): AirAtTemperature {
 	requireInRange('airAtTemperature', 't', t, AIR_TEMPERATURE);
-	const p = condition.pressure ?? standardPressure(condition.elevation ?? 0);
-	const vapour = Math.min((condition.relativeHumidity ?? 0) * saturationPressure(condition.temperature), p);
-	const saturated = saturationPressure(t);
+	const p = pressureOf(condition);
+	const vapour = vapourPressure(condition);
+	// At a low pressure water boils within the range: then vapour alone is saturated.
+	const saturated = Math.min(saturationPressure(t), p);
 	const pw = Math.min(vapour, saturated);
-	const T = t + 273.15;
+	const condenses = vapour > saturated;
 	return {
-		density: (p - pw) / (DRY_AIR * T) + pw / (VAPOUR * T),
+		density: mixtureDensity(t, pw, p),
 		viscosity: sutherlandViscosity(t),
-		condenses: vapour > saturated
+		relativeHumidity: pw / saturated,
+		condenses,
+		note: condenses
+			? `The air is below its dew point of ${dewPoint(vapour).toFixed(1)} °C: water falls out, saturated air is taken.`
+			: null
 	};
 }

@@ -1,20 +1,9 @@
 import { humidAirDensity } from './humid-air-density';
-import { standardPressure } from './standard-atmosphere';
+import { pressureOf, type AirCondition } from './moist-air';
 import { sutherlandViscosity } from './viscosity';
 
 /** Air by its condition, or with its properties given. */
-export type AirSpec =
-	| {
-			/** °C */
-			readonly temperature: number;
-			/** 0 to 1; dry without it */
-			readonly relativeHumidity?: number | undefined;
-			/** m above sea level; 0 without it */
-			readonly elevation?: number | undefined;
-			/** Absolute [Pa]; that of the elevation without it */
-			readonly pressure?: number | undefined;
-	  }
-	| { readonly density: number; readonly viscosity?: number | undefined };
+export type AirSpec = AirCondition | { readonly density: number; readonly viscosity?: number | undefined };
 
 export interface AirState {
 	/** kg/m3 */
@@ -35,9 +24,8 @@ export interface AirState {
  */
 export function airState(spec: AirSpec): AirState {
 	if ('density' in spec) return { density: spec.density, viscosity: spec.viscosity ?? sutherlandViscosity(20) };
-	const p = spec.pressure ?? standardPressure(spec.elevation ?? 0);
 	return {
-		density: humidAirDensity(spec.temperature, spec.relativeHumidity ?? 0, p),
+		density: humidAirDensity(spec.temperature, spec.relativeHumidity ?? 0, pressureOf(spec)),
 		viscosity: sutherlandViscosity(spec.temperature)
 	};
 }

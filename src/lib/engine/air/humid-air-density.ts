@@ -7,8 +7,26 @@ export const RELATIVE_HUMIDITY: Range = { min: 0, max: 1 };
 /** From the highest site to a little above the lowest [Pa]. */
 export const AIR_PRESSURE: Range = { min: 10_000, max: 200_000 };
 
-const DRY_AIR = 287.042; // J/(kg K)
-const VAPOUR = 461.52; // J/(kg K)
+/** Gas constants [J/(kg K)] */
+export const DRY_AIR = 287.042;
+export const VAPOUR = 461.52;
+
+/**
+ * Density of an ideal mixture of dry air and vapour.
+ *
+ *   rho = (p - pw)/(287.042 T) + pw/(461.52 T)
+ *
+ * @param t temperature [°C], above -273.15
+ * @param pw pressure of the vapour [Pa], 0 to p
+ * @param p absolute pressure [Pa]
+ * @returns rho density, of the mixture [kg/m3]
+ * @source Ideal-gas mixture, as in Hyland & Wexler (1983) without its virial terms
+ * @check fixtures/published/air.json
+ */
+export function mixtureDensity(t: number, pw: number, p: number): number {
+	const T = t + 273.15;
+	return (p - pw) / (DRY_AIR * T) + pw / (VAPOUR * T);
+}
 
 /**
  * Density of humid air, an ideal mixture of dry air and vapour.
@@ -27,8 +45,6 @@ export function humidAirDensity(t: number, phi: number, p: number): number {
 	requireInRange('humidAirDensity', 't', t, AIR_TEMPERATURE);
 	requireInRange('humidAirDensity', 'phi', phi, RELATIVE_HUMIDITY);
 	requireInRange('humidAirDensity', 'p', p, AIR_PRESSURE);
-	const T = t + 273.15;
 	// Vapour cannot hold more than the whole pressure.
-	const pw = Math.min(phi * saturationPressure(t), p);
-	return (p - pw) / (DRY_AIR * T) + pw / (VAPOUR * T);
+	return mixtureDensity(t, Math.min(phi * saturationPressure(t), p), p);
 }

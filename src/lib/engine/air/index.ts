@@ -1,7 +1,10 @@
-export { airAtTemperature, type AirCondition } from './air-at-temperature';
+export { airAtTemperature, type AirAtTemperature } from './air-at-temperature';
 export { airState, type AirSpec, type AirState } from './air-state';
 export { AIR_PRESSURE, AIR_TEMPERATURE, RELATIVE_HUMIDITY, humidAirDensity } from './humid-air-density';
+export { enthalpy, mixedTemperature, type MixedAir, type MixingStream } from './mixing';
+export { dewPoint, humidityRatio, vapourPressure, type AirCondition } from './moist-air';
 export { SATURATION_TEMPERATURE, saturationPressure } from './saturation-pressure';
 export { ELEVATION, standardPressure, standardTemperature } from './standard-atmosphere';
+export { STANDARD_DENSITY, STANDARD_DENSITY_IP, actualFlow, standardFlow } from './standard-flow';
 export { velocityPressure } from './velocity-pressure';
 export { VISCOSITY_TEMPERATURE, sutherlandViscosity } from './viscosity';
