@@ -170,6 +170,35 @@ describe('materials', () => {
 		}
 	});
 
+	it('have a design value within the range, and the range of the table in feet', () => {
+		for (const { key, low, roughness, high } of materials) {
+			expect(low, key).toBeLessThanOrEqual(roughness);
+			expect(roughness, key).toBeLessThanOrEqual(high);
+		}
+		const inFeet = (key: string) =>
+			[findMaterial(key)?.low ?? NaN, findMaterial(key)?.high ?? NaN].map((m) => m / FOOT);
+		const printed: readonly (readonly [string, number, number])[] = [
+			['galvanized-steel', 0.00016, 0.00032],
+			['galvanized-steel-spiral', 0.0002, 0.0004],
+			['galvanized-steel-spiral-ribbed', 0.00029, 0.00038],
+			['galvanized-steel-rectangular', 0.00027, 0.0005],
+			['steel-corrugated', 0.0018, 0.003],
+			['aluminium', 0.00012, 0.0002],
+			['plastic', 0.00003, 0.00015],
+			['flexible-extended', 0.0003, 0.003]
+		];
+		// Rounded to thousandths of a millimetre.
+		for (const [key, low, high] of printed) {
+			expect(Math.abs((inFeet(key)[0] ?? NaN) - low), key).toBeLessThan(5e-6);
+			expect(Math.abs((inFeet(key)[1] ?? NaN) - high), key).toBeLessThan(5e-6);
+		}
+	});
+
+	it('say of what is remembered that it is, and which are lined', () => {
+		for (const { known, source } of materials) expect(source.includes('from memory')).toBe(known === 'from memory');
+		expect(materials.filter(({ lined }) => lined).map(({ key }) => key)).toEqual(['liner-coated', 'liner-uncoated']);
+	});
+
 	it('start from galvanised steel of 0.09 mm', () => {
 		expect(findMaterial(DEFAULT_MATERIAL)?.roughness).toBeCloseTo(0.00009, 12);
 		expect(findMaterial('constructor')).toBeNull();

@@ -1,3 +1,5 @@
+import { readFileSync, readdirSync } from 'node:fs';
+import { join } from 'node:path';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { describePublished } from '../../../../fixtures/published/published-checks';
@@ -84,5 +86,18 @@ describe('laminar friction of a rectangle', () => {
 		[10, 84.68]
 	])('agrees with the exact series at %d to 1 (Shah & London 1978)', (aspect, exact) => {
 		expect(Math.abs(laminarRectangle(aspect, 1) / exact - 1)).toBeLessThan(0.001);
+	});
+});
+
+describe('the equivalent diameter', () => {
+	// Friction goes by the hydraulic diameter and the true velocity; the equivalent one is for changing a shape.
+	it('is named in no file that works out friction', () => {
+		const root = join(import.meta.dirname, '..');
+		const texts = readdirSync(root, { recursive: true, encoding: 'utf8' })
+			.filter((name) => name.endsWith('.ts') && !name.endsWith('.test.ts') && !name.endsWith('index.ts'))
+			.map((name) => ({ name, text: readFileSync(join(root, name), 'utf8') }))
+			.filter(({ text }) => /\b(darcyWeisbach|frictionFactor|reynoldsNumber)\(/.test(text));
+		expect(texts.map(({ name }) => name)).toContain(join('network', 'hydraulics.ts'));
+		for (const { name, text } of texts) expect(text, name).not.toMatch(/\bequivalent(Diameter|Rectangle|Oval)/);
 	});
 });
