@@ -10,7 +10,10 @@ import {
 	roundedEntryIdelchik,
 	roundedEntryRennels2012
 } from './entry-formulas';
+import { coefficientOf } from './coefficient-of';
 import { plainExit } from './exits';
+import { flatCapSmacna, taperedHoodAcgih } from './hood-tables';
+import type { FittingContext } from './types';
 
 describePublished('entries against published values', entries, {
 	'fitting.entry-bellmouth-free': (given) => freeBellmouthIdelchik(given.number('r_over_D')),
@@ -56,3 +59,35 @@ describe('entries', () => {
 		}
 	});
 });
+
+describe('hoods and caps', () => {
+	it('taper best at 45°, and worse with a rectangular face until they are a flange', () => {
+		for (let d = 15; d < 180; d += 1) {
+			const [here, next] = [taperedHoodAcgih(d, 'round'), taperedHoodAcgih(d + 1, 'round')];
+			if (d < 45) expect(next).toBeLessThan(here);
+			else expect(next).toBeGreaterThan(here);
+			expect(taperedHoodAcgih(d, 'rectangular')).toBeGreaterThan(here);
+		}
+		expect(taperedHoodAcgih(180, 'rectangular')).toBe(taperedHoodAcgih(180, 'round'));
+	});
+
+	it('lose less the farther the cap, at last as the open end does (Idelchik 3-1 within 10 %; energy)', () => {
+		for (const way of ['intake', 'exhaust'] as const)
+			for (let x = 0.1; x < 0.95; x += 0.05)
+				expect(flatCapSmacna(x + 0.05, way)).toBeLessThanOrEqual(flatCapSmacna(x, way));
+		expect(flatCapSmacna(1, 'exhaust')).toBe(plainExit(1));
+		expect(Math.abs(flatCapSmacna(1, 'intake') / projectingEntryIdelchik(0, 1) - 1)).toBeLessThanOrEqual(0.1 + 1e-12);
+	});
+
+	it('take the coefficient of the maker as it is, and say when there is none', () => {
+		for (const kind of ['intake-hood', 'intake-louvre', 'exhaust-hood', 'exhaust-louvre']) {
+			expect(coefficientOf(kind, { coefficient: 2.4 }, ROW)).toMatchObject({ coefficient: 2.4, rangeNote: null });
+			expect(coefficientOf(kind, {}, ROW)).toMatchObject({ coefficient: 0, inRange: false });
+		}
+	});
+});
+
+const ROW: FittingContext = {
+	size: { shape: 'round', diameter: 0.3 },
+	...{ reynolds: 3e5, velocity: 8, relativeRoughness: 0.0003, frictionFactor: 0.017 }
+};

@@ -6,6 +6,7 @@ import type { Shape, Size } from '../shape';
 import { conicalContractionIdelchik } from './area-change-idelchik';
 import { bendReynoldsFactorIdelchik } from './bend-idelchik';
 import { catalogue } from './catalogue';
+import { splitterSmacna, splitterVanes } from './splitter-vanes';
 import { coefficientOf } from './coefficient-of';
 import type { CatalogueEntry, FittingContext } from './types';
 
@@ -164,6 +165,22 @@ describe('what is put into an elbow', () => {
 			expect(by[1]).toBeLessThan(by[0] ?? 0);
 			expect(by[2]).toBeLessThan(by[1] ?? 0);
 			expect(by[0]).toBeLessThan(C('rectangular-elbow-smooth', { radiusRatio }));
+		}
+	});
+
+	it('as splitter vanes loses less the rounder the passages, and within 1.8 times as much with as round ones', () => {
+		for (const aspect of [0.25, 0.5, 1, 1.5, 2, 3, 4, 5, 6, 7, 8]) {
+			for (const vanes of [1, 2, 3])
+				for (let throat = 0.05; throat < (vanes === 1 ? 0.45 : vanes === 2 ? 0.2 : 0.1); throat += 0.01) {
+					const at = (R: number) => splitterSmacna(vanes, splitterVanes(vanes, R, 1).curveRatio, aspect);
+					expect(at(throat + 0.01), `${vanes} vanes, ${throat}, ${aspect}`).toBeLessThanOrEqual(at(throat));
+				}
+			for (const CR of [0.47, 0.5, 0.55])
+				for (const vanes of [2, 3]) {
+					const times = splitterSmacna(vanes, CR, aspect) / splitterSmacna(1, CR, aspect);
+					expect(times, `${vanes} vanes, CR ${CR}, ${aspect}`).toBeGreaterThan(1 / 1.8);
+					expect(times, `${vanes} vanes, CR ${CR}, ${aspect}`).toBeLessThan(1.8);
+				}
 		}
 	});
 
