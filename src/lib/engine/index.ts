@@ -34,14 +34,22 @@ export { ENGINE_VERSION } from './version';
 export * from './quantity';
 export {
 	catalogue,
+	coefficientOf,
 	fittingEntry,
+	junctionCoefficientOf,
 	type CatalogueEntry,
+	type CoefficientResult,
+	type Drawing,
 	type Family,
+	type FittingContext,
 	type FittingParameter,
+	type JunctionContext,
 	type Known,
+	type Leg,
+	type Method,
 	type Picture
 } from './fitting';
 export { airState, type AirState } from './air';
-export { findMaterial, materials, regime, type Material } from './friction';
+export { findMaterial, frictionFactor, materials, regime, type Material } from './friction';
 export { equivalentDiameter, sectionOf, type Section, type Size } from './shape';
 export { OutOfRangeError } from './errors';
