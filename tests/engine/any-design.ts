@@ -99,3 +99,26 @@ export function solutionOf(document: unknown): Solution {
 	if (!solved.ok) throw new Error(JSON.stringify(solved.problems));
 	return solved.solution;
 }
+
+const JUNCTIONS = ['tee', 'wye', 'shoe-take-off', 'conical-take-off', 'cross', 'plenum'] as const;
+
+/** As `anyDesign`, with junctions of the catalogue, rows at temperatures of their own, and flows of standard air. */
+export const anyDesignOfStreams: fc.Arbitrary<DesignDocument> = fc
+	.record({
+		design: anyDesign,
+		kinds: fc.array(fc.option(fc.constantFrom(...JUNCTIONS), { nil: null }), { minLength: 40, maxLength: 40 }),
+		temperatures: fc.array(fc.option(between(-10, 60), { nil: null, freq: 4 }), { minLength: 40, maxLength: 40 }),
+		standard: fc.boolean()
+	})
+	.map(({ design, kinds, temperatures, standard }) => {
+		const straight = new Set<string>();
+		const rows = design.rows.map((row, at): DesignRow => {
+			const [kind, temperature] = [kinds[at] ?? null, temperatures[at] ?? null];
+			const warm = temperature === null ? row : { ...row, temperature };
+			if (kind === null || row.joins === null) return warm;
+			const leg = at % 2 === 0 && !straight.has(row.joins) ? 'straight' : 'branch';
+			if (leg === 'straight') straight.add(row.joins);
+			return { ...warm, junction: { kind, leg } };
+		});
+		return { ...design, ...(standard && { flowBasis: 'standard' as const }), rows };
+	});

@@ -31,6 +31,16 @@ export {
 } from './document';
 export { solveDesign } from './network';
 export { ENGINE_VERSION } from './version';
+export {
+	formulaOf,
+	ROW_FIGURES,
+	workingOf,
+	type FigureName,
+	type RowFigure,
+	type Working,
+	type WorkingStep,
+	type WorkingValue
+} from './working';
 export * from './quantity';
 export {
 	catalogue,

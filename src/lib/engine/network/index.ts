@@ -1,1 +1,2 @@
+export { STANDARD_DENSITY } from './flows';
 export { solveDesign } from './solve';
