@@ -7,11 +7,11 @@ const INVERSE_LN2 = 1.4426950408889634;
 const LARGEST = 709.782712893384;
 const SMALLEST = -745.1332191019412;
 
-/** 1/2 + r/6 + r^2/24 + … + r^12/14! */
+/** 1/2! + r/3! + r^2/4! + … + r^12/14! */
 function tail(r: number): number {
-	let sum = 1;
-	for (let n = 14; n >= 3; n -= 1) sum = 1 + (sum * r) / n;
-	return sum / 2;
+	const last = 1 / 3628800 + r * (1 / 39916800 + r * (1 / 479001600 + r * (1 / 6227020800 + r * (1 / 87178291200))));
+	const middle = 1 / 720 + r * (1 / 5040 + r * (1 / 40320 + r * (1 / 362880 + r * last)));
+	return 1 / 2 + r * (1 / 6 + r * (1 / 24 + r * (1 / 120 + r * middle)));
 }
 
 /** e^(hi + lo), |lo| far below |hi|. */

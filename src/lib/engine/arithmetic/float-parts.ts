@@ -1,11 +1,18 @@
 // The parts of a double (IEEE 754): exponent and fraction, read through a view of fixed byte order.
 const view = new DataView(new ArrayBuffer(8));
 
-/** The power of two 2^n as a double, n from -1022 to 1023. */
+/** The least power of two: 2^-1074. */
+const LEAST = 1074;
+
+/** All powers of two that are doubles: 2^n at n + 1074. */
+export const POWERS_OF_TWO = new Float64Array(LEAST + 1024);
+POWERS_OF_TWO[LEAST] = 1;
+for (let n = 1; n <= LEAST; n += 1) POWERS_OF_TWO[LEAST - n] = (POWERS_OF_TWO[LEAST - n + 1] as number) / 2;
+for (let n = 1; n < 1024; n += 1) POWERS_OF_TWO[LEAST + n] = (POWERS_OF_TWO[LEAST + n - 1] as number) * 2;
+
+/** The power of two 2^n as a double, n from -1074 to 1023. */
 function powerOfTwo(n: number): number {
-	view.setUint32(0, (n + 1023) * 0x100000);
-	view.setUint32(4, 0);
-	return view.getFloat64(0);
+	return POWERS_OF_TWO[LEAST + n] as number;
 }
 
 /** x times 2^n, rounded once unless the result is subnormal. */

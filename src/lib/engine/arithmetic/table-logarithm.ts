@@ -1,7 +1,7 @@
 // Natural logarithm by a table: x = m 2^k, c the multiple of 1/128 next to m, log x = k ln 2 + ln c + log(1 + r),
 // r = (m - c)/c, |r| <= 2^-8. After Tang, Table-driven implementation of the logarithm function in IEEE floating-point
 // arithmetic, ACM Transactions on Mathematical Software 16 (1990); the series is Abramowitz & Stegun 4.1.24.
-import { scale } from './float-parts';
+import { POWERS_OF_TWO } from './float-parts';
 import { LN2_HIGH, LN2_LOW, logParts } from './logarithm';
 
 const LN2 = 0.6931471805599453;
@@ -20,8 +20,8 @@ const INVERSE = new Float64Array(128);
 /** ln c in two parts; the first is a multiple of 2^-42, so that adding k ln 2 to it is exact. */
 const LN_HIGH = new Float64Array(128);
 const LN_LOW = new Float64Array(128);
-/** 2^(1023 - e) */
-const POWER = new Float64Array(2048);
+/** Where 2^(1023 - e) lies among the powers of two, less -e. */
+const PLACE = 1074 + 1023;
 
 const ROUNDING = 1536; // 1.5 times 2^10, whose last bit is 2^-42
 for (let j = 0; j < 128; j += 1) {
@@ -31,7 +31,6 @@ for (let j = 0; j < 128; j += 1) {
 	LN_HIGH[j] = hi + ROUNDING - ROUNDING;
 	LN_LOW[j] = hi - (LN_HIGH[j] as number) + lo;
 }
-for (let e = 1; e < 2048; e += 1) POWER[e] = scale(1, 1023 - e);
 
 /** The logarithm of a normal x that is not near 1. */
 function byTable(x: number): number {
@@ -40,7 +39,7 @@ function byTable(x: number): number {
 	const e = high >>> 20;
 	const j = (high >>> 13) & 127;
 	const k = e - 1023;
-	const r = (x * (POWER[e] as number) - (1 + j * 0.0078125)) * (INVERSE[j] as number);
+	const r = (x * (POWERS_OF_TWO[PLACE - e] as number) - (1 + j * 0.0078125)) * (INVERSE[j] as number);
 	const w = k * LN2_HIGH + (LN_HIGH[j] as number);
 	const sum = w + r;
 	const low = w - sum + r + (k * LN2_LOW + (LN_LOW[j] as number));

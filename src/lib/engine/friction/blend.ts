@@ -4,12 +4,10 @@ import { colebrookRoot } from './colebrook';
 
 /** Laminar below, turbulent above; neither within [-]. */
 export const TRANSITION: Range = { min: 2_000, max: 4_000 };
-const LOG_MIN = 7.600902459542082; // ln 2000
-const LOG_SPAN = 0.6931471805599453; // ln 2
+const LN2 = 0.6931471805599453; // of the width of the transition, in ln Re
 
-/** y = start + t (one + t (two + t three)), t from 0 to 1 over the transition. */
+/** y - y(2000) = t (one + t (two + t three)), t = log2(Re/2000), 0 to 1 over the transition. */
 interface Cubic {
-	readonly start: number;
 	readonly one: number;
 	readonly two: number;
 	readonly three: number;
@@ -18,12 +16,11 @@ interface Cubic {
 /** The cubic that meets both laws with value and slope (Hermite). */
 function cubicOf(roughness: number, laminar: number): Cubic {
 	const { x, slope } = colebrookRoot(TRANSITION.max, roughness);
-	const start = log(laminar) + LOG_MIN;
-	const end = 2 * (LOG_MIN + LOG_SPAN) - 2 * log(x);
-	const one = LOG_SPAN;
-	const last = (2 + slope) * LOG_SPAN;
-	const rise = end - start;
-	return { start, one, two: 3 * rise - 2 * one - last, three: one + last - 2 * rise };
+	// f Re^2 at 4000 over that at 2000
+	const rise = log((TRANSITION.max * TRANSITION.max) / (TRANSITION.min * laminar * x * x));
+	const one = LN2;
+	const last = (2 + slope) * LN2;
+	return { one, two: 3 * rise - 2 * one - last, three: one + last - 2 * rise };
 }
 
 /**
@@ -41,10 +38,9 @@ function cubicOf(roughness: number, laminar: number): Cubic {
  * @check none: no published value; laws tested in friction.test.ts
  */
 export function blendedFriction(Re: number, roughness: number, laminar: number): number {
-	const { start, one, two, three } = cubicOf(roughness, laminar);
-	const u = log(Re);
-	const t = (u - LOG_MIN) / LOG_SPAN;
-	return exp(start + t * (one + t * (two + t * three)) - 2 * u);
+	const { one, two, three } = cubicOf(roughness, laminar);
+	const t = log(Re / TRANSITION.min) / LN2;
+	return (exp(t * (one + t * (two + t * three))) * laminar * TRANSITION.min) / (Re * Re);
 }
 
 /**
@@ -61,6 +57,6 @@ export function blendedFriction(Re: number, roughness: number, laminar: number):
  */
 export function blendedSlope(Re: number, roughness: number, laminar: number): number {
 	const { one, two, three } = cubicOf(roughness, laminar);
-	const t = (log(Re) - LOG_MIN) / LOG_SPAN;
-	return (one + t * (2 * two + 3 * t * three)) / LOG_SPAN - 2;
+	const t = log(Re / TRANSITION.min) / LN2;
+	return (one + t * (2 * two + 3 * t * three)) / LN2 - 2;
 }
