@@ -31,7 +31,9 @@ export function checksPages({ checks, toBeConfirmed, revisions }: Report, sheet:
 			: [notes(['No check of the engine found anything to look at. That is no proof that nothing is wrong.'])]),
 		heading('To be confirmed'),
 		...(open.length > 0 ? (open as Content[]) : [notes(['Nothing is marked as to be confirmed.'])]),
-		...(leavesOut(revisions) ? [heading('All revisions'), revisionTable(revisions, sheet.content.width)] : [])
+		...(leavesOut(revisions, sheet)
+			? [heading('All revisions', 10, 'revisions'), revisionTable(revisions, sheet.content.width)]
+			: [])
 	];
 }
 

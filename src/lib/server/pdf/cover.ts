@@ -2,10 +2,11 @@ import type { Content, TableCell } from 'pdfmake/interfaces';
 import type { Labelled, Report } from '$lib/report';
 import { cell, grid, RULE } from './grid';
 import { heading, notes } from './page-head';
+import { pageList } from './page-list';
 import type { Sheet } from './paper';
 import { narrow, sans } from './printable';
 import { resultBand } from './result-band';
-import { COVER_REVISIONS, coverNote, revisionTable } from './revision-table';
+import { coverRevisions, leavesOut, revisionTable } from './revision-table';
 import { STAMP_WIDTH, stamp } from './stamp';
 
 /** Open items told on the cover; all stand on the page of the checks. */
@@ -13,21 +14,11 @@ const COVER_ITEMS = 4;
 const GAP = 19.5;
 const WIDE_GAP = 34;
 
-/** The pages that follow, with the ids of their heads. */
-const PAGES: readonly (readonly [string, string])[] = [
-	['Checks, to be confirmed', 'checks'],
-	['Duct schedule', 'schedule'],
-	['Paths and ledger', 'ledger'],
-	['Parts of each section', 'parts'],
-	['Fan duty, cautions', 'fan'],
-	['Sources and methods', 'sources']
-];
-
 /** The cover: whose it is, what it rests on, what came out and what is still open. */
 export function coverPages(report: Report, sheet: Sheet): Content[] {
 	const width = sheet.wide ? (sheet.content.width - WIDE_GAP) / 2 : sheet.content.width;
 	const first = [...headOf(report, width), ...resultOf(report, width)];
-	const second = [...openOf(report, width), ...recordOf(report, width)];
+	const second = [...openOf(report, width), ...recordOf(report, sheet, width), pageList(width)];
 	if (!sheet.wide) return [...first, ...second];
 	return [
 		{
@@ -60,7 +51,7 @@ function headOf({ heading: { kind, title, place, identity, stamp: status }, basi
 		{
 			columns: [
 				{ width: half, stack: [heading('Record', 6), pairs(identity, half)] },
-				{ width: half, stack: [heading('Basis of design', 6), pairs(basis, half)] }
+				{ width: half, stack: [heading('Basis of design', 6, 'basis'), pairs(basis, half)] }
 			],
 			columnGap: GAP
 		}
@@ -91,7 +82,7 @@ function pairs(lines: readonly Labelled[], width: number): Content {
 }
 
 function resultOf({ result }: Report, width: number): Content[] {
-	return [heading('Result'), resultBand(result, width), notes(result.notes)];
+	return [heading('Result', 8), resultBand(result, width), notes(result.notes)];
 }
 
 function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Content[] {
@@ -121,7 +112,7 @@ function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Con
 		{ width: 44, head: 'Worst', kind: 'computed', align: 'right' },
 		{ width: 40, head: '', kind: 'entered', align: 'right' }
 	] as const;
-	const right: Content[] = [heading('Checks')];
+	const right: Content[] = [heading('Checks', 8)];
 	if (limits.length > 0) right.push(grid(columns, limits, { fontSize: 8.8, heavy: false, pad: 1.8 }));
 	else right.push(sans('The design names no limits of its own.', { fontSize: 9.6 }));
 	right.push(
@@ -132,7 +123,7 @@ function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Con
 	return [
 		{
 			columns: [
-				{ width: half, stack: [heading('To be confirmed'), ...items] },
+				{ width: half, stack: [heading('To be confirmed', 8), ...items] },
 				{ width: half, stack: right }
 			],
 			columnGap: GAP
@@ -140,41 +131,16 @@ function openOf({ toBeConfirmed, criteria, checks }: Report, width: number): Con
 	];
 }
 
-function recordOf({ revisions }: Report, width: number): Content[] {
-	const latest = revisions.slice(0, COVER_REVISIONS).map((one) => ({ ...one, note: coverNote(one.note) }));
+function recordOf({ revisions }: Report, sheet: Sheet, width: number): Content[] {
+	const latest = coverRevisions(revisions, sheet);
 	const table: Content[] =
 		latest.length > 0
 			? [revisionTable(latest, width)]
 			: [sans('None: this sheet was not saved as a version.', { fontSize: 9.6 })];
-	const more = revisions.length - latest.length;
-	if (more > 0) table.push(reference(`and ${more} earlier, on page `, 'checks', 3));
-	return [
-		{ stack: [heading('Revisions'), ...table], unbreakable: true },
-		{ stack: [heading('Pages'), pageList(width)], unbreakable: true }
-	];
-}
-
-function pageList(width: number): Content {
-	const entry = (place: number): TableCell[] => {
-		const [name, id] = PAGES[place] ?? ['', ''];
-		return [{ pageReference: id, fontSize: 9.6, noWrap: true }, sans(name, { fontSize: 9.6 })];
-	};
-	const third = width / 3;
-	return {
-		table: {
-			widths: [14, third - 24, 14, third - 24, 14, third - 24],
-			body: [0, 3].map((start) => [...entry(start), ...entry(start + 1), ...entry(start + 2)])
-		},
-		layout: {
-			hLineWidth: (i) => (i === 0 ? 0.75 : 0.4),
-			hLineColor: (i) => (i === 0 ? '#000000' : RULE),
-			vLineWidth: () => 0,
-			paddingLeft: (i) => (i % 2 === 0 ? 0 : 7),
-			paddingRight: () => 1.5,
-			paddingTop: () => 1.8,
-			paddingBottom: () => 1.8
-		}
-	};
+	const some = latest.length < revisions.length ? `, the latest ${latest.length} of ${revisions.length}` : '';
+	// Where something is left out, this id is that of the whole table, with the checks.
+	const id = leavesOut(revisions, sheet) ? undefined : 'revisions';
+	return [{ stack: [heading(`Revisions${some}`, 8, id), ...table], unbreakable: true }];
 }
 
 function reference(text: string, id: string, top = 0): Content {

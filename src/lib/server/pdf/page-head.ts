@@ -36,8 +36,8 @@ export function keyLine(): Content {
 	} as Content;
 }
 
-export function heading(text: string, top = 10): Content {
-	return sans(text, { fontSize: 10.5, bold: true, margin: [0, top, 0, 3] });
+export function heading(text: string, top = 10, id?: string): Content {
+	return sans(text, { fontSize: 10.5, bold: true, margin: [0, top, 0, 3], ...(id !== undefined && { id }) });
 }
 
 export function notes(lines: readonly string[]): Content {

@@ -19,6 +19,9 @@ export function footOrigin(sheet: Sheet): number {
 	return sheet.height - sheet.margins[3];
 }
 
+/** Upright paper with little height, where the cover must be thrifty to stay one page. */
+export const isShort = (sheet: Sheet): boolean => !sheet.wide && sheet.height < 800;
+
 /** Upright: width, height [pt]. */
 const SIZES: Readonly<Record<Paper, readonly [number, number]>> = {
 	A4: [595.28, 841.89],

@@ -5,6 +5,7 @@ import { reportOf, type Report } from '$lib/report';
 import { inputOf, library, treeOf } from '$lib/report/sample-input';
 import { definitionOf } from './definition';
 import { face, NARROW, SANS, STRONG, type Family } from './fonts';
+import { sheetOf } from './paper';
 import { reportPdf } from './report-pdf';
 
 const PRINTED = new Date('2026-11-24T09:05:00.000Z');
@@ -43,16 +44,29 @@ function missing(report: Report): string[] {
 	);
 }
 
-async function pagesOf(pdf: Buffer): Promise<{ width: number; height: number; text: string }[]> {
+interface Page {
+	readonly width: number;
+	readonly height: number;
+	readonly text: string;
+	/** How far below the upper edge the lowest of the words of a text stands [pt]; Infinity where one is missing. */
+	readonly lowest: (text: string) => number;
+}
+
+async function pagesOf(pdf: Buffer): Promise<Page[]> {
 	const task = getDocument({ data: new Uint8Array(pdf), useSystemFonts: false, isEvalSupported: false, verbosity: 0 });
 	const document = await task.promise;
-	const pages = [];
+	const pages: Page[] = [];
 	for (let number = 1; number <= document.numPages; number += 1) {
 		const page = await document.getPage(number);
 		const { width, height } = page.getViewport({ scale: 1 });
 		const { items } = await page.getTextContent();
 		const text = items.map((item) => ('str' in item ? item.str + (item.hasEOL ? ' ' : '') : '')).join('');
-		pages.push({ width, height, text: text.replace(/[\s\u00a0]+/g, ' ') });
+		const placed = items.flatMap((item) => ('str' in item && item.str.trim() ? [item] : []));
+		const lowest = (wanted: string) => {
+			const found = placed.filter(({ str }) => wanted.includes(str) && str.length > 3);
+			return found.length ? Math.max(...found.map(({ transform }) => height - Number(transform[5]))) : Infinity;
+		};
+		pages.push({ width, height, text: text.replace(/[\s\u00a0]+/g, ' '), lowest });
 	}
 	await task.destroy();
 	return pages;
@@ -123,6 +137,24 @@ describe('the file', () => {
 		const schedule = pages.find(({ text }) => text.startsWith('Duct schedule'));
 		expect(schedule && schedule.width > schedule.height).toBe(true);
 	});
+
+	it.each(['A4', 'Letter', 'A3', 'Tabloid'] as const)(
+		'has a cover of one page on %s, its line of verification clear of the title block',
+		async (paper) => {
+			for (const units of ['SI', 'IP'] as const) {
+				const input = inputOf(library, { paper, units });
+				const [first] = input.revisions;
+				const revisions = ['P03', 'P02', 'P01'].map((revision) => ({ ...first!, revision }));
+				const report = reportOf({ ...input, revisions });
+				const pages = await pagesOf(await reportPdf(report));
+				expect(pages[0]?.text).toContain('Basis of design');
+				expect(pages[1]?.text.startsWith('Checks')).toBe(true);
+				const { code, line } = report.verification;
+				expect(pages[0]?.lowest(code ?? '')).toBeLessThan(sheetOf(paper, 'text').blockTop);
+				expect(pages[0]?.lowest(line)).toBeLessThan(sheetOf(paper, 'text').blockTop);
+			}
+		}
+	);
 
 	it('repeats the heads of the schedule on each of its pages, and loses no row of a long one', async () => {
 		const report = reportOf(inputOf(treeOf(90)));

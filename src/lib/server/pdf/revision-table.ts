@@ -1,21 +1,28 @@
 import type { ContentTable } from 'pdfmake/interfaces';
 import type { RevisionLine } from '$lib/report';
 import { cell, grid, type GridColumn } from './grid';
+import { isShort, type Sheet } from './paper';
 
-/** Revisions on the cover; where there are more, all stand on the page of the checks. */
-export const COVER_REVISIONS = 3;
-/** Characters of a note on the cover. */
-const COVER_NOTE = 180;
+/** Characters of a note on the cover, so that it takes two lines in the newest revision and one in those before. */
+const NEWEST_NOTE = 110;
+const EARLIER_NOTE = 54;
 const SIZE = 9.4;
 
-/** A note as the cover has it; where something is left out, the whole stands on the page of the checks. */
-export function coverNote(note: string): string {
-	return note.length <= COVER_NOTE ? note : `${note.slice(0, COVER_NOTE).trimEnd()}…`;
+/** The newest revisions as the cover has room for them; where it leaves something out, all stand with the checks. */
+export function coverRevisions(revisions: readonly RevisionLine[], sheet: Sheet): RevisionLine[] {
+	return revisions
+		.slice(0, isShort(sheet) ? 2 : 3)
+		.map((one, place) => ({ ...one, note: cut(one.note, place === 0 ? NEWEST_NOTE : EARLIER_NOTE) }));
 }
 
 /** Whether the cover leaves out revisions or parts of notes. */
-export function leavesOut(revisions: readonly RevisionLine[]): boolean {
-	return revisions.length > COVER_REVISIONS || revisions.some(({ note }) => coverNote(note) !== note);
+export function leavesOut(revisions: readonly RevisionLine[], sheet: Sheet): boolean {
+	const told = coverRevisions(revisions, sheet);
+	return revisions.some(({ note }, place) => told[place]?.note !== note);
+}
+
+function cut(note: string, most: number): string {
+	return note.length <= most ? note : `${note.slice(0, most).trimEnd()}…`;
 }
 
 export function revisionTable(revisions: readonly RevisionLine[], width: number): ContentTable {
@@ -23,9 +30,9 @@ export function revisionTable(revisions: readonly RevisionLine[], width: number)
 	const columns = [
 		column('Rev.', 36),
 		column('Date', 66),
-		column('Status', 84),
-		column('What changed', width - 36 - 66 - 84 - 96),
-		column('Prepared', 96)
+		column('Status', 80),
+		column('What changed', width - 36 - 66 - 80 - 84),
+		column('Prepared', 84)
 	];
 	const body = revisions.map(({ revision, date, status, note, by, current }) =>
 		[revision, date, status, note, by].map((text, place) =>

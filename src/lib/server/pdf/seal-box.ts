@@ -1,12 +1,10 @@
-import type { Content } from 'pdfmake/interfaces';
+import type { Content, ContentTable } from 'pdfmake/interfaces';
 import type { Verification } from '$lib/report';
 import { STRONG } from './fonts';
-import { footOrigin, type Sheet } from './paper';
+import { footOrigin, isShort, type Sheet } from './paper';
 import { narrow, sans } from './printable';
 
-/** Upright paper below this height [pt] has a lower box, so that the cover stays one page. */
-const SHORT = 800;
-const heightOn = (sheet: Sheet) => (!sheet.wide && sheet.height < SHORT ? 62 : 100);
+const heightOn = (sheet: Sheet) => (isShort(sheet) ? 76 : 100);
 /** Height that the foot of the cover takes above the title block [pt]. */
 export const coverFootHeight = (sheet: Sheet): number => heightOn(sheet) + 8;
 const SEAL = 240;
@@ -24,8 +22,10 @@ export function coverFoot(sheet: Sheet, { title, text, code, line }: Verificatio
 		sans(title, { fontSize: 10.5, bold: true }),
 		sans(text, { fontSize: 9, margin: [0, 2, 0, 0] })
 	];
-	if (code !== null)
-		lines.push({
+	const told = sans(line, { fontSize: 9, color: '#333333' });
+	if (code === null) lines.push({ ...told, margin: [0, 4, 0, 0] });
+	else {
+		const box: ContentTable = {
 			table: {
 				widths: ['auto'],
 				body: [
@@ -39,10 +39,17 @@ export function coverFoot(sheet: Sheet, { title, text, code, line }: Verificatio
 				paddingRight: () => 6,
 				paddingTop: () => 2,
 				paddingBottom: () => 2
-			},
+			}
+		};
+		lines.push({
+			columns: [
+				{ width: 'auto', ...box },
+				{ width: '*', ...told }
+			],
+			columnGap: 8,
 			margin: [0, 4, 0, 0]
 		});
-	lines.push(sans(line, { fontSize: 9, color: '#333333', margin: [0, 4, 0, 0] }));
+	}
 	const dash = { length: 2.2, space: 1.6 };
 	return {
 		stack: [
