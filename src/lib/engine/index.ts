@@ -63,3 +63,4 @@ export { airState, type AirState } from './air';
 export { findMaterial, frictionFactor, materials, regime, type Material } from './friction';
 export { equivalentDiameter, sectionOf, type Section, type Size } from './shape';
 export { OutOfRangeError } from './errors';
+export { Given, publishedEvaluators, subjectsOfTopic, type Answer, type Evaluators } from './published';

@@ -4,18 +4,9 @@ import { describePublished } from '../../../../fixtures/published/published-chec
 import { coefficientOf } from './coefficient-of';
 import { REFERENCE_VELOCITY, openBladeDamper, openDamperCoefficient } from './damper-open';
 import { bladeDamper, butterflyDamper, gateDamper } from './damper-tables';
+import { damperChecks } from '../published/dampers';
 
-describePublished('dampers against published values', published, {
-	'fitting.damper-butterfly': (given) =>
-		butterflyDamper(given.number('closed_angle'), given.text('shape') === 'round' ? 'round' : 'rectangular'),
-	'fitting.damper-multiblade-open': (given) => {
-		const Au = given.number('duct_m2');
-		const V = given.number('Q_m3s') / Au;
-		const blades = given.text('blades') === 'parallel' ? 'parallel' : 'opposed';
-		const { freeRatio, loss } = openBladeDamper(blades, given.number('damper_m2'), Au, V);
-		return { free_ratio: freeRatio, V_m_s: V, dp_Pa: loss };
-	}
-});
+describePublished('dampers against published values', published, damperChecks);
 
 describe('dampers', () => {
 	it('lose more the more they close', () => {

@@ -1,57 +1,16 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import published from '../../../../fixtures/published/elbows.json';
-import { describePublished, type Given } from '../../../../fixtures/published/published-checks';
+import { describePublished } from '../../../../fixtures/published/published-checks';
 import { OutOfRangeError } from '../errors';
-import { frictionFactor } from '../friction';
 import { bendAspectFactorIdelchik, bendIdelchik, bendReynoldsFactorIdelchik } from './bend-idelchik';
-import { bendMiller } from './bend-miller';
-import { bendIto1960, bendRennels2012, mitreRennels2012 } from './bend-rivals';
-import {
-	elbowAngleFactorSmacna,
-	mitreReynoldsFactorSmacna,
-	rectangularElbowSmacna,
-	roundElbowSmacna,
-	segmentedElbowSmacna
-} from './elbow-tables';
+import { bendIto1960 } from './bend-rivals';
+import { elbowAngleFactorSmacna, rectangularElbowSmacna, roundElbowSmacna, segmentedElbowSmacna } from './elbow-tables';
 import { mitreAspectFactorIdelchik, mitreIdelchik } from './mitre-idelchik';
 import { rectangularMitreSmacna, roundMitreSmacna } from './mitre-tables';
-import { splitterVanes } from './splitter-vanes';
+import { elbowChecks } from '../published/elbows';
 
-const angle = (given: Given) => given.number('angle');
-const aspect = (given: Given) => (given.has('H_over_W') ? given.number('H_over_W') : 1);
-
-describePublished('elbows against published values', published, {
-	'fitting.elbow-round-smooth': (given) => roundElbowSmacna(given.number('r_over_D'), angle(given)),
-	'fitting.elbow-round-gored': (given) =>
-		segmentedElbowSmacna(given.number('pieces'), given.number('r_over_D'), angle(given)),
-	'fitting.elbow-round-mitred': (given) => {
-		// Most checks say '>=1.4e5', where the factor is 1.
-		const Re = given.has('Re') && !given.isText('Re') ? given.number('Re') : 1.4e5;
-		return roundMitreSmacna(angle(given)) * mitreReynoldsFactorSmacna(Re);
-	},
-	'fitting.elbow-rect-mitred': (given) => rectangularMitreSmacna(angle(given), aspect(given)),
-	'fitting.elbow-rect-smooth': (given) => rectangularElbowSmacna(given.number('r_over_W'), aspect(given)),
-	'fitting.elbow-splitter-geometry': (given) => {
-		const { curveRatio, radii } = splitterVanes(given.number('vanes'), given.number('throat_R'), given.number('W'));
-		return { CR: curveRatio, vane_radii: radii };
-	},
-	'fitting.elbow-round-smooth.idelchik': (given) => bendIdelchik(angle(given), given.number('R0_over_D')),
-	'fitting.elbow-mitred.idelchik': (given) => mitreIdelchik(angle(given)) * mitreAspectFactorIdelchik(aspect(given)),
-	'fitting.elbow-rect-smooth.idelchik': (given) =>
-		bendIdelchik(angle(given), given.number('R0_over_W')) * bendAspectFactorIdelchik(aspect(given)),
-	'fitting.elbow-Re-factor.idelchik': (given) =>
-		bendReynoldsFactorIdelchik(given.number('R0_over_D'), given.number('Re')),
-	'fitting.elbow-round-smooth.rennels': (given) =>
-		bendRennels2012(angle(given), given.number('r_over_D'), given.number('fd')),
-	'fitting.elbow-round-smooth.ito': (given) => bendIto1960(given.number('r_over_D'), given.number('Re'), angle(given)),
-	'fitting.elbow-round-smooth.miller': (given) => {
-		const Re = given.number('Re');
-		const factor = (eps: number) => frictionFactor({ reynolds: Re, relativeRoughness: eps / given.number('D') });
-		return bendMiller(given.number('r_over_D'), angle(given), Re, factor(given.number('eps')), factor(0));
-	},
-	'fitting.elbow-round-mitred.rennels': (given) => mitreRennels2012(angle(given))
-});
+describePublished('elbows against published values', published, elbowChecks);
 
 describe('the closed form of mitred elbows', () => {
 	// SMACNA, HVAC Systems Duct Design, 4th ed. (2006), table A-7, printed to two figures

@@ -4,7 +4,6 @@ import entries from '../../../../fixtures/published/entries.json';
 import exits from '../../../../fixtures/published/exits.json';
 import { describePublished } from '../../../../fixtures/published/published-checks';
 import {
-	angledEntryIdelchik,
 	freeBellmouthIdelchik,
 	projectingEntryIdelchik,
 	roundedEntryIdelchik,
@@ -14,22 +13,11 @@ import { coefficientOf } from './coefficient-of';
 import { plainExit } from './exits';
 import { flatCapSmacna, taperedHoodAcgih } from './hood-tables';
 import type { FittingContext } from './types';
+import { entryChecks, exitChecks } from '../published/ends';
 
-describePublished('entries against published values', entries, {
-	'fitting.entry-bellmouth-free': (given) => freeBellmouthIdelchik(given.number('r_over_D')),
-	'fitting.entry-duct-through-wall': (given) =>
-		projectingEntryIdelchik(given.number('t_over_D'), given.number('L_over_D')),
-	'fitting.entry-rounded-flush': (given) => {
-		const r = given.number('r_over_D');
-		return { rennels: roundedEntryRennels2012(r), idelchik: roundedEntryIdelchik(r) };
-	},
-	'fitting.entry-angled': (given) => angledEntryIdelchik(given.number('angle_to_wall_deg'))
-});
+describePublished('entries against published values', entries, entryChecks);
 
-describePublished('exits against published values', exits, {
-	// A uniform profile has a kinetic energy factor of 1.
-	'fitting.exit': (given) => plainExit(given.text('profile') === 'uniform' ? 1 : NaN)
-});
+describePublished('exits against published values', exits, exitChecks);
 
 describe('the rounded entry of Rennels & Hudson', () => {
 	// fluids package, entrance_rounded: a point of their diagram 9.2

@@ -1,23 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { describePublished } from '../../../../fixtures/published/published-checks';
 import published from '../../../../fixtures/published/screens.json';
-import {
-	obstructionIdelchik,
-	thickPlateIdelchik,
-	thinPlateIdelchik,
-	wireScreenBlevins,
-	wireScreenIdelchik
-} from './screen-formulas';
+import { thickPlateIdelchik, thinPlateIdelchik, wireScreenIdelchik } from './screen-formulas';
+import { screenChecks } from '../published/screens';
 
-describePublished('screens and plates against published values', published, {
-	'fitting.screen-wire': (given) => wireScreenIdelchik(given.number('free_area_ratio')),
-	'fitting.screen-wire.blevins': (given) => wireScreenBlevins(given.number('free_area_ratio'), given.number('Re')),
-	'fitting.orifice-perforated-plate': (given) =>
-		thickPlateIdelchik(given.number('free_area_ratio'), given.number('l_over_d'), given.number('lambda')),
-	'fitting.perforated-plate-thin': (given) => thinPlateIdelchik(given.number('free_area_ratio')),
-	'fitting.obstruction': (given) =>
-		obstructionIdelchik(given.number('Sm_over_A'), given.number('Cx'), given.number('tau'))
-});
+describePublished('screens and plates against published values', published, screenChecks);
 
 describe('screens and plates', () => {
 	it('lose less the more open they are', () => {

@@ -2,14 +2,10 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { describePublished } from '../../../../fixtures/published/published-checks';
 import published from '../../../../fixtures/published/terminals.json';
-import { lossAtDensity, meanFilterLoss, ratedLoss } from './rated-loss';
+import { ratedLoss } from './rated-loss';
+import { terminalChecks } from '../published/terminals';
 
-describePublished('terminals against published values', published, {
-	'terminal.power-law': (given) =>
-		ratedLoss(given.number('dp_rated'), given.number('Q_rated'), given.number('Q'), given.number('n')),
-	'terminal.filter': (given) => meanFilterLoss(given.number('dp_clean'), given.number('dp_dirty')),
-	'terminal.density': (given) => lossAtDensity(given.number('dp_catalogue_1.2'), 1.2, given.number('rho'))
-});
+describePublished('terminals against published values', published, terminalChecks);
 
 describe('the loss of a terminal', () => {
 	it('is the rated one at the rated flow, whatever the exponent', () => {

@@ -1,21 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import published from '../../../../fixtures/published/leakage.json';
-import { describePublished, type Given, type PublishedFile } from '../../../../fixtures/published/published-checks';
+import { describePublished, type PublishedFile } from '../../../../fixtures/published/published-checks';
 import { OutOfRangeError } from '../errors';
-import {
-	allowableLeakage,
-	coefficientOfClass,
-	findLeakageClass,
-	leakageClasses,
-	leakageFlow,
-	measuredClass,
-	type LeakageClass
-} from '.';
-
-const FOOT = 0.3048;
-const CFM = (FOOT * FOOT * FOOT) / 60;
-const INCH_OF_WATER = 249.089;
+import { coefficientOfClass, findLeakageClass, leakageClasses, leakageFlow, measuredClass, type LeakageClass } from '.';
+import { leakageChecks } from '../published/leakage';
 
 function classOf(key: string): LeakageClass {
 	const found = findLeakageClass(key);
@@ -23,22 +12,7 @@ function classOf(key: string): LeakageClass {
 	return found;
 }
 
-describePublished('leakage against published values', published as PublishedFile, {
-	'leakage.en-class': (given: Given) =>
-		allowableLeakage(classOf(given.text('class')), given.number('area_m2'), given.number('p_Pa')) * 1000,
-	'leakage.ip-class': (given: Given) => {
-		const surface = given.number('area_ft2') * FOOT * FOOT;
-		return leakageFlow({ CL: given.number('CL') }, surface, given.number('p_inwg') * INCH_OF_WATER) / CFM;
-	},
-	'leakage.system': (given: Given) => {
-		const sections = published.checks.find(({ id }) => id === 'F-system')?.inputs.sections ?? [];
-		const flow = sections
-			.map(([surface, pressure, key]) => leakageFlow(classOf(String(key)), Number(surface), Number(pressure)))
-			.reduce((sum, one) => sum + one, 0);
-		const L_s = flow * 1000;
-		return { L_s, percent: (100 * L_s) / given.number('design_flow_L_s') };
-	}
-});
+describePublished('leakage against published values', published as PublishedFile, leakageChecks);
 
 describe('the classes of air tightness', () => {
 	it('have keys of their own, and each is three times tighter than the one before', () => {

@@ -5,27 +5,9 @@ import { describe, expect, it } from 'vitest';
 import { describePublished } from '../../../../fixtures/published/published-checks';
 import published from '../../../../fixtures/published/shape.json';
 import { equivalentDiameter, laminarRectangle, sectionOf } from '.';
+import { shapeChecks } from '../published/shape';
 
-const INCH = 0.0254;
-
-describePublished('shapes against published values', published, {
-	'geometry.rect-equivalent': (given) => {
-		const width = given.number('a_in') * INCH;
-		return equivalentDiameter({ shape: 'rectangular', width, height: given.number('b_in') * INCH }) / INCH;
-	},
-	'geometry.flat-oval': (given) => {
-		const height = given.number('minor_mm') / 1000;
-		const size = { shape: 'oval', width: given.number('major_mm') / 1000, height } as const;
-		const { area, perimeter, hydraulicDiameter } = sectionOf(size);
-		return {
-			A_mm2: area * 1e6,
-			P_mm: perimeter * 1000,
-			De_mm: equivalentDiameter(size) * 1000,
-			Dh_mm: hydraulicDiameter * 1000
-		};
-	},
-	'friction.rect-laminar': (given) => laminarRectangle(1, given.number('aspect_b_over_a'))
-});
+describePublished('shapes against published values', published, shapeChecks);
 
 const side = fc.double({ min: 0.05, max: 3, noNaN: true });
 
