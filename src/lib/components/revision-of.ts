@@ -1,11 +1,25 @@
+type Status = 'work-in-progress' | 'issued-for-review';
+
 interface Saved {
 	readonly revision: string;
 	/** The last edit that is in it. */
 	readonly seq: number;
+	readonly status: Status;
 }
 
-/** What the title block says of the last revision: whether the working sheet still is as it was saved. */
-export function revisionOf(last: Saved | undefined, seq: number): { readonly code: string; readonly about: string } {
-	if (!last) return { code: '–', about: 'none saved yet' };
-	return { code: last.revision, about: seq > last.seq ? 'edited since' : 'as saved' };
+/** What a title block says of a revision and of the status that goes with it. */
+export interface Revision {
+	readonly caption: string;
+	readonly code: string;
+	readonly about: string;
+	readonly status: Status;
+}
+
+/** Of the working sheet: the last revision and its status while the sheet stands as saved; in work after it once edited. */
+export function revisionOf(last: Saved | undefined, seq: number): Revision {
+	if (!last) return { caption: 'Revision', code: '–', about: 'none saved yet', status: 'work-in-progress' };
+	const { revision: code, status } = last;
+	return seq > last.seq
+		? { caption: 'In work, after', code, about: 'changed since', status: 'work-in-progress' }
+		: { caption: 'Revision', code, about: 'as saved', status };
 }
