@@ -48,6 +48,12 @@ describe('Colebrook–White by brackets in 40 digits', () => {
 		);
 	});
 
+	it('is exact below the transition too, where it only serves the blend', () => {
+		for (const roughness of [0, 1e-4, 0.01, 0.3, 1])
+			for (let Re = 1_000; Re < 4_000; Re *= 1.021)
+				expect(isBracketed(frictionColebrook1939(Re, roughness), Re, roughness, 4 * ULP), `Re ${Re}`).toBe(true);
+	});
+
 	it('would miss a factor that is wrong by the fifteenth digit', () => {
 		const f = frictionColebrook1939(1e5, 1e-4);
 		expect(isBracketed(f * (1 + 1e-15), 1e5, 1e-4, 3 * ULP)).toBe(false);

@@ -19,8 +19,8 @@ const VISCOUS = 2.51 * K;
  *   r = y0 + ln(a + b y0), q = b/(a + b y0 + b), s = -q r
  *   y = y0 - (1 - q) r [1 + q s/2 + q (q/2 - 1/3) s^2 + q (5 q^2/8 - 5 q/6 + 1/4) s^3]
  *
- * The bracket is the series of the root in powers of the residual (Lagrange), with what is left of order s^4; |s| is
- * below 0.002 after the first step.
+ * The bracket is the series of the root in powers of the residual (Lagrange), with what is left of order s^4; after the
+ * first step |s| is below 0.0007 from Re 4000 on and below 0.0022 from Re 1000 on.
  */
 function rootOf(a: number, b: number): number {
 	let y = -roughLog(a + b * 8);

@@ -19,7 +19,7 @@ export interface FlexibleStretch {
 export const INSTALLED_LENGTH =
 	'Length as installed, along the curve of the duct with its sag. Compression is what is missing of the fully ' +
 	'stretched length: 1 - installed/stretched. The factor knows no sag beyond the length it adds: slack between ' +
-	'supports gathers the inner skin, and loses more.';
+	'supports gathers the inner skin, and loses more (common practice).';
 
 function notesOf(diameter: number, compression: number): string | null {
 	const notes: string[] = [];
