@@ -91,6 +91,11 @@ function treeOf(letter: string, seeds: readonly Seed[], sides: readonly DesignRo
 	});
 }
 
+/** Whether every formula of a design is asked within its range: leakage is not at ten thousand pascal. */
+export function isWithinRange(document: DesignDocument): boolean {
+	return solveDesign(document).ok;
+}
+
 /** The solution of a document that must be sound. */
 export function solutionOf(document: unknown): Solution {
 	const validated = validateDocument(document);
@@ -108,17 +113,30 @@ export const anyDesignOfStreams: fc.Arbitrary<DesignDocument> = fc
 		design: anyDesign,
 		kinds: fc.array(fc.option(fc.constantFrom(...JUNCTIONS), { nil: null }), { minLength: 40, maxLength: 40 }),
 		temperatures: fc.array(fc.option(between(-10, 60), { nil: null, freq: 4 }), { minLength: 40, maxLength: 40 }),
-		standard: fc.boolean()
+		standard: fc.boolean(),
+		leakage: fc.option(fc.constantFrom({ class: 'A' }, { class: 'C' }, { class: 'ATC1' }, { cl: 24 }), { nil: null }),
+		lining: fc.array(fc.boolean(), { minLength: 40, maxLength: 40 })
 	})
-	.map(({ design, kinds, temperatures, standard }) => {
+	.map(({ design, kinds, temperatures, standard, leakage, lining }) => {
 		const straight = new Set<string>();
 		const rows = design.rows.map((row, at): DesignRow => {
 			const [kind, temperature] = [kinds[at] ?? null, temperatures[at] ?? null];
-			const warm = temperature === null ? row : { ...row, temperature };
+			const lined = lining[at] ? ({ thickness: 0.025, sizeIs: at % 3 === 0 ? 'clear' : 'metal' } as const) : undefined;
+			const warm = {
+				...row,
+				...(temperature !== null && { temperature }),
+				...(lined && { lining: lined }),
+				...(row.flexible && at % 2 === 0 && { flexible: { length: row.flexible.length, compression: 0.1 } })
+			};
 			if (kind === null || row.joins === null) return warm;
 			const leg = at % 2 === 0 && !straight.has(row.joins) ? 'straight' : 'branch';
 			if (leg === 'straight') straight.add(row.joins);
 			return { ...warm, junction: { kind, leg } };
 		});
-		return { ...design, ...(standard && { flowBasis: 'standard' as const }), rows };
+		return {
+			...design,
+			...(standard && { flowBasis: 'standard' as const }),
+			...(leakage && { leakage: { ...leakage, testPressure: 400 } }),
+			rows
+		};
 	});

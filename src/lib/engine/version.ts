@@ -1,2 +1,2 @@
 /** The version of the calculation, carried by every solution. It changes when a figure may change. */
-export const ENGINE_VERSION = '1.0.0';
+export const ENGINE_VERSION = '1.1.0';

@@ -57,6 +57,7 @@ export const RULE: Readonly<Record<FlagRule, string>> = {
 	'to-be-confirmed': 'To be confirmed',
 	'fan-flows-differ': 'Flows of the two sides of the fan',
 	'temperature-mix': 'Temperature of united streams',
+	'leakage-not-settled': 'Leakage that does not settle',
 	condensation: 'Air below its dew point',
 	'service-caution': 'Special service',
 	'fire-damper-caution': 'Fire or smoke damper',

@@ -1,5 +1,6 @@
 import { catalogue, fittingEntry, type CatalogueEntry } from '../fitting';
 import { findMaterial, materials } from '../friction';
+import { findLeakageClass, leakageClasses } from '../leakage';
 import { fault, isRecord, rowsOf, shown, textAt, type Step } from './fault';
 import type { Problem } from './types';
 
@@ -12,6 +13,7 @@ export function partProblems(document: unknown): Problem[] {
 	const problems: Problem[] = [];
 	materialProblem(document, [], problems);
 	fanProblems(document, problems);
+	leakageProblem(isRecord(document) ? document.leakage : null, ['leakage'], problems);
 	methodsProblems(document, problems);
 	const air = isRecord(document) ? document.air : null;
 	const byDensity = isRecord(air) && air.density !== undefined;
@@ -30,6 +32,10 @@ export function partProblems(document: unknown): Problem[] {
 		if (Array.isArray(row.fittings))
 			row.fittings.forEach((one, k) => fittingProblems(one, ['rows', i, 'fittings', k], problems));
 		junctionProblems(row.junction, ['rows', i, 'junction'], problems);
+		leakageProblem(row.leakage, ['rows', i, 'leakage'], problems);
+		liningProblem(row, ['rows', i, 'lining'], problems);
+		if (Array.isArray(row.equipment))
+			row.equipment.forEach((one, k) => equipmentProblem(one, ['rows', i, 'equipment', k], problems));
 	});
 	return problems;
 }
@@ -39,6 +45,80 @@ function materialProblem(holder: unknown, path: readonly Step[], problems: Probl
 	if (material === null || findMaterial(material) !== null) return;
 	const keys = materials.map((one) => one.key).join(', ');
 	problems.push(fault('unknown-material', [...path, 'material'], `is ${shown(material)}`, `one of ${keys}`));
+}
+
+/** A class of the list, or an inch-pound figure. */
+function leakageProblem(leakage: unknown, path: readonly Step[], problems: Problem[]): void {
+	if (!isRecord(leakage)) return;
+	const key = textAt(leakage, 'class');
+	const known = leakageClasses.map((one) => one.key).join(', ');
+	if (key !== null && findLeakageClass(key) === null)
+		problems.push(fault('unknown-leakage-class', [...path, 'class'], `is ${shown(key)}`, `one of ${known}`));
+	else if (key === null && leakage.cl === undefined)
+		problems.push(fault('unknown-leakage-class', path, 'names no class', `class, one of ${known}; or cl`));
+}
+
+/** A liner leaves room for the air. */
+function liningProblem(row: Readonly<Record<string, unknown>>, path: readonly Step[], problems: Problem[]): void {
+	const { lining, size } = row;
+	if (!isRecord(lining) || !isRecord(size) || lining.sizeIs !== 'metal' || typeof lining.thickness !== 'number') return;
+	const sides = [size.diameter, size.width, size.height].filter((side) => typeof side === 'number');
+	const least = Math.min(...sides);
+	if (2 * lining.thickness < least * (1 - 1e-6)) return;
+	problems.push(
+		fault(
+			'lining-fills',
+			[...path, 'thickness'],
+			'leaves no free space in the duct',
+			'less than half of the least side'
+		)
+	);
+}
+
+function equipmentProblem(equipment: unknown, path: readonly Step[], problems: Problem[]): void {
+	if (!isRecord(equipment)) return;
+	const { loss, points, filter } = equipment;
+	const given = [loss, points, filter].filter((one) => one !== undefined).length;
+	if (given !== 1)
+		problems.push(
+			fault(
+				'loss-missing',
+				[...path, 'loss'],
+				given === 0 ? 'is missing' : 'stands beside points or a filter',
+				'one of loss, points and filter'
+			)
+		);
+	if (Array.isArray(points)) {
+		let before: readonly number[] = [0, 0];
+		points.forEach((point: unknown, k) => {
+			if (!Array.isArray(point) || typeof point[0] !== 'number' || typeof point[1] !== 'number') return;
+			const [at, there] = [point[0], point[1]];
+			if (at <= (before[0] ?? 0) || there <= 0 || there < (before[1] ?? 0))
+				problems.push(
+					fault(
+						'out-of-range',
+						[...path, 'points', k],
+						'does not rise',
+						'points by rising flow, each of a loss above 0 that does not fall'
+					)
+				);
+			before = [at, there];
+		});
+	}
+	if (
+		isRecord(filter) &&
+		typeof filter.clean === 'number' &&
+		typeof filter.final === 'number' &&
+		filter.final < filter.clean
+	)
+		problems.push(
+			fault(
+				'out-of-range',
+				[...path, 'filter', 'final'],
+				`is ${filter.final}`,
+				`at least ${filter.clean}, the loss when clean`
+			)
+		);
 }
 
 function junctionProblems(junction: unknown, path: readonly Step[], problems: Problem[]): void {

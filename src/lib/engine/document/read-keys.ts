@@ -6,6 +6,8 @@ import {
 	fittingSchema,
 	flexibleSchema,
 	junctionSchema,
+	leakageSchema,
+	liningSchema,
 	outletSchema,
 	rowSchema
 } from './schema';
@@ -24,6 +26,8 @@ export const readKeys = {
 	sides: new Set(['shape', 'width', 'height']),
 	flexible: keysOf(flexibleSchema),
 	junction: keysOf(junctionSchema),
+	leakage: keysOf(leakageSchema),
+	lining: keysOf(liningSchema),
 	fitting: keysOf(fittingSchema),
 	equipment: keysOf(equipmentSchema),
 	outlet: keysOf(outletSchema)

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { STRETCH } from '../friction';
 import { LIMITS } from './limits';
 
 /**
@@ -81,7 +82,18 @@ export const junctionSchema = open({
 
 export const equipmentSchema = open({
 	name: text,
-	loss: upTo(LIMITS.loss, 'total-pressure loss at atFlow, Pa'),
+	loss: upTo(LIMITS.loss, 'total-pressure loss at atFlow, Pa; points or filter may stand in its place').optional(),
+	points: z
+		.array(z.tuple([flow, upTo(LIMITS.loss, 'Pa')]))
+		.min(1)
+		.max(LIMITS.parts)
+		.describe("a maker's points, [flow, loss]")
+		.optional(),
+	filter: open({
+		clean: upTo(LIMITS.loss, 'Pa at atFlow'),
+		final: upTo(LIMITS.loss, 'Pa at atFlow, at which it is changed'),
+		state: z.enum(['clean', 'mean', 'dirty'])
+	}).optional(),
 	atFlow: flow.describe('m3/s; the design flow of the row if absent').optional(),
 	exponent: exponent.optional(),
 	toBeConfirmed: toBeConfirmed.optional()
@@ -99,7 +111,24 @@ export const outletSchema = open({
 
 export const flexibleSchema = open({
 	length: upTo(LIMITS.length, 'm'),
-	factor: upTo(100, "times the row's own rigid friction rate; 4 if absent").optional()
+	factor: upTo(100, "times the row's own rigid friction rate; 4 if absent").optional(),
+	compression: upTo(
+		STRETCH.max,
+		'what is missing of the stretched length, as a fraction; in place of the factor'
+	).optional()
+});
+
+/** How tight the ductwork is: a class by its letter or number, or an inch-pound class by its figure. */
+export const leakageSchema = open({
+	class: z.string().describe('a key of the list of leakage classes').optional(),
+	cl: upTo(1_000, 'cfm by 100 square feet at 1 in. wg').optional(),
+	testPressure: upTo(10_000, 'Pa, for the allowable leakage').optional()
+});
+
+/** A liner inside the duct, and what the size of the row means. */
+export const liningSchema = open({
+	thickness: upTo(1, 'm'),
+	sizeIs: z.enum(['clear', 'metal']).describe('the free space inside the liner, or the inside of the metal')
 });
 
 export const rowSchema = open({
@@ -118,6 +147,8 @@ export const rowSchema = open({
 	roughness: roughness.optional(),
 	material: material.optional(),
 	flexible: flexibleSchema.optional(),
+	lining: liningSchema.optional(),
+	leakage: leakageSchema.optional(),
 	junction: junctionSchema.optional(),
 	fittings: z.array(fittingSchema).max(LIMITS.parts).optional(),
 	equipment: z.array(equipmentSchema).max(LIMITS.parts).optional(),
@@ -137,6 +168,7 @@ export const designSchema = open({
 	format: z.literal(DESIGN_FORMAT),
 	title: text.optional(),
 	air: airSchema,
+	leakage: leakageSchema.describe('of the rows that name none of their own').optional(),
 	flowBasis: z
 		.enum(['actual', 'standard'])
 		.describe("'actual' if absent; 'standard': flows of outlets are those of air of the standard density")

@@ -65,6 +65,9 @@ export type ProblemCode =
 	| 'unknown-fitting'
 	| 'unknown-method'
 	| 'temperature-unknown'
+	| 'unknown-leakage-class'
+	| 'loss-missing'
+	| 'lining-fills'
 	| 'two-straight'
 	| 'parameter-missing'
 	| 'parameter-unknown'
@@ -146,6 +149,9 @@ export interface SolvedRow {
 	readonly side: Side;
 	readonly flow: number; // m3/s, actual, of the air in the row
 	readonly massFlow: number; // kg/s
+	/** Where air leaks: what escapes or is drawn in [m3/s], and the flow at [fan end, far end]; the flow is their mean. */
+	readonly leakage?: number;
+	readonly flowEnds?: readonly [number, number];
 	readonly density: number; // kg/m3
 	/** Where it differs from that of the design [degC]. */
 	readonly temperature?: number;
@@ -199,6 +205,7 @@ export type FlagRule =
 	| 'to-be-confirmed'
 	| 'fan-flows-differ'
 	| 'temperature-mix'
+	| 'leakage-not-settled'
 	| 'condensation'
 	| 'service-caution'
 	| 'fire-damper-caution'
@@ -242,7 +249,29 @@ export interface Solution {
 		readonly staticPressure: number | null; // Pa; null without a supply row
 	};
 	readonly totals: { readonly supplyFlow: number; readonly returnFlow: number };
+	/** Mass of air on each side [kg/s]: what passes the fan is what passes the outlets, and the leakage. */
+	readonly massBalance: { readonly supply: MassBalance; readonly return: MassBalance };
+	/** Null without a leakage class. */
+	readonly leakage: LeakageSum | null;
 	readonly flags: readonly Flag[];
+}
+
+export interface MassBalance {
+	readonly fan: number; // kg/s
+	readonly outlets: number; // kg/s
+	readonly leakage: number; // kg/s
+}
+
+export interface LeakageSum {
+	readonly flow: number; // m3/s, of all rows
+	/** Of the fan's flow. */
+	readonly share: number;
+	readonly surface: number; // m2, of the rows with a class
+	/** What a test at this pressure may show [m3/s]; null where no test pressure is named. */
+	readonly allowable: number | null;
+	readonly testPressure: number | null; // Pa
+	/** How often flows and pressures were worked in turn. */
+	readonly rounds: number;
 }
 
 export type SolveResult =

@@ -13,16 +13,24 @@ import { serviceFlags } from './service-flags';
 const FLOWS_DIFFER = 0.005;
 const NO_NOTES: readonly RangeNote[] = [];
 
+interface Found {
+	readonly losses: readonly RowLoss[];
+	readonly notes: ReadonlyMap<string, readonly RangeNote[]>;
+	readonly totals: { readonly supplyFlow: number; readonly returnFlow: number };
+	/** Total pressure of the fan [Pa]. */
+	readonly duty: number;
+	/** Of the design's air [kg/m3]. */
+	readonly density: number;
+	readonly airs: readonly RowAir[];
+	/** Leakage and pressures suit each other. */
+	readonly isSettled: boolean;
+}
+
 /** What an engineer should look at, in the order of the rows; what concerns the whole design comes first. */
 export function flagsOf(
 	document: DesignDocument,
 	network: Network,
-	losses: readonly RowLoss[],
-	notes: ReadonlyMap<string, readonly RangeNote[]>,
-	totals: { readonly supplyFlow: number; readonly returnFlow: number },
-	duty: number,
-	density: number,
-	airs: readonly RowAir[]
+	{ losses, notes, totals, duty, density, airs, isSettled }: Found
 ): readonly Flag[] {
 	const flags: Flag[] = [
 		...serviceFlags(document),
@@ -30,6 +38,14 @@ export function flagsOf(
 		...dutyFlags(duty),
 		...densityFlags(document, density)
 	];
+	if (!isSettled)
+		flags.push({
+			rule: 'leakage-not-settled',
+			row: null,
+			severity: 'fault',
+			message: 'Leakage and pressures did not settle: the leakage is so great that no flow suits it.',
+			basis: 'iteration by substitution'
+		});
 	unreadKeyFlags(document, flags);
 	airFlags(document, network, losses, airs, flags);
 	const outlets = { supply: 0, other: 0 };

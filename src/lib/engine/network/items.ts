@@ -11,13 +11,16 @@ import type {
 } from '../document/types';
 import {
 	coefficientOf,
+	filterLoss,
 	fittingEntry,
 	junctionCoefficientOf,
+	lossFromPoints,
 	ratedLoss,
 	type CatalogueEntry,
-	type CoefficientResult
+	type CoefficientResult,
+	type LossPoint
 } from '../fitting';
-import { COLEBROOK_ROUGHNESS, regime } from '../friction';
+import { COLEBROOK_ROUGHNESS, flexibleStretchFactor, regime } from '../friction';
 import { parametersInWords } from './parameters-in-words';
 import type { Hydraulics } from './hydraulics';
 import type { JunctionView } from './junction-views';
@@ -60,9 +63,16 @@ export function ductItem(
 }
 
 export function flexibleItem(
-	{ length, factor }: NonNullable<DesignRow['flexible']>,
-	{ frictionRate }: Hydraulics
+	{ length, factor, compression }: NonNullable<DesignRow['flexible']>,
+	{ frictionRate, hydraulicDiameter }: Hydraulics,
+	notes: RangeNote[]
 ): Item {
+	if (compression !== undefined && factor === undefined) {
+		const stretch = flexibleStretchFactor(hydraulicDiameter, compression);
+		if (stretch.note !== null) notes.push({ name: 'Flexible duct', inRange: false, note: stretch.note });
+		const source = 'Abushakra, Walker & Sherman (2004), by its compression, from memory; on the rigid friction rate';
+		return item('flexible', 'Flexible duct', stretch.factor * frictionRate * length, { source });
+	}
 	const source =
 		factor === undefined ? `${FLEXIBLE_FACTOR} times the rigid rate: the program’s default, illustrative` : BY_HAND;
 	return item('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, { source });
@@ -75,7 +85,7 @@ export function flexibleItem(
 export function junctionItem(
 	junction: Junction,
 	{ velocityPressure }: Hydraulics,
-	view: (JunctionView & { readonly tag: string }) | undefined,
+	view: JunctionView | undefined,
 	methods: DesignDocument['methods'],
 	notes: RangeNote[]
 ): Item {
@@ -164,9 +174,23 @@ function useOf(entry: CatalogueEntry, result: CoefficientResult): CatalogueUse {
 	};
 }
 
+const STATE = { clean: 'clean', mean: 'mean of clean and final', dirty: 'final, as it is changed' } as const;
+
 /** Without the flow it was given at, a loss is that at the design flow. */
-export function equipmentItem(equipment: Equipment, flow: number): Item {
-	const { name, loss, atFlow = flow, exponent = 2, toBeConfirmed } = equipment;
+export function equipmentItem(equipment: Equipment, flow: number, notes: RangeNote[]): Item {
+	const { name, loss = 0, atFlow = flow, exponent = 2, points, filter, toBeConfirmed } = equipment;
+	if (points) {
+		const found = lossFromPoints(points as readonly LossPoint[], flow);
+		if (found.note !== null) notes.push({ name, inRange: false, note: found.note });
+		return item('equipment', name, found.loss, {
+			source: 'points of the maker, a power law between them',
+			toBeConfirmed
+		});
+	}
+	if (filter) {
+		const found = filterLoss({ ...filter, atFlow, exponent: equipment.exponent ?? 1 }, flow);
+		return item('equipment', name, found, { source: `filter, ${STATE[filter.state]}`, toBeConfirmed });
+	}
 	return item('equipment', name, ratedLoss(loss, atFlow, flow, exponent), { source: BY_HAND, toBeConfirmed });
 }
 

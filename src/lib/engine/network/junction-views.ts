@@ -1,3 +1,4 @@
+import { velocityPressure } from '../air';
 import type { JunctionContext } from '../fitting';
 import type { Hydraulics } from './hydraulics';
 import type { Network } from './network';
@@ -7,8 +8,18 @@ export interface JunctionView {
 	readonly context: JunctionContext;
 	/** Place of the common leg. */
 	readonly common: number;
-	/** Velocity pressure of the common leg [Pa]. */
+	/** Tag of the common leg. */
+	readonly tag: string;
+	/** Velocity pressure of the common leg, at the node [Pa]. */
 	readonly velocityPressure: number;
+}
+
+/** Mass flows at the nodes [kg/s]. */
+export interface MassFlows {
+	/** Of each row where it joins, or meets the fan. */
+	readonly leg: Float64Array;
+	/** Of each row where others join it, or at its outlet. */
+	readonly common: Float64Array;
 }
 
 interface Node {
@@ -29,6 +40,7 @@ interface Node {
  * @param network rows as trees
  * @param hydraulics of each row: area [m2], velocity pressure [Pa]
  * @param massFlows of each row at the node where it joins [kg/s], and of the common leg at that node
+ * @param farFlows of each row where others join it [m3/s]
  * @returns for each row with a junction of the catalogue its view of the node; undefined for the others
  * @source Conservation of mass
  * @check none: the balance at each node is a law under test
@@ -36,7 +48,8 @@ interface Node {
 export function junctionViews(
 	{ rows, parents, order }: Network,
 	hydraulics: readonly Hydraulics[],
-	massFlows: { readonly leg: Float64Array; readonly common: Float64Array }
+	massFlows: MassFlows,
+	farFlows: Float64Array
 ): readonly (JunctionView | undefined)[] {
 	const asked = (place: number) => {
 		const kind = rows[place]?.junction?.kind;
@@ -83,7 +96,9 @@ export function junctionViews(
 			commonSize: commonRow.size,
 			size: row.size
 		};
-		views[place] = { context, common: parent, velocityPressure: common.velocityPressure };
+		// Where the common leg leaks, its flow at the node is not the mean one.
+		const pv = velocityPressure(common.air.density, (farFlows[parent] ?? 0) / common.area);
+		views[place] = { context, common: parent, tag: commonRow.tag, velocityPressure: pv };
 	});
 	return views;
 }

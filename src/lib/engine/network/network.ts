@@ -1,6 +1,7 @@
 import type { DesignDocument, DesignRow, Problem } from '../document/types';
 import { readTree } from '../document/tree';
 import { locate } from '../document/fault';
+import { linedSize } from '../shape';
 
 /** Rows as trees: places in the document's list of rows stand for the rows. */
 export interface Network {
@@ -20,10 +21,17 @@ export type BuildResult =
 export function buildNetwork(document: DesignDocument): BuildResult {
 	const { parents, problems } = readTree(document);
 	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
-	const { rows } = document;
+	const rows = document.rows.map(clearOf);
 	const joined = new Uint8Array(rows.length);
 	for (const parent of parents) if (parent >= 0) joined[parent] = 1;
 	return { ok: true, network: { rows, parents, order: orderOf(rows, parents), joined } };
+}
+
+/** A lined row with the size that the air has; every other as it is. */
+function clearOf(row: DesignRow): DesignRow {
+	return row.lining === undefined
+		? row
+		: { ...row, size: linedSize(row.size, row.lining.thickness, row.lining.sizeIs) };
 }
 
 /** From the fan outward, rows that join the same one by their tags: sums then run alike for any order of rows. */

@@ -15,7 +15,9 @@ import type { Settings } from './settings';
 import { thermalGravity } from './thermal-gravity';
 
 /** A row solved but for its place in the network: `placePressures` fills in what depends on the others. */
-export type RowLoss = Omit<SolvedRow, 'totalPressure' | 'staticPressure' | 'spare'> & {
+export type RowLoss = Omit<SolvedRow, 'totalPressure' | 'staticPressure' | 'spare' | 'leakage' | 'flowEnds'> & {
+	leakage?: number;
+	flowEnds?: readonly [number, number];
 	totalPressure: readonly [number, number];
 	staticPressure: readonly [number, number];
 	spare: number;
@@ -39,7 +41,7 @@ export type RowLoss = Omit<SolvedRow, 'totalPressure' | 'staticPressure' | 'spar
 export function rowLoss(
 	row: DesignRow,
 	hydraulics: Hydraulics,
-	view: (JunctionView & { readonly tag: string }) | undefined,
+	view: JunctionView | undefined,
 	settings: Settings,
 	notes: RangeNote[]
 ): RowLoss {
@@ -53,14 +55,14 @@ export function rowLoss(
 	};
 
 	const frictionLoss = lossOf(ductItem(row.length, row.size.shape, hydraulics, notes));
-	const flexibleLoss = row.flexible === undefined ? 0 : lossOf(flexibleItem(row.flexible, hydraulics));
+	const flexibleLoss = row.flexible === undefined ? 0 : lossOf(flexibleItem(row.flexible, hydraulics, notes));
 	const junctionLoss =
 		row.junction === undefined ? 0 : lossOf(junctionItem(row.junction, hydraulics, view, methods, notes));
 	let fittingLoss = 0;
 	for (const fitting of row.fittings ?? [])
 		fittingLoss += lossOf(fittingItem(fitting, row, hydraulics, methods, notes));
 	let equipmentLoss = 0;
-	for (const equipment of row.equipment ?? []) equipmentLoss += lossOf(equipmentItem(equipment, flow));
+	for (const equipment of row.equipment ?? []) equipmentLoss += lossOf(equipmentItem(equipment, flow, notes));
 	const outletLoss = row.outlet === undefined ? 0 : lossOf(outletItem(row.outlet, row.side, hydraulics));
 	const gain = gainOf(row, air.density, settings.surroundings);
 	if (gain !== 0) items.push(gravityItem(gain));

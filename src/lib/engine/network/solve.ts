@@ -1,19 +1,14 @@
 import type { DesignDocument, DesignRow, Problem, Solution, SolvedRow, SolveResult } from '../document/types';
-import { fault, locate } from '../document/fault';
-import { OutOfRangeError } from '../errors';
-import { shortFigure } from '../short-figure';
+import { locate } from '../document/fault';
 import { ENGINE_VERSION } from '../version';
-import { flagsOf } from './flags';
-import { designFlows, type RowFlows } from './flows';
-import { hydraulicsOf, type Hydraulics } from './hydraulics';
-import { junctionViews } from './junction-views';
-import { buildNetwork, type Network } from './network';
-import { lossesFromFan, pathsOf } from './paths';
 import { fanDuty, totalsOf } from './fan-duty';
-import type { RangeNote } from './items';
-import { placePressures } from './pressures';
+import { flagsOf } from './flags';
+import { settle } from './leakage';
+import { massBalanceOf } from './mass-balance';
+import { buildNetwork, type Network } from './network';
+import { outsideProblem } from './pass';
 import { isUniform, rowAirs, type RowAir } from './row-airs';
-import { rowLoss, type RowLoss } from './row-loss';
+import type { RowLoss } from './row-loss';
 import { settingsOf, type Settings } from './settings';
 
 /**
@@ -29,53 +24,30 @@ export function solveDesign(document: DesignDocument): SolveResult {
 	const { network } = built;
 	const settings = settingsOrProblem(document);
 	if ('code' in settings) return { ok: false, problems: [settings] };
-
 	const airs = airsOrProblem(network, document, settings);
 	if ('code' in airs) return { ok: false, problems: locate([airs], document) };
 	const uniform = isUniform(airs);
-	const flows = designFlows(network, { airs, uniform, standard: settings.standard, leaks: null });
-	const notes = new Map<string, readonly RangeNote[]>();
-	const rowLosses: RowLoss[] = [];
-	const problems: Problem[] = [];
-	const hydraulics: Hydraulics[] = [];
-	network.rows.forEach((row, place) => {
-		const air = airs[place] ?? { ...settings.air, temperature: null, condenses: false };
-		const found = orProblem(() => hydraulicsOf(row, flows.farEnd[place] ?? 0, air, settings), place);
-		if ('code' in found) problems.push(found);
-		else hydraulics.push(found);
-	});
-	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
-	const masses = massFlowsOf(airs, flows);
-	const views = junctionViews(network, hydraulics, masses);
-	network.rows.forEach((row, place) => {
-		const ofRow: RangeNote[] = [];
-		const view = views[place];
-		const tag = view && (network.rows[view.common]?.tag ?? '');
-		const own = hydraulics[place];
-		const solved =
-			own &&
-			orProblem(
-				() => rowLoss(row, own, view && tag !== undefined ? { ...view, tag } : undefined, settings, ofRow),
-				place
-			);
-		if (solved && 'code' in solved) problems.push(solved);
-		else if (solved && Number.isFinite(solved.loss)) rowLosses.push(solved);
-		else problems.push(tooGreat(place));
-		if (ofRow.length > 0) notes.set(row.tag, ofRow);
-	});
-	if (problems.length > 0) return { ok: false, problems: locate(problems, document) };
 
-	const along = lossesFromFan(
-		network,
-		Float64Array.from(rowLosses, (one) => one.loss)
-	);
-	const { paths, required, index, spares } = pathsOf(network, along);
-	placePressures(network, along, required, spares, rowLosses);
+	const settled = settle({ network, settings, airs, uniform }, document);
+	if (!('pass' in settled)) return { ok: false, problems: locate([...settled], document) };
+	const { pass, leaks, isSettled } = settled;
+	const { flows, masses, rowLosses, notes } = pass;
+	const { paths, required, index } = pass.paths;
+	if (leaks)
+		rowLosses.forEach((row, place) => {
+			row.leakage = leaks[place] ?? 0;
+			row.flowEnds = [flows.fanEnd[place] ?? 0, flows.farEnd[place] ?? 0];
+		});
+
 	const totals = totalsOf(network, flows.fanEnd);
 	// By mass where the densities differ; by volume, with not a bit of difference, where they do not.
 	const balance = uniform ? totals : totalsOf(network, masses.leg);
 	const fan = fanDuty(network, rowLosses, required, totals);
-	const flags = flagsOf(document, network, rowLosses, notes, balance, fan.totalPressure, settings.air.density, airs);
+	const leakage = settled.sum && { ...settled.sum, share: settled.sum.flow / fan.flow };
+	const flags = flagsOf(document, network, {
+		...{ losses: rowLosses, notes, totals: balance, duty: fan.totalPressure },
+		...{ density: settings.air.density, airs, isSettled }
+	});
 	return {
 		ok: true,
 		solution: {
@@ -88,6 +60,8 @@ export function solveDesign(document: DesignDocument): SolveResult {
 			index,
 			fan,
 			totals,
+			massBalance: massBalanceOf(network, masses, leaks, airs),
+			leakage,
 			flags
 		}
 	};
@@ -107,31 +81,6 @@ function airsOrProblem(network: Network, document: DesignDocument, settings: Set
 	} catch (error) {
 		return outsideProblem(error, ['rows']);
 	}
-}
-
-/** Of each row at the node where it joins, and of the common leg there [kg/s]. */
-function massFlowsOf(airs: readonly RowAir[], { fanEnd, farEnd }: RowFlows) {
-	const mass = (flows: Float64Array) => flows.map((flow, place) => flow * (airs[place]?.density ?? 1));
-	return { leg: mass(fanEnd), common: mass(farEnd) };
-}
-
-const tooGreat = (place: number): Problem =>
-	fault('too-great', ['rows', place], 'loses more than a number can tell', 'a row of usual size and flow');
-
-function orProblem<T extends object>(find: () => T, place: number): T | Problem {
-	try {
-		return find();
-	} catch (error) {
-		return outsideProblem(error, ['rows', place]);
-	}
-}
-
-/** Only a formula asked outside its range is a problem of the document; anything else is a bug and goes on. */
-function outsideProblem(error: unknown, path: readonly (string | number)[]): Problem {
-	if (!(error instanceof OutOfRangeError)) throw error;
-	const { formula, symbol, value, range } = error;
-	const message = `${formula}: ${symbol} = ${shortFigure(value, range)} is outside the range of the formula`;
-	return fault('outside-formula', path, message, `${symbol} from ${range.min} to ${range.max}`);
 }
 
 /** Rows by their tags, `__proto__` being a tag like any other. */

@@ -19,11 +19,14 @@ export function unreadKeyFlags(document: DesignDocument, flags: Flag[]): void {
 	look(document, readKeys.design, 'of the document', null);
 	look(document.air, 'density' in document.air ? readKeys.airByDensity : readKeys.air, 'of the air', null);
 	look(document.criteria, readKeys.criteria, 'of the criteria', null);
+	look(document.leakage, readKeys.leakage, 'of the leakage', null);
 	look(document.fan, readKeys.fan, 'of the fan', null);
 	for (const row of document.rows) {
 		look(row, readKeys.row, 'of the row', row.tag);
 		look(row.size, row.size.shape === 'round' ? readKeys.round : readKeys.sides, 'of the size', row.tag);
 		look(row.flexible, readKeys.flexible, 'of the flexible duct', row.tag);
+		look(row.leakage, readKeys.leakage, 'of the leakage', row.tag);
+		look(row.lining, readKeys.lining, 'of the lining', row.tag);
 		look(row.junction, readKeys.junction, 'of the junction', row.tag);
 		look(row.outlet, readKeys.outlet, 'of the outlet', row.tag);
 		for (const one of row.fittings ?? [])

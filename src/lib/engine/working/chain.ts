@@ -20,6 +20,10 @@ export const standing = (name: string, value: number | string, unit = ''): Given
 	...{ name, value, unit, from: 'default' }
 });
 
+export const settled = (name: string, value: number, unit = ''): Given => ({
+	...{ name, value, unit, from: 'settled' }
+});
+
 /** Steps in the order in which they are worked, each computed by its formula; what was worked once is not worked again. */
 export class Chain {
 	readonly steps: WorkingStep[] = [];

@@ -1,6 +1,16 @@
 import { airAtTemperature, airState, velocityPressure } from '../air';
-import { coefficientOf, junctionCoefficientOf, ratedLoss, type JunctionContext, type Leg } from '../fitting';
-import { darcyWeisbach, frictionFactor, reynoldsNumber } from '../friction';
+import {
+	coefficientOf,
+	filterLoss,
+	junctionCoefficientOf,
+	lossFromPoints,
+	ratedLoss,
+	type FilterState,
+	type JunctionContext,
+	type Leg,
+	type LossPoint
+} from '../fitting';
+import { darcyWeisbach, flexibleStretchFactor, frictionFactor, reynoldsNumber } from '../friction';
 import { sectionOf, type Size } from '../shape';
 
 /** Values of a step by their symbols; texts of a catalogue's step are JSON. */
@@ -167,6 +177,41 @@ const FORMULAS = {
 		expression: 'Δp = C pv',
 		source: 'Definition of the coefficient',
 		compute: (v) => n(v, 'C') * n(v, 'pv') + 0
+	},
+	'points-loss': {
+		expression: 'ln Δp straight against ln Q between the points of the maker',
+		source: 'Power law between measured points: common practice',
+		compute: (v) => lossFromPoints(JSON.parse(text(v, 'points')) as LossPoint[], n(v, 'Q')).loss
+	},
+	'filter-loss': {
+		expression: 'Δp = Δpᵣ (Q/Qᵣ)ⁿ, Δpᵣ of the state: clean, their mean, or final',
+		source: 'Common practice',
+		compute: (v) =>
+			filterLoss(
+				{
+					clean: n(v, 'clean'),
+					final: n(v, 'final'),
+					state: text(v, 'state') as FilterState,
+					atFlow: n(v, 'Qᵣ'),
+					exponent: n(v, 'n')
+				},
+				n(v, 'Q')
+			)
+	},
+	'flexible-stretch': {
+		expression: 'k = 1 + 0.58 K e^(−0.00496 D), K the compression in %, D in mm',
+		source: 'Abushakra, Walker & Sherman (2004), from memory',
+		compute: (v) => flexibleStretchFactor(n(v, 'D'), n(v, 'compression')).factor
+	},
+	'flow-at-fan-end': {
+		expression: 'Q₁ = Q₂ + q, q what leaks from the row',
+		source: CONTINUITY,
+		compute: (v) => n(v, 'Q₂') + n(v, 'q')
+	},
+	'mean-flow': {
+		expression: 'Q = (Q₂ + Q₁)/2',
+		source: 'Leakage spread evenly along the row',
+		compute: (v) => (n(v, 'Q₂') + n(v, 'Q₁')) / 2
 	},
 	'rated-loss': {
 		expression: 'Δp = Δpᵣ (Q/Qᵣ)ⁿ',

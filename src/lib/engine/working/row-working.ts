@@ -1,7 +1,8 @@
-import type { DesignDocument, DesignRow, Item, Solution, SolvedRow } from '../document/types';
+import type { DesignDocument, DesignRow, Equipment, Item, Solution, SolvedRow } from '../document/types';
 import { DEFAULT_MATERIAL, findMaterial } from '../friction';
 import { STANDARD_DENSITY } from '../network';
-import { entered, standing, type Chain, type Input, type Ref } from './chain';
+import { linedSize, type Size } from '../shape';
+import { entered, settled, standing, type Chain, type Input, type Ref } from './chain';
 
 /** All that the working of a design looks into. */
 export interface Ground {
@@ -91,13 +92,18 @@ export class RowWorking {
 	}
 
 	private size(): Record<string, Input> {
-		const { size } = this.row;
+		const size = this.clearSize();
 		if (size.shape === 'round') return { D: entered('Diameter', size.diameter, 'm') };
 		return {
 			shape: entered('Shape', size.shape),
 			W: entered('Width', size.width, 'm'),
 			H: entered('Height', size.height, 'm')
 		};
+	}
+	/** The size that the air has: a liner takes some of the metal's. */
+	private clearSize(): Size {
+		const { size, lining } = this.row;
+		return lining ? linedSize(size, lining.thickness, lining.sizeIs) : size;
 	}
 	area(): Ref {
 		return this.chain.work('area', { symbol: 'A', name: this.of('Area'), unit: 'm²' }, this.size());
@@ -107,10 +113,17 @@ export class RowWorking {
 		return this.chain.work('hydraulic-diameter', result, this.size());
 	}
 
+	/** Flow that the losses of the row go with: that of both ends, or their mean where air leaks. */
 	flow(): Ref {
+		const result = { symbol: 'Q', name: this.of('Flow'), unit: 'm³/s' };
+		if (this.solved.leakage === undefined) return this.farFlow(result);
+		return this.chain.work('mean-flow', result, { 'Q₂': this.farFlow(), 'Q₁': this.fanFlow() });
+	}
+
+	/** Flow at the outlet, or where rows join. */
+	private farFlow(result = { symbol: 'Q₂', name: this.of('Flow at the far end'), unit: 'm³/s' }): Ref {
 		const { outlet, tag } = this.row;
 		const { flowBasis, standardDensity = STANDARD_DENSITY } = this.ground.document;
-		const result = { symbol: 'Q', name: this.of('Flow'), unit: 'm³/s' };
 		if (outlet && flowBasis === 'standard')
 			return this.chain.work('standard-flow', result, {
 				Qₛ: entered('Flow of the outlet, standard', outlet.flow, 'm³/s'),
@@ -122,9 +135,20 @@ export class RowWorking {
 		return this.chain.work('sum-flows', result, numbered('Q', flows));
 	}
 
+	/** Flow where the row joins another, or meets the fan. */
+	private fanFlow(): Ref {
+		const { leakage } = this.solved;
+		if (leakage === undefined) return this.flow();
+		return this.chain.work(
+			'flow-at-fan-end',
+			{ symbol: 'Q₁', name: this.of('Flow at the fan end'), unit: 'm³/s' },
+			{ 'Q₂': this.farFlow(), q: settled(this.of('Leakage'), leakage, 'm³/s') }
+		);
+	}
+
 	/** The flow of a row that joins this one, at the density of this one. */
 	private flowInto(joining: RowWorking, tag: string): Ref {
-		const flow = joining.flow();
+		const flow = joining.fanFlow();
 		if (this.isUniform()) return flow;
 		return this.chain.work(
 			'flow-at-density',
@@ -145,6 +169,17 @@ export class RowWorking {
 	velocityPressure(): Ref {
 		const result = { symbol: 'pv', name: this.of('Velocity pressure'), unit: 'Pa' };
 		return this.chain.work('velocity-pressure', result, { ρ: this.density(), V: this.velocity() });
+	}
+	/** Where other rows join: at the flow of the far end. */
+	private nodeVelocityPressure(): Ref {
+		if (this.solved.leakage === undefined) return this.velocityPressure();
+		const V = this.chain.work(
+			'velocity',
+			{ symbol: 'V', name: this.of('Velocity at the far end'), unit: 'm/s' },
+			{ Q: this.farFlow(), A: this.area() }
+		);
+		const result = { symbol: 'pv', name: this.of('Velocity pressure at the far end'), unit: 'Pa' };
+		return this.chain.work('velocity-pressure', result, { ρ: this.density(), V });
 	}
 	reynolds(): Ref {
 		return this.chain.work(
@@ -206,9 +241,19 @@ export class RowWorking {
 		const result = { symbol: 'Δp', name: this.of('Loss of flexible duct'), unit: 'Pa' };
 		const { flexible } = this.row;
 		if (!flexible) return this.nothing(result.name);
-		const factor = flexible.factor;
+		const { factor, compression } = flexible;
+		const k =
+			factor === undefined && compression !== undefined
+				? this.chain.work(
+						'flexible-stretch',
+						{ symbol: 'k', name: this.of('Factor of the flexible duct'), unit: '' },
+						{ D: this.hydraulicDiameter(), compression: entered('Compression', compression) }
+					)
+				: factor === undefined
+					? standing('Times the rigid rate', 4)
+					: entered('Times the rigid rate', factor);
 		return this.chain.work('flexible-loss', result, {
-			k: factor === undefined ? standing('Times the rigid rate', 4) : entered('Times the rigid rate', factor),
+			k,
 			R: this.frictionRate(),
 			L: entered('Length of flexible duct', flexible.length, 'm')
 		});
@@ -236,7 +281,7 @@ export class RowWorking {
 							{
 								kind: entered('Fitting', kind),
 								parameters: entered('Parameters', JSON.stringify(withMethod(fitting, this.ground.document.methods))),
-								size: entered('Size', JSON.stringify(this.row.size)),
+								size: entered('Size', JSON.stringify(this.clearSize())),
 								...{
 									Re: this.reynolds(),
 									V: this.velocity(),
@@ -278,7 +323,7 @@ export class RowWorking {
 		const common = this.other(joins);
 		return this.chain.work('loss-of-junction', result, {
 			C: this.junctionCoefficient(common, item),
-			pv: common.velocityPressure()
+			pv: common.nodeVelocityPressure()
 		});
 	}
 
@@ -288,12 +333,12 @@ export class RowWorking {
 		const legOf = (one: RowWorking) => one.row.junction?.leg ?? 'branch';
 		const branches = siblings.filter((one) => legOf(one) === 'branch');
 		const straight = siblings.find((one) => legOf(one) === 'straight');
+		const massOf = (one: RowWorking) => (one.solved.flowEnds?.[0] ?? one.solved.flow) * one.solved.density;
+		const whole = (common.solved.flowEnds?.[1] ?? common.solved.flow) * common.solved.density;
 		const greatest = branches.reduce<RowWorking | null>(
-			(most, one) => (most === null || one.solved.massFlow >= most.solved.massFlow ? one : most),
+			(most, one) => (most === null || massOf(one) >= massOf(most) ? one : most),
 			null
 		);
-		const massOf = (one: RowWorking) => one.solved.massFlow;
-		const whole = massOf(common);
 		const ratio = (name: string, part: number, of: number, unit: string) =>
 			this.chain.work(
 				'ratio',
@@ -330,31 +375,41 @@ export class RowWorking {
 					as: ratio('Area ratio of the straight leg', straight.area().value, common.area().value, 'm²')
 				}),
 				branches: entered('Branches at the node', branches.length),
-				'common size': entered('Size of the common leg', JSON.stringify(common.row.size)),
-				size: entered('Size', JSON.stringify(row.size))
+				'common size': entered('Size of the common leg', JSON.stringify(common.clearSize())),
+				size: entered('Size', JSON.stringify(this.clearSize()))
 			},
 			{ source: item.source ?? '', range: item.catalogue?.rangeNote ?? null, expression: item.catalogue?.method ?? '' }
 		);
 	}
 
 	equipmentLoss(): Ref {
-		const losses = (this.row.equipment ?? []).map((one, at) =>
-			this.chain.work(
-				'rated-loss',
-				{ symbol: 'Δp', name: `Loss of ${one.name} (${at + 1}) in ${this.row.tag}`, unit: 'Pa' },
-				{
-					Δpᵣ: entered('Loss as stated', one.loss, 'Pa'),
-					Qᵣ: one.atFlow === undefined ? this.flow() : entered('At the flow', one.atFlow, 'm³/s'),
-					Q: this.flow(),
-					n: one.exponent === undefined ? standing('Exponent', 2) : entered('Exponent', one.exponent)
-				}
-			)
-		);
-		return this.chain.work(
-			'sum-losses',
-			{ symbol: 'Δp', name: this.of('Loss of equipment'), unit: 'Pa' },
-			numbered('Δp', losses)
-		);
+		const losses = (this.row.equipment ?? []).map((one, at) => this.lossOfEquipment(one, at));
+		const result = { symbol: 'Δp', name: this.of('Loss of equipment'), unit: 'Pa' };
+		return this.chain.work('sum-losses', result, numbered('Δp', losses));
+	}
+
+	private lossOfEquipment(one: Equipment, at: number): Ref {
+		const result = { symbol: 'Δp', name: `Loss of ${one.name} (${at + 1}) in ${this.row.tag}`, unit: 'Pa' };
+		const Q = this.flow();
+		const atFlow = one.atFlow === undefined ? Q : entered('At the flow', one.atFlow, 'm³/s');
+		const exponent = (standard: number) =>
+			one.exponent === undefined ? standing('Exponent', standard) : entered('Exponent', one.exponent);
+		if (one.points)
+			return this.chain.work('points-loss', result, {
+				points: entered('Points of the maker, m³/s and Pa', JSON.stringify(one.points)),
+				Q
+			});
+		if (one.filter)
+			return this.chain.work('filter-loss', result, {
+				clean: entered('Loss when clean', one.filter.clean, 'Pa'),
+				final: entered('Loss when it is changed', one.filter.final, 'Pa'),
+				state: entered('State', one.filter.state),
+				...{ Qᵣ: atFlow, Q, n: exponent(1) }
+			});
+		return this.chain.work('rated-loss', result, {
+			Δpᵣ: entered('Loss as stated', one.loss ?? 0, 'Pa'),
+			...{ Qᵣ: atFlow, Q, n: exponent(2) }
+		});
 	}
 
 	outletLoss(): Ref {

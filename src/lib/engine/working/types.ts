@@ -6,7 +6,8 @@ export interface WorkingValue {
 	readonly value: number | string;
 	/** SI; '' for a pure number or a word. */
 	readonly unit: string;
-	readonly from: 'entered' | 'default' | 'constant' | 'step';
+	/** `settled`: what the iteration of leakage and pressures came to. */
+	readonly from: 'entered' | 'default' | 'settled' | 'step';
 	/** Place of the step that it comes from. */
 	readonly step?: number;
 }

@@ -1,0 +1,95 @@
+import type { DesignDocument, DesignRow, LeakageSum, Problem } from '../document/types';
+import { allowableLeakage, findLeakageClass, leakageFlow, type Tightness } from '../leakage';
+import { sectionOf } from '../shape';
+import { outsideProblem, workPass, type Pass, type PassGround } from './pass';
+
+/** Rounds in which flows and pressures are worked in turn; a usual system settles in some ten. */
+const MOST_ROUNDS = 60;
+/** Change of the leakage, of the fan's flow, below which it is settled. */
+const SETTLED = 1e-13;
+
+/** A row from which air leaks. */
+interface Leaking {
+	readonly place: number;
+	readonly tightness: Tightness;
+	/** Surface of the duct [m2]. */
+	readonly surface: number;
+}
+
+/** A pass whose leakage suits its pressures. */
+export interface Settled {
+	readonly pass: Pass;
+	/** Of each row [m3/s]; null without leakage. */
+	readonly leaks: Float64Array | null;
+	readonly sum: LeakageSum | null;
+	readonly isSettled: boolean;
+}
+
+/**
+ * Works flows and leakage in turn until they suit each other: the leakage of a row goes with the mean static pressure in
+ * it, and the flows with the leakage.
+ *
+ *   q = c A |(ps1 + ps2)/2|^0.65, A = P (L + L_flexible)
+ *
+ * @param ground rows, air and settings
+ * @param document leakage classes of the design and of its rows; surfaces in [m2], pressures in [Pa]
+ * @returns the last round with its leakage [m3/s], or what is wrong with the rows
+ * @source Law of the leakage classes, EN 1507 and EN 12237; iterated by substitution
+ * @check fixtures/published/leakage.json
+ */
+export function settle(ground: PassGround, document: DesignDocument): Settled | readonly Problem[] {
+	const leaking = leakingRows(ground.network.rows, document);
+	if (leaking.length === 0) {
+		const pass = workPass(ground, null);
+		return isProblems(pass) ? pass : { pass, leaks: null, sum: null, isSettled: true };
+	}
+	let leaks = new Float64Array(ground.network.rows.length);
+	for (let rounds = 1; ; rounds += 1) {
+		const pass = workPass(ground, leaks);
+		if (isProblems(pass)) return pass;
+		const next = new Float64Array(leaks.length);
+		for (const { place, tightness, surface } of leaking) {
+			const [near = 0, far = 0] = pass.rowLosses[place]?.staticPressure ?? [];
+			try {
+				next[place] = leakageFlow(tightness, surface, (near + far) / 2);
+			} catch (error) {
+				return [outsideProblem(error, ['rows', place, 'leakage'])];
+			}
+		}
+		const through = pass.flows.fanEnd.reduce((most, flow) => Math.max(most, flow), 0);
+		const change = next.reduce((most, leak, at) => Math.max(most, Math.abs(leak - (leaks[at] ?? 0))), 0);
+		const isSettled = change <= SETTLED * through;
+		if (isSettled || rounds === MOST_ROUNDS)
+			return { pass, leaks, sum: sumOf(leaks, leaking, document, rounds), isSettled };
+		leaks = next;
+	}
+}
+
+const isProblems = (found: Pass | readonly Problem[]): found is readonly Problem[] => Array.isArray(found);
+
+function leakingRows(rows: readonly DesignRow[], document: DesignDocument): readonly Leaking[] {
+	return rows.flatMap((row, place) => {
+		const named = row.leakage ?? document.leakage;
+		if (!named) return [];
+		const tightness = named.cl !== undefined ? { CL: named.cl } : findLeakageClass(named.class ?? '');
+		if (!tightness) return [];
+		const surface = sectionOf(row.size).perimeter * (row.length + (row.flexible?.length ?? 0));
+		return [{ place, tightness, surface }];
+	});
+}
+
+/** The fan's flow is put in by `solveDesign`, which knows both sides. */
+function sumOf(leaks: Float64Array, leaking: readonly Leaking[], document: DesignDocument, rounds: number): LeakageSum {
+	const testPressure = document.leakage?.testPressure ?? null;
+	return {
+		flow: leaks.reduce((sum, leak) => sum + leak, 0),
+		share: 0,
+		surface: leaking.reduce((sum, one) => sum + one.surface, 0),
+		allowable:
+			testPressure === null
+				? null
+				: leaking.reduce((sum, one) => sum + allowableLeakage(one.tightness, one.surface, testPressure), 0),
+		testPressure,
+		rounds
+	};
+}
