@@ -7,6 +7,7 @@ import type { FirmScope } from '../../src/lib/server/auth/scope';
 import { changeDesign } from '../../src/lib/server/designs/change-design';
 import { openDesign } from '../../src/lib/server/designs/find-design';
 import { reportOfSheet, reportOfVersion } from '../../src/lib/server/versions/report-of';
+import { listRegister } from '../../src/lib/server/projects/projects';
 import { putBack, restoreVersion } from '../../src/lib/server/versions/restore-version';
 import { saveVersion } from '../../src/lib/server/versions/save-version';
 import { listVersions, openVersion } from '../../src/lib/server/versions/versions';
@@ -178,6 +179,32 @@ describe('the engine', () => {
 });
 
 describe('a version that is restored', () => {
+	it('is what the sheet stands as until the next edit, as is a version whose own edit is put back', async () => {
+		const { designId, ids } = await treeDesign(ours);
+		const stands = async () => {
+			const head = (await openDesign(ours, designId))?.seq;
+			const [project] = (await listRegister(ours, 'current')).filter(({ designs }) =>
+				designs.some((one) => one.designId === designId)
+			);
+			const inRegister = project?.designs.find((one) => one.designId === designId);
+			const told = (await listVersions(ours, designId)).filter(({ standsAt }) => standsAt === head);
+			expect(inRegister?.revisions.filter(({ standsAt }) => standsAt === inRegister.headSeq)).toHaveLength(told.length);
+			return told.map(({ revision }) => revision);
+		};
+		await save(designId);
+		expect(await stands()).toEqual(['P01']);
+		await append(ours, designId, [sent(write(ids[0] ?? '', 'length', '31'))]);
+		expect(await stands()).toEqual([]);
+		await save(designId, 'longer');
+		expect(await stands()).toEqual(['P02']);
+		await restoreVersion(ours, designId, 1);
+		expect(await stands()).toEqual(['P01']);
+		await putBack(ours, designId, 3);
+		expect(await stands()).toEqual(['P02']);
+		await append(ours, designId, [sent(write(ids[0] ?? '', 'length', '32'))]);
+		expect(await stands()).toEqual([]);
+	});
+
 	it('gives the same document when saved again, as one more entry of the log', async () => {
 		const { designId, ids } = await treeDesign(ours);
 		await save(designId);

@@ -2,8 +2,8 @@ type Status = 'work-in-progress' | 'issued-for-review';
 
 interface Saved {
 	readonly revision: string;
-	/** The last edit that is in it. */
-	readonly seq: number;
+	/** The last edit at which the sheet stood as it. */
+	readonly standsAt: number;
 	readonly status: Status;
 }
 
@@ -19,7 +19,7 @@ export interface Revision {
 export function revisionOf(last: Saved | undefined, seq: number): Revision {
 	if (!last) return { caption: 'Revision', code: '–', about: 'none saved yet', status: 'work-in-progress' };
 	const { revision: code, status } = last;
-	return seq > last.seq
+	return seq > last.standsAt
 		? { caption: 'In work, after', code, about: 'changed since', status: 'work-in-progress' }
 		: { caption: 'Revision', code, about: 'as saved', status };
 }

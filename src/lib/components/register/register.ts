@@ -32,7 +32,7 @@ export interface RegisterDesign {
 		readonly revision: string;
 		readonly status: 'work-in-progress' | 'issued-for-review';
 		readonly savedAt: Date;
-		/** The last edit that is in it. */
-		readonly seq: number;
+		/** The last edit at which the sheet stood as it. */
+		readonly standsAt: number;
 	}[];
 }

@@ -2,8 +2,9 @@ import { and, asc, desc, eq, isNull, sql } from 'drizzle-orm';
 import type { FirmScope } from '../auth/scope';
 import { inFirm } from '../db';
 import { isDuplicate } from '../db/is-duplicate';
-import { design, project, version } from '../db/schema';
+import { design, edit, project, version } from '../db/schema';
 import type { DesignFigures } from '../designs/figures';
+import { newestEdit, ofVersion, standsAt } from '../versions/versions';
 
 export interface ProjectFields {
 	readonly number: string;
@@ -97,9 +98,11 @@ export function listRegister(scope: FirmScope, show: 'current' | 'archived') {
 				revision: version.revision,
 				status: version.status,
 				savedAt: version.savedAt,
-				seq: version.seq
+				standsAt
 			})
 			.from(version)
+			.innerJoin(design, ofVersion)
+			.leftJoin(edit, newestEdit)
 			.where(eq(version.firmId, scope.firmId))
 			.orderBy(asc(version.number));
 		const kept = (archivedAt: Date | null) => (show === 'archived' ? archivedAt !== null : archivedAt === null);

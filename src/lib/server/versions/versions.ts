@@ -3,11 +3,27 @@ import type { DesignDocument, Solution } from '$lib/engine';
 import type { Sheet } from '$lib/sheet/sheet';
 import type { FirmScope } from '../auth/scope';
 import { inFirm } from '../db';
-import { user, version } from '../db/schema';
+import { design, edit, user, version } from '../db/schema';
 import type { DesignHeading } from '../designs/find-design';
 
 /** As a person signs, or the address where no name was given. */
 const nameOf = sql<string>`coalesce(nullif(trim(${user.name}), ''), ${user.email})`;
+
+/**
+ * The last edit at which the working sheet stood as a version: the one that it was saved after, or the newest of the
+ * log where that put the version back. Needs the newest edit of the design joined.
+ */
+export const standsAt = sql<number>`case
+	when ${edit.entry}->>'kind' = 'replace' and ${edit.entry}->>'from' in (${version.revision}, 'edit ' || ${version.seq})
+	then ${edit.seq} else ${version.seq} end`.mapWith(Number);
+
+/** Joins the newest edit of a version's design. */
+export const newestEdit = and(
+	eq(edit.firmId, design.firmId),
+	eq(edit.designId, design.designId),
+	eq(edit.seq, design.headSeq)
+);
+export const ofVersion = and(eq(design.firmId, version.firmId), eq(design.designId, version.designId));
 
 /** The saved versions of a design, newest first, without their contents. */
 export function listVersions(scope: FirmScope, designId: string) {
@@ -19,6 +35,7 @@ export function listVersions(scope: FirmScope, designId: string) {
 				note: version.note,
 				status: version.status,
 				seq: version.seq,
+				standsAt,
 				sha256: version.sha256,
 				engineVersion: version.engineVersion,
 				savedAt: version.savedAt,
@@ -26,6 +43,8 @@ export function listVersions(scope: FirmScope, designId: string) {
 			})
 			.from(version)
 			.innerJoin(user, eq(user.id, version.userId))
+			.innerJoin(design, ofVersion)
+			.leftJoin(edit, newestEdit)
 			.where(and(eq(version.firmId, scope.firmId), eq(version.designId, designId)))
 			.orderBy(desc(version.number))
 	);
