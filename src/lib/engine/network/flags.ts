@@ -5,6 +5,7 @@ import type { Network } from './network';
 import { unreadKeyFlags } from './unread-keys';
 import { rowFlags } from './row-flags';
 import { partFlags } from './part-flags';
+import { partHints } from './part-hints';
 import type { RowAir } from './row-airs';
 import type { RowLoss } from './row-loss';
 import { serviceFlags } from './service-flags';
@@ -50,13 +51,14 @@ export function flagsOf(
 	airFlags(document, network, losses, airs, flags);
 	const outlets = { supply: 0, other: 0 };
 	for (const { side, outlet } of network.rows) if (outlet) outlets[side === 'supply' ? 'supply' : 'other']++;
+	const hintsOf = partHints();
 	network.rows.forEach((row, place) => {
 		const solved = losses[place];
 		if (solved === undefined) return;
 		const alone = outlets[row.side === 'supply' ? 'supply' : 'other'] === 1;
 		const joined = network.joined[place] === 1;
 		rowFlags(row, solved, joined, document.criteria, flags);
-		partFlags(row, solved, notes.get(row.tag) ?? NO_NOTES, document.criteria, alone, flags);
+		partFlags(row, solved, notes.get(row.tag) ?? NO_NOTES, hintsOf(row), document.criteria, alone, flags);
 	});
 	return flags;
 }

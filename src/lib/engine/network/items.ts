@@ -1,14 +1,4 @@
-import type {
-	CatalogueUse,
-	DesignDocument,
-	DesignRow,
-	Equipment,
-	Fitting,
-	Item,
-	Junction,
-	Outlet,
-	ReferenceLeg
-} from '../document/types';
+import type { DesignDocument, DesignRow, Equipment, Fitting, Item, Junction, Outlet } from '../document/types';
 import {
 	coefficientOf,
 	filterLoss,
@@ -16,12 +6,11 @@ import {
 	junctionCoefficientOf,
 	lossFromPoints,
 	ratedLoss,
-	type CatalogueEntry,
 	type CoefficientResult,
 	type LossPoint
 } from '../fitting';
 import { COLEBROOK_ROUGHNESS, flexibleStretchFactor, regime } from '../friction';
-import { parametersInWords } from './parameters-in-words';
+import type { CatalogueUses } from './catalogue-uses';
 import type { Hydraulics } from './hydraulics';
 import type { JunctionView } from './junction-views';
 
@@ -59,7 +48,7 @@ export function ductItem(
 		});
 	if (relativeRoughness > COLEBROOK_ROUGHNESS.max)
 		notes.push({ name: 'Duct', inRange: false, note: 'the relative roughness is above the range of Colebrook–White' });
-	return item('duct', 'Duct', frictionRate * length, { source: FRICTION[law] });
+	return plainItem('duct', 'Duct', frictionRate * length, FRICTION[law]);
 }
 
 export function flexibleItem(
@@ -71,11 +60,11 @@ export function flexibleItem(
 		const stretch = flexibleStretchFactor(hydraulicDiameter, compression);
 		if (stretch.note !== null) notes.push({ name: 'Flexible duct', inRange: false, note: stretch.note });
 		const source = 'Abushakra, Walker & Sherman (2004), by its compression, from memory; on the rigid friction rate';
-		return item('flexible', 'Flexible duct', stretch.factor * frictionRate * length, { source });
+		return plainItem('flexible', 'Flexible duct', stretch.factor * frictionRate * length, source);
 	}
 	const source =
 		factor === undefined ? `${FLEXIBLE_FACTOR} times the rigid rate: the program’s default, illustrative` : BY_HAND;
-	return item('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, { source });
+	return plainItem('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, source);
 }
 
 /**
@@ -86,27 +75,34 @@ export function junctionItem(
 	junction: Junction,
 	{ velocityPressure }: Hydraulics,
 	view: JunctionView | undefined,
-	methods: DesignDocument['methods'],
+	{ methods, uses }: Catalogued,
 	notes: RangeNote[]
 ): Item {
-	const { coefficient: given = 0, kind, toBeConfirmed } = junction;
+	const { coefficient: given = 0, kind, toBeConfirmed = false } = junction;
 	const entry = kind === 'fixed' || !view ? null : fittingEntry(kind);
 	if (!entry || !view) {
 		// Where a row meets the fan there is no node: a flag says so.
 		const coefficient = kind === 'fixed' ? given : 0;
 		const { name = 'Junction' } = junction;
-		return item('junction', name, coefficient * velocityPressure, {
-			...{ kind, coefficient, source: BY_HAND, toBeConfirmed }
-		});
+		const loss = coefficient * velocityPressure + 0;
+		return {
+			...{ part: 'junction', name, kind, count: null, coefficient: coefficient + 0 },
+			...{ loss, source: BY_HAND, catalogue: null, toBeConfirmed }
+		};
 	}
 	const { context, tag } = view;
 	const name = junction.name ?? `${entry.name}, ${context.leg}`;
 	const result = junctionCoefficientOf(kind, withMethod(junction, methods), context);
 	noteRange(name, result, notes);
 	const loss = result.coefficient * view.velocityPressure;
-	return item('junction', name, loss, {
-		...{ kind, coefficient: loss / velocityPressure, source: result.source, toBeConfirmed },
-		catalogue: useOf(entry, result),
+	return {
+		part: 'junction',
+		name,
+		kind,
+		count: null,
+		coefficient: loss / velocityPressure + 0,
+		loss: loss + 0,
+		source: result.source,
 		reference: {
 			leg: 'common',
 			row: tag,
@@ -114,8 +110,10 @@ export function junctionItem(
 			velocityPressure: view.velocityPressure,
 			flowRatio: context.flowRatio,
 			areaRatio: context.areaRatio
-		}
-	});
+		},
+		catalogue: uses(junction, entry, result),
+		toBeConfirmed
+	};
 }
 
 /** The parameters with the method that the design has chosen for the kind, where the fitting names none of its own. */
@@ -132,45 +130,51 @@ function noteRange(name: string, { inRange, rangeNote }: CoefficientResult, note
 		notes.push({ name, inRange, note: rangeNote ?? 'outside the range of its source' });
 }
 
+/** What a part of the catalogue is asked with beside its row. */
+interface Catalogued {
+	readonly methods: DesignDocument['methods'];
+	readonly uses: CatalogueUses;
+}
+
 export function fittingItem(
 	fitting: Fitting,
 	row: DesignRow,
 	hydraulics: Hydraulics,
-	methods: DesignDocument['methods'],
+	{ methods, uses }: Catalogued,
 	notes: RangeNote[]
 ): Item {
-	const { kind, count = 1, toBeConfirmed } = fitting;
+	const { kind, count = 1, toBeConfirmed = false } = fitting;
 	const pv = hydraulics.velocityPressure;
 	if (kind === 'fixed') {
 		const { coefficient = 0, name = 'Fitting' } = fitting;
-		const loss = coefficient * count * pv;
-		return item('fitting', name, loss, { kind, count, coefficient, source: BY_HAND, toBeConfirmed });
+		return {
+			part: 'fitting',
+			name,
+			kind,
+			count,
+			coefficient: coefficient + 0,
+			loss: coefficient * count * pv + 0,
+			source: BY_HAND,
+			catalogue: null,
+			toBeConfirmed
+		};
 	}
 	const entry = fittingEntry(kind);
 	const name = fitting.name ?? entry?.name ?? kind;
 	const { reynolds, velocity, relativeRoughness, frictionFactor } = hydraulics;
 	const context = { size: row.size, reynolds, velocity, relativeRoughness, frictionFactor };
 	const result = coefficientOf(kind, withMethod(fitting, methods), context);
-	const { coefficient, source } = result;
 	noteRange(name, result, notes);
-	const catalogue = entry === null ? null : useOf(entry, result);
-	return item('fitting', name, coefficient * count * pv, {
+	return {
+		part: 'fitting',
+		name,
 		kind,
 		count,
-		coefficient,
-		source,
-		catalogue,
+		coefficient: result.coefficient + 0,
+		loss: result.coefficient * count * pv + 0,
+		source: result.source,
+		catalogue: entry && uses(fitting, entry, result),
 		toBeConfirmed
-	});
-}
-
-function useOf(entry: CatalogueEntry, result: CoefficientResult): CatalogueUse {
-	const { parameters, methodKey, method, known, uncertainty, rangeNote } = result;
-	return {
-		parameters,
-		words: parametersInWords(entry, parameters),
-		...(methodKey !== null && { methodKey }),
-		...{ method, known, uncertainty, rangeNote, caution: entry.caution }
 	};
 }
 
@@ -182,50 +186,43 @@ export function equipmentItem(equipment: Equipment, flow: number, notes: RangeNo
 	if (points) {
 		const found = lossFromPoints(points as readonly LossPoint[], flow);
 		if (found.note !== null) notes.push({ name, inRange: false, note: found.note });
-		return item('equipment', name, found.loss, {
-			source: 'points of the maker, a power law between them',
-			toBeConfirmed
-		});
+		const source = 'points of the maker, a power law between them';
+		return plainItem('equipment', name, found.loss, source, toBeConfirmed);
 	}
 	if (filter) {
 		const found = filterLoss({ ...filter, atFlow, exponent: equipment.exponent ?? 1 }, flow);
-		return item('equipment', name, found, { source: `filter, ${STATE[filter.state]}`, toBeConfirmed });
+		return plainItem('equipment', name, found, `filter, ${STATE[filter.state]}`, toBeConfirmed);
 	}
-	return item('equipment', name, ratedLoss(loss, atFlow, flow, exponent), { source: BY_HAND, toBeConfirmed });
+	return plainItem('equipment', name, ratedLoss(loss, atFlow, flow, exponent), BY_HAND, toBeConfirmed);
 }
 
 /** At its design flow an outlet loses what was entered; without a figure it is an open end of one velocity pressure. */
 export function outletItem(outlet: Outlet, side: DesignRow['side'], { velocityPressure: pv }: Hydraulics): Item {
 	const { name = side === 'supply' ? 'Outlet' : 'Inlet', toBeConfirmed } = outlet;
 	if (outlet.loss === undefined)
-		return item('outlet', name, pv, { coefficient: 1, source: 'open end, one velocity pressure', toBeConfirmed });
+		return {
+			...plainItem('outlet', name, pv, 'open end, one velocity pressure', toBeConfirmed),
+			coefficient: 1
+		};
 	const loss = outlet.lossIs === 'static' ? outlet.loss + pv : outlet.loss;
-	return item('outlet', name, loss, { source: BY_HAND, toBeConfirmed });
+	return plainItem('outlet', name, loss, BY_HAND, toBeConfirmed);
 }
 
 export function gravityItem(gain: number): Item {
-	return item('gravity', 'Thermal gravity', -gain, { source: 'g (ρ surroundings − ρ) Δz' });
+	return plainItem('gravity', 'Thermal gravity', -gain, 'g (ρ surroundings − ρ) Δz');
 }
 
-type More = {
-	readonly [K in 'kind' | 'count' | 'coefficient' | 'source' | 'catalogue' | 'toBeConfirmed']?: Item[K] | undefined;
-} & { readonly reference?: ReferenceLeg };
-
-function item(part: Item['part'], name: string, loss: number, more: More): Item {
-	const {
-		kind = null,
-		count = null,
-		coefficient = null,
-		source = null,
-		catalogue = null,
-		toBeConfirmed = false
-	} = more;
-	// Adding 0 turns -0 into 0.
-	const figure = coefficient === null ? null : coefficient + 0;
-	const { reference } = more;
+/** An item without a coefficient. Adding 0 turns -0 into 0. */
+function plainItem(part: Item['part'], name: string, loss: number, source: string, toBeConfirmed = false): Item {
 	return {
-		...{ part, name, kind, count, coefficient: figure, loss: loss + 0, source },
-		...(reference && { reference }),
-		...{ catalogue, toBeConfirmed }
+		part,
+		name,
+		kind: null,
+		count: null,
+		coefficient: null,
+		loss: loss + 0,
+		source,
+		catalogue: null,
+		toBeConfirmed
 	};
 }

@@ -1,12 +1,7 @@
-import type { Criteria, DesignRow, Flag } from '../document/types';
-import { fittingEntry } from '../fitting';
+import type { Criteria, DesignRow, Flag, Item } from '../document/types';
 import type { RangeNote } from './items';
+import type { PartHints } from './part-hints';
 import type { RowLoss } from './row-loss';
-
-const DAMPER = /damper|\b(vcd|fsd)\b/i;
-/** Dampers that do not balance: they close, or open, by themselves. */
-const UNSUITED = /\b(fire|smoke|fsd|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
-const FIRE = /\b(fire|smoke|fsd)\b/i;
 
 /**
  * Fittings, equipment and outlet of one row: what is not settled, out of range, missing or needs a caution.
@@ -16,6 +11,7 @@ export function partFlags(
 	row: DesignRow,
 	solved: RowLoss,
 	notes: readonly RangeNote[],
+	hints: PartHints,
 	criteria: Criteria | undefined,
 	alone: boolean,
 	flags: Flag[]
@@ -29,8 +25,8 @@ export function partFlags(
 			basis: 'range of the source of the coefficient'
 		});
 
-	if (solved.items.some((item) => item.toBeConfirmed)) {
-		const open = solved.items.filter((item) => item.toBeConfirmed).map((item) => item.name);
+	if (solved.items.some(isOpen)) {
+		const open = solved.items.filter(isOpen).map((item) => item.name);
 		const names = [...new Set(open)];
 		flags.push({
 			rule: 'to-be-confirmed',
@@ -42,7 +38,7 @@ export function partFlags(
 		});
 	}
 
-	if (hasNamed(row, (name) => FIRE.test(name) && DAMPER.test(name)))
+	if (hints.fireDamper)
 		flags.push({
 			rule: 'fire-damper-caution',
 			row: row.tag,
@@ -52,7 +48,7 @@ export function partFlags(
 			basis: 'outside the scope of a pressure calculation'
 		});
 
-	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !alone && !hasBalancingDamper(row))
+	if (criteria?.damperAtOutlet === true && row.outlet !== undefined && !alone && !hints.balances)
 		flags.push({
 			rule: 'damper-missing',
 			row: row.tag,
@@ -61,7 +57,7 @@ export function partFlags(
 			basis: 'criteria of the design'
 		});
 
-	endFlag(row, flags);
+	endFlag(row, hints.end, flags);
 	if (row.flexible !== undefined && row.flexible.length > 0 && row.flexible.factor === undefined)
 		flags.push({
 			rule: 'flexible-default',
@@ -70,12 +66,12 @@ export function partFlags(
 			message: 'Flexible duct is taken at 4 times the rigid rate, the program’s default; as installed it can be more.',
 			basis: 'illustrative: published tests give about 4 times for moderate and near 10 times for severe compression'
 		});
-	if (row.fittings?.some((one) => fittingEntry(one.kind)?.family === 'dampers' && !('angle' in one)) === true)
+	if (hints.openAssumed)
 		flags.push({
 			rule: 'damper-open-assumed',
 			row: row.tag,
 			severity: 'note',
-			message: 'A damper without an angle is taken as fully open.',
+			message: 'A damper without a setting is taken as fully open.',
 			basis: 'default of the catalogue'
 		});
 
@@ -90,13 +86,11 @@ export function partFlags(
 		});
 }
 
+const isOpen = (item: Item) => item.toBeConfirmed;
+
 /** An entry or exit of the catalogue is the end of its run: the outlet's own loss would count it a second time. */
-function endFlag(row: DesignRow, flags: Flag[]): void {
-	if (row.outlet === undefined || row.outlet.loss === 0) return;
-	const end = row.fittings
-		?.map((one) => fittingEntry(one.kind))
-		.find((entry) => entry?.family === 'entries' || entry?.family === 'exits');
-	if (!end) return;
+function endFlag(row: DesignRow, end: PartHints['end'], flags: Flag[]): void {
+	if (end === null || row.outlet === undefined || row.outlet.loss === 0) return;
 	flags.push({
 		rule: 'end-counted-twice',
 		row: row.tag,
@@ -104,15 +98,4 @@ function endFlag(row: DesignRow, flags: Flag[]): void {
 		message: `${end.name} and the loss of the outlet are both counted. Where the fitting is the end of the run, the outlet loses 0.`,
 		basis: 'an end loses its velocity pressure once'
 	});
-}
-
-function hasBalancingDamper(row: DesignRow): boolean {
-	if (hasNamed(row, (name) => DAMPER.test(name) && !UNSUITED.test(name))) return true;
-	return row.fittings?.some((one) => fittingEntry(one.kind)?.family === 'dampers') ?? false;
-}
-
-/** Whether a fitting or a piece of equipment has a name such as this. */
-function hasNamed(row: DesignRow, isSuch: (name: string) => boolean): boolean {
-	if (row.fittings?.some((one) => one.name !== undefined && isSuch(one.name)) === true) return true;
-	return row.equipment?.some((one) => isSuch(one.name)) ?? false;
 }

@@ -46,34 +46,34 @@ export function rowLoss(
 	notes: RangeNote[]
 ): RowLoss {
 	const { flow, air } = hydraulics;
-	const { methods } = settings;
-	const items: Item[] = [];
-	/** Adds the item, and gives its loss. */
+	const { fittings = NONE, equipment = NONE } = row;
+	const gain = gainOf(row, air.density, settings.surroundings);
+	// Of just its length: lists that grow keep room that is never used.
+	const items = new Array<Item>(itemCount(row, gain));
+	let at = 0;
+	/** Puts the item in, and gives its loss. */
 	const lossOf = (item: Item): number => {
-		items.push(item);
+		items[at++] = item;
 		return item.loss;
 	};
 
 	const frictionLoss = lossOf(ductItem(row.length, row.size.shape, hydraulics, notes));
 	const flexibleLoss = row.flexible === undefined ? 0 : lossOf(flexibleItem(row.flexible, hydraulics, notes));
 	const junctionLoss =
-		row.junction === undefined ? 0 : lossOf(junctionItem(row.junction, hydraulics, view, methods, notes));
+		row.junction === undefined ? 0 : lossOf(junctionItem(row.junction, hydraulics, view, settings, notes));
 	let fittingLoss = 0;
-	for (const fitting of row.fittings ?? [])
-		fittingLoss += lossOf(fittingItem(fitting, row, hydraulics, methods, notes));
+	for (const one of fittings) fittingLoss += lossOf(fittingItem(one, row, hydraulics, settings, notes));
 	let equipmentLoss = 0;
-	for (const equipment of row.equipment ?? []) equipmentLoss += lossOf(equipmentItem(equipment, flow, notes));
+	for (const one of equipment) equipmentLoss += lossOf(equipmentItem(one, flow, notes));
 	const outletLoss = row.outlet === undefined ? 0 : lossOf(outletItem(row.outlet, row.side, hydraulics));
-	const gain = gainOf(row, air.density, settings.surroundings);
-	if (gain !== 0) items.push(gravityItem(gain));
+	if (gain !== 0) items[at] = gravityItem(gain);
 
 	const losses = frictionLoss + flexibleLoss + fittingLoss + junctionLoss + equipmentLoss + outletLoss;
-	return {
+	const solved: RowLoss = {
 		side: row.side,
 		flow,
 		massFlow: flow * air.density,
 		density: air.density,
-		...(air.temperature !== null && { temperature: air.temperature }),
 		area: hydraulics.area,
 		hydraulicDiameter: hydraulics.hydraulicDiameter,
 		velocity: hydraulics.velocity,
@@ -92,11 +92,18 @@ export function rowLoss(
 		totalPressure: UNPLACED,
 		staticPressure: UNPLACED,
 		spare: 0,
-		items: items.slice() // a list of just its length
+		items
 	};
+	return air.temperature === null ? solved : { ...solved, temperature: air.temperature };
 }
 
 const UNPLACED = [0, 0] as const;
+const NONE = [] as const;
+
+function itemCount({ flexible, junction, fittings, equipment, outlet }: DesignRow, gain: number): number {
+	const once = 1 + Number(flexible !== undefined) + Number(junction !== undefined) + Number(outlet !== undefined);
+	return once + (fittings?.length ?? 0) + (equipment?.length ?? 0) + Number(gain !== 0);
+}
 
 /** Supply air runs toward the far end, all other air away from it. */
 function gainOf({ rise = 0, side }: DesignRow, density: number, surroundings: number): number {

@@ -9,6 +9,8 @@ const CAUTIONS: Readonly<Record<Exclude<Service, 'general'>, string>> = {
 		'Smoke control: leakage, temperature, reliability and the sequence of operation are not checked here.'
 };
 
+type Hint = Exclude<Service, 'general'> | null;
+
 /** Words that hint at a service nobody has named. */
 const HINTS: readonly (readonly [RegExp, Exclude<Service, 'general'>])[] = [
 	[/\b(kitchens?|grease|cooking|cookers?|fryers?|canop(y|ies)|range hoods?)\b/i, 'kitchen-grease'],
@@ -16,6 +18,8 @@ const HINTS: readonly (readonly [RegExp, Exclude<Service, 'general'>])[] = [
 	[/\b(hazardous|explosive|dusts?|welding|flues?|boilers?|combustion)\b/i, 'hazardous'],
 	[/\b(smoke (control|exhaust|extract)|(stairs?|lift|lobby) pressuri[sz]ation|pressuri[sz]ation)\b/i, 'smoke-control']
 ];
+/** Most texts hint at nothing: one look tells. */
+const ANY = new RegExp(HINTS.map(([pattern]) => pattern.source).join('|'), 'i');
 const BASIS = 'outside the scope of a pressure calculation: the adopted codes and a licensed professional govern';
 
 /** The caution of the service of the design; where none is named, of what the rows seem to serve. */
@@ -27,29 +31,34 @@ export function serviceFlags(document: DesignDocument): Flag[] {
 		return [{ rule: 'service-caution', row: null, severity: 'caution', message, basis: BASIS }];
 	}
 	const flags: Flag[] = [];
-	const inTitle = hintIn([document.title ?? '']);
+	const inTitle = hintOf(document.title ?? '');
 	if (inTitle !== null) flags.push(hinted(null, inTitle));
+	const known = new Map<string, Hint>();
+	/** Parts have few distinct names. */
+	const ofPart = (name: string): Hint => {
+		let hint = known.get(name);
+		if (hint === undefined) known.set(name, (hint = hintOf(name)));
+		return hint;
+	};
 	for (const row of document.rows) {
-		const hint = hintIn(textsOf(row));
+		const hint = hintIn(row, ofPart);
 		if (hint !== null) flags.push(hinted(row.tag, hint));
 	}
 	return flags;
 }
 
-/** Every text of a row that may name what it serves. */
-function* textsOf({ serves, outlet, equipment, fittings }: DesignRow): Generator<string> {
-	if (serves !== undefined) yield serves;
-	if (outlet?.name !== undefined) yield outlet.name;
-	for (const { name } of equipment ?? []) yield name;
-	for (const { name } of fittings ?? []) if (name !== undefined) yield name;
+/** The first hint among the texts of a row that may name what it serves. */
+function hintIn({ serves, outlet, equipment, fittings }: DesignRow, ofPart: (name: string) => Hint): Hint {
+	let hint: Hint = serves === undefined ? null : hintOf(serves);
+	if (outlet?.name !== undefined) hint ??= hintOf(outlet.name);
+	if (equipment) for (const { name } of equipment) hint ??= ofPart(name);
+	if (fittings) for (const { name } of fittings) if (name !== undefined) hint ??= ofPart(name);
+	return hint;
 }
 
-function hintIn(texts: Iterable<string>): Exclude<Service, 'general'> | null {
-	for (const text of texts) {
-		const hint = HINTS.find(([pattern]) => pattern.test(text));
-		if (hint !== undefined) return hint[1];
-	}
-	return null;
+function hintOf(text: string): Hint {
+	if (!ANY.test(text)) return null;
+	return HINTS.find(([pattern]) => pattern.test(text))?.[1] ?? null;
 }
 
 function hinted(row: string | null, service: Exclude<Service, 'general'>): Flag {

@@ -1,6 +1,7 @@
 import { airState, type AirSpec, type AirState } from '../air';
 import type { DesignAir, DesignDocument, DesignRow } from '../document/types';
 import { DEFAULT_MATERIAL, findMaterial } from '../friction';
+import { catalogueUses, type CatalogueUses } from './catalogue-uses';
 import { STANDARD_DENSITY } from './flows';
 
 /** What holds for all rows of a design. */
@@ -10,6 +11,7 @@ export interface Settings {
 	readonly surroundings: number;
 	readonly roughnessOf: (row: DesignRow) => number;
 	readonly methods: DesignDocument['methods'];
+	readonly uses: CatalogueUses;
 	/** Density of standard flows [kg/m3]; null where flows are actual ones. */
 	readonly standard: number | null;
 }
@@ -21,7 +23,14 @@ export function settingsOf(document: DesignDocument): Settings {
 	const general = roughnessIn(document) ?? findMaterial(DEFAULT_MATERIAL)?.roughness ?? 0;
 	const roughnessOf = (row: DesignRow) => roughnessIn(row) ?? general;
 	const standard = document.flowBasis === 'standard' ? (document.standardDensity ?? STANDARD_DENSITY) : null;
-	return { air, surroundings: surroundings.density, roughnessOf, methods: document.methods, standard };
+	return {
+		air,
+		surroundings: surroundings.density,
+		roughnessOf,
+		methods: document.methods,
+		uses: catalogueUses(),
+		standard
+	};
 }
 
 /** A given density goes before a temperature that stands beside it. */
