@@ -55,7 +55,7 @@ export default ts.config(
 		rules: ban(engine, server, sql, tests, routes)
 	},
 	{
-		files: ['src/lib/{report,drawing,schemas}/**/*.ts'],
+		files: ['src/lib/{report,drawing,methods,schemas}/**/*.ts'],
 		rules: ban(engine, server, sql, screen, tests, routes)
 	},
 	// Runes stand in files that are named like components.

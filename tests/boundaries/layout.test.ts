@@ -20,10 +20,11 @@ const MAY_KNOW: Readonly<Record<string, readonly string[]>> = {
 	sheet: ['engine'],
 	report: ['engine'],
 	drawing: ['engine'],
+	methods: ['engine'],
 	schemas: ['engine', 'sheet'],
-	components: ['engine', 'sheet', 'schemas', 'report', 'drawing'],
+	components: ['engine', 'sheet', 'schemas', 'report', 'drawing', 'methods'],
 	server: ['engine', 'sheet', 'schemas', 'report', 'drawing'],
-	routes: ['engine', 'sheet', 'schemas', 'report', 'drawing', 'components', 'server']
+	routes: ['engine', 'sheet', 'schemas', 'report', 'drawing', 'methods', 'components', 'server']
 };
 
 describe('ESLint', { timeout: 30_000 }, () => {

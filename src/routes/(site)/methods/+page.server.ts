@@ -1,31 +1,16 @@
-import { catalogue, ENGINE_VERSION, materials, type Family } from '$lib/engine';
+import { ENGINE_VERSION, materials } from '$lib/engine';
+import { familyNotes, publishedGroups } from '$lib/methods';
 import type { PageServerLoad } from './$types';
 
-const FAMILIES: Readonly<Record<Family, string>> = {
-	'elbows-round': 'Round elbows',
-	'elbows-rectangular': 'Rectangular elbows',
-	'elbows-oval': 'Oval elbows',
-	offsets: 'Offsets',
-	'area-changes': 'Changes of size',
-	entries: 'Entries',
-	exits: 'Exits',
-	dampers: 'Dampers',
-	screens: 'Screens, plates and obstructions',
-	'junctions-diverging': 'Junctions where a stream divides',
-	'junctions-converging': 'Junctions where streams unite',
-	equipment: 'Equipment and terminals',
-	'system-effect': 'System effect at the fan'
-};
+/** Worked out once: the catalogue does not change while the program runs. What is not in it is not computed. */
+const families = familyNotes();
+const published = Object.fromEntries(
+	['streams', 'air', 'shape', 'friction', 'leakage'].map((subject) => [subject, publishedGroups(subject)])
+);
 
-const families = (Object.keys(FAMILIES) as Family[]).map((family) => ({
-	id: family,
-	title: FAMILIES[family],
-	entries: catalogue.filter((entry) => entry.family === family)
-}));
-
-/** The catalogue as the engine holds it: what is not here is not computed. */
 export const load: PageServerLoad = ({ locals }) => ({
-	families: families.filter(({ entries }) => entries.length > 0),
+	families,
+	published,
 	materials,
 	engineVersion: ENGINE_VERSION,
 	signedIn: locals.scope !== null

@@ -1,21 +1,6 @@
-/** What is computed outside the catalogue of fittings, as the method notes show it. */
-export interface FormulaNote {
-	readonly name: string;
-	/** What stands in ^{…} is raised. */
-	readonly equation: string;
-	/** Symbols with their units. */
-	readonly where: string;
-	readonly range: string;
-	readonly source: string;
-	readonly caution?: string;
-}
-
-export interface FormulaGroup {
-	readonly id: string;
-	readonly title: string;
-	readonly lead: string;
-	readonly formulas: readonly FormulaNote[];
-}
+import { LEAKAGE } from './formulas-of-leakage';
+import { SHAPE } from './formulas-of-shape';
+import type { FormulaGroup } from './formula-note';
 
 const NETWORK: FormulaGroup = {
 	id: 'streams',
@@ -24,9 +9,9 @@ const NETWORK: FormulaGroup = {
 	formulas: [
 		{
 			name: 'Flow',
-			equation: 'Q = Σ Q of the rows that join',
-			where: 'Q volume flow [m³/s]',
-			range: 'One density in the whole system',
+			equation: 'ρQ = Σ ρQ of the rows that join',
+			where: 'Q volume flow [m³/s], ρ density of the air in the row [kg/m³]',
+			range: 'One density in each row',
 			source: 'Conservation of mass'
 		},
 		{
@@ -35,6 +20,14 @@ const NETWORK: FormulaGroup = {
 			where: 'All in Pa, of total pressure',
 			range: 'Design flow above zero',
 			source: 'Bernoulli’s equation with losses'
+		},
+		{
+			name: 'Loss of a fitting or junction',
+			equation: 'Δp = C ½ρV²,  C₂ = C₁ (V₁ / V₂)²',
+			where:
+				'C on the velocity pressure of the leg that its source names; brought to another leg so that the loss stays the same',
+			range: 'That of the entry',
+			source: 'Definition of the loss coefficient'
 		},
 		{
 			name: 'Path, index and spare',
@@ -137,4 +130,4 @@ const FRICTION: FormulaGroup = {
 };
 
 /** The groups in the order in which a figure comes about. */
-export const FORMULA_GROUPS: readonly FormulaGroup[] = [NETWORK, AIR, FRICTION];
+export const FORMULA_GROUPS: readonly FormulaGroup[] = [NETWORK, AIR, SHAPE, FRICTION, LEAKAGE];

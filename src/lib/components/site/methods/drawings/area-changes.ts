@@ -70,7 +70,7 @@ export function step(key: string): PartFigure {
 			`M${deep[0]} ${y}c${(deep[1] ?? 0) - (deep[0] ?? 0)} ${-11 * sign} ${(deep[1] ?? 0) - (deep[0] ?? 0)} ${11 * sign} 6 ${6 * sign}`
 		);
 	}
-	return board.figure();
+	return board.figure(196);
 }
 
 /** Cone, drawn with its included angle. */
@@ -99,7 +99,7 @@ function gradual(key: string): { board: DrawingBoard; halves: readonly [number, 
 	return { board, halves };
 }
 
-export const transition = (key: string): PartFigure => gradual(key).board.figure();
+export const transition = (key: string): PartFigure => gradual(key).board.figure(196);
 
 /** The section at the end, beside the side view: both outlines as they lie in one another. */
 function endView(board: DrawingBoard, large: string, small: string): void {
@@ -159,7 +159,7 @@ export function oneSided(key: string): PartFigure {
 	return board
 		.add('thin', line(foot, [foot[0] + way * 92, foot[1]]))
 		.angle(foot, 70, grows ? -slope : 180, grows ? 0 : 180 + slope, 'θ', -14)
-		.figure();
+		.figure(196);
 }
 
 /** A cone at the end of a duct, open to the room. */
@@ -192,5 +192,5 @@ export function exitDiffuser(key: string): PartFigure {
 		.flow([226, MIDDLE - 0], 0, '', 38)
 		.angle(apex, 170, -half, half, '')
 		.letter([apex[0] + 184, MIDDLE - 9], 'θ')
-		.figure();
+		.figure(196);
 }

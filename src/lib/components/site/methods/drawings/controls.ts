@@ -26,7 +26,7 @@ export function damper(key: string): PartFigure {
 		.add('solid', ring(hub, 4))
 		.add('dashed', line([110, Y], [202, Y]))
 		.add('thin', line(hub, [156, Y - 70]), line([156, Y - 70], [186, Y - 70]));
-	return board.angle(hub, 40, t, 0, 'θ', 12).figure();
+	return board.angle(hub, 40, t, 0, 'θ', 12).figure(196);
 }
 
 export function blades(key: string): PartFigure {
@@ -43,13 +43,13 @@ export function blades(key: string): PartFigure {
 	}
 	if (open) {
 		board.add('solid', box(x - 4, Y - half, 8, 8), box(x - 4, Y + half - 8, 8, 8));
-		return board.dimension([x + 42, Y - half + 8], [x + 42, Y + half - 8], 'A_d').figure();
+		return board.dimension([x + 42, Y - half + 8], [x + 42, Y + half - 8], 'A_d').figure(196);
 	}
 	const third: Point = [x, Y + half / 4];
 	return board
 		.add('thin', line(third, [x + 66, third[1]]))
 		.angle(third, 50, -36, 0, 'θ', 12)
-		.figure();
+		.figure(196);
 }
 
 export function gate(key: string): PartFigure {
@@ -62,7 +62,7 @@ export function gate(key: string): PartFigure {
 		.dimension([x + 26, Y - 4], [x + 26, Y + 48], 'h')
 		.add('thin', line([x + 6, Y - 4], [x + 34, Y - 4]))
 		.flow([x - 46, Y + 24], 0, '', 36)
-		.figure();
+		.figure(196);
 }
 
 export function firedamper(key: string): PartFigure {
@@ -78,14 +78,14 @@ export function firedamper(key: string): PartFigure {
 	return board
 		.note([x + 30, Y + 90], 'wall', 'start')
 		.flow([100, Y + 16], 0, '', 36)
-		.figure();
+		.figure(196);
 }
 
 export function screen(key: string): PartFigure {
 	const board = duct(key, 60, 'A');
 	for (let y = Y - 54; y <= Y + 54; y += 12) board.add('solid', ring([140, y], 3));
 	board.add('joint', line([140, Y - 60], [140, Y + 60]));
-	return streams(board, 152, 12, 5).figure();
+	return streams(board, 152, 12, 5).figure(196);
 }
 
 /** Small streams behind openings. */
@@ -118,7 +118,7 @@ export function plate(key: string): PartFigure {
 		board
 			.add('thin', line([x + 3, Y - half + 14], [x + 40, Y - half - 16], [x + 46, Y - half - 16]))
 			.note([x + 50, Y - half - 12], 'sharp-edged holes', 'start');
-	return board.figure();
+	return board.figure(196);
 }
 
 export function obstruction(key: string): PartFigure {
@@ -133,5 +133,5 @@ export function obstruction(key: string): PartFigure {
 			)
 			.add('thin', arc([184, Y + sign * 8], 6, 200, -100));
 	board.add('thin', line([centre[0] + 8, Y - 11], [190, Y - 78], [198, Y - 78])).letter([212, Y - 73], 'A_m');
-	return board.figure();
+	return board.figure(196);
 }

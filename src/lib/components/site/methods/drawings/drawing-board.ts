@@ -14,6 +14,7 @@ export interface Lettering {
 /** A drawing as path data, by the kind of line. */
 export interface PartFigure {
 	readonly label: string;
+	readonly height: number;
 	readonly body: string;
 	readonly wall: string;
 	readonly joint: string;
@@ -32,7 +33,7 @@ export type Point = readonly [x: number, y: number];
 export const WIDTH = 340;
 export const HEIGHT = 240;
 
-type Line = Exclude<keyof PartFigure, 'label' | 'letters'>;
+type Line = Exclude<keyof PartFigure, 'label' | 'height' | 'letters'>;
 
 const short = (x: number): string => String(Math.round(x * 10) / 10);
 const radians = (degrees: number): number => (degrees * Math.PI) / 180;
@@ -133,13 +134,13 @@ export class DrawingBoard {
 	}
 
 	/** An angle between two directions, with heads at both ends. */
-	angle(centre: Point, r: number, from: number, to: number, text: string, away = 13): this {
+	angle(centre: Point, r: number, from: number, to: number, text: string, away = 13, share = 0.5): this {
 		const lean = (9 / 2 / r) * (180 / Math.PI) * Math.sign(to - from);
 		const turn = to > from ? 90 : -90;
 		this.add('thin', arc(centre, r, from, to));
 		if (Math.abs(to - from) * radians(r) > 26)
 			this.head(toward(centre, from, r), from - turn + lean).head(toward(centre, to, r), to + turn - lean);
-		const [x, y] = toward(centre, (from + to) / 2, r + away);
+		const [x, y] = toward(centre, from + share * (to - from), r + away);
 		return this.letter([x, y + 5], text);
 	}
 
@@ -179,8 +180,9 @@ export class DrawingBoard {
 		return this.add('joint', box(x, y, width, height));
 	}
 
-	figure(): PartFigure {
+	/** The finished drawing, cut off below what is drawn. */
+	figure(height = HEIGHT): PartFigure {
 		const paths = Object.fromEntries(Object.entries(this.lines).map(([kind, parts]) => [kind, parts.join('')]));
-		return { label: this.label, ...(paths as Record<Line, string>), letters: this.letters };
+		return { label: this.label, height, ...(paths as Record<Line, string>), letters: this.letters };
 	}
 }

@@ -25,7 +25,7 @@ function bendLettering(board: DrawingBoard, section: Section): void {
 		.flow([CENTRE[0] - RADIUS, 196], -90)
 		.add('thin', line([CENTRE[0] - RADIUS + SIDE / 2 + 2, CENTRE[1]], [CENTRE[0] + 6, CENTRE[1]]))
 		.add('thin', line([CENTRE[0], CENTRE[1] - RADIUS + SIDE / 2 + 2], [CENTRE[0], CENTRE[1] + 6]))
-		.angle(CENTRE, 26, 180, 270, 'θ', 12);
+		.angle(CENTRE, 26, 180, 270, 'θ', 13, 0.82);
 	sectionInset(board, section, [272, 158]);
 }
 
@@ -138,8 +138,8 @@ export function splitter(key: string): PartFigure {
 	bendLettering(run.board, sectionOf(key));
 	return run.board
 		.add('wall', arc(CENTRE, throat / ratio, 180, 270))
-		.ray(CENTRE, toward(CENTRE, 212, RADIUS), 'r', 0.55)
-		.ray(CENTRE, toward(CENTRE, 246, throat / ratio), 'R_1', 0.62)
+		.ray(CENTRE, toward(CENTRE, 205, RADIUS), 'r', 0.55)
+		.ray(CENTRE, toward(CENTRE, 235, throat / ratio), 'R_1', 0.72)
 		.figure();
 }
 

@@ -7,7 +7,7 @@ import { fanInlet, fanOutlet } from './fans';
 import { bullhead, conical, cross, plenum, shoe, tee, wye } from './junctions';
 import { bellmouth, cap, entry, exit, hood, louvre } from './openings';
 
-export { HEIGHT, WIDTH, type PartFigure } from './drawing-board';
+export { WIDTH, type PartFigure } from './drawing-board';
 
 /** Each drawing, made for the entry that shows it: those of one kind differ by what they have and where they flow. */
 const DRAWINGS: Readonly<Record<Drawing, (key: string) => PartFigure>> = {

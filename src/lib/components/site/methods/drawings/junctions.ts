@@ -42,7 +42,7 @@ function upward(board: DrawingBoard, left: number, right: number, from = Y - HAL
 
 export function tee(key: string): PartFigure {
 	const board = upward(main(key, [136, 184]), 136, 184);
-	return board.angle([160, Y], 30, -90, 0, 'θ', 12).figure();
+	return board.angle([160, Y], 26, -90, 0, 'θ', 12, 0.72).figure();
 }
 
 /** A wye; a conical take-off at 45° is none. */
@@ -99,7 +99,7 @@ export function conical(key: string): PartFigure {
 		)
 		.add('wall', ...sides)
 		.add('joint', line([left - 8, Y - HALF - tall], [right + 8, Y - HALF - tall]))
-		.angle([160, Y], 26, -90, 0, 'θ', 12)
+		.angle([160, Y], 26, -90, 0, 'θ', 12, 0.72)
 		.figure();
 }
 

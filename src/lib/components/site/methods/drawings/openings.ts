@@ -154,10 +154,10 @@ export function cap(key: string): PartFigure {
 		.dimension([x - half, 206], [x + half, 206], 'D', [0, 20])
 		.add('thin', line([x + half + 5, top], [x + 72, top]))
 		.dimension([x + 64, 50], [x + 64, top], 'h');
-	return capArrows(board, intake, x, top);
+	return capArrows(board, intake, x);
 }
 
-function capArrows(board: DrawingBoard, intake: boolean, x: number, top: number): PartFigure {
+function capArrows(board: DrawingBoard, intake: boolean, x: number): PartFigure {
 	if (intake)
 		board
 			.flow([46, 72], 0, '', 44)
