@@ -10,6 +10,7 @@ import { leakageChecks } from './leakage';
 import { screenChecks } from './screens';
 import { shapeChecks } from './shape';
 import { terminalChecks } from './terminals';
+import { textbookChecks } from './textbook';
 
 export { Given, type Answer, type Evaluators } from './given';
 export { subjectsOfTopic } from './subjects';
@@ -28,5 +29,6 @@ export const publishedEvaluators: Evaluators = {
 	...screenChecks,
 	...terminalChecks,
 	...convergingChecks,
-	...divergingChecks
+	...divergingChecks,
+	...textbookChecks
 };

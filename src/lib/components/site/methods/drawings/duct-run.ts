@@ -24,7 +24,7 @@ export class DuctRun {
 	private corners: readonly [Point, Point];
 
 	constructor(
-		private readonly board: DrawingBoard,
+		readonly board: DrawingBoard,
 		public place: Point,
 		public heading: number,
 		private readonly width: number

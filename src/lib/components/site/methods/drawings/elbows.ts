@@ -29,10 +29,9 @@ function bendLettering(board: DrawingBoard, section: Section): void {
 	sectionInset(board, section, [272, 158]);
 }
 
-function bend(key: string): DuctRun & { board: DrawingBoard } {
+function bend(key: string): DuctRun {
 	const board = new DrawingBoard(`${key.replaceAll('-', ' ')}, seen in the plane of the bend`);
-	const run = new DuctRun(board, [CENTRE[0] - RADIUS, 206], -90, SIDE);
-	return Object.assign(run, { board });
+	return new DuctRun(board, [CENTRE[0] - RADIUS, 206], -90, SIDE);
 }
 
 export function elbow(key: string): PartFigure {
