@@ -32,6 +32,18 @@ export {
 export { solveDesign } from './network';
 export { ENGINE_VERSION } from './version';
 export {
+	checkList,
+	checksOf,
+	marginLedger,
+	NOT_SHOWN,
+	type CheckBasis,
+	type CheckResult,
+	type CheckThreshold,
+	type Finding,
+	type MarginLedger,
+	type MarginLine
+} from './checks';
+export {
 	formulaOf,
 	ROW_FIGURES,
 	workingOf,
@@ -63,4 +75,4 @@ export { airState, type AirState } from './air';
 export { findMaterial, frictionFactor, materials, regime, type Material } from './friction';
 export { equivalentDiameter, sectionOf, type Section, type Size } from './shape';
 export { OutOfRangeError } from './errors';
-export { Given, publishedEvaluators, subjectsOfTopic, type Answer, type Evaluators } from './published';
+export { evaluatedTopics, Given, publishedEvaluator, subjectsOfTopic, type Answer, type Evaluators } from './published';

@@ -1,4 +1,4 @@
-import { Given, publishedEvaluators, subjectsOfTopic, type Answer } from '$lib/engine';
+import { Given, publishedEvaluator, subjectsOfTopic, type Answer } from '$lib/engine';
 import { figureText } from './axis';
 import { givenInWords, partInWords } from './given-in-words';
 
@@ -69,7 +69,7 @@ function allowedText(tolerance: Check['tolerance']): string {
 function valuesOf(check: Check, file: PublishedFile): readonly PublishedValue[] {
 	const { id, topic, inputs, expected, unit = '' } = check;
 	const reason = file.notCovered?.find((one) => one.id === id)?.reason ?? null;
-	const evaluate = publishedEvaluators[topic];
+	const evaluate = publishedEvaluator(topic);
 	const answer: Answer | null = reason === null && evaluate ? evaluate(new Given(inputs)) : null;
 	const ours = new Map(partsOf(answer));
 	const halfUnit = file.printedShort?.find((one) => one.id === id)?.halfUnit;

@@ -15,20 +15,30 @@ import { textbookChecks } from './textbook';
 export { Given, type Answer, type Evaluators } from './given';
 export { subjectsOfTopic } from './subjects';
 
-/** Every topic of the published checks with what works it out. */
-export const publishedEvaluators: Evaluators = {
-	...airChecks,
-	...shapeChecks,
-	...frictionChecks,
-	...leakageChecks,
-	...elbowChecks,
-	...areaChangeChecks,
-	...entryChecks,
-	...exitChecks,
-	...damperChecks,
-	...screenChecks,
-	...terminalChecks,
-	...convergingChecks,
-	...divergingChecks,
-	...textbookChecks
-};
+// A list and no merged object: a page that works out no check then carries none.
+const EVALUATORS: readonly Evaluators[] = [
+	airChecks,
+	shapeChecks,
+	frictionChecks,
+	leakageChecks,
+	elbowChecks,
+	areaChangeChecks,
+	entryChecks,
+	exitChecks,
+	damperChecks,
+	screenChecks,
+	terminalChecks,
+	convergingChecks,
+	divergingChecks,
+	textbookChecks
+];
+
+/** What works out the published checks of a topic; null where nothing does. */
+export function publishedEvaluator(topic: string): Evaluators[string] | null {
+	return EVALUATORS.find((one) => topic in one)?.[topic] ?? null;
+}
+
+/** Every topic of the published checks that something works out. */
+export function evaluatedTopics(): readonly string[] {
+	return [...new Set(EVALUATORS.flatMap((one) => Object.keys(one)))];
+}
