@@ -58,6 +58,7 @@ export const RULE: Readonly<Record<FlagRule, string>> = {
 	'fan-flows-differ': 'Flows of the two sides of the fan',
 	'temperature-mix': 'Temperature of united streams',
 	'leakage-not-settled': 'Leakage that does not settle',
+	'leakage-reversed': 'Leakage against its side',
 	condensation: 'Air below its dew point',
 	'service-caution': 'Special service',
 	'fire-damper-caution': 'Fire or smoke damper',

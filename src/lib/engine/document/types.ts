@@ -152,6 +152,8 @@ export interface SolvedRow {
 	/** Where air leaks: what escapes or is drawn in [m3/s], and the flow at [fan end, far end]; the flow is their mean. */
 	readonly leakage?: number;
 	readonly flowEnds?: readonly [number, number];
+	/** Where air leaks: mean static pressure inside the duct, behind its junction and before its outlet [Pa]. */
+	readonly leakagePressure?: number;
 	readonly density: number; // kg/m3
 	/** Where it differs from that of the design [degC]. */
 	readonly temperature?: number;
@@ -206,6 +208,7 @@ export type FlagRule =
 	| 'fan-flows-differ'
 	| 'temperature-mix'
 	| 'leakage-not-settled'
+	| 'leakage-reversed'
 	| 'condensation'
 	| 'service-caution'
 	| 'fire-damper-caution'

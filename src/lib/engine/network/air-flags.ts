@@ -1,3 +1,5 @@
+import { mixedTemperature, type MixingStream } from '../air';
+import { pressureOf } from '../air/moist-air';
 import type { DesignDocument, Flag } from '../document/types';
 import type { Network } from './network';
 import type { RowAir } from './row-airs';
@@ -16,7 +18,7 @@ export function airFlags(
 ): void {
 	if ('density' in document.air || airs.every(({ temperature }) => temperature === null)) return;
 	const general = document.air.temperature;
-	const sums = new Map<number, { mass: number; heat: number }>();
+	const uniting = new Map<number, MixingStream[]>();
 	rows.forEach((row, place) => {
 		const air = airs[place];
 		if (row.temperature !== undefined && air?.condenses)
@@ -31,13 +33,19 @@ export function airFlags(
 			});
 		const parent = parents[place] ?? -1;
 		if (row.side === 'supply' || parent < 0) return;
-		const mass = losses[place]?.massFlow ?? 0;
-		const sum = sums.get(parent) ?? { mass: 0, heat: 0 };
-		sums.set(parent, { mass: sum.mass + mass, heat: sum.heat + mass * (air?.temperature ?? general) });
+		const stream: MixingStream = {
+			temperature: air?.temperature ?? general,
+			relativeHumidity: air?.relativeHumidity ?? 0,
+			massFlow: losses[place]?.massFlow ?? 0
+		};
+		const others = uniting.get(parent);
+		if (others) others.push(stream);
+		else uniting.set(parent, [stream]);
 	});
-	for (const [parent, { mass, heat }] of sums) {
+	const pressure = pressureOf(document.air);
+	for (const [parent, streams] of uniting) {
 		const there = airs[parent]?.temperature ?? general;
-		const mixed = heat / mass;
+		const { temperature: mixed } = mixedTemperature(streams, pressure);
 		if (!(Math.abs(mixed - there) > MIX_DIFFERS)) continue;
 		flags.push({
 			rule: 'temperature-mix',
@@ -46,7 +54,7 @@ export function airFlags(
 			message: 'The streams that unite here mix to another temperature than the one this section is computed with.',
 			value: mixed,
 			threshold: there,
-			basis: 'balance of heat by mass, one specific heat; heat through the walls is not counted'
+			basis: 'balance of dry air, vapour and enthalpy; heat through the walls is not counted'
 		});
 	}
 }

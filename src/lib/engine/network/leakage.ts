@@ -1,10 +1,13 @@
-import type { DesignDocument, DesignRow, LeakageSum, Problem } from '../document/types';
+import type { DesignDocument, DesignRow, LeakageSum, Problem, RowSize } from '../document/types';
 import { allowableLeakage, findLeakageClass, leakageFlow, type Tightness } from '../leakage';
 import { sectionOf } from '../shape';
 import { outsideProblem, workPass, type Pass, type PassGround } from './pass';
+import type { RowLoss } from './row-loss';
 
 /** Rounds in which flows and pressures are worked in turn; a usual system settles in some ten. */
-const MOST_ROUNDS = 60;
+const MOST_ROUNDS = 100;
+/** From this round on only half of each change is taken: leakage that swings to and fro comes to rest. */
+const HALVED_FROM = 30;
 /** Change of the leakage, of the fan's flow, below which it is settled. */
 const SETTLED = 1e-13;
 
@@ -29,7 +32,8 @@ export interface Settled {
  * Works flows and leakage in turn until they suit each other: the leakage of a row goes with the mean static pressure in
  * it, and the flows with the leakage.
  *
- *   q = c A |(ps1 + ps2)/2|^0.65, A = P (L + L_flexible)
+ *   q = c A |ps|^0.65, ps = (pt1 + pt2)/2 - pv, A = P (L + L_flexible)
+ *   pt1 and pt2 inside the duct: behind the loss of its junction and before that of its outlet
  *
  * @param ground rows, air and settings
  * @param document leakage classes of the design and of its rows; surfaces in [m2], pressures in [Pa]
@@ -38,7 +42,7 @@ export interface Settled {
  * @check fixtures/published/leakage.json
  */
 export function settle(ground: PassGround, document: DesignDocument): Settled | readonly Problem[] {
-	const leaking = leakingRows(ground.network.rows, document);
+	const leaking = leakingRows(document);
 	if (leaking.length === 0) {
 		const pass = workPass(ground, null);
 		return isProblems(pass) ? pass : { pass, leaks: null, sum: null, isSettled: true };
@@ -49,9 +53,9 @@ export function settle(ground: PassGround, document: DesignDocument): Settled | 
 		if (isProblems(pass)) return pass;
 		const next = new Float64Array(leaks.length);
 		for (const { place, tightness, surface } of leaking) {
-			const [near = 0, far = 0] = pass.rowLosses[place]?.staticPressure ?? [];
+			const row = pass.rowLosses[place];
 			try {
-				next[place] = leakageFlow(tightness, surface, (near + far) / 2);
+				next[place] = row ? leakageFlow(tightness, surface, ductPressure(row)) : 0;
 			} catch (error) {
 				return [outsideProblem(error, ['rows', place, 'leakage'])];
 			}
@@ -61,21 +65,41 @@ export function settle(ground: PassGround, document: DesignDocument): Settled | 
 		const isSettled = change <= SETTLED * through;
 		if (isSettled || rounds === MOST_ROUNDS)
 			return { pass, leaks, sum: sumOf(leaks, leaking, document, rounds), isSettled };
-		leaks = next;
+		leaks = rounds < HALVED_FROM ? next : next.map((leak, at) => (leak + (leaks[at] ?? 0)) / 2);
 	}
+}
+
+/** Mean static pressure inside the duct [Pa]: the loss of an outlet is still before the air, that of a junction behind it. */
+export function ductPressure({
+	side,
+	totalPressure: [near, far],
+	junctionLoss,
+	outletLoss,
+	velocityPressure
+}: RowLoss) {
+	const inner = side === 'supply' ? outletLoss - junctionLoss : junctionLoss - outletLoss;
+	return (near + far + inner) / 2 - velocityPressure;
 }
 
 const isProblems = (found: Pass | readonly Problem[]): found is readonly Problem[] => Array.isArray(found);
 
-function leakingRows(rows: readonly DesignRow[], document: DesignDocument): readonly Leaking[] {
-	return rows.flatMap((row, place) => {
+function leakingRows(document: DesignDocument): readonly Leaking[] {
+	return document.rows.flatMap((row, place) => {
 		const named = row.leakage ?? document.leakage;
 		if (!named) return [];
 		const tightness = named.cl !== undefined ? { CL: named.cl } : findLeakageClass(named.class ?? '');
 		if (!tightness) return [];
-		const surface = sectionOf(row.size).perimeter * (row.length + (row.flexible?.length ?? 0));
+		const surface = sectionOf(metalSize(row)).perimeter * (row.length + (row.flexible?.length ?? 0));
 		return [{ place, tightness, surface }];
 	});
+}
+
+/** A liner lies inside the metal, and it is the metal that leaks. */
+function metalSize({ size, lining }: DesignRow): RowSize {
+	if (lining === undefined || lining.sizeIs === 'metal') return size;
+	const both = 2 * lining.thickness;
+	if (size.shape === 'round') return { ...size, diameter: size.diameter + both };
+	return { ...size, width: size.width + both, height: size.height + both };
 }
 
 /** The fan's flow is put in by `solveDesign`, which knows both sides. */

@@ -44,7 +44,7 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	const problems: Problem[] = [];
 	const hydraulics: Hydraulics[] = [];
 	network.rows.forEach((row, place) => {
-		const air = airs[place] ?? { ...settings.air, temperature: null, condenses: false };
+		const air = airs[place] ?? { ...settings.air, temperature: null, relativeHumidity: null, condenses: false };
 		const far = flows.farEnd[place] ?? 0;
 		const flow = leaks ? (far + (flows.fanEnd[place] ?? 0)) / 2 : far;
 		const found = orProblem(() => hydraulicsOf(row, flow, air, settings), place);

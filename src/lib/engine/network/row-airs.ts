@@ -6,6 +6,8 @@ import type { Network } from './network';
 export interface RowAir extends AirState {
 	/** Where it differs from that of the design [degC]. */
 	readonly temperature: number | null;
+	/** 0 to 1; null where the air is given by its density. */
+	readonly relativeHumidity: number | null;
 	/** Colder than the dew point of the design's air. */
 	readonly condenses: boolean;
 }
@@ -22,9 +24,11 @@ export interface RowAir extends AirState {
  * @check fixtures/published/air.json
  */
 export function rowAirs({ rows, parents, order }: Network, document: DesignDocument, air: AirState): readonly RowAir[] {
-	const own: RowAir = { density: air.density, viscosity: air.viscosity, temperature: null, condenses: false };
-	const airs = new Array<RowAir>(rows.length).fill(own);
 	const condition = document.air;
+	const relativeHumidity = 'density' in condition ? null : (condition.relativeHumidity ?? 0);
+	const { density, viscosity } = air;
+	const own: RowAir = { density, viscosity, temperature: null, relativeHumidity, condenses: false };
+	const airs = new Array<RowAir>(rows.length).fill(own);
 	if ('density' in condition) return airs;
 	const known = new Map<number, RowAir>();
 	for (const place of order) {
@@ -35,7 +39,10 @@ export function rowAirs({ rows, parents, order }: Network, document: DesignDocum
 			continue;
 		}
 		let there = known.get(named);
-		if (!there) known.set(named, (there = { ...airAtTemperature(condition, named), temperature: named }));
+		if (!there) {
+			const { note: _note, ...state } = airAtTemperature(condition, named);
+			known.set(named, (there = { ...state, temperature: named }));
+		}
 		airs[place] = there;
 	}
 	return airs;

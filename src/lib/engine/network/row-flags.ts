@@ -66,6 +66,7 @@ export function rowFlags(
 			message: 'This row meets the fan, where no stream divides or unites: its junction is not counted.',
 			basis: 'a junction stands where a row joins another'
 		});
+	reversedFlag(row, solved, flags);
 	if (solved.loss < 0)
 		flags.push({
 			rule: 'negative-loss',
@@ -87,6 +88,23 @@ export function rowFlags(
 			threshold: row.length + flexible,
 			basis: 'geometry'
 		});
+}
+
+/** The law of leakage knows no direction: it is counted as escaping from supply and entering all other ducts. */
+function reversedFlag({ tag, side }: DesignRow, { leakage = 0, leakagePressure = 0 }: RowLoss, flags: Flag[]): void {
+	if (leakage === 0 || (side === 'supply') === leakagePressure > 0) return;
+	flags.push({
+		rule: 'leakage-reversed',
+		row: tag,
+		severity: 'note',
+		message:
+			side === 'supply'
+				? 'The static pressure here is below that around the duct: air is drawn in, but counted as escaping.'
+				: 'The static pressure here is above that around the duct: air escapes, but is counted as drawn in.',
+		value: leakagePressure,
+		threshold: 0,
+		basis: 'leakage follows the static pressure; its amount is counted by magnitude'
+	});
 }
 
 function above(

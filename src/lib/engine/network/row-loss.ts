@@ -15,9 +15,13 @@ import type { Settings } from './settings';
 import { thermalGravity } from './thermal-gravity';
 
 /** A row solved but for its place in the network: `placePressures` fills in what depends on the others. */
-export type RowLoss = Omit<SolvedRow, 'totalPressure' | 'staticPressure' | 'spare' | 'leakage' | 'flowEnds'> & {
+export type RowLoss = Omit<
+	SolvedRow,
+	'totalPressure' | 'staticPressure' | 'spare' | 'leakage' | 'flowEnds' | 'leakagePressure'
+> & {
 	leakage?: number;
 	flowEnds?: readonly [number, number];
+	leakagePressure?: number;
 	totalPressure: readonly [number, number];
 	staticPressure: readonly [number, number];
 	spare: number;

@@ -3,7 +3,7 @@ import { locate } from '../document/fault';
 import { ENGINE_VERSION } from '../version';
 import { fanDuty, totalsOf } from './fan-duty';
 import { flagsOf } from './flags';
-import { settle } from './leakage';
+import { ductPressure, settle } from './leakage';
 import { massBalanceOf } from './mass-balance';
 import { buildNetwork, type Network } from './network';
 import { outsideProblem } from './pass';
@@ -37,6 +37,7 @@ export function solveDesign(document: DesignDocument): SolveResult {
 		rowLosses.forEach((row, place) => {
 			row.leakage = leaks[place] ?? 0;
 			row.flowEnds = [flows.fanEnd[place] ?? 0, flows.farEnd[place] ?? 0];
+			row.leakagePressure = ductPressure(row);
 		});
 
 	const totals = totalsOf(network, flows.fanEnd);
