@@ -149,6 +149,10 @@ export const rowSchema = open({
 	flexible: flexibleSchema.optional(),
 	lining: liningSchema.optional(),
 	leakage: leakageSchema.optional(),
+	pressureClass: either(
+		LIMITS.loss,
+		'static pressure that the ductwork is built for, Pa; negative for suction'
+	).optional(),
 	junction: junctionSchema.optional(),
 	fittings: z.array(fittingSchema).max(LIMITS.parts).optional(),
 	equipment: z.array(equipmentSchema).max(LIMITS.parts).optional(),
@@ -162,6 +166,38 @@ export const criteriaSchema = open({
 	flexibleLength: upTo(LIMITS.length, 'm, most').optional(),
 	damperAtOutlet: z.boolean().describe('every row with an outlet has a damper').optional(),
 	aspectRatio: z.number().min(1).max(1_000).describe('longer side to shorter, most').optional()
+});
+
+/** A check with a threshold of its own, or left out with a reason. */
+const checkSchema = open({
+	threshold: z.number().optional(),
+	off: open({ reason: text }).optional()
+});
+
+/** A finding that a person has looked at and lets stand. */
+const overrideSchema = open({
+	check: tag,
+	row: tag.nullable().describe('null: all that the check finds'),
+	reason: text,
+	by: text,
+	at: text.describe('date')
+});
+
+/** An allowance on the duty, by its name. */
+const marginSchema = open({
+	name: text,
+	of: z.enum(['flow', 'pressure']),
+	fraction: z.number().min(-0.9).max(10).optional(),
+	pressure: either(LIMITS.loss, 'Pa').optional(),
+	reason: text.optional()
+});
+
+/** What stands on the sheet beside the figures. */
+const recordSchema = open({
+	codes: text.describe('codes and their editions').optional(),
+	noiseCriterion: text.optional(),
+	originator: text.optional(),
+	checker: text.optional()
 });
 
 export const designSchema = open({
@@ -179,6 +215,10 @@ export const designSchema = open({
 	roughness: roughness.optional(),
 	material: material.optional(),
 	criteria: criteriaSchema.optional(),
+	checks: z.record(z.string(), checkSchema).describe('by the keys of the checks').optional(),
+	overrides: z.array(overrideSchema).max(LIMITS.rows).optional(),
+	margins: z.array(marginSchema).max(LIMITS.parts).optional(),
+	record: recordSchema.optional(),
 	methods: z
 		.record(z.string(), z.string())
 		.describe('for keys of the catalogue, the method that counts where a fitting names none')
