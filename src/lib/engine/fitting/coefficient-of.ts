@@ -1,7 +1,7 @@
 import { findDefinition, findJunction } from './catalogue';
-import type { Definition } from './definition';
+import type { Definition, ParameterValues } from './definition';
 import { readParameters } from './parameters';
-import type { CoefficientResult, FittingContext, FittingParameters, JunctionContext } from './types';
+import type { CatalogueEntry, CoefficientResult, FittingContext, FittingParameters, JunctionContext } from './types';
 
 /** Below this Reynolds number no source of the catalogue was measured. */
 const TURBULENT = 4_000;
@@ -69,20 +69,23 @@ function resultOf<Context>(
 	return {
 		coefficient: coefficient === 0 ? 0 : coefficient, // never -0
 		methodKey: rival?.key ?? entry.standardMethod ?? null,
-		...{ method, source, known, uncertainty },
-		parameters: Object.fromEntries(
-			entry.parameters.map(({ name, options, default: standard }) => [
-				name,
-				options === undefined
-					? values.number(name)
-					: typeof standard === 'number'
-						? Number(values.choice(name))
-						: values.choice(name)
-			])
-		),
+		method,
+		source,
+		known,
+		uncertainty,
+		parameters: parametersAsUsed(entry, values),
 		inRange: notes.length === 0,
 		rangeNote: notes.length === 0 ? null : notes.join('; ')
 	};
+}
+
+function parametersAsUsed(entry: CatalogueEntry, values: ParameterValues): Record<string, number | string> {
+	const used: Record<string, number | string> = {};
+	for (const { name, options, default: standard } of entry.parameters) {
+		if (options === undefined) used[name] = values.number(name);
+		else used[name] = typeof standard === 'number' ? Number(values.choice(name)) : values.choice(name);
+	}
+	return used;
 }
 
 /** The Reynolds number is told once: a note on the range of a formula may have told it already. */
