@@ -16,6 +16,7 @@ export interface PlotSpec {
 	readonly height: number;
 	/** Room at the right for the names of the curves */
 	readonly nameRoom: number;
+	readonly printed?: readonly { readonly x: number; readonly C: number }[];
 	readonly canBeLog: boolean;
 	readonly isAngle?: boolean;
 	/** Name of the course that sets the scale; others may run off it */
@@ -148,6 +149,9 @@ export function drawnPlot(given: PlotSpec): Plot {
 		zero: !yAxis.isLog && yAxis.from < 0 ? y(0) : null,
 		hatched: spec.outside.map(([from, to]) => [x(from), x(to)] as const).filter(([from, to]) => to - from > 1),
 		curves,
+		marks: (spec.printed ?? [])
+			.filter((one) => one.x >= xAxis.from && one.x <= xAxis.to && one.C >= yAxis.from && one.C <= yAxis.to)
+			.map((one) => [x(one.x), y(one.C)] as const),
 		note: spec.note
 	};
 }

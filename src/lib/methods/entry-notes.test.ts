@@ -85,6 +85,28 @@ describe('the method notes', () => {
 		}
 	);
 
+	it('put the marks of printed figures on one of the curves', () => {
+		const away = ([x, y]: readonly [number, number], path: string) => {
+			const places = placesOf(path);
+			const distances = places.slice(1).map(([x2, y2], i) => {
+				const [x1, y1] = places[i] ?? [x2, y2];
+				const length = (x2 - x1) ** 2 + (y2 - y1) ** 2;
+				const share = Math.max(0, Math.min(1, ((x - x1) * (x2 - x1) + (y - y1) * (y2 - y1)) / length));
+				return Math.hypot(x - x1 - share * (x2 - x1), y - y1 - share * (y2 - y1));
+			});
+			return Math.min(...distances);
+		};
+		let marks = 0;
+		for (const { plots, entry } of catalogue.map(entryNote))
+			for (const plot of plots)
+				for (const mark of plot.marks) {
+					const nearest = Math.min(...plot.curves.map(({ path }) => away(mark, path)));
+					expect(nearest, `${entry.key} at ${read(plot.x.ticks, mark[0])}`).toBeLessThan(5);
+					marks += 1;
+				}
+		expect(marks).toBeGreaterThan(40);
+	});
+
 	it('draw both legs of a tee where the engine has them', () => {
 		const tee = catalogue.find(({ key }) => key === 'tee');
 		if (!tee) throw new Error('no tee');

@@ -2,6 +2,7 @@ import { coefficientOf, type CatalogueEntry, type FittingParameter } from '$lib/
 import { drawnPlot } from './drawn-plot';
 import { methodName } from './method-name';
 import type { Course, Plot } from './plot';
+import { printedPoints } from './printed-points';
 import { typicalRow } from './typical-row';
 
 type Values = Readonly<Record<string, number | string>>;
@@ -99,13 +100,23 @@ export function fittingPlot(entry: CatalogueEntry): Plot | null {
 			points: points.map(({ x, C, inRange }) => ({ x, C: inRange || !answered ? C : null }))
 		};
 	});
+	const free = variants.flatMap(({ values }) => Object.keys(values));
+	const printed = printedPoints(entry, along.name, at, free);
 	return drawnPlot({
 		title: `Coefficient over ${lowered(along.label)}`,
 		xName: along.unit === '' ? along.label : `${along.label}, ${along.unit === '°' ? 'degrees' : along.unit}`,
 		yName: `C, on the velocity pressure of ${entry.reference === 'row' ? 'the row' : `the ${entry.reference}`}`,
-		note: [words, othersInWords(entry, along, at), restInWords(asked)].filter((text) => text !== '').join('; '),
+		note: [
+			words,
+			othersInWords(entry, along, at),
+			restInWords(asked),
+			printed.length > 0 ? '+ printed in a source' : ''
+		]
+			.filter((text) => text !== '')
+			.join('; '),
 		courses,
 		outside: gapsOf(asked[0] ?? []),
+		printed,
 		...{ from, to, width: 430, height: 270, nameRoom: variants.length > 1 ? 104 : 12, canBeLog: true },
 		isAngle: along.unit === '°'
 	});

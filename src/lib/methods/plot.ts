@@ -28,6 +28,8 @@ export interface Plot {
 	/** Widths in which the source of the standard method gives no answer */
 	readonly hatched: readonly (readonly [from: number, to: number])[];
 	readonly curves: readonly PlotCurve[];
+	/** Printed figures, as marks */
+	readonly marks: readonly (readonly [x: number, y: number])[];
 	/** What holds for the whole plot: the duct, and what is not drawn */
 	readonly note: string;
 }

@@ -1,23 +1,7 @@
 import { Given, publishedEvaluator, subjectsOfTopic, type Answer } from '$lib/engine';
 import { figureText } from './axis';
 import { givenInWords, partInWords } from './given-in-words';
-
-interface Check {
-	readonly id: string;
-	readonly topic: string;
-	readonly inputs: Readonly<Record<string, unknown>>;
-	readonly expected: unknown;
-	readonly unit?: string;
-	readonly tolerance: { readonly type: string; readonly value: number };
-	readonly source: string;
-	readonly certainty: string;
-}
-
-interface PublishedFile {
-	readonly checks?: readonly Check[];
-	readonly notCovered?: readonly { readonly id: string; readonly reason: string }[];
-	readonly printedShort?: readonly { readonly id: string; readonly halfUnit: number }[];
-}
+import { publishedFiles, type Check, type PublishedFile } from './published-files';
 
 /** One published figure beside ours. */
 export interface PublishedValue {
@@ -41,9 +25,6 @@ export interface PublishedGroup {
 	readonly certainty: string;
 	readonly values: readonly PublishedValue[];
 }
-
-// The figures that the tests compare are shown too: they are data of the page, read here alone.
-const files = import.meta.glob<PublishedFile>('/fixtures/published/*.json', { eager: true, import: 'default' });
 
 type Part = readonly [part: string, value: number];
 
@@ -93,13 +74,14 @@ function valuesOf(check: Check, file: PublishedFile): readonly PublishedValue[] 
 /** The published figures that speak of a subject, those of one source together. */
 export function publishedGroups(subject: string): readonly PublishedGroup[] {
 	const groups = new Map<string, { topic: string; source: string; certainty: string; values: PublishedValue[] }>();
-	for (const file of Object.values(files))
+	for (const file of publishedFiles)
 		for (const check of file.checks ?? []) {
 			const { topic, source, certainty } = check;
 			if (!subjectsOfTopic(topic).includes(subject)) continue;
 			const key = `${topic} ${source} ${certainty}`;
 			const group = groups.get(key) ?? { topic, source, certainty, values: [] };
-			group.values.push(...valuesOf(check, file));
+			// Several files may hold the same check.
+			if (!group.values.some(({ id }) => id.split(' ')[0] === check.id)) group.values.push(...valuesOf(check, file));
 			groups.set(key, group);
 		}
 	return [...groups.values()];
@@ -108,7 +90,7 @@ export function publishedGroups(subject: string): readonly PublishedGroup[] {
 /** Topics of the published figures, and how many checks each has. */
 export function publishedTopics(): ReadonlyMap<string, number> {
 	const counts = new Map<string, number>();
-	for (const file of Object.values(files))
+	for (const file of publishedFiles)
 		for (const { topic } of file.checks ?? []) counts.set(topic, (counts.get(topic) ?? 0) + 1);
 	return counts;
 }

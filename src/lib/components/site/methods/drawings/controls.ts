@@ -85,7 +85,9 @@ export function screen(key: string): PartFigure {
 	const board = duct(key, 60, 'A');
 	for (let y = Y - 54; y <= Y + 54; y += 12) board.add('solid', ring([140, y], 3));
 	board.add('joint', line([140, Y - 60], [140, Y + 60]));
-	return streams(board, 152, 12, 5).figure(196);
+	return streams(board, 152, 12, 5)
+		.letter([214, Y - 42], 'A_f')
+		.figure(196);
 }
 
 /** Small streams behind openings. */
@@ -104,7 +106,7 @@ export function plate(key: string): PartFigure {
 	const [x, width] = thick ? [134, 26] : [143, 5];
 	for (let i = 0; i < 6; i += 1)
 		board.add('solid', box(x, Y - half + i * 24 - (i === 0 ? 0 : 6), width, i === 0 || i === 5 ? 6 : 12));
-	streams(board, x + width + 8, 12, 5);
+	streams(board, x + width + 8, 12, 5).letter([222, Y - 42], 'A_f');
 	if (thick) {
 		board.dimension([x, Y + half], [x + width, Y + half], 't', [0, 20]);
 		board

@@ -165,7 +165,7 @@ export function offset(key: string): PartFigure {
 		.dimension([20, 153], [20, 199], section === 'rectangular' ? 'W' : 'D', [18, 0])
 		.dimension(a, b, 'L', [-34 * Math.SQRT1_2, -34 * Math.SQRT1_2])
 		.add('thin', line(turn, [turn[0] + 74, turn[1]]))
-		.angle(turn, 62, 0, -45, 'θ', 12)
+		.angle(turn, 62, 0, -45, 'θ', 12, 0.3)
 		.flow([52, 176], 0, '', 30)
 		.figure();
 }
