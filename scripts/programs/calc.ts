@@ -1,11 +1,24 @@
 import { readFileSync } from 'node:fs';
-import { designJsonSchema, solveDesign, validateDocument, type Problem } from '$lib/engine';
+import {
+	checksOf,
+	designJsonSchema,
+	marginLedger,
+	ROW_FIGURES,
+	solveDesign,
+	validateDocument,
+	workingOf,
+	type DesignDocument,
+	type Problem,
+	type Solution
+} from '$lib/engine';
 import { csvOf } from './calc/solution-csv';
 import { whereJsonBreaks } from './calc/json-fault';
 import { write } from './calc/write';
 
-const USAGE = 'usage: npm run --silent calc -- FILE [--csv] [--installed] | --schema   (FILE - is standard input)';
-const FLAGS: readonly string[] = ['--csv', '--installed', '--schema'];
+const USAGE =
+	'usage: npm run --silent calc -- FILE [--csv | --checks | --working=FIGURE] [--installed] | --schema   (FILE - is standard input)';
+const FLAGS: readonly string[] = ['--csv', '--checks', '--installed', '--schema'];
+const WORKING = /^--working=(.+)$/;
 
 /** Status of a document, or a command, that cannot be used. */
 const BAD = 2;
@@ -19,13 +32,14 @@ const NOT_HERE = 3;
  * @returns exit status: 0 solved, 2 bad document or command, 3 not in this version
  */
 export function calc(words: readonly string[]): number {
-	const unknown = words.find((word) => word.startsWith('-') && word !== '-' && !FLAGS.includes(word));
+	const isFlag = (word: string) => FLAGS.includes(word) || WORKING.test(word);
+	const unknown = words.find((word) => word.startsWith('-') && word !== '-' && !isFlag(word));
 	if (unknown !== undefined) return refuse(`${unknown}: no such flag; ${USAGE}`);
 	if (words.includes('--schema')) {
 		write(1, `${JSON.stringify(designJsonSchema(), null, 2)}\n`);
 		return 0;
 	}
-	const files = words.filter((word) => !FLAGS.includes(word));
+	const files = words.filter((word) => !isFlag(word));
 	const [file] = files;
 	if (file === undefined || files.length > 1) return refuse(`${files.length} files named, not one; ${USAGE}`);
 	if (words.includes('--installed')) {
@@ -42,9 +56,39 @@ export function calc(words: readonly string[]): number {
 	if (!validated.ok) return refuseAll(validated.problems);
 	const solved = solveDesign(validated.document);
 	if (!solved.ok) return refuseAll(solved.problems);
-	const csv = words.includes('--csv');
-	write(1, csv ? csvOf(solved.solution) : `${JSON.stringify(solved.solution, null, 2)}\n`);
+	const { document } = validated;
+	const { solution } = solved;
+	const wanted = words.flatMap((word) => WORKING.exec(word)?.[1] ?? []);
+	if (wanted.length > 0) {
+		const workings = wanted.map((name) => [name, workingNamed(document, solution, name)] as const);
+		const lacking = workings.find(([, working]) => working === null);
+		if (lacking) return refuse(`${lacking[0]}: the solution has no such figure that is worked`);
+		write(
+			1,
+			`${JSON.stringify(
+				workings.map(([, working]) => working),
+				null,
+				2
+			)}\n`
+		);
+	} else if (words.includes('--checks')) {
+		const checks = { checks: checksOf(document, solution), margins: marginLedger(document, solution) };
+		write(1, `${JSON.stringify(checks, null, 2)}\n`);
+	} else write(1, words.includes('--csv') ? csvOf(solution) : `${JSON.stringify(solution, null, 2)}\n`);
 	return 0;
+}
+
+/** `rows.S05.loss`, `paths.S05.spare` or `fan.totalPressure`; a tag may hold points. */
+function workingNamed(document: DesignDocument, solution: Solution, name: string) {
+	const [, holder = '', tag = '', figure = ''] = /^(rows|paths|fan)\.(?:(.+)\.)?(\w+)$/.exec(name) ?? [];
+	if (holder === 'fan') {
+		const fan = (['totalPressure', 'supplyPressure', 'returnPressure'] as const).find((one) => one === figure);
+		return fan ? workingOf(document, solution, { fan }) : null;
+	}
+	if (holder === 'paths')
+		return figure === 'loss' || figure === 'spare' ? workingOf(document, solution, { path: tag, figure }) : null;
+	const ofRow = ROW_FIGURES.find((one) => one === figure);
+	return ofRow ? workingOf(document, solution, { row: tag, figure: ofRow }) : null;
 }
 
 function textOf(file: string): string | null {

@@ -7,6 +7,7 @@ import fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { whereJsonBreaks } from '../../../scripts/programs/calc/json-fault';
 import { solutionOf } from '../../../tests/engine/any-design';
+import { checksOf, marginLedger, type DesignDocument } from '.';
 
 const root = fileURLToPath(new URL('../../..', import.meta.url));
 const networks = join(root, 'fixtures', 'networks');
@@ -46,6 +47,29 @@ describe('the calc command', () => {
 		const { stdout } = calc([hood]);
 		expect(calc(['-'], text)).toEqual({ status: 0, stdout, stderr: '' });
 		expect(calc(['-'], `\uFEFF${text}`).stdout).toBe(stdout);
+	});
+
+	it('prints the checks with the margins', () => {
+		const { status, stdout, stderr } = calc([hood, '--checks']);
+		expect([status, stderr]).toEqual([0, '']);
+		const { checks, margins } = JSON.parse(stdout) as { checks: { key: string; outcome: string }[]; margins: object };
+		const document = JSON.parse(readFileSync(hood, 'utf8')) as DesignDocument;
+		expect({ checks, margins }).toEqual({
+			checks: checksOf(document, solutionOf(document)),
+			margins: marginLedger(document, solutionOf(document))
+		});
+	});
+
+	it('prints the working of figures, and names one that is not worked', () => {
+		const { fan, paths } = solutionOf(JSON.parse(readFileSync(hood, 'utf8')));
+		const outlet = paths[0]?.outlet ?? '';
+		const { status, stdout, stderr } = calc([hood, '--working=fan.totalPressure', `--working=rows.${outlet}.velocity`]);
+		expect([status, stderr]).toEqual([0, '']);
+		const [duty, velocity] = JSON.parse(stdout) as { figure: string; value: number; steps: object[] }[];
+		expect(duty?.value).toBe(fan.totalPressure);
+		expect(duty?.steps.length).toBeGreaterThan(8);
+		expect(velocity?.figure).toBe(`rows.${outlet}.velocity`);
+		expect(calc([hood, '--working=fan.colour'])).toMatchObject({ status: 2, stdout: '' });
 	});
 
 	it('prints one line for each row as CSV, units in the header', () => {
