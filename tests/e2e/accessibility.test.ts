@@ -40,6 +40,8 @@ const PAGES: readonly (readonly [name: string, path: string, signedIn: boolean])
 	['basis of design', '/designs/DESIGN/basis', true],
 	['versions', '/designs/DESIGN/versions', true],
 	['one version', '/designs/DESIGN/versions/1', true],
+	['ledger of one version', '/designs/DESIGN/versions/1?show=ledger', true],
+	['basis of one version', '/designs/DESIGN/versions/1?show=basis', true],
 	['hand-over', '/designs/DESIGN/hand-over', true],
 	['account', '/account', true]
 ];

@@ -162,7 +162,8 @@ describe('the path from sign-up to the PDF', () => {
 		await page.getByRole('button', { name: 'Save as P01' }).click();
 		await page.getByText('Saved as P01').waitFor();
 		await page.getByRole('link', { name: 'P01', exact: true }).click();
-		await page.getByRole('button', { name: 'Restore into the sheet' }).waitFor();
+		await page.getByText('the working sheet stands as this').waitFor();
+		expect(await page.getByRole('button', { name: 'Restore into the sheet' }).count()).toBe(0);
 		expect(await sheet.grid.getAttribute('aria-readonly')).toBe('true');
 		await page.waitForLoadState('networkidle');
 		await sheet.select('T1', 'size');
