@@ -1,7 +1,8 @@
 import { catalogue, fittingEntry, type CatalogueEntry } from '../fitting';
 import { findMaterial, materials } from '../friction';
-import { findLeakageClass, leakageClasses } from '../leakage';
+import { leakageClasses } from '../leakage';
 import { fault, isRecord, rowsOf, shown, textAt, type Step } from './fault';
+import { leakageClassOf } from './leakage-class-of';
 import type { Problem } from './types';
 
 /** Keys of a fitting that are no parameters of its kind. */
@@ -52,7 +53,7 @@ function leakageProblem(leakage: unknown, path: readonly Step[], problems: Probl
 	if (!isRecord(leakage)) return;
 	const key = textAt(leakage, 'class');
 	const known = leakageClasses.map((one) => one.key).join(', ');
-	if (key !== null && findLeakageClass(key) === null)
+	if (key !== null && leakageClassOf(key) === null)
 		problems.push(fault('unknown-leakage-class', [...path, 'class'], `is ${shown(key)}`, `one of ${known}`));
 	else if (key === null && leakage.cl === undefined)
 		problems.push(fault('unknown-leakage-class', path, 'names no class', `class, one of ${known}; or cl`));

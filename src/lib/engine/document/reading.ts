@@ -19,6 +19,11 @@ const UNITS: Readonly<Record<string, string>> = {
 	flow: 'm3/s',
 	atFlow: 'm3/s',
 	loss: 'Pa',
+	clean: 'Pa',
+	final: 'Pa',
+	testPressure: 'Pa',
+	thickness: 'm',
+	standardDensity: 'kg/m3',
 	pressure: 'Pa',
 	totalPressure: 'Pa',
 	frictionRate: 'Pa/m',
@@ -28,6 +33,7 @@ const UNITS: Readonly<Record<string, string>> = {
 	mainVelocity: 'm/s',
 	runOutVelocity: 'm/s'
 };
+const POINT = 'a pair [flow, loss]';
 const KINDS: Readonly<Record<string, string>> = {
 	object: 'an object',
 	array: 'a list',
@@ -35,7 +41,7 @@ const KINDS: Readonly<Record<string, string>> = {
 	number: 'a number',
 	int: 'a whole number',
 	boolean: 'true or false',
-	tuple: 'a pair [flow, total pressure]'
+	tuple: 'a pair of numbers'
 };
 
 /** What of the document breaks the schema: every key that is missing, of the wrong kind or out of bounds. */
@@ -101,6 +107,8 @@ function tooSmall(origin: string, minimum: number, path: readonly Step[], value:
 	if (origin === 'string') return ['text-length', 'is empty', 'some text'];
 	if (origin === 'array') {
 		if (key === 'rows') return ['no-rows', 'has no rows', 'at least one row'];
+		if (path.includes('points'))
+			return ['out-of-range', 'is too short', key === 'points' ? 'at least one point' : POINT];
 		return ['fan-curve', 'is too short', key === 'curve' ? 'at least two points' : 'a pair [flow, total pressure]'];
 	}
 	const expected = `at least ${minimum}${unitOf(key)}`;
@@ -117,6 +125,7 @@ function tooBig(origin: string, maximum: number, path: readonly Step[], value: u
 	if (origin === 'array') {
 		const count = Array.isArray(value) ? value.length : 0;
 		if (key === 'rows') return ['too-many-rows', `has ${count} rows`, `at most ${LIMITS.rows} rows`];
+		if (path.includes('points') && typeof key === 'number') return ['out-of-range', `has ${count} values`, POINT];
 		if (typeof key === 'number') return ['fan-curve', `has ${count} values`, 'a pair [flow, total pressure]'];
 		return ['too-many-parts', `has ${count} entries`, `at most ${maximum} entries`];
 	}

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { fittingEntry } from '../fitting';
 import { validateDocument } from './validate';
 import type { Problem } from './types';
 
@@ -9,6 +10,10 @@ const round = { shape: 'round', diameter: 0.3 };
 const first: Json = { id: 'r-1', tag: 'S1', joins: null, side: 'supply', size: round, length: 12 };
 const last: Json = { tag: 'S2', joins: 'S1', side: 'supply', size: round, length: 4, outlet: { flow: 0.3, loss: 25 } };
 const sound: Json = { format: 'evendraft/design@1', air: { temperature: 20 }, rows: [first, last] };
+
+/** Another author's method than that which stands. */
+const rivalOf = (key: string): string => fittingEntry(key)?.rivals?.[0]?.key ?? 'none';
+const [RIVAL, TEE_RIVAL] = [rivalOf('round-elbow-smooth'), rivalOf('tee')];
 
 const withRows = (...rows: unknown[]): Json => ({ ...sound, rows });
 const withFirst = (keys: Json): Json => withRows({ ...first, ...keys }, last);
@@ -27,7 +32,27 @@ describe('a sound document', () => {
 		if (result.ok) expect(result.document).not.toBe(sound);
 	});
 
-	it('may have keys of other versions', () => expect(problemsOf(withFirst({ leakage: { class: 'B' } }))).toEqual([]));
+	it('may have keys of other versions', () => expect(problemsOf(withFirst({ colour: 'red' }))).toEqual([]));
+
+	it.each<[string, Json]>([
+		['a leakage class', { leakage: { class: 'B' } }],
+		['a leakage class by its printed name', { leakage: { class: 'ATC 6' } }],
+		['an inch-pound leakage class', { leakage: { cl: 0 } }],
+		['a lining', { lining: { thickness: 0.025, sizeIs: 'metal' } }],
+		['compressed flexible duct', { flexible: { length: 2, compression: 0.3 } }],
+		["a maker's points", { equipment: [{ name: 'Coil', points: [[0.2, 12], [0.4, 41]] }] }], // prettier-ignore
+		['a filter', { equipment: [{ name: 'Filter', filter: { clean: 60, final: 200, state: 'mean' } }] }],
+		['a temperature', { temperature: 14 }],
+		['a rival method', { fittings: [{ kind: 'round-elbow-smooth', method: RIVAL }] }]
+	])('may have %s', (_what, keys) => expect(problemsOf(withFirst(keys))).toEqual([]));
+
+	it('may have a junction of the catalogue, its method chosen for all or for one', () => {
+		const tee = { kind: 'tee', leg: 'branch' };
+		expect(
+			problemsOf({ ...withLast({ junction: { ...tee, method: TEE_RIVAL } }), methods: { tee: TEE_RIVAL } })
+		).toEqual([]);
+		expect(problemsOf(withLast({ junction: { kind: 'fixed', coefficient: -0.1 } }))).toEqual([]);
+	});
 
 	it('may have a curve of the fan, given air and any side', () => {
 		const other = { ...last, tag: 'R1', joins: null, side: 'return' };
@@ -134,6 +159,102 @@ const bad: readonly (readonly [string, unknown, string, string])[] = [
 		withLast({ junction: { kind: 'fixed' } }),
 		'parameter-missing',
 		'rows[1].junction.coefficient'
+	],
+	[
+		'a fitting as a junction',
+		withLast({ junction: { kind: 'round-elbow-smooth' } }),
+		'unknown-fitting',
+		'rows[1].junction.kind'
+	],
+	['a junction as a fitting', withFitting({ kind: 'tee' }), 'unknown-fitting', 'rows[0].fittings[0].kind'],
+	[
+		'a leg that is none',
+		withLast({ junction: { kind: 'tee', leg: 'left' } }),
+		'unknown-key-value',
+		'rows[1].junction.leg'
+	],
+	[
+		'a strange word of a junction',
+		withLast({ junction: { kind: 'tee', wings: 2 } }),
+		'parameter-unknown',
+		'rows[1].junction.wings'
+	],
+	[
+		'a junction at no angle',
+		withLast({ junction: { kind: 'wye', angle: 400 } }),
+		'parameter-range',
+		'rows[1].junction.angle'
+	],
+	[
+		'a method of nobody',
+		withFitting({ kind: 'round-elbow-smooth', method: 'nobody' }),
+		'unknown-method',
+		'rows[0].fittings[0].method'
+	],
+	[
+		'a junction by nobody',
+		withLast({ junction: { kind: 'tee', method: 'nobody' } }),
+		'unknown-method',
+		'rows[1].junction.method'
+	],
+	['a method of nobody for all', { ...sound, methods: { tee: 'nobody' } }, 'unknown-method', 'methods.tee'],
+	['a method of no fitting', { ...sound, methods: { knot: 'idelchik' } }, 'unknown-fitting', 'methods.knot'],
+	[
+		'two straight legs at a node',
+		withRows(first, ...['S2', 'S3'].map((tag) => ({ ...last, tag, junction: { kind: 'tee', leg: 'straight' } }))),
+		'two-straight',
+		'rows[2].junction.leg'
+	],
+	[
+		'warmth of air by its density',
+		{ ...withFirst({ temperature: 30 }), air: { density: 1.2 } },
+		'temperature-unknown',
+		'rows[0].temperature'
+	],
+	[
+		'an unknown leakage class',
+		withFirst({ leakage: { class: 'Z' } }),
+		'unknown-leakage-class',
+		'rows[0].leakage.class'
+	],
+	['leakage of no class', { ...sound, leakage: {} }, 'unknown-leakage-class', 'leakage'],
+	[
+		'a lining that fills its duct',
+		withFirst({ lining: { thickness: 0.15, sizeIs: 'metal' } }),
+		'lining-fills',
+		'rows[0].lining.thickness'
+	],
+	[
+		'a lining of an unknown side',
+		withFirst({ lining: { thickness: 0.02, sizeIs: 'outer' } }),
+		'unknown-key-value',
+		'rows[0].lining.sizeIs'
+	],
+	[
+		'flexible duct pressed to nothing',
+		withFirst({ flexible: { length: 1, compression: 0.9 } }),
+		'out-of-range',
+		'rows[0].flexible.compression'
+	],
+	['equipment without a loss', withFirst({ equipment: [{ name: 'x' }] }), 'loss-missing', 'rows[0].equipment[0].loss'],
+	[
+		'equipment with two losses',
+		withFirst({ equipment: [{ name: 'x', loss: 5, points: [[1, 2]] }] }),
+		'loss-missing',
+		'rows[0].equipment[0].loss'
+	],
+	[
+		'points that fall',
+		withFirst({ equipment: [{ name: 'x', points: [[1, 20], [2, 10]] }] }), // prettier-ignore
+		'out-of-range',
+		'rows[0].equipment[0].points[1]'
+	],
+	['no points', withFirst({ equipment: [{ name: 'x', points: [] }] }), 'out-of-range', 'rows[0].equipment[0].points'],
+	[
+		'a filter cleaner when dirty',
+		withFirst({ equipment: [{ name: 'x', filter: { clean: 90, final: 40, state: 'mean' } }] }),
+		'out-of-range',
+		'rows[0].equipment[0].filter.final'
 	],
 	['equipment without a name', withFirst({ equipment: [{ loss: 5 }] }), 'missing', 'rows[0].equipment[0].name'],
 	[

@@ -1,5 +1,6 @@
+import { leakageClassOf } from '../document/leakage-class-of';
 import type { DesignDocument, DesignRow, LeakageSum, Problem, RowSize } from '../document/types';
-import { allowableLeakage, findLeakageClass, leakageFlow, type Tightness } from '../leakage';
+import { allowableLeakage, leakageFlow, type Tightness } from '../leakage';
 import { sectionOf } from '../shape';
 import { outsideProblem, workPass, type Pass, type PassGround } from './pass';
 import type { RowLoss } from './row-loss';
@@ -87,7 +88,7 @@ function leakingRows(document: DesignDocument): readonly Leaking[] {
 	return document.rows.flatMap((row, place) => {
 		const named = row.leakage ?? document.leakage;
 		if (!named) return [];
-		const tightness = named.cl !== undefined ? { CL: named.cl } : findLeakageClass(named.class ?? '');
+		const tightness = named.cl !== undefined ? { CL: named.cl } : leakageClassOf(named.class ?? '');
 		if (!tightness) return [];
 		const surface = sectionOf(metalSize(row)).perimeter * (row.length + (row.flexible?.length ?? 0));
 		return [{ place, tightness, surface }];
