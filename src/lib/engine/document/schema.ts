@@ -114,7 +114,7 @@ export const flexibleSchema = open({
 	factor: upTo(100, "times the row's own rigid friction rate; 4 if absent").optional(),
 	compression: upTo(
 		STRETCH.max,
-		'what is missing of the stretched length, as a fraction; in place of the factor'
+		'what is missing of the stretched length, as a fraction; in place of the factor, on the rate of stretched duct'
 	).optional()
 });
 

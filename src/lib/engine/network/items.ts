@@ -9,7 +9,14 @@ import {
 	type CoefficientResult,
 	type LossPoint
 } from '../fitting';
-import { COLEBROOK_ROUGHNESS, flexibleStretchFactor, regime } from '../friction';
+import {
+	COLEBROOK_ROUGHNESS,
+	darcyWeisbach,
+	findMaterial,
+	flexibleStretchFactor,
+	frictionFactor,
+	regime
+} from '../friction';
 import type { CatalogueUses } from './catalogue-uses';
 import type { Hydraulics } from './hydraulics';
 import type { JunctionView } from './junction-views';
@@ -17,6 +24,7 @@ import type { JunctionView } from './junction-views';
 const BY_HAND = 'entered by hand';
 /** Times the rigid friction rate, where the design names no factor; illustrative, for a length not fully stretched. */
 const FLEXIBLE_FACTOR = 4;
+const STRETCHED_ROUGHNESS = findMaterial('flexible-extended')?.roughness ?? 0; // m
 
 /** A coefficient outside the range of its source, or used beside its purpose. */
 export interface RangeNote {
@@ -53,18 +61,25 @@ export function ductItem(
 
 export function flexibleItem(
 	{ length, factor, compression }: NonNullable<DesignRow['flexible']>,
-	{ frictionRate, hydraulicDiameter }: Hydraulics,
+	hydraulics: Hydraulics,
 	notes: RangeNote[]
 ): Item {
+	const { frictionRate, hydraulicDiameter } = hydraulics;
 	if (compression !== undefined && factor === undefined) {
 		const stretch = flexibleStretchFactor(hydraulicDiameter, compression);
 		if (stretch.note !== null) notes.push({ name: 'Flexible duct', inRange: false, note: stretch.note });
-		const source = 'Abushakra, Walker & Sherman (2004), by its compression, from memory; on the rigid friction rate';
-		return plainItem('flexible', 'Flexible duct', stretch.factor * frictionRate * length, source);
+		const source = 'Abushakra, Walker & Sherman (2004), by its compression, from memory; on the rate of stretched duct';
+		return plainItem('flexible', 'Flexible duct', stretch.factor * stretchedRate(hydraulics) * length, source);
 	}
 	const source =
 		factor === undefined ? `${FLEXIBLE_FACTOR} times the rigid rate: the program’s default, illustrative` : BY_HAND;
 	return plainItem('flexible', 'Flexible duct', (factor ?? FLEXIBLE_FACTOR) * frictionRate * length, source);
+}
+
+/** Friction rate of flexible duct that is fully stretched [Pa/m], in the section of the row. */
+function stretchedRate({ reynolds, hydraulicDiameter, air, velocity }: Hydraulics): number {
+	const factor = frictionFactor({ reynolds, relativeRoughness: STRETCHED_ROUGHNESS / hydraulicDiameter });
+	return darcyWeisbach(factor, 1, hydraulicDiameter, air.density, velocity);
 }
 
 /**
@@ -161,8 +176,14 @@ export function fittingItem(
 	}
 	const entry = fittingEntry(kind);
 	const name = fitting.name ?? entry?.name ?? kind;
-	const { reynolds, velocity, relativeRoughness, frictionFactor } = hydraulics;
-	const context = { size: row.size, reynolds, velocity, relativeRoughness, frictionFactor };
+	const { reynolds, velocity, relativeRoughness } = hydraulics;
+	const context = {
+		size: row.size,
+		reynolds,
+		velocity,
+		relativeRoughness,
+		frictionFactor: hydraulics.frictionFactor
+	};
 	const result = coefficientOf(kind, withMethod(fitting, methods), context);
 	noteRange(name, result, notes);
 	return {

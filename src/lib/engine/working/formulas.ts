@@ -144,8 +144,8 @@ const FORMULAS = {
 	},
 	'friction-loss': { expression: 'Δp = R L', source: 'Darcy–Weisbach', compute: (v) => n(v, 'R') * n(v, 'L') },
 	'flexible-loss': {
-		expression: 'Δp = k R L, k times the rigid friction rate',
-		source: 'Entered, or the program’s default',
+		expression: 'Δp = k R L, k times the friction rate of rigid duct, or of the same duct stretched',
+		source: 'Entered, the program’s default, or by its compression',
 		compute: (v) => n(v, 'k') * n(v, 'R') * n(v, 'L')
 	},
 	coefficient: {

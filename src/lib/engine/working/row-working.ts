@@ -242,21 +242,37 @@ export class RowWorking {
 		const { flexible } = this.row;
 		if (!flexible) return this.nothing(result.name);
 		const { factor, compression } = flexible;
-		const k =
-			factor === undefined && compression !== undefined
-				? this.chain.work(
-						'flexible-stretch',
-						{ symbol: 'k', name: this.of('Factor of the flexible duct'), unit: '' },
-						{ D: this.hydraulicDiameter(), compression: entered('Compression', compression) }
-					)
-				: factor === undefined
-					? standing('Times the rigid rate', 4)
-					: entered('Times the rigid rate', factor);
+		const isStretched = factor === undefined && compression !== undefined;
+		const k = isStretched
+			? this.chain.work(
+					'flexible-stretch',
+					{ symbol: 'k', name: this.of('Factor of the flexible duct'), unit: '' },
+					{ D: this.hydraulicDiameter(), compression: entered('Compression', compression) }
+				)
+			: factor === undefined
+				? standing('Times the rigid rate', 4)
+				: entered('Times the rigid rate', factor);
 		return this.chain.work('flexible-loss', result, {
 			k,
-			R: this.frictionRate(),
+			R: isStretched ? this.stretchedRate() : this.frictionRate(),
 			L: entered('Length of flexible duct', flexible.length, 'm')
 		});
+	}
+
+	/** Of flexible duct that is fully stretched, in the section of the row. */
+	private stretchedRate(): Ref {
+		const material = findMaterial('flexible-extended');
+		const ε = standing(`Roughness of ${material?.name ?? ''}`, material?.roughness ?? 0, 'm');
+		const ratio = { symbol: 'ε/Dh', name: this.of('Relative roughness of the stretched duct'), unit: '' };
+		const factor = { symbol: 'f', name: this.of('Friction factor of the stretched duct'), unit: '' };
+		const rate = { symbol: 'R', name: this.of('Friction rate of the stretched duct'), unit: 'Pa/m' };
+		const f = this.chain.work('friction-factor', factor, {
+			Re: this.reynolds(),
+			'ε/Dh': this.chain.work('relative-roughness', ratio, { ε, Dh: this.hydraulicDiameter() }),
+			c: standing('Laminar constant, round', 64)
+		});
+		const [Dh, ρ, V] = [this.hydraulicDiameter(), this.density(), this.velocity()];
+		return this.chain.work('friction-rate', rate, { f, Dh, ρ, V });
 	}
 
 	private items(part: Item['part']): readonly Item[] {
