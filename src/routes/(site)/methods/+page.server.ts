@@ -1,4 +1,4 @@
-import { ENGINE_VERSION, materials } from '$lib/engine';
+import { checkList, ENGINE_VERSION, materials, NOT_SHOWN } from '$lib/engine';
 import { familyNotes, publishedGroups } from '$lib/methods';
 import type { PageServerLoad } from './$types';
 
@@ -12,6 +12,8 @@ export const load: PageServerLoad = ({ locals }) => ({
 	families,
 	published,
 	materials,
+	checks: checkList,
+	notShown: NOT_SHOWN,
 	engineVersion: ENGINE_VERSION,
 	signedIn: locals.scope !== null
 });
