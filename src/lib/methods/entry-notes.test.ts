@@ -6,8 +6,11 @@ import type { Plot } from './plot';
 import { typicalRow } from './typical-row';
 
 const entries = catalogue.map((entry) => ({ key: entry.key, entry }));
+/** Numbers that a coefficient is computed from; where it is entered, from none. */
 const numeric = ({ parameters }: CatalogueEntry) =>
-	parameters.filter(({ options, name }) => options === undefined && name !== 'coefficient');
+	parameters.some(({ name }) => name === 'coefficient')
+		? []
+		: parameters.filter(({ options }) => options === undefined);
 
 /** The value at a place of an axis, read from its marks as a reader would. */
 function read(ticks: Plot['x']['ticks'], place: number): number {
@@ -63,7 +66,6 @@ describe('the method notes', () => {
 			if (!plot || !along || !isLinear(plot)) return;
 			const parameters = {
 				...(entry.reference === 'smaller leg' ? { leg: 'smaller' } : {}),
-				...(entry.parameters.some(({ name }) => name === 'coefficient') ? { coefficient: 1 } : {}),
 				...entry.plot?.at
 			};
 			const { context } = typicalRow(entry.shapes[0] ?? 'round');

@@ -23,10 +23,12 @@ const DRAWN = 200;
 /** A label within a sentence. */
 const lowered = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1);
 
-/** The numeric parameter along which an entry is plotted; a coefficient that is entered is none. */
+/** The numeric parameter along which an entry is plotted; none where the coefficient is entered. */
 export function plottedParameter({ plot, parameters }: CatalogueEntry): FittingParameter | null {
-	const numeric = parameters.filter(({ options, name }) => options === undefined && name !== 'coefficient');
-	return (plot && parameters.find(({ name }) => name === plot.along)) ?? numeric[0] ?? null;
+	const chosen = plot && parameters.find(({ name }) => name === plot.along);
+	if (chosen) return chosen;
+	if (parameters.some(({ name }) => name === 'coefficient')) return null;
+	return parameters.find(({ options }) => options === undefined) ?? null;
 }
 
 /** One curve for each rival method; without rivals one for each option of the first choice. */
@@ -60,7 +62,7 @@ function drawnRange(all: readonly (readonly Asked[])[], { min, max }: FittingPar
 	const from = Math.max(min, low - spare);
 	const rest = Math.max(...all.map(lastMove));
 	const to = Math.min(max, high + spare);
-	return [from, rest < from + (to - from) * 0.6 ? Math.min(to, from + (rest - from) * 1.5) : to];
+	return [from, rest > from && rest < from + (to - from) * 0.6 ? Math.min(to, from + (rest - from) * 1.5) : to];
 }
 
 /** The first x from which a course stays within 2 % of its end. */
@@ -77,8 +79,7 @@ export function fittingPlot(entry: CatalogueEntry): Plot | null {
 	if (!along) return null;
 	const { context, words } = typicalRow(shape);
 	const onSmaller: Values = entry.reference === 'smaller leg' ? { leg: 'smaller' } : {};
-	const entered: Values = entry.parameters.some(({ name }) => name === 'coefficient') ? { coefficient: 1 } : {};
-	const at: Values = { ...onSmaller, ...entered, ...entry.plot?.at };
+	const at: Values = { ...onSmaller, ...entry.plot?.at };
 	const ask = ({ values }: Variant, from: number, to: number, steps: number): Asked[] =>
 		Array.from({ length: steps + 1 }, (_, i) => {
 			const x = from + ((to - from) * i) / steps;

@@ -46,7 +46,7 @@ export function toward([x, y]: Point, degrees: number, distance: number): Point 
 export const at = ([x, y]: Point): string => `${short(x)} ${short(y)}`;
 export const line = (...points: readonly Point[]): string => `M${points.map(at).join('L')}`;
 export const ring = (centre: Point, r: number): string =>
-	`M${at(toward(centre, 180, r))}a${short(r)} ${short(r)} 0 1 0 ${short(2 * r)} 0a${short(r)} ${short(r)} 0 1 0 ${short(-2 * r)} 0z`;
+	`M${at(toward(centre, 180, r))}a${short(r)} ${short(r)} 0 1 1 ${short(2 * r)} 0a${short(r)} ${short(r)} 0 1 1 ${short(-2 * r)} 0z`;
 export const box = (x: number, y: number, width: number, height: number): string =>
 	`M${at([x, y])}h${short(width)}v${short(height)}h${short(-width)}z`;
 
