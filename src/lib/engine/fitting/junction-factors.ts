@@ -40,7 +40,7 @@ export function dividingFactor(q: number, a: number): number {
  * Factor of the straight leg where the stream divides.
  *
  *   tau = 0.4 for a <= 0.4; above, 2 (2q - 1) for q <= 0.5 and 0.3 (2q - 1) beyond
- *   Smoothed (ours): a 0.40 to 0.44, q 0.50 to 0.54
+ *   Smoothed (ours): a 0.40 to 0.44; at q = 0.5 it bends but does not jump
  *
  * @param q flow of the branch over that of the common leg [-], 0 to 1
  * @param a area of the branch over that of the common leg [-], above 0 to 1
@@ -49,6 +49,7 @@ export function dividingFactor(q: number, a: number): number {
  * @check fixtures/published/junctions-diverging.json
  */
 export function passageFactor(q: number, a: number): number {
-	const wide = mixed(2, 0.3, stepAbove(q, 0.5)) * (2 * q - 1);
+	// Both printed branches are 0 at q = 0.5: the factor bends there, and jumps nowhere.
+	const wide = (q <= 0.5 ? 2 : 0.3) * (2 * q - 1);
 	return mixed(0.4, wide, stepAbove(a, 0.4));
 }
