@@ -35,6 +35,7 @@ const HEADROOM = 1.3;
 const UNSEEN = 0.15;
 /** Least distance between two names */
 const NAME_STEP = 14;
+const NAME_WIDTH = 90;
 /** A curve that ends so far before the edge has its name beside it */
 const SHORT = 24;
 
@@ -115,11 +116,16 @@ function named(
 		frame.top,
 		frame.bottom
 	);
+	const taken: Place[] = [];
 	return drawn.map((curve) => {
 		if (!isNamed) return { ...curve, nameAt: null };
 		const [x, y] = curve.end;
-		if (isShort(curve)) return { ...curve, nameAt: y < frame.top + 30 ? [x + 5, y + 4] : [x + 4, y - 18] };
-		return { ...curve, nameAt: [frame.right + 15, heights[reaching.indexOf(curve)] ?? y] };
+		if (!isShort(curve)) return { ...curve, nameAt: [frame.right + 15, heights[reaching.indexOf(curve)] ?? y] };
+		let nameAt: Place = y < frame.top + 30 ? [x + 5, y + 4] : [x + 4, y - 18];
+		while (taken.some(([tx, ty]) => Math.abs(tx - nameAt[0]) < NAME_WIDTH && Math.abs(ty - nameAt[1]) < NAME_STEP))
+			nameAt = [nameAt[0], nameAt[1] - NAME_STEP];
+		taken.push(nameAt);
+		return { ...curve, nameAt };
 	});
 }
 
