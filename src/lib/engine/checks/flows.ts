@@ -12,16 +12,18 @@ export const flowChecks: readonly CheckDefinition[] = [
 		severity: 'fault',
 		threshold: null,
 		basis: PRACTICE('conservation of mass; leakage is its own line'),
-		test: ({ solution }) =>
-			foundOf(
+		test: ({ solution: { massBalance } }) => {
+			if (!massBalance) return notApplicable('Engine 1.0.0, which stored these figures, gave no balance of mass.');
+			return foundOf(
 				(['supply', 'return'] as const).flatMap((side) => {
-					const { fan, outlets, leakage } = solution.massBalance[side];
+					const { fan, outlets, leakage } = massBalance[side];
 					const open = Math.abs(fan - outlets - leakage);
 					return open <= ROUNDING * fan
 						? []
 						: [{ row: null, value: open, message: `The ${side} side does not close.` }];
 				})
-			)
+			);
+		}
 	},
 	{
 		key: 'sides-close',

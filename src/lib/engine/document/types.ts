@@ -252,10 +252,13 @@ export interface Solution {
 		readonly staticPressure: number | null; // Pa; null without a supply row
 	};
 	readonly totals: { readonly supplyFlow: number; readonly returnFlow: number };
-	/** Mass of air on each side [kg/s]: what passes the fan is what passes the outlets, and the leakage. */
-	readonly massBalance: { readonly supply: MassBalance; readonly return: MassBalance };
+	/**
+	 * Mass of air on each side [kg/s]: what passes the fan is what passes the outlets, and the leakage. Absent, as the
+	 * leakage is, in solutions that engine 1.0.0 has stored.
+	 */
+	readonly massBalance?: { readonly supply: MassBalance; readonly return: MassBalance };
 	/** Null without a leakage class. */
-	readonly leakage: LeakageSum | null;
+	readonly leakage?: LeakageSum | null;
 	readonly flags: readonly Flag[];
 }
 
