@@ -103,6 +103,13 @@ function nameHeights(ends: readonly number[], top: number, bottom: number): numb
 	return heights;
 }
 
+/** Rise over run of the last piece of a path. */
+function steepness(path: string): number {
+	const [, x1, y1, x2, y2] = /([\d.-]+) ([\d.-]+)L([\d.-]+) ([\d.-]+)$/.exec(path) ?? [];
+	const run = Number(x2) - Number(x1);
+	return run > 0 ? Math.abs((Number(y2) - Number(y1)) / run) : Infinity;
+}
+
 /** The names of the curves: at the right edge, or beside a curve that ends before it. */
 function named(
 	drawn: readonly Omit<PlotCurve, 'nameAt'>[],
@@ -121,7 +128,8 @@ function named(
 		if (!isNamed) return { ...curve, nameAt: null };
 		const [x, y] = curve.end;
 		if (!isShort(curve)) return { ...curve, nameAt: [frame.right + 15, heights[reaching.indexOf(curve)] ?? y] };
-		let nameAt: Place = y < frame.top + 30 ? [x + 5, y + 4] : [x + 4, y - 18];
+		// Beside a steep end there is room; a flat one lies among its neighbours.
+		let nameAt: Place = y < frame.top + 30 || steepness(curve.path) > 0.3 ? [x + 5, y] : [x + 4, y - 18];
 		while (taken.some(([tx, ty]) => Math.abs(tx - nameAt[0]) < NAME_WIDTH && Math.abs(ty - nameAt[1]) < NAME_STEP))
 			nameAt = [nameAt[0], nameAt[1] - NAME_STEP];
 		taken.push(nameAt);

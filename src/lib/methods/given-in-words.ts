@@ -43,6 +43,9 @@ export function givenInWords(inputs: Readonly<Record<string, unknown>>): string 
 /** Which figure of a check with several; for one alone its unit, if it has one. */
 export function partInWords(part: string, unit: string): string {
 	if (part !== '') return part.replaceAll('_', ' ');
-	const plain = unit.replace(/^-\s*/, '').replace(/^\((.*)\)$/, '$1');
+	const plain = unit
+		.replace(/^-\s*/, '')
+		.replace(/^\((.*)\)$/, '$1')
+		.replaceAll('_', ' ');
 	return plain === '' || plain.includes('Darcy') ? '' : plain;
 }

@@ -128,5 +128,6 @@ export function silentDirection(entry: CatalogueEntry): string | null {
 			`${WORDS[direction]}, nothing is drawn: ${asked.find(({ rangeNote }) => rangeNote)?.rangeNote ?? 'no source'}`
 		];
 	});
-	return silent.length > 0 ? silent.join('; ') : null;
+	const text = silent.join('; ');
+	return text === '' ? null : text.charAt(0).toUpperCase() + text.slice(1);
 }

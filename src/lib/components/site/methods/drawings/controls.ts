@@ -78,7 +78,7 @@ export function firedamper(key: string): PartFigure {
 	return board
 		.note([x + 30, Y + 90], 'wall', 'start')
 		.flow([100, Y + 16], 0, '', 36)
-		.figure(196);
+		.figure(206);
 }
 
 export function screen(key: string): PartFigure {
