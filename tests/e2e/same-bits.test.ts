@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { build } from 'vite';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { canonicalText, solveDesign, validateDocument } from '../../src/lib/engine';
@@ -5,6 +6,7 @@ import type { FirmScope } from '../../src/lib/server/auth/scope';
 import { openDesign } from '../../src/lib/server/designs/find-design';
 import { solveSheet } from '../../src/lib/sheet/solve-sheet';
 import { building } from '../bench/building';
+import { anyDesignOfStreams, isWithinRange } from '../engine/any-design';
 import { firm } from '../server/support/designs';
 import { demoDesigns, enterDemo, networks } from './support/fixtures';
 import { RunSheet } from './support/run-sheet';
@@ -33,6 +35,12 @@ beforeAll(async () => {
 	script = output?.output[0]?.code ?? '';
 });
 
+/** Made-up designs with all that a row can have, always the same. */
+const streams = fc
+	.sample(anyDesignOfStreams, { seed: 110, numRuns: 200 })
+	.filter((document) => document.rows.length > 8 && document.leakage !== undefined && isWithinRange(document))
+	.slice(0, 12);
+
 function solvedHere(document: unknown): string {
 	const read = validateDocument(document);
 	const solved = read.ok ? solveDesign(read.document) : read;
@@ -43,7 +51,8 @@ function solvedHere(document: unknown): string {
 describe('the engine in Chromium and in Node', () => {
 	const documents = [
 		...networks().map(({ name, document }) => [name, document] as const),
-		['a building of 500 rows', building(500)] as const
+		['a building of 500 rows', building(500)] as const,
+		...streams.map((document, at) => [`junctions, temperatures and leakage, ${at + 1}`, document] as const)
 	];
 
 	it.each(documents)('gives the same solution to the last bit for %s', async (_name, document) => {
