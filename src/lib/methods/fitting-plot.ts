@@ -111,7 +111,7 @@ export function fittingPlot(entry: CatalogueEntry): Plot | null {
 			words,
 			othersInWords(entry, along, at),
 			restInWords(asked),
-			printed.length > 0 ? '+ printed in a source' : ''
+			printed.length > 0 ? '+ check value of a source' : ''
 		]
 			.filter((text) => text !== '')
 			.join('; '),

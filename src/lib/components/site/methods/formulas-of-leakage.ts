@@ -3,7 +3,7 @@ import type { FormulaGroup } from './formula-note';
 export const LEAKAGE: FormulaGroup = {
 	id: 'leakage',
 	title: 'Leakage',
-	lead: 'Air that leaks through seams and joints, by the tightness class of the ductwork and its surface.',
+	lead: 'Air that leaks through seams and joints, by the tightness class of the ductwork, its surface and the mean static pressure in each row. Flows and leakage are worked in turn until they suit each other.',
 	formulas: [
 		{
 			name: 'Leakage of a class',

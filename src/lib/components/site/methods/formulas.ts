@@ -45,6 +45,21 @@ const NETWORK: FormulaGroup = {
 			source: 'The maker’s data that were entered'
 		},
 		{
+			name: 'Filters',
+			equation: 'Δp₀ = ½ (Δp₀ of the clean one + Δp₀ of the dirty one)',
+			where: 'The mean state; a filter counts as clean, mean or dirty, as entered',
+			range: 'As the maker states',
+			source: 'Common practice'
+		},
+		{
+			name: 'Loss at another density',
+			equation: 'Δp = Δp₀ ρ / ρ₀',
+			where: 'ρ₀ density for which the maker gives Δp₀ [kg/m³]',
+			range: 'One volume flow, exponent 2',
+			source: 'Common practice',
+			caution: 'Not applied to what is entered: a check says where the density is not that of makers’ data.'
+		},
+		{
 			name: 'Thermal gravity',
 			equation: 'Δp = g (ρ₀ − ρ) Δz',
 			where: 'ρ₀ density of the surroundings [kg/m³], Δz rise in the direction of flow [m], g = 9.80665 m/s²',
@@ -121,10 +136,17 @@ const FRICTION: FormulaGroup = {
 			name: 'Flexible duct',
 			equation: 'Δp = k R L',
 			where:
-				'R friction rate of the rigid duct [Pa/m], L length of flexible duct [m], k a factor that the designer gives; 4 if none is',
+				'R friction rate of the rigid duct [Pa/m], L length of flexible duct as installed [m], k a factor that the designer gives; 4 if neither it nor a compression is',
 			range: 'k is illustrative: it covers moderate compression',
 			source: 'Abushakra, Walker & Sherman (2004): about 4 times for moderate, near 10 times for severe compression',
 			caution: 'Flexible duct as built differs more than any formula. Look at it before trusting the figure.'
+		},
+		{
+			name: 'Flexible duct, compressed',
+			equation: 'k = 1 + 0.58 K e^{−0.00496 D},  K = 100 (1 − L / Lₑ)',
+			where: 'L length as installed [m], Lₑ fully stretched [m], D diameter [mm]; on the loss of the stretched duct',
+			range: 'D 150 to 400 mm; measured to K 30 %, with care to 45 %',
+			source: 'Abushakra, Walker & Sherman (2004) and Culp: handbook form, from memory; the abstract’s magnitudes agree'
 		}
 	]
 };
