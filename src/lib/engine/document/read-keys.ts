@@ -2,6 +2,7 @@ import {
 	criteriaSchema,
 	designSchema,
 	equipmentSchema,
+	filterSchema,
 	fanSchema,
 	fittingSchema,
 	flexibleSchema,
@@ -30,5 +31,6 @@ export const readKeys = {
 	lining: keysOf(liningSchema),
 	fitting: keysOf(fittingSchema),
 	equipment: keysOf(equipmentSchema),
+	filter: keysOf(filterSchema),
 	outlet: keysOf(outletSchema)
 } as const;

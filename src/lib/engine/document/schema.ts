@@ -80,6 +80,13 @@ export const junctionSchema = open({
 	toBeConfirmed: toBeConfirmed.optional()
 });
 
+/** A filter by its losses; they go with the flow itself, exponent 1, where none is named. */
+export const filterSchema = open({
+	clean: upTo(LIMITS.loss, 'Pa at atFlow'),
+	final: upTo(LIMITS.loss, 'Pa at atFlow, at which it is changed'),
+	state: z.enum(['clean', 'mean', 'dirty'])
+});
+
 export const equipmentSchema = open({
 	name: text,
 	loss: upTo(LIMITS.loss, 'total-pressure loss at atFlow, Pa; points or filter may stand in its place').optional(),
@@ -89,11 +96,7 @@ export const equipmentSchema = open({
 		.max(LIMITS.parts)
 		.describe("a maker's points, [flow, loss]")
 		.optional(),
-	filter: open({
-		clean: upTo(LIMITS.loss, 'Pa at atFlow'),
-		final: upTo(LIMITS.loss, 'Pa at atFlow, at which it is changed'),
-		state: z.enum(['clean', 'mean', 'dirty'])
-	}).optional(),
+	filter: filterSchema.optional(),
 	atFlow: flow.describe('m3/s; the design flow of the row if absent').optional(),
 	exponent: exponent.optional(),
 	toBeConfirmed: toBeConfirmed.optional()

@@ -15,6 +15,8 @@ const end: Json = {
 	outlet: { flow: 0.1, loss: 20 }
 };
 
+const FILTER = { clean: 40, final: 120, state: 'mean' };
+
 function flagsOf(keysOfMain: Json, keysOfEnd: Json = {}, keys: Json = {}, others: Json[] = []): readonly Flag[] {
 	const rows = [{ ...main, ...keysOfMain }, { ...end, ...keysOfEnd }, ...others];
 	return solutionOf({ format: 'evendraft/design@1', air: { density: 1.2 }, ...keys, rows }).flags;
@@ -57,6 +59,13 @@ describe('flags', () => {
 		['rise-exceeds-length M', { rise: -11 }, {}, {}],
 		['flexible-default E', {}, { flexible: { length: 2 } }, {}],
 		['damper-open-assumed E', {}, { fittings: [{ kind: 'damper-butterfly' }] }, {}],
+		['damper-open-assumed E', {}, { fittings: [{ kind: 'damper-gate' }] }, {}],
+		['fire-damper-caution M', { fittings: [{ kind: 'damper-fire-curtain' }] }, {}, {}],
+		['to-be-confirmed E', {}, { junction: { kind: 'fixed', coefficient: 0.2, toBeConfirmed: true } }, {}],
+		['to-be-confirmed E', {}, { outlet: { flow: 0.1, loss: 20, toBeConfirmed: true } }, {}],
+		['key-not-read E', {}, { junction: { kind: 'fixed', coefficient: 0.2, angle: 45 } }, {}],
+		['key-not-read M', { equipment: [{ name: 'Filter', filter: { ...FILTER, colour: 'G4' } }] }, {}, {}],
+		['junction-at-fan M', { junction: { kind: 'tee', leg: 'branch' } }, {}, {}],
 		['end-counted-twice E', {}, { fittings: [{ kind: 'exit-plain' }] }, {}],
 		['end-counted-twice E', {}, { fittings: [{ kind: 'entry-flush' }], outlet: { flow: 0.1 } }, {}],
 		['negative-duty null', {}, { outlet: { flow: 0.1, loss: 0, pressure: -80 } }, {}],
@@ -70,6 +79,20 @@ describe('flags', () => {
 		['key-not-read null', {}, {}, { air: { density: 1.2, temperature: 20 } }]
 	])('%s', (expected, keysOfMain, keysOfEnd, keys) => {
 		expect(brief(flagsOf(keysOfMain, keysOfEnd, keys))).toEqual([expected]);
+	});
+
+	it('read every parameter of a junction of the catalogue', () =>
+		expect(brief(flagsOf({}, { junction: { kind: 'wye', leg: 'branch', angle: 45 } }))).not.toContain(
+			'key-not-read E'
+		));
+
+	it('do not take a fire damper of the catalogue for one that balances, nor for one that stands at a setting', () => {
+		const fire = { fittings: [{ kind: 'damper-fire-curtain' }] };
+		const other: Json = { ...end, tag: 'F', fittings: [{ kind: 'damper-butterfly', angle: 10 }] };
+		expect(brief(flagsOf({}, fire, { criteria: { damperAtOutlet: true } }, [other]))).toEqual([
+			'fire-damper-caution E',
+			'damper-missing E'
+		]);
 	});
 
 	it('do not say that an end is counted twice where the outlet loses nothing', () =>

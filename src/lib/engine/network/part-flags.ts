@@ -25,7 +25,7 @@ export function partFlags(
 			basis: 'range of the source of the coefficient'
 		});
 
-	if (solved.items.some(isOpen)) {
+	if (hints.toBeConfirmed || row.junction?.toBeConfirmed === true || row.outlet?.toBeConfirmed === true) {
 		const open = solved.items.filter(isOpen).map((item) => item.name);
 		const names = [...new Set(open)];
 		flags.push({

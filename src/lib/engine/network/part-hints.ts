@@ -7,6 +7,8 @@ export interface PartHints {
 	readonly fireDamper: boolean;
 	/** A damper that balances is among them: not one that closes, or opens, by itself. */
 	readonly balances: boolean;
+	/** The value of a fitting or a piece of equipment is not settled. */
+	readonly toBeConfirmed: boolean;
 	/** A damper whose setting is not given, so that it counts as open. */
 	readonly openAssumed: boolean;
 	/** The first entry or exit of the catalogue: the end of a run. */
@@ -29,7 +31,7 @@ const DAMPER = /damper|\b(vcd|fsd)\b/i;
 const FIRE = /\b(fire|smoke|fsd)\b/i;
 const BY_ITSELF = /\b(fire|smoke|fsd|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
 const NOTHING: NameHint = { fireDamper: false, balances: false };
-const NONE: PartHints = { fireDamper: false, balances: false, openAssumed: false, end: null };
+const NONE: PartHints = { fireDamper: false, balances: false, toBeConfirmed: false, openAssumed: false, end: null };
 
 const ofKind: ReadonlyMap<string, KindHint> = new Map(catalogue.map((entry) => [entry.key, kindHint(entry)]));
 
@@ -56,10 +58,14 @@ export function partHints(): (row: DesignRow) => PartHints {
 	};
 	return ({ fittings, equipment }) => {
 		if (fittings === undefined && equipment === undefined) return NONE;
-		let [fireDamper, balances, openAssumed] = [false, false, false];
+		let fireDamper = false;
+		let balances = false;
+		let toBeConfirmed = false;
+		let openAssumed = false;
 		let end: CatalogueEntry | null = null;
 		if (fittings)
 			for (const one of fittings) {
+				toBeConfirmed ||= one.toBeConfirmed === true;
 				if (one.name !== undefined) {
 					const hint = ofName(one.name);
 					fireDamper ||= hint.fireDamper;
@@ -73,12 +79,13 @@ export function partHints(): (row: DesignRow) => PartHints {
 				if (kind.isEnd) end ??= kind.entry;
 			}
 		if (equipment)
-			for (const { name } of equipment) {
-				const hint = ofName(name);
+			for (const one of equipment) {
+				toBeConfirmed ||= one.toBeConfirmed === true;
+				const hint = ofName(one.name);
 				fireDamper ||= hint.fireDamper;
 				balances ||= hint.balances;
 			}
-		return { fireDamper, balances, openAssumed, end };
+		return { fireDamper, balances, toBeConfirmed, openAssumed, end };
 	};
 }
 

@@ -27,10 +27,14 @@ export function unreadKeyFlags(document: DesignDocument, flags: Flag[]): void {
 		look(row.flexible, readKeys.flexible, 'of the flexible duct', row.tag);
 		look(row.leakage, readKeys.leakage, 'of the leakage', row.tag);
 		look(row.lining, readKeys.lining, 'of the lining', row.tag);
-		look(row.junction, readKeys.junction, 'of the junction', row.tag);
+		// Of a kind of the catalogue every key is a parameter, and a strange one a problem.
+		if (row.junction?.kind === 'fixed') look(row.junction, readKeys.junction, 'of the junction', row.tag);
 		look(row.outlet, readKeys.outlet, 'of the outlet', row.tag);
 		for (const one of row.fittings ?? [])
 			if (one.kind === 'fixed') look(one, readKeys.fitting, 'of a fitting', row.tag);
-		for (const one of row.equipment ?? []) look(one, readKeys.equipment, 'of a piece of equipment', row.tag);
+		for (const one of row.equipment ?? []) {
+			look(one, readKeys.equipment, 'of a piece of equipment', row.tag);
+			look(one.filter, readKeys.filter, 'of a filter', row.tag);
+		}
 	}
 }
