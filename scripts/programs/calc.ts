@@ -3,8 +3,10 @@ import {
 	checksOf,
 	designJsonSchema,
 	marginLedger,
+	monteCarloOf,
 	ROW_FIGURES,
 	solveDesign,
+	uncertaintyOf,
 	validateDocument,
 	workingOf,
 	type DesignDocument,
@@ -16,9 +18,12 @@ import { whereJsonBreaks } from './calc/json-fault';
 import { write } from './calc/write';
 
 const USAGE =
-	'usage: npm run --silent calc -- FILE [--csv | --checks | --working=FIGURE] [--installed] | --schema   (FILE - is standard input)';
-const FLAGS: readonly string[] = ['--csv', '--checks', '--installed', '--schema'];
+	'usage: npm run --silent calc -- FILE [--csv | --checks | --uncertainty | --working=FIGURE] [--installed] | --schema   (FILE - is standard input)';
+const FLAGS: readonly string[] = ['--csv', '--checks', '--installed', '--schema', '--uncertainty'];
 const WORKING = /^--working=(.+)$/;
+
+/** Of the draws: any number, and always the same. */
+const SEED = 1;
 
 /** Status of a document, or a command, that cannot be used. */
 const BAD = 2;
@@ -74,6 +79,10 @@ export function calc(words: readonly string[]): number {
 	} else if (words.includes('--checks')) {
 		const checks = { checks: checksOf(document, solution), margins: marginLedger(document, solution) };
 		write(1, `${JSON.stringify(checks, null, 2)}\n`);
+	} else if (words.includes('--uncertainty')) {
+		const firstOrder = uncertaintyOf(document, solution);
+		const drawn = monteCarloOf(document, solution, { seed: SEED });
+		write(1, `${JSON.stringify({ firstOrder, drawn }, null, 2)}\n`);
 	} else write(1, words.includes('--csv') ? csvOf(solution) : `${JSON.stringify(solution, null, 2)}\n`);
 	return 0;
 }

@@ -60,6 +60,14 @@ describe('the calc command', () => {
 		});
 	});
 
+	it('prints the uncertainty of duty and paths', () => {
+		const { status, stdout, stderr } = calc([hood, '--uncertainty']);
+		expect([status, stderr]).toEqual([0, '']);
+		const { firstOrder, drawn } = JSON.parse(stdout) as Record<string, { fan: Record<string, number> }>;
+		expect(firstOrder?.fan.plusMinus).toBeGreaterThan(0);
+		expect((drawn?.fan.deviation ?? NaN) / (firstOrder?.fan.plusMinus ?? NaN)).toBeCloseTo(1, 1);
+	});
+
 	it('prints the working of figures, and names one that is not worked', () => {
 		const { fan, paths } = solutionOf(JSON.parse(readFileSync(hood, 'utf8')));
 		const outlet = paths[0]?.outlet ?? '';

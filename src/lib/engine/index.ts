@@ -32,6 +32,16 @@ export {
 export { solveDesign } from './network';
 export { ENGINE_VERSION } from './version';
 export {
+	monteCarloOf,
+	SPREADS,
+	uncertaintyOf,
+	type Influence,
+	type MonteCarlo,
+	type SpreadOptions,
+	type Uncertain,
+	type Uncertainty
+} from './uncertainty';
+export {
 	checkList,
 	checksOf,
 	marginLedger,
