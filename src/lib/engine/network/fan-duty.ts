@@ -51,8 +51,11 @@ function velocityPressureAtOutlet({ rows, parents, order }: Network, rowLosses: 
 	for (const place of order) {
 		const solved = rowLosses[place];
 		if (solved === undefined || (parents[place] ?? -1) >= 0 || rows[place]?.side !== 'supply') continue;
-		flow += solved.flow;
-		sum += solved.flow * solved.velocityPressure;
+		// Where the row leaks, more leaves the fan than the mean flow that its velocity pressure is of.
+		const atFan = solved.flowEnds?.[0] ?? solved.flow;
+		const ratio = atFan / solved.flow;
+		flow += atFan;
+		sum += atFan * solved.velocityPressure * ratio * ratio;
 	}
 	return flow > 0 ? sum / flow : null;
 }

@@ -162,6 +162,12 @@ describe('a single duct that leaks', () => {
 		expect(fan.flow).toBeGreaterThan(1.04);
 	});
 
+	it('leaves the fan with the velocity pressure of all that leaves it', () => {
+		const { fan } = solutionOf(duct('supply'));
+		const pv = 0.6 * (fan.flow / (0.04 * Math.PI)) ** 2;
+		expect(fan.staticPressure).toBeCloseTo(fan.totalPressure - pv, 9);
+	});
+
 	it('draws in at the return what it loses at the supply, where both pressures mirror each other', () => {
 		// The velocity pressure does not change sides: without it the two are alike.
 		const still = { size: { shape: 'round', diameter: 2 } } as const;
