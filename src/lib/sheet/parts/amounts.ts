@@ -28,6 +28,8 @@ const PARAMETERS: readonly (readonly [string, RegExp])[] = [
 	['pieces', /(?<![\d.,])(\d+)[ -]?(?=(?:pieces?|pc|gores?|segments?)\b)/],
 	['angle', new RegExp(`${N} ?(?:°|deg(?:rees?)?\\b)`)],
 	['areaRatio', new RegExp(`${START}(?:area ratio|a) ?=? ?${DECIMAL}`)],
+	['freeArea', new RegExp(`${START}(?:free area|f) ?=? ?${DECIMAL}`)],
+	['vanes', /(?<![\d.,])([123])[ -]?(?=(?:splitters?|splitter vanes?)\b)/],
 	['thicknessRatio', new RegExp(`${START}t ?=? ?${DECIMAL}`)],
 	['lengthRatio', new RegExp(`${START}l ?=? ?${DECIMAL}`)]
 ];

@@ -8,6 +8,8 @@ const LETTERS: Readonly<Record<string, (value: number | string) => string>> = {
 	areaRatio: (value) => `area ratio ${value}`,
 	thicknessRatio: (value) => `t ${value}`,
 	lengthRatio: (value) => `l ${value}`,
+	freeArea: (value) => `free area ${value}`,
+	vanes: (value) => `${value} ${value === 1 ? 'vane' : 'vanes'}`,
 	leg: (value) => (value === 'straight' || value === 'branch' ? '' : `row is the ${value} leg`),
 	plane: (value) => `${value} in the plane of the bend`
 };

@@ -29,7 +29,7 @@ describe('parts in the design document', () => {
 	it.each([
 		['elbow r1.5 45°', round, { kind: 'round-elbow-smooth', name: 'Elbow', radiusRatio: 1.5, angle: 45 }],
 		['2 elbow r1.5', rectangular, { kind: 'rectangular-elbow-smooth', name: 'Elbow', count: 2, radiusRatio: 1.5 }],
-		['elbow', oval, { kind: 'rectangular-elbow-smooth', name: 'Elbow' }],
+		['elbow', oval, { kind: 'oval-elbow-smooth', name: 'Elbow' }],
 		['mitred elbow', round, { kind: 'round-elbow-mitred', name: 'Mitred elbow' }],
 		['mitred elbow', rectangular, { kind: 'rectangular-elbow-mitred', name: 'Mitred elbow' }],
 		['3-piece elbow', round, { kind: 'round-elbow-segmented', name: 'Elbow', pieces: 3 }],

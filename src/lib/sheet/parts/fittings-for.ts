@@ -89,11 +89,13 @@ function withParameters(part: PartFitting, entry: CatalogueEntry, typed: PartFit
 
 /** The entry for the row's shape: by its own key, by the shape's, or the first damper that suits. */
 function entryFor(part: PartFitting, size: RowSize): CatalogueEntry | null {
-	const shape = size.shape === 'round' ? 'round' : 'rectangular';
+	const shapes = size.shape === 'round' ? ['round'] : size.shape === 'oval' ? ['oval', 'rectangular'] : ['rectangular'];
+	const ofShape = shapes.map((shape) => `${shape}-${part.kind}`);
+	const bare = part.kind.replace(/^(round|rectangular|oval)-/, '');
 	const keys =
 		part.kind === 'damper'
 			? ['damper-butterfly', 'damper-opposed-blades', 'damper-parallel-blades']
-			: [part.kind, `${shape}-${part.kind}`];
+			: [part.kind, ...ofShape, ...shapes.map((shape) => `${shape}-${bare}`)];
 	for (const key of keys) {
 		const entry = fittingEntry(key);
 		if (entry?.shapes.includes(size.shape)) return entry;

@@ -92,7 +92,7 @@ add('device', 'transition', 'box vav device equipment unit meter station orifice
 
 add('mitred', null, 'mitred mitre=mitred mitered=mitred miter=mitred square');
 add('vaned', null, 'vaned vanes vane=vanes turning');
-add('splitter', null, 'splitter');
+add('splitter', null, 'splitter splitters=splitter');
 add('segmented', null, 'segmented gored=segmented lobster-back=segmented pieces= piece= gores= gore= segments= pc=');
 add('smooth', null, 'smooth radius pressed');
 add('butterfly', null, 'butterfly');

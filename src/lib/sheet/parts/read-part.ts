@@ -1,5 +1,6 @@
 import { quoted, refusal, type Picture, type UnitSystem } from '$lib/engine';
 import { takeAmounts, type Amounts } from './amounts';
+import { entryByName, isNameWord } from './by-name';
 import { findWord, nearestWords, type Role, type Word } from './lexicon';
 import type { PartEquipment, PartFitting, PartWord } from './parts';
 import { takesOf } from './takes';
@@ -15,6 +16,8 @@ const MOST = { fittings: 1000, equipment: 50, coefficient: 1_000_000 } as const;
 /** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [?]`, in any order. Never throws. */
 export function readPart(typed: string, units: UnitSystem): PartReading {
 	const amounts = takeAmounts(typed.toLowerCase(), units);
+	const ofCatalogue = amounts.coefficient === null && amounts.pressure === null ? entryByName(amounts.rest) : null;
+	if (ofCatalogue && !isCommon(ofCatalogue.entry.key)) return fromName(typed, amounts, ofCatalogue);
 	const known: Word[] = [];
 	const tags: string[] = [];
 	for (const written of amounts.rest.split(/ +|(?=\+)|(?<=\+)/)) {
@@ -22,12 +25,31 @@ export function readPart(typed: string, units: UnitSystem): PartReading {
 		const word = findWord(bare);
 		if (word) known.push(word);
 		else if (TAG.test(bare)) tags.push(bare.toUpperCase());
+		else if (isNameWord(bare)) known.push({ role: 'plain', print: bare, picture: null });
 		else if (bare !== '' && bare !== '-') return unknownWord(written);
 	}
 	const roles = new Set(known.map((word) => word.role));
 	if (known.length === 0 && amounts.parameters['angle'] !== undefined) roles.add('elbow');
 	if (known.length === 0 && amounts.parameters['radiusRatio'] !== undefined) roles.add('elbow');
 	return assembled(typed, units, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
+}
+
+/** Those that the words of the trade name already, with what a row's shape makes of them. */
+const COMMON =
+	/elbow-(smooth|mitred|segmented|vaned|splitter)$|^(sudden|gradual)-|^entry-(flush|plain-end|projecting|bellmouth)|^exit-|^damper-(butterfly|parallel|opposed)/;
+const isCommon = (key: string) => COMMON.test(key) && !key.startsWith('oval');
+
+function fromName(
+	typed: string,
+	amounts: Amounts,
+	{ entry, word }: NonNullable<ReturnType<typeof entryByName>>
+): PartReading {
+	const { count, parameters, toBeConfirmed } = amounts;
+	if (count < 1) return { ok: false, message: refusal(typed, 'a count is 1 or more'), expected: exampleOf(word) };
+	if (count > MOST.fittings)
+		return { ok: false, message: refusal(typed, 'the count is too great'), expected: `at most ${MOST.fittings}` };
+	const { key, name, picture } = entry;
+	return { ok: true, slot: 'fitting', part: { word, kind: key, count, name, parameters, picture, toBeConfirmed } };
 }
 
 function unknownWord(typed: string): PartReading {
