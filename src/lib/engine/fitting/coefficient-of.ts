@@ -73,13 +73,24 @@ function resultOf<Context>(
 		source,
 		known,
 		uncertainty,
-		parameters: parametersAsUsed(entry, values),
+		parameters: parametersAsUsed(entry, values, parameters),
 		inRange: notes.length === 0,
 		rangeNote: notes.length === 0 ? null : notes.join('; ')
 	};
 }
 
-function parametersAsUsed(entry: CatalogueEntry, values: ParameterValues): Record<string, number | string> {
+type UsedParameters = CoefficientResult['parameters'];
+const standing = new Map<CatalogueEntry, UsedParameters>();
+
+function parametersAsUsed(entry: CatalogueEntry, values: ParameterValues, given: FittingParameters): UsedParameters {
+	// Most fittings are as they stand in the catalogue: these share one list of the defaults.
+	for (const { name } of entry.parameters) if (Object.hasOwn(given, name)) return listOf(entry, values);
+	let list = standing.get(entry);
+	if (list === undefined) standing.set(entry, (list = Object.freeze(listOf(entry, values))));
+	return list;
+}
+
+function listOf(entry: CatalogueEntry, values: ParameterValues): UsedParameters {
 	const used: Record<string, number | string> = {};
 	for (const { name, options, default: standard } of entry.parameters) {
 		if (options === undefined) used[name] = values.number(name);

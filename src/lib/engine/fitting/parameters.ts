@@ -45,22 +45,36 @@ export function noteOutside(value: number, range: Range, what: string, note: Not
 
 /** Parameters of a document read for one entry: defaults for what is missing, limits for what is beyond them. */
 export function readParameters(entry: CatalogueEntry, given: FittingParameters, note: Note): ParameterValues {
-	const parameterOf = (name: string): FittingParameter => {
-		const found = entry.parameters.find((one) => one.name === name);
-		if (!found) throw new Error(`${entry.key} has no parameter ${name}`);
-		return found;
-	};
-	return {
-		number(name) {
-			const parameter = parameterOf(name);
-			const value = Object.hasOwn(given, name) ? given[name] : undefined;
-			if (typeof value !== 'number' || !Number.isFinite(value)) return Number(parameter.default);
-			return heldWithin(value, parameter, parameter.label.toLowerCase(), note);
-		},
-		choice(name) {
-			const parameter = parameterOf(name);
-			const value = Object.hasOwn(given, name) ? given[name] : undefined;
-			return String(parameter.options?.find((one) => one === value) ?? parameter.default);
-		}
-	};
+	return new GivenValues(entry, given, note);
+}
+
+/** One object, not a closure for each way to read: a network reads the parameters of many thousand fittings. */
+class GivenValues implements ParameterValues {
+	constructor(
+		private readonly entry: CatalogueEntry,
+		private readonly given: FittingParameters,
+		private readonly note: Note
+	) {}
+
+	number(name: string): number {
+		const parameter = this.parameterOf(name);
+		const value = this.valueOf(name);
+		if (typeof value !== 'number' || !Number.isFinite(value)) return Number(parameter.default);
+		return heldWithin(value, parameter, parameter.label.toLowerCase(), this.note);
+	}
+
+	choice(name: string): string {
+		const parameter = this.parameterOf(name);
+		const value = this.valueOf(name);
+		return String(parameter.options?.find((one) => one === value) ?? parameter.default);
+	}
+
+	private parameterOf(name: string): FittingParameter {
+		for (const one of this.entry.parameters) if (one.name === name) return one;
+		throw new Error(`${this.entry.key} has no parameter ${name}`);
+	}
+
+	private valueOf(name: string): unknown {
+		return Object.hasOwn(this.given, name) ? this.given[name] : undefined;
+	}
 }
