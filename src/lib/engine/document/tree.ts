@@ -110,7 +110,7 @@ function sideProblems(rows: readonly unknown[], parents: Int32Array, problems: P
 		const parent = rows[parents[i] ?? -1];
 		const side = textAt(row, 'side');
 		const other = textAt(parent, 'side');
-		if (side === null || other === null || !SIDES.includes(side) || !SIDES.includes(other)) return;
+		if (side === other || side === null || other === null || !SIDES.includes(side) || !SIDES.includes(other)) return;
 		if ((side === 'supply') === (other === 'supply')) return;
 		const message = `is ${side}, but the row it joins is ${other}`;
 		const expected = other === 'supply' ? 'supply' : 'return, exhaust or outdoor';

@@ -57,15 +57,17 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	const views = junctionViews(network, hydraulics, masses, flows.farEnd);
 	const notes = new Map<string, readonly RangeNote[]>();
 	const rowLosses: RowLoss[] = [];
+	let ofRow: RangeNote[] = [];
 	network.rows.forEach((row, place) => {
 		const own = hydraulics[place];
 		if (!own) return;
-		const ofRow: RangeNote[] = [];
 		const solved = orProblem(() => rowLoss(row, own, views[place], settings, ofRow), place);
 		if ('code' in solved) problems.push(solved);
 		else if (Number.isFinite(solved.loss)) rowLosses.push(solved);
 		else problems.push(tooGreat(place));
-		if (ofRow.length > 0) notes.set(row.tag, ofRow);
+		if (ofRow.length === 0) return;
+		notes.set(row.tag, ofRow);
+		ofRow = [];
 	});
 	if (problems.length > 0) return problems;
 
