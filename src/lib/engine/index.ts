@@ -31,6 +31,7 @@ export {
 } from './document';
 export { solveDesign } from './network';
 export { ENGINE_VERSION } from './version';
+export { leakageClasses, type LeakageClass } from './leakage';
 export {
 	monteCarloOf,
 	SPREADS,

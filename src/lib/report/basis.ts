@@ -2,12 +2,14 @@ import {
 	findMaterial,
 	formatDensity,
 	formatElevation,
+	formatFlow,
 	formatHumidity,
 	formatRoughness,
 	formatTemperature,
 	unitOf,
 	type DesignAir,
 	type DesignDocument,
+	type Solution,
 	type UnitSystem
 } from '$lib/engine';
 import type { ReportInput } from './input';
@@ -29,7 +31,10 @@ export function basisOf({ document, solution, units, heading }: ReportInput): La
 		{ label: 'Roughness', value: roughnessWords(document, units) },
 		{ label: 'Losses', value: 'coefficient × own velocity pressure; equipment and outlets as entered' },
 		{ label: 'Flexible duct', value: flexibleWords(document) },
-		{ label: 'Leakage, margin', value: 'none included' },
+		{ label: 'Leakage, margin', value: leakageWords(document, solution, units) },
+		...(document.flowBasis === 'standard'
+			? [{ label: 'Flows', value: 'of outlets as standard air; others actual' }]
+			: []),
 		{ label: 'Engine', value: `Evendraft ${solution.engineVersion}` }
 	];
 }
@@ -72,6 +77,14 @@ function flexibleWords(document: DesignDocument): string {
 	const factors = flexible.map(({ factor }) => factor ?? 4);
 	const [least, most] = [Math.min(...factors), Math.max(...factors)].map((factor) => String(Number(factor.toFixed(2))));
 	return `${least === most ? least : `${least} to ${most}`} × the rigid rate${byDefault}`;
+}
+
+/** The class, what leaks, and its share; margins are never in the figures. */
+function leakageWords({ leakage }: DesignDocument, { leakage: sum }: Solution, units: UnitSystem): string {
+	if (!leakage || !sum) return 'none included';
+	const named = leakage.cl === undefined ? `class ${leakage.class ?? ''}` : `CL ${leakage.cl}`;
+	const flow = `${formatFlow(sum.flow, units)} ${unitOf('flow', units)}`;
+	return `${named}: ${flow}, ${(100 * sum.share).toFixed(1)} % of the fan’s; no margin`;
 }
 
 const lowered = (name: string) => name.charAt(0).toLowerCase() + name.slice(1);

@@ -75,7 +75,7 @@ export function fanDutyOf({ document, solution, units }: ReportInput): FanDuty {
 		lines,
 		notes: [
 			'Losses inside the unit are only those entered. The pressures are those of the duct system as drawn up here, also called external to the unit where its inner parts are not entered.',
-			'No margin, no leakage, no system effect at the fan’s inlet or outlet and no drive are included.',
+			`No margin, ${solution.leakage ? '' : 'no leakage, '}no system effect at the fan’s inlet or outlet beyond what the rows hold, and no drive are included.`,
 			...(fan.staticPressure === null
 				? ['No supply section leaves the fan, so its outlet velocity pressure and static pressure are not stated.']
 				: [])

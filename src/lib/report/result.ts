@@ -37,7 +37,11 @@ export function resultOf({ document, solution, units }: ReportInput): Result {
 		spread > 0 ? pressure('Dampers must take', spread, 'up to ') : pressure('Dampers must take', null)
 	];
 	if (outletPressure !== null) cells.push(pressure('Velocity pressure, first section', outletPressure));
-	const notes = notesOf(fan.staticPressure, (value) => `${formatPressure(value, units)} ${unit}`);
+	const notes = notesOf(
+		fan.staticPressure,
+		Boolean(solution.leakage),
+		(value) => `${formatPressure(value, units)} ${unit}`
+	);
 	if (spread > LOUD)
 		notes.push(
 			`More than ${formatPressure(LOUD, units)} ${unit} at one damper asks for a low-noise device (common practice).`
@@ -45,9 +49,9 @@ export function resultOf({ document, solution, units }: ReportInput): Result {
 	return { cells, notes };
 }
 
-function notesOf(staticPressure: number | null, shown: (value: number) => string): string[] {
+function notesOf(staticPressure: number | null, leaks: boolean, shown: (value: number) => string): string[] {
 	const inside = 'Losses inside the unit are only those entered.';
-	const margin = 'No margin and no leakage are included.';
+	const margin = leaks ? 'Leakage is included by class, and no margin.' : 'No margin and no leakage are included.';
 	if (staticPressure === null) return [`${inside} ${margin}`];
 	return [
 		`${inside} ${margin} Fan static pressure, total less the velocity pressure in the first section, which may differ from that at the fan’s own outlet: ${shown(staticPressure)}.`

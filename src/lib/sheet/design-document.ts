@@ -58,6 +58,7 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 	const surroundings = settingOf(sheet, 'surroundings');
 	// Left out until a person names it: the engine then asks where a room's name hints at a special service.
 	const service = settingOf(sheet, 'service');
+	const [leakage, flowBasis] = [settingOf(sheet, 'leakage'), settingOf(sheet, 'flowBasis')];
 	const criteria = criteriaOf(sheet);
 	return {
 		format: 'evendraft/design@1',
@@ -71,10 +72,14 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 			}
 		}),
 		material: settingOf(sheet, 'material') ?? 'galvanized-steel',
+		...(leakage !== null && { leakage: leakageOf(leakage) }),
+		...(flowBasis !== null && { flowBasis }),
 		...(service !== null && { service }),
 		...(criteria && { criteria })
 	};
 }
+
+const leakageOf = (key: string) => (key.startsWith('CL') ? { cl: Number(key.slice(2)) } : { class: key });
 
 function criteriaOf(sheet: Sheet): Criteria | null {
 	const fields = [

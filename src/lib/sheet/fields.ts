@@ -1,5 +1,6 @@
 /** The columns and settings that a person types into: how each text is read. */
 import {
+	leakageClasses,
 	materials,
 	readDensity,
 	readElevation,
@@ -34,9 +35,9 @@ function readChoice<T extends string>(choices: readonly { readonly key: T; reado
 	return (text) => {
 		const wanted = text.trim().toLowerCase();
 		const found =
-			choices.find(({ key, name }) => key === wanted || name.toLowerCase() === wanted) ??
+			choices.find(({ key, name }) => key.toLowerCase() === wanted || name.toLowerCase() === wanted) ??
 			(wanted
-				? choices.find(({ key, name }) => key.startsWith(wanted) || name.toLowerCase().startsWith(wanted))
+				? choices.find(({ key, name }) => key.toLowerCase().startsWith(wanted) || name.toLowerCase().startsWith(wanted))
 				: null);
 		if (found) return understood(found.key, found.name);
 		return {
@@ -89,6 +90,17 @@ export const ROW_READERS: Readers<RowValues> = {
 	pressure: readRoomPressure
 };
 
+/** Inch-pound classes that are usual, from unsealed down. */
+const INCH_CLASSES = [48, 24, 12, 6, 3];
+export const LEAKAGES = [
+	...leakageClasses.map(({ key, name }) => ({ key, name })),
+	...INCH_CLASSES.map((cl) => ({ key: `CL${cl}`, name: `CL ${cl}` }))
+];
+export const FLOW_BASES = [
+	{ key: 'actual', name: 'Actual flows' },
+	{ key: 'standard', name: 'Standard flows, of air of 1.204 kg/m³' }
+] as const;
+
 export const SETTING_READERS: Readers<SettingValues> = {
 	title: readText('title', 120),
 	units: readChoice([
@@ -103,6 +115,8 @@ export const SETTING_READERS: Readers<SettingValues> = {
 	surroundings: temperatureAround,
 	material: readChoice(MATERIALS),
 	flexFactor,
+	leakage: readChoice(LEAKAGES),
+	flowBasis: readChoice(FLOW_BASES),
 	mainVelocity: readVelocity,
 	runOutVelocity: readVelocity,
 	frictionRate: readRate,

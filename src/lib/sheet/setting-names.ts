@@ -60,6 +60,16 @@ export const SETTING_NAMES = {
 		blank: '4, the program’s default; illustrative',
 		meanwhile: 'flexible duct is taken at 4 times the rigid rate'
 	},
+	leakage: {
+		name: 'Leakage class of the ductwork',
+		blank: 'none: no leakage is counted',
+		meanwhile: 'no leakage is counted'
+	},
+	flowBasis: {
+		name: 'Flows of outlets are',
+		blank: 'actual flows',
+		meanwhile: 'they are taken as actual flows'
+	},
 	mainVelocity: { name: 'Velocity in mains, at most', quantity: 'velocity', ...notChecked('it') },
 	runOutVelocity: { name: 'Velocity in run-outs, at most', quantity: 'velocity', ...notChecked('it') },
 	frictionRate: { name: 'Friction rate, at most', quantity: 'rate', ...notChecked('it') },

@@ -64,6 +64,10 @@ export interface SettingValues {
 	material: string;
 	/** Flexible duct loses this many times the rigid rate. */
 	flexFactor: number;
+	/** A class of the list by its key, or an inch-pound class as `CL24`. */
+	leakage: string;
+	/** Of what air the flows of outlets are. */
+	flowBasis: 'actual' | 'standard';
 	mainVelocity: number;
 	runOutVelocity: number;
 	frictionRate: number;
