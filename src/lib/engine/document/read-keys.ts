@@ -10,6 +10,7 @@ import {
 	leakageSchema,
 	liningSchema,
 	outletSchema,
+	rowLeakageSchema,
 	rowSchema
 } from './schema';
 
@@ -28,6 +29,7 @@ export const readKeys = {
 	flexible: keysOf(flexibleSchema),
 	junction: keysOf(junctionSchema),
 	leakage: keysOf(leakageSchema),
+	rowLeakage: keysOf(rowLeakageSchema),
 	lining: keysOf(liningSchema),
 	fitting: keysOf(fittingSchema),
 	equipment: keysOf(equipmentSchema),

@@ -122,9 +122,13 @@ export const flexibleSchema = open({
 });
 
 /** How tight the ductwork is: a class by its letter or number, or an inch-pound class by its figure. */
+const tightness = {
+	class: z.string().describe("a leakage class by key or name, as 'C' or 'ATC 3'").optional(),
+	cl: upTo(1_000, 'cfm by 100 square feet at 1 in. wg; goes before a class; 0 for no leakage').optional()
+};
+export const rowLeakageSchema = open(tightness);
 export const leakageSchema = open({
-	class: z.string().describe('a key of the list of leakage classes').optional(),
-	cl: upTo(1_000, 'cfm by 100 square feet at 1 in. wg').optional(),
+	...tightness,
 	testPressure: upTo(10_000, 'Pa, for the allowable leakage').optional()
 });
 
@@ -151,7 +155,7 @@ export const rowSchema = open({
 	material: material.optional(),
 	flexible: flexibleSchema.optional(),
 	lining: liningSchema.optional(),
-	leakage: leakageSchema.optional(),
+	leakage: rowLeakageSchema.optional(),
 	pressureClass: either(
 		LIMITS.loss,
 		'static pressure that the ductwork is built for, Pa; negative for suction'

@@ -65,6 +65,7 @@ describe('flags', () => {
 		['to-be-confirmed E', {}, { outlet: { flow: 0.1, loss: 20, toBeConfirmed: true } }, {}],
 		['key-not-read E', {}, { junction: { kind: 'fixed', coefficient: 0.2, angle: 45 } }, {}],
 		['key-not-read M', { equipment: [{ name: 'Filter', filter: { ...FILTER, colour: 'G4' } }] }, {}, {}],
+		['key-not-read M', { leakage: { cl: 0, testPressure: 500 } }, {}, {}],
 		['junction-at-fan M', { junction: { kind: 'tee', leg: 'branch' } }, {}, {}],
 		['end-counted-twice E', {}, { fittings: [{ kind: 'exit-plain' }] }, {}],
 		['end-counted-twice E', {}, { fittings: [{ kind: 'entry-flush' }], outlet: { flow: 0.1 } }, {}],

@@ -25,7 +25,7 @@ export function unreadKeyFlags(document: DesignDocument, flags: Flag[]): void {
 		look(row, readKeys.row, 'of the row', row.tag);
 		look(row.size, row.size.shape === 'round' ? readKeys.round : readKeys.sides, 'of the size', row.tag);
 		look(row.flexible, readKeys.flexible, 'of the flexible duct', row.tag);
-		look(row.leakage, readKeys.leakage, 'of the leakage', row.tag);
+		look(row.leakage, readKeys.rowLeakage, 'of the leakage', row.tag);
 		look(row.lining, readKeys.lining, 'of the lining', row.tag);
 		// Of a kind of the catalogue every key is a parameter, and a strange one a problem.
 		if (row.junction?.kind === 'fixed') look(row.junction, readKeys.junction, 'of the junction', row.tag);
