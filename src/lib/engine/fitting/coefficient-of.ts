@@ -1,5 +1,5 @@
 import { findDefinition, findJunction } from './catalogue';
-import type { Definition, ParameterValues } from './definition';
+import type { Note, Definition, ParameterValues } from './definition';
 import { readParameters } from './parameters';
 import type { CatalogueEntry, CoefficientResult, FittingContext, FittingParameters, JunctionContext } from './types';
 
@@ -60,7 +60,11 @@ function resultOf<Context>(
 	look: (notes: string[]) => void
 ): CoefficientResult {
 	const notes: string[] = [];
-	const note = (text: string) => void (notes.includes(text) || notes.push(text));
+	const within: string[] = [];
+	const note: Note = (text, isWithin = false) => {
+		const list = isWithin ? within : notes;
+		if (!list.includes(text)) list.push(text);
+	};
 	const rival = entry.rivals?.find(({ key }) => key === parameters.method);
 	const values = readParameters(entry, parameters, note);
 	const coefficient = ((rival && rivals[rival.key]) ?? standard)(values, context, note);
@@ -75,7 +79,7 @@ function resultOf<Context>(
 		uncertainty,
 		parameters: parametersAsUsed(entry, values, parameters),
 		inRange: notes.length === 0,
-		rangeNote: notes.length === 0 ? null : notes.join('; ')
+		rangeNote: notes.length + within.length === 0 ? null : [...notes, ...within].join('; ')
 	};
 }
 

@@ -6,8 +6,8 @@ export interface ParameterValues {
 	choice(name: string): string;
 }
 
-/** Takes the notes of a coefficient that was asked outside its source. */
-export type Note = (note: string) => void;
+/** Takes what is to be said of a coefficient: that it was asked outside its source, or, within it, how it was found. */
+export type Note = (note: string, isWithin?: boolean) => void;
 
 type Coefficient<Context> = (values: ParameterValues, context: Context, note: Note) => number;
 

@@ -66,7 +66,10 @@ function noteWidths({ a, s }: Branching, note: Note): void {
 	if (share < -NEAR) note('the straight leg is wider than the common one; taken as equally wide');
 	else if (share > 1 + NEAR) note('both legs together are narrower than the common one; taken as areas that add up');
 	else if (share > NEAR && share < 1 - NEAR)
-		note('the areas lie between a straight leg as wide as the common one and areas that add up; so does the value');
+		note(
+			'the areas lie between a straight leg as wide as the common one and areas that add up; so does the value',
+			true
+		);
 }
 
 /** A note for the methods that know only a straight leg as wide as the common one. */
