@@ -1,14 +1,5 @@
-import type { DesignDocument, DesignRow, Equipment, Fitting, Item, Junction, Outlet } from '../document/types';
-import {
-	coefficientOf,
-	filterLoss,
-	fittingEntry,
-	junctionCoefficientOf,
-	lossFromPoints,
-	ratedLoss,
-	type CoefficientResult,
-	type LossPoint
-} from '../fitting';
+import type { DesignRow, Equipment, Item, Outlet } from '../document/types';
+import { filterLoss, lossFromPoints, ratedLoss, type LossPoint } from '../fitting';
 import {
 	COLEBROOK_ROUGHNESS,
 	darcyWeisbach,
@@ -17,11 +8,9 @@ import {
 	frictionFactor,
 	regime
 } from '../friction';
-import type { CatalogueUses } from './catalogue-uses';
 import type { Hydraulics } from './hydraulics';
-import type { JunctionView } from './junction-views';
 
-const BY_HAND = 'entered by hand';
+export const BY_HAND = 'entered by hand';
 /** Times the rigid friction rate, where the design names no factor; illustrative, for a length not fully stretched. */
 const FLEXIBLE_FACTOR = 4;
 const STRETCHED_ROUGHNESS = findMaterial('flexible-extended')?.roughness ?? 0; // m
@@ -80,123 +69,6 @@ export function flexibleItem(
 function stretchedRate({ reynolds, hydraulicDiameter, air, velocity }: Hydraulics): number {
 	const factor = frictionFactor({ reynolds, relativeRoughness: STRETCHED_ROUGHNESS / hydraulicDiameter });
 	return darcyWeisbach(factor, 1, hydraulicDiameter, air.density, velocity);
-}
-
-/**
- * What a junction costs the stream of its row. A coefficient of the catalogue is on the velocity pressure of the common
- * leg; the item gives it on the row's own, and the other beside it.
- */
-export function junctionItem(
-	junction: Junction,
-	{ velocityPressure }: Hydraulics,
-	view: JunctionView | undefined,
-	{ methods, uses }: Catalogued,
-	notes: RangeNote[]
-): Item {
-	const { coefficient: given = 0, kind, toBeConfirmed = false } = junction;
-	const entry = kind === 'fixed' || !view ? null : fittingEntry(kind);
-	if (!entry || !view) {
-		// Where a row meets the fan there is no node: a flag says so.
-		const coefficient = kind === 'fixed' ? given : 0;
-		const { name = 'Junction' } = junction;
-		const loss = coefficient * velocityPressure + 0;
-		return {
-			...{ part: 'junction', name, kind, count: null, coefficient: coefficient + 0 },
-			...{ loss, source: BY_HAND, catalogue: null, toBeConfirmed }
-		};
-	}
-	const { context, tag } = view;
-	const name = junction.name ?? `${entry.name}, ${context.leg}`;
-	const result = junctionCoefficientOf(kind, withMethod(junction, methods), context);
-	noteRange(name, result, notes);
-	const loss = result.coefficient * view.velocityPressure;
-	return {
-		part: 'junction',
-		name,
-		kind,
-		count: null,
-		coefficient: loss / velocityPressure + 0,
-		loss: loss + 0,
-		source: result.source,
-		reference: {
-			leg: 'common',
-			row: tag,
-			coefficient: result.coefficient,
-			velocityPressure: view.velocityPressure,
-			flowRatio: context.flowRatio,
-			areaRatio: context.areaRatio
-		},
-		catalogue: uses(junction, entry, result),
-		toBeConfirmed
-	};
-}
-
-/** The parameters with the method that the design has chosen for the kind, where the fitting names none of its own. */
-function withMethod<F extends { readonly kind: string; readonly method?: string | undefined }>(
-	fitting: F,
-	methods: DesignDocument['methods']
-): F {
-	const chosen = methods && Object.hasOwn(methods, fitting.kind) ? methods[fitting.kind] : undefined;
-	return fitting.method === undefined && chosen !== undefined ? { ...fitting, method: chosen } : fitting;
-}
-
-function noteRange(name: string, { inRange, rangeNote }: CoefficientResult, notes: RangeNote[]): void {
-	if (!inRange || rangeNote !== null)
-		notes.push({ name, inRange, note: rangeNote ?? 'outside the range of its source' });
-}
-
-/** What a part of the catalogue is asked with beside its row. */
-interface Catalogued {
-	readonly methods: DesignDocument['methods'];
-	readonly uses: CatalogueUses;
-}
-
-export function fittingItem(
-	fitting: Fitting,
-	row: DesignRow,
-	hydraulics: Hydraulics,
-	{ methods, uses }: Catalogued,
-	notes: RangeNote[]
-): Item {
-	const { kind, count = 1, toBeConfirmed = false } = fitting;
-	const pv = hydraulics.velocityPressure;
-	if (kind === 'fixed') {
-		const { coefficient = 0, name = 'Fitting' } = fitting;
-		return {
-			part: 'fitting',
-			name,
-			kind,
-			count,
-			coefficient: coefficient + 0,
-			loss: coefficient * count * pv + 0,
-			source: BY_HAND,
-			catalogue: null,
-			toBeConfirmed
-		};
-	}
-	const entry = fittingEntry(kind);
-	const name = fitting.name ?? entry?.name ?? kind;
-	const { reynolds, velocity, relativeRoughness } = hydraulics;
-	const context = {
-		size: row.size,
-		reynolds,
-		velocity,
-		relativeRoughness,
-		frictionFactor: hydraulics.frictionFactor
-	};
-	const result = coefficientOf(kind, withMethod(fitting, methods), context);
-	noteRange(name, result, notes);
-	return {
-		part: 'fitting',
-		name,
-		kind,
-		count,
-		coefficient: result.coefficient + 0,
-		loss: result.coefficient * count * pv + 0,
-		source: result.source,
-		catalogue: entry && uses(fitting, entry, result),
-		toBeConfirmed
-	};
 }
 
 const STATE = { clean: 'clean', mean: 'mean of clean and final', dirty: 'final, as it is changed' } as const;

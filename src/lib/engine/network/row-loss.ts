@@ -1,15 +1,7 @@
 import type { DesignRow, Item, SolvedRow } from '../document/types';
+import { fittingItem, junctionItem } from './coefficient-items';
 import type { Hydraulics } from './hydraulics';
-import {
-	ductItem,
-	equipmentItem,
-	fittingItem,
-	flexibleItem,
-	gravityItem,
-	junctionItem,
-	outletItem,
-	type RangeNote
-} from './items';
+import { ductItem, equipmentItem, flexibleItem, gravityItem, outletItem, type RangeNote } from './items';
 import type { JunctionView } from './junction-views';
 import type { Settings } from './settings';
 import { thermalGravity } from './thermal-gravity';
