@@ -72,7 +72,7 @@ describe('the catalogue', () => {
 				.filter((one) => !one.options && one.name !== 'coefficient')
 				.map((one) => one.name);
 			// What is entered by hand is its own plot.
-		if (figures.length > 0 && entry.known !== 'entered by hand') expect(figures).toContain(entry.plot?.along);
+			if (figures.length > 0 && entry.known !== 'entered by hand') expect(figures).toContain(entry.plot?.along);
 			else expect(entry.plot).toBeUndefined();
 		}
 	);
