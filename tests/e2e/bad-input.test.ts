@@ -142,6 +142,8 @@ describe('a paste that no sheet could hold', () => {
 		await sheet.page.keyboard.press('ArrowDown');
 		await sheet.page.keyboard.press('Home');
 		await sheet.paste('{"format":"evendraft/design@1","rows":[{"tag":"S1","length":-1}]}');
+		// The clipboard answers when it does: the new row stands where the writing line was.
+		await sheet.page.locator('[data-row="4"][data-key="tag"][title]').waitFor();
 		await sheet.saved();
 		expect(await sheet.text('S4', 'velocity')).toBe(VELOCITY_OF_S4);
 		expect(await at(sheet, 4, 'tag').getAttribute('title')).toMatch(/characters/);
