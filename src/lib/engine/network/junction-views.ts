@@ -1,7 +1,7 @@
 import { velocityPressure } from '../air';
 import type { JunctionContext } from '../fitting';
-import type { Hydraulics } from './hydraulics';
 import type { Network } from './network';
+import type { RowAir } from './row-airs';
 
 /** A node as one of its streams sees it, with the row that is its common leg. */
 export interface JunctionView {
@@ -22,6 +22,11 @@ export interface MassFlows {
 	readonly common: Float64Array;
 }
 
+interface Sections {
+	readonly areas: Float64Array;
+	readonly airs: readonly RowAir[];
+}
+
 interface Node {
 	/** Place of the straight leg; -1 where none goes straight on. */
 	straight: number;
@@ -38,7 +43,7 @@ interface Node {
  *   q = m_leg/m_common, a = A_leg/A_common
  *
  * @param network rows as trees
- * @param hydraulics of each row: area [m2], velocity pressure [Pa]
+ * @param sections area of each row [m2], and its air: density [kg/m3]
  * @param massFlows of each row at the node where it joins [kg/s], and of the common leg at that node
  * @param farFlows of each row where others join it [m3/s]
  * @returns for each row with a junction of the catalogue its view of the node; undefined for the others
@@ -47,7 +52,7 @@ interface Node {
  */
 export function junctionViews(
 	{ rows, parents, order }: Network,
-	hydraulics: readonly Hydraulics[],
+	{ areas, airs }: Sections,
 	massFlows: MassFlows,
 	farFlows: Float64Array
 ): readonly (JunctionView | undefined)[] {
@@ -77,11 +82,12 @@ export function junctionViews(
 	rows.forEach((row, place) => {
 		const parent = parents[place] ?? -1;
 		const node = nodes.get(parent);
-		const [own, common, commonRow] = [hydraulics[place], hydraulics[parent], rows[parent]];
-		if (!asked(place) || !node || !own || !common || !commonRow) return;
+		const commonRow = rows[parent];
+		if (!asked(place) || !node || !commonRow) return;
+		const [own, common] = [areas[place] ?? 0, areas[parent] ?? 0];
 		const through = massFlows.common[parent] ?? 0;
 		const ratio = (flow: number) => (through > 0 ? flow / through : 0);
-		const areaOf = (at: number) => (hydraulics[at]?.area ?? 0) / common.area;
+		const areaOf = (at: number) => (areas[at] ?? 0) / common;
 		const leg = row.junction?.leg ?? 'branch';
 		const flowRatio = ratio(massFlows.leg[place] ?? 0);
 		const context: JunctionContext = {
@@ -89,15 +95,15 @@ export function junctionViews(
 			leg,
 			flowRatio,
 			branchFlowRatio: leg === 'branch' ? flowRatio : ratio(node.branchFlow),
-			areaRatio: own.area / common.area,
-			branchAreaRatio: leg === 'branch' ? own.area / common.area : node.greatest < 0 ? 1 : areaOf(node.greatest),
+			areaRatio: own / common,
+			branchAreaRatio: leg === 'branch' ? own / common : node.greatest < 0 ? 1 : areaOf(node.greatest),
 			straightAreaRatio: node.straight < 0 ? null : areaOf(node.straight),
 			branches: node.branches,
 			commonSize: commonRow.size,
 			size: row.size
 		};
 		// Where the common leg leaks, its flow at the node is not the mean one.
-		const pv = velocityPressure(common.air.density, (farFlows[parent] ?? 0) / common.area);
+		const pv = velocityPressure(airs[parent]?.density ?? 0, (farFlows[parent] ?? 0) / common);
 		views[place] = { context, common: parent, tag: commonRow.tag, velocityPressure: pv };
 	});
 	return views;

@@ -3,7 +3,8 @@ import type { Problem } from '../document/types';
 import { OutOfRangeError } from '../errors';
 import { shortFigure } from '../short-figure';
 import { designFlows, type RowFlows } from './flows';
-import { hydraulicsOf, type Hydraulics } from './hydraulics';
+import { sectionOf } from '../shape';
+import { hydraulicsOf } from './hydraulics';
 import type { RangeNote } from './items';
 import { junctionViews, type MassFlows } from './junction-views';
 import type { Network } from './network';
@@ -26,7 +27,6 @@ export interface PassGround {
 export interface Pass {
 	readonly flows: RowFlows;
 	readonly masses: MassFlows;
-	readonly hydraulics: readonly Hydraulics[];
 	readonly rowLosses: readonly RowLoss[];
 	readonly notes: ReadonlyMap<string, readonly RangeNote[]>;
 	readonly paths: PathsResult;
@@ -42,26 +42,21 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	const { network, settings, airs, uniform } = ground;
 	const flows = designFlows(network, { airs, uniform, standard: settings.standard, leaks });
 	const problems: Problem[] = [];
-	const hydraulics: Hydraulics[] = [];
-	network.rows.forEach((row, place) => {
-		const air = airs[place] ?? { ...settings.air, temperature: null, relativeHumidity: null, condenses: false };
-		const far = flows.farEnd[place] ?? 0;
-		const flow = leaks ? (far + (flows.fanEnd[place] ?? 0)) / 2 : far;
-		const found = orProblem(() => hydraulicsOf(row, flow, air, settings), place);
-		if ('code' in found) problems.push(found);
-		else hydraulics.push(found);
-	});
-	if (problems.length > 0) return problems;
-
+	const areas = Float64Array.from(network.rows, ({ size }) => sectionOf(size).area);
 	const masses = massFlowsOf(airs, flows);
-	const views = junctionViews(network, hydraulics, masses, flows.farEnd);
+	const views = junctionViews(network, { areas, airs }, masses, flows.farEnd);
 	const notes = new Map<string, readonly RangeNote[]>();
 	const rowLosses: RowLoss[] = [];
 	let ofRow: RangeNote[] = [];
 	network.rows.forEach((row, place) => {
-		const own = hydraulics[place];
-		if (!own) return;
-		const solved = orProblem(() => rowLoss(row, own, views[place], settings, ofRow), place);
+		const air = airs[place] ?? { ...settings.air, temperature: null, relativeHumidity: null, condenses: false };
+		const far = flows.farEnd[place] ?? 0;
+		const flow = leaks ? (far + (flows.fanEnd[place] ?? 0)) / 2 : far;
+		// What the row's own flow comes to lives no longer than its losses are worked.
+		const solved = orProblem(
+			() => rowLoss(row, hydraulicsOf(row, flow, air, settings), views[place], settings, ofRow),
+			place
+		);
 		if ('code' in solved) problems.push(solved);
 		else if (Number.isFinite(solved.loss)) rowLosses.push(solved);
 		else problems.push(tooGreat(place));
@@ -77,7 +72,7 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	);
 	const paths = pathsOf(network, along);
 	placePressures(network, along, paths.required, paths.spares, rowLosses);
-	return { flows, masses, hydraulics, rowLosses, notes, paths };
+	return { flows, masses, rowLosses, notes, paths };
 }
 
 /** Of each row at the node where it joins, and of the common leg there [kg/s]. */
