@@ -1,4 +1,5 @@
 import { readPressure, type Pascal, type Reading, type UnitSystem } from '$lib/engine';
+import { wordedFigures } from './worded-figures';
 
 /** The figures of one part, taken out of its text. */
 export interface Amounts {
@@ -8,6 +9,8 @@ export interface Amounts {
 	readonly pressure: Reading<Pascal> | null;
 	readonly exponent: number | null;
 	readonly parameters: Readonly<Record<string, number | string>>;
+	/** Author of the method, as typed behind `by`. */
+	readonly author: string | null;
 	/** What stood in brackets and is no figure. */
 	readonly note: string | null;
 	readonly toBeConfirmed: boolean;
@@ -34,6 +37,7 @@ const PARAMETERS: readonly (readonly [string, RegExp])[] = [
 	['lengthRatio', new RegExp(`${START}l ?=? ?${DECIMAL}`)]
 ];
 const EXPONENT = new RegExp(`${START}n ?=? ?${DECIMAL}`);
+const AUTHOR = /\bby ([a-z]+(?:[ -](?:table|equation))?)(?![a-z])/;
 const PLANE = /\bplane ?=? ?(width|height|w|h)\b/;
 /** Angles that people write before an elbow without the sign. */
 const BARE_ANGLE = /^(15|22[.,]5|30|45|60|75|90)(?= |$)(?! ?x)/;
@@ -58,7 +62,7 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 	const coefficient = take(COEFFICIENT);
 	const pressureText = take(PRESSURE);
 	const pressure = pressureText === null ? null : readPressure(pressureText, units);
-	const parameters: Record<string, number | string> = {};
+	const parameters = wordedFigures(rest, take);
 	for (const [name, pattern] of PARAMETERS) {
 		const typed = take(pattern);
 		if (typed !== null) parameters[name] = figure(typed);
@@ -72,6 +76,7 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 		.replace(/ +/g, ' ')
 		.trim();
 	const note = take(/\(([^()]*)\)/);
+	const author = take(AUTHOR);
 	const bareAngle = take(BARE_ANGLE);
 	const count = bareAngle === null ? (take(COUNT) ?? take(COUNT_AFTER)) : null;
 	const angle = bareAngle ?? take(BARE_ANGLE);
@@ -82,6 +87,7 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 		pressure,
 		exponent: exponent === null ? null : figure(exponent),
 		parameters,
+		author,
 		note: note === null || note.trim() === '' ? null : note.trim(),
 		toBeConfirmed,
 		rest

@@ -1,5 +1,13 @@
 import { formatPressure, unitOf, type UnitSystem } from '$lib/engine';
+import { authorOf } from './authors';
 import type { PartEquipment, PartFitting, Picture } from './parts';
+
+/** Which way an offset's second elbow turns. */
+const SECOND: Readonly<Record<string, string>> = {
+	back: 'turning back',
+	onward: 'turning on',
+	across: 'turning across'
+};
 
 const LETTERS: Readonly<Record<string, (value: number | string) => string>> = {
 	radiusRatio: (value) => `r ${value}`,
@@ -9,7 +17,20 @@ const LETTERS: Readonly<Record<string, (value: number | string) => string>> = {
 	thicknessRatio: (value) => `t ${value}`,
 	lengthRatio: (value) => `l ${value}`,
 	freeArea: (value) => `free area ${value}`,
-	vanes: (value) => `${value} ${value === 1 ? 'vane' : 'vanes'}`,
+	// A pair is radius and spacing of turning vanes, a number those of a splitter elbow.
+	vanes: (value) => (typeof value === 'string' ? `vanes ${value} mm` : `${value} ${value === 1 ? 'vane' : 'vanes'}`),
+	bend: (value) => `${value} bend`,
+	spacing: (value) => `spacing ${value}`,
+	second: (value) => SECOND[value] ?? String(value),
+	distanceRatio: (value) => `h/D ${value}`,
+	curtain: (value) => `curtain ${value === 'in' ? 'in' : 'out of'} the stream`,
+	opening: (value) => `open ${value}`,
+	blockage: (value) => `blockage ${value}`,
+	form: (value) => String(value),
+	straight: (value) => `${value} m straight`,
+	edges: (value) => `${value} edges`,
+	blades: (value) => `${value} blades`,
+	coefficient: (value) => `C ${value}`,
 	leg: (value) => (value === 'straight' || value === 'branch' ? '' : `row is the ${value} leg`),
 	plane: (value) => `${value} in the plane of the bend`
 };
@@ -46,8 +67,13 @@ function equipmentWords(part: PartEquipment, units: UnitSystem): string[] {
 
 function fittingWords(part: PartFitting): string[] {
 	const name = part.count > 1 ? `${part.count} × ${part.name}` : part.name;
-	const known = part.coefficient === undefined ? 'from the catalogue' : `C ${signed(part.coefficient)}`;
-	return [name, ...parameterWords(part.parameters), known];
+	const by = part.method === undefined ? [] : [`by ${authorOf(part.method)}`];
+	return [name, ...parameterWords(part.parameters), ...by, ...knownBy(part)];
+}
+
+function knownBy({ coefficient, parameters }: PartFitting): string[] {
+	if (coefficient !== undefined) return [`C ${signed(coefficient)}`];
+	return parameters['coefficient'] === undefined ? ['from the catalogue'] : [];
 }
 
 function signed(value: number): string {

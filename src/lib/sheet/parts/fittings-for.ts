@@ -6,21 +6,37 @@ import {
 	type Junction,
 	type RowSize
 } from '$lib/engine';
+import { authorOf, methodsOf } from './authors';
+import { placedKind } from './by-place';
 import { parameterWords } from './describe-part';
-import type { DocumentEquipment, DocumentFitting, DocumentParts, PartFitting, PartProblem, Parts } from './parts';
+import { ofPlane } from './of-plane';
+import type {
+	DocumentEquipment,
+	DocumentFitting,
+	DocumentParts,
+	PartFitting,
+	PartProblem,
+	Parts,
+	RowPlace
+} from './parts';
 
 type Suited =
 	{ readonly ok: true; readonly fitting: DocumentFitting } | { readonly ok: false; readonly problem: PartProblem };
 
 /**
- * The parts of a cell as the design document holds them. Kinds of elbows depend on the row's shape (an oval takes the
- * rectangular ones); a part that does not suit it is left out and named among the problems.
+ * The parts of a cell as the design document holds them. Kinds of elbows depend on the row's shape, transitions on the
+ * size of the row that is joined; a part that does not suit is left out and named among the problems.
+ *
+ * @param size free size of the row
+ * @param place null where nothing else is known of the row
  */
-export function fittingsFor(parts: Parts, size: RowSize): DocumentParts {
+export function fittingsFor(parts: Parts, size: RowSize, place: RowPlace | null = null): DocumentParts {
 	const problems: PartProblem[] = [];
 	const fittings: DocumentFitting[] = [];
+	const ofJunction = parts.junction !== null && parts.junction.kind !== 'fixed';
 	for (const part of parts.fittings) {
-		const found: Suited = part.kind === 'fixed' ? { ok: true, fitting: fixed(part) } : fromCatalogue(part, size);
+		const found: Suited =
+			part.kind === 'fixed' ? { ok: true, fitting: fixed(part) } : fromCatalogue(part, size, place, ofJunction);
 		if (found.ok) fittings.push(found.fitting);
 		else problems.push(found.problem);
 	}
@@ -64,14 +80,20 @@ function common(part: PartFitting) {
 	};
 }
 
-function fromCatalogue(part: PartFitting, size: RowSize): Suited {
+function fromCatalogue(typed: PartFitting, size: RowSize, place: RowPlace | null, ofJunction: boolean): Suited {
+	const placed = placedKind(typed, size, place, ofJunction);
+	if (!placed.ok) return problem(typed, `${typed.name}: ${placed.message}`, placed.expected);
+	const part = { ...typed, kind: placed.kind };
 	const entry = entryFor(part, size);
-	return entry === null ? unsuited(part, size) : withParameters(part, entry, part.parameters);
+	return entry === null ? unsuited(part, size) : withParameters(part, entry, ofPlane(placed.parameters, entry, size));
 }
 
 /** The fitting with what was typed for it, each figure within the range of the entry. */
 function withParameters(part: PartFitting, entry: CatalogueEntry, typed: PartFitting['parameters']): Suited {
 	const parameters: Record<string, number | string> = {};
+	const { method } = part;
+	if (method !== undefined && !methodsOf(entry).includes(method))
+		return problem(part, `${part.name} has no method by ${authorOf(method)}`, authorsOf(entry));
 	for (const [name, value] of Object.entries(typed)) {
 		const known = entry.parameters.find((parameter) => parameter.name === name);
 		if (known === undefined) {
@@ -84,7 +106,8 @@ function withParameters(part: PartFitting, entry: CatalogueEntry, typed: PartFit
 			return problem(part, `${part.name}: ${known.label.toLowerCase()} ${value} ${fault}`, takes(entry));
 		parameters[name] = value;
 	}
-	return { ok: true, fitting: { kind: entry.key, ...common(part), ...parameters } };
+	const by = method === undefined ? {} : { method };
+	return { ok: true, fitting: { kind: entry.key, ...common(part), ...by, ...parameters } };
 }
 
 /** The entry for the row's shape: by its own key, by the shape's, or the first damper that suits. */
@@ -95,7 +118,9 @@ function entryFor(part: PartFitting, size: RowSize): CatalogueEntry | null {
 	const keys =
 		part.kind === 'damper'
 			? ['damper-butterfly', 'damper-opposed-blades', 'damper-parallel-blades']
-			: [part.kind, ...ofShape, ...shapes.map((shape) => `${shape}-${bare}`)];
+			: part.kind === 'offset'
+				? ['offset-round', 'offset-rectangular']
+				: [part.kind, ...ofShape, ...shapes.map((shape) => `${shape}-${bare}`)];
 	for (const key of keys) {
 		const entry = fittingEntry(key);
 		if (entry?.shapes.includes(size.shape)) return entry;
@@ -122,6 +147,11 @@ function faultOf(parameter: FittingParameter, value: number | string): string | 
 	}
 	if (typeof value !== 'number') return 'is not a figure';
 	return value < parameter.min || value > parameter.max ? 'is outside the catalogue’s range' : null;
+}
+
+function authorsOf(entry: CatalogueEntry): string {
+	const authors = methodsOf(entry).map((key) => `by ${authorOf(key).replace(',', '')}`);
+	return authors.length ? authors.join('; ') : 'no author: the catalogue has one method for it';
 }
 
 function takes(entry: CatalogueEntry): string {

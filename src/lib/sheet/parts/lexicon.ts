@@ -67,7 +67,11 @@ add('cross', 'tee', 'cross');
 add('bullhead', 'tee', 'bullhead');
 add('chamber', null, 'plenum');
 add('damper', 'damper', 'damper dampers=damper d=damper vcd=volume_damper vd=volume_damper mvd=volume_damper');
-add('special-damper', 'firedamper', 'fd=fire_damper sd=smoke_damper fsd=fire_and_smoke_damper fire smoke');
+add(
+	'special-damper',
+	'firedamper',
+	'fd=fire_damper fds=fire_damper sd=smoke_damper fsd=fire_and_smoke_damper fire smoke'
+);
 add(
 	'special-damper',
 	'damper',
@@ -112,7 +116,7 @@ add('larger', null, 'larger=');
 add(
 	'plain',
 	null,
-	'way volume control balancing manual motorised motorized=motorised open single double single-thickness double-thickness ' +
+	'way system effect volume control balancing manual motorised motorized=motorised open single double single-thickness double-thickness ' +
 		'blade blades past main converging diverging long short weather roof exhaust supply return intake inlet outlet ' +
 		'outdoor discharge suction ahu heating cooling heat recovery bag panel carbon duct air room wire bird insect terminal ' +
 		'flow leg plain ceiling floor door transfer jet perforated egg-crate eggcrate=egg-crate round rectangular rect=rectangular oval hepa sound linear slot swirl disc spill and with of the in at for to + &'

@@ -1,4 +1,4 @@
-import type { Equipment, FittingEntry, Junction, Picture } from '$lib/engine';
+import type { Equipment, FittingEntry, Junction, Picture, RowSize } from '$lib/engine';
 
 export type { Picture } from '$lib/engine';
 
@@ -8,7 +8,10 @@ export type PartWord = 'elbow' | 'junction' | 'transition' | 'entry' | 'exit' | 
 /** A part whose loss goes with the row's own velocity pressure. */
 export interface PartFitting {
 	readonly word: PartWord;
-	/** 'fixed' (has a coefficient), or a kind of the catalogue without its shape: 'elbow-smooth', 'entry-flush' … */
+	/**
+	 * 'fixed' (has a coefficient); a kind of the catalogue, or one without its shape: 'elbow-smooth', 'entry-flush' …; or
+	 * one that sizes and side of the row decide: 'transition', 'cap' …
+	 */
 	readonly kind: string;
 	readonly count: number;
 	/** As printed: 'Elbow', 'Tee branch', 'Fire damper FD-01'. */
@@ -16,6 +19,8 @@ export interface PartFitting {
 	readonly coefficient?: number;
 	/** By the names of the catalogue: radiusRatio, angle, pieces, areaRatio, leg … */
 	readonly parameters: Readonly<Record<string, number | string>>;
+	/** Key of the method that was named, `elbow by rennels`. */
+	readonly method?: string;
 	readonly picture: Picture;
 	/** Set by a question mark. */
 	readonly toBeConfirmed: boolean;
@@ -42,6 +47,14 @@ export interface Parts {
 export type DocumentFitting = FittingEntry;
 /** An equipment loss as the design document holds it. */
 export type DocumentEquipment = Equipment;
+
+/** What a row tells of its parts beside its size. */
+export interface RowPlace {
+	/** Free size of the row that it joins; null where it meets the fan, or where that size is not known. */
+	readonly joined: RowSize | null;
+	/** Whether its air runs toward the fan. */
+	readonly towardFan: boolean;
+}
 
 /** A part that does not suit the row. */
 export interface PartProblem {

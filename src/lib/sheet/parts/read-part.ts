@@ -1,8 +1,11 @@
-import { quoted, refusal, type Picture, type UnitSystem } from '$lib/engine';
+import { fittingEntry, quoted, refusal, type Picture, type UnitSystem } from '$lib/engine';
 import { takeAmounts, type Amounts } from './amounts';
-import { entryByName, isNameWord } from './by-name';
+import { AUTHORS, methodKeyOf } from './authors';
+import { entryByName, isNameWord, type NamedPart } from './by-name';
 import { findWord, nearestWords, type Role, type Word } from './lexicon';
 import type { PartEquipment, PartFitting, PartWord } from './parts';
+import { bladesOf, isTakeOff, junctionKind, kindOf, nameOf, pictureOf, wordOf } from './kind-of-part';
+import { UNCLEAR } from './phrases';
 import { takesOf } from './takes';
 
 export type PartReading =
@@ -13,11 +16,9 @@ export type PartReading =
 const TAG = /^[a-z]{1,4}-?\d{1,4}[a-z]?$/;
 const MOST = { fittings: 1000, equipment: 50, coefficient: 1_000_000 } as const;
 
-/** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [?]`, in any order. Never throws. */
+/** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [by author] [?]`, in any order. Never throws. */
 export function readPart(typed: string, units: UnitSystem): PartReading {
 	const amounts = takeAmounts(typed.toLowerCase(), units);
-	const ofCatalogue = amounts.coefficient === null && amounts.pressure === null ? entryByName(amounts.rest) : null;
-	if (ofCatalogue && !isCommon(ofCatalogue.entry.key)) return fromName(typed, amounts, ofCatalogue);
 	const known: Word[] = [];
 	const tags: string[] = [];
 	for (const written of amounts.rest.split(/ +|(?=\+)|(?<=\+)/)) {
@@ -28,29 +29,86 @@ export function readPart(typed: string, units: UnitSystem): PartReading {
 		else if (isNameWord(bare)) known.push({ role: 'plain', print: bare, picture: null });
 		else if (bare !== '' && bare !== '-') return unknownWord(written);
 	}
+	const method = amounts.author === null ? null : methodKeyOf(amounts.author);
+	const fault = authorFault(amounts, method);
+	if (fault) return { ok: false, message: refusal(typed, fault[0]), expected: fault[1] };
 	const roles = new Set(known.map((word) => word.role));
 	if (known.length === 0 && amounts.parameters['angle'] !== undefined) roles.add('elbow');
 	if (known.length === 0 && amounts.parameters['radiusRatio'] !== undefined) roles.add('elbow');
-	return assembled(typed, units, amounts, roles, nameOf(known, tags, roles, amounts.note), pictureOf(known, roles));
+	const name = nameOf(known, tags, roles, amounts.note);
+	const named = entryByName(amounts.rest, roleOf);
+	if (named && isNamed(named, amounts)) return fromName(typed, amounts, named, name, roles, method);
+	const own = wordOf(roles);
+	const picture = own === null && named ? named.picture : pictureOf(known, roles);
+	return assembled(typed, units, amounts, roles, name, picture, method, own ?? named?.word ?? null);
+}
+
+const roleOf = (word: string) => findWord(word)?.role ?? null;
+
+/** A method goes with the catalogue, not with a figure of one's own. */
+function authorFault(amounts: Amounts, method: string | null): readonly [string, string] | null {
+	if (amounts.author === null) return null;
+	if (method === null) return [`the catalogue has no method by ${amounts.author}`, `one of ${AUTHORS}`];
+	if (amounts.coefficient === null && amounts.pressure === null) return null;
+	return ['has a figure of its own beside a method', 'one of the two'];
 }
 
 /** Those that the words of the trade name already, with what a row's shape makes of them. */
 const COMMON =
-	/elbow-(smooth|mitred|segmented|vaned|splitter)$|^(sudden|gradual)-|^entry-(flush|plain-end|projecting|bellmouth)|^exit-|^damper-(butterfly|parallel|opposed)/;
+	/elbow-(smooth|mitred|segmented|vaned|splitter)$|^(sudden|gradual)-(?!tr)|^entry-(flush|plain-end|projecting|bellmouth)|^exit-|^damper-(butterfly|parallel|opposed)/;
 const isCommon = (key: string) => COMMON.test(key) && !key.startsWith('oval');
+
+/** With a figure typed beside it a part stands for itself, unless it is one to which its maker's is entered. */
+function isNamed({ kind }: NamedPart, { coefficient, pressure, rest }: Amounts): boolean {
+	if (isCommon(kind) || pressure !== null) return false;
+	if (coefficient === null) return true;
+	return isByMaker(kind) && !isUnclear(kind, rest);
+}
+
+const isByMaker = (kind: string) => (fittingEntry(kind)?.parameters ?? []).some(({ name }) => name === 'coefficient');
+const isUnclear = (kind: string, rest: string) => kind === UNCLEAR && !/cowl|discharge/.test(rest);
 
 function fromName(
 	typed: string,
 	amounts: Amounts,
-	{ entry, word }: NonNullable<ReturnType<typeof entryByName>>
+	{ kind: named, word, picture }: NamedPart,
+	name: string,
+	roles: ReadonlySet<Role>,
+	method: string | null
 ): PartReading {
-	const { count, parameters, toBeConfirmed } = amounts;
-	if (count < 1) return { ok: false, message: refusal(typed, 'a count is 1 or more'), expected: exampleOf(word) };
-	if (count > MOST.fittings)
-		return { ok: false, message: refusal(typed, 'the count is too great'), expected: `at most ${MOST.fittings}` };
-	const { key, name, picture } = entry;
-	return { ok: true, slot: 'fitting', part: { word, kind: key, count, name, parameters, picture, toBeConfirmed } };
+	const { count, coefficient, toBeConfirmed, rest } = amounts;
+	const refuse = (message: string, expected: string): PartReading => ({
+		ok: false,
+		message: refusal(typed, message),
+		expected
+	});
+	if (count < 1) return refuse('a count is 1 or more', exampleOf(word));
+	if (count > MOST.fittings) return refuse('the count is too great', `at most ${MOST.fittings}`);
+	if (isUnclear(named, rest))
+		return refuse(
+			'does a hood take the air in or let it out',
+			'hood, flanged hood or tapered hood 45° where it takes air in; exhaust cowl C1.2 where it lets it out'
+		);
+	if (coefficient === null && isByMaker(named)) return refuse(...makersOf(named, rest));
+	const leg = legOf(roles);
+	const parameters = {
+		...amounts.parameters,
+		...(coefficient !== null && { coefficient }),
+		...(leg !== null && { leg })
+	};
+	const isThick = named === 'perforated-plate' && parameters['thicknessRatio'] !== undefined;
+	const kind = named === 'perforated-plate' ? `perforated-plate-${isThick ? 'thick' : 'thin'}` : named;
+	const by = method === null ? {} : { method };
+	return { ok: true, slot: 'fitting', part: { word, kind, count, name, parameters, ...by, picture, toBeConfirmed } };
 }
+
+function makersOf(kind: string, typed: string): readonly [string, string] {
+	return kind.startsWith('fan')
+		? ['its coefficient is missing: K of the charts, or of the maker of the fan', `${typed} C0.3`]
+		: ['its coefficient or its pressure is missing: what the maker states', `${typed} C1.2, or ${typed} 25 Pa`];
+}
+
+const legOf = (roles: ReadonlySet<Role>) => (roles.has('smaller') ? 'smaller' : roles.has('larger') ? 'larger' : null);
 
 function unknownWord(typed: string): PartReading {
 	if (/^\d*[.,]?\d+$/.test(typed))
@@ -71,7 +129,9 @@ function assembled(
 	amounts: Amounts,
 	roles: ReadonlySet<Role>,
 	name: string,
-	picture: Picture
+	picture: Picture,
+	method: string | null,
+	word: PartWord | null
 ): PartReading {
 	const refuse = (message: string, expected: string): PartReading => ({
 		ok: false,
@@ -79,7 +139,6 @@ function assembled(
 		expected
 	});
 	const { coefficient, pressure, count, parameters, toBeConfirmed } = amounts;
-	const word = wordOf(roles);
 	if (word === null) return refuse('no word says what it is', 'a word such as elbow, damper or silencer');
 	if (coefficient !== null && pressure !== null)
 		return refuse('has both a coefficient and a pressure', 'one of the two');
@@ -109,7 +168,11 @@ function assembled(
 	if (count > MOST.fittings) return refuse('the count is too great', `at most ${MOST.fittings}`);
 	if (coefficient !== null) return { ok: true, slot: 'fitting', part: fitting('fixed') };
 	const kind = kindOf(word, roles);
-	return kind === null ? lacking(word) : { ok: true, slot: 'fitting', part: fitting(kind) };
+	if (kind === null) return lacking(word);
+	const blades = bladesOf(kind, parameters);
+	if (blades === null) return { ok: true, slot: 'fitting', part: fitting(kind) };
+	const open = fitting('damper-blades-open');
+	return { ok: true, slot: 'fitting', part: { ...open, parameters: { ...open.parameters, blades } } };
 
 	function lacking(what: PartWord): PartReading {
 		const { message, expected } = takesOf(what, amounts.rest, units);
@@ -117,112 +180,23 @@ function assembled(
 	}
 
 	function fitting(kind: string): PartFitting {
-		const leg = roles.has('smaller') ? 'smaller' : roles.has('larger') ? 'larger' : null;
+		const leg = legOf(roles);
 		const base: PartFitting = {
 			word: word as PartWord,
 			kind,
 			count,
 			name,
 			parameters: leg === null ? parameters : { ...parameters, leg },
-			picture,
+			...(method !== null && { method }),
+			picture: fittingEntry(kind)?.picture ?? picture,
 			toBeConfirmed
 		};
 		return coefficient === null ? base : { ...base, coefficient };
 	}
 }
 
-const JUNCTIONS: readonly Role[] = ['junction', 'shoe', 'take-off', 'wye', 'cross', 'bullhead'];
-const BESIDE_A_LEG: readonly Role[] = ['leg', 'straight', 'plain', 'transition', 'chamber'];
-
-/** A junction takes what is named beside it; `branch` and `straight` alone are one, `branch damper` is a damper. */
-function wordOf(roles: ReadonlySet<Role>): PartWord | null {
-	if (JUNCTIONS.some((role) => roles.has(role))) return 'junction';
-	const legAlone = [...roles].every((role) => BESIDE_A_LEG.includes(role));
-	if ((roles.has('leg') || roles.has('straight') || roles.has('chamber')) && legAlone) return 'junction';
-	if (roles.has('special-damper')) return 'device';
-	if (roles.has('damper') || roles.has('butterfly')) return 'damper';
-	if (roles.has('elbow')) return 'elbow';
-	if (roles.has('transition') || roles.has('expansion') || roles.has('contraction')) return 'transition';
-	if (roles.has('entry') || roles.has('bellmouth')) return 'entry';
-	if (roles.has('exit')) return 'exit';
-	if (roles.has('device')) return 'device';
-	return roles.has('mitred') || roles.has('vaned') ? 'elbow' : null;
-}
-
-/** Key of the junction in the catalogue: a tee at another angle than 90° is a wye. */
-function junctionKind(roles: ReadonlySet<Role>, angle: number | string | undefined): string {
-	if (roles.has('bullhead')) return 'bullhead-tee';
-	if (roles.has('cross')) return 'cross';
-	if (roles.has('gradual') && (roles.has('take-off') || roles.has('junction'))) return 'conical-take-off';
-	if (roles.has('shoe')) return 'shoe-take-off';
-	if (roles.has('chamber')) return 'plenum';
-	return roles.has('wye') || (angle !== undefined && angle !== 90) ? 'wye' : 'tee';
-}
-
-/** What only ever is the branch: a take-off, a leg of a bullhead tee, a duct that leaves a plenum. */
-const isTakeOff = (roles: ReadonlySet<Role>) =>
-	(['shoe', 'take-off', 'bullhead', 'chamber'] as const).some((role) => roles.has(role));
-
-/** Kind of the catalogue without its shape, or null where only a coefficient or a pressure can tell. */
-function kindOf(word: PartWord, roles: ReadonlySet<Role>): string | null {
-	if (word === 'elbow') {
-		if (roles.has('vaned')) return 'elbow-vaned';
-		if (roles.has('mitred')) return 'elbow-mitred';
-		if (roles.has('segmented')) return 'elbow-segmented';
-		return roles.has('splitter') ? 'elbow-splitter' : 'elbow-smooth';
-	}
-	if (word === 'damper') {
-		if (roles.has('opposed')) return 'damper-opposed-blades';
-		if (roles.has('parallel')) return 'damper-parallel-blades';
-		return roles.has('butterfly') ? 'damper-butterfly' : 'damper';
-	}
-	if (word === 'entry') {
-		if (roles.has('bellmouth')) return roles.has('in-wall') ? 'entry-bellmouth-in-wall' : 'entry-bellmouth';
-		if (roles.has('projecting')) return 'entry-projecting';
-		if (roles.has('flush')) return 'entry-flush';
-		return roles.has('plain-end') ? 'entry-plain-end' : null;
-	}
-	if (word === 'exit') return roles.has('device') ? 'exit-diffuser' : 'exit-plain';
-	if (word === 'transition') {
-		const change = roles.has('expansion') ? 'expansion' : roles.has('contraction') ? 'contraction' : null;
-		if (change !== null && roles.has('sudden')) return `sudden-${change}`;
-		return change !== null && roles.has('gradual') ? `gradual-${change}` : null;
-	}
-	return null;
-}
-
 function exampleOf(word: PartWord): string {
 	return word === 'elbow'
 		? 'a part, such as 2 x elbow r1.0 or elbow C0.23'
 		: 'a part, such as damper C0.2 or silencer 25 Pa';
-}
-
-function nameOf(
-	known: readonly Word[],
-	tags: readonly string[],
-	roles: ReadonlySet<Role>,
-	note: string | null
-): string {
-	const printed = known.map((word) => word.print).filter((print) => print !== '');
-	if (printed.length === 0 && roles.has('elbow')) printed.push('elbow');
-	const name = [...printed, ...tags].join(' ');
-	const capital = name.startsWith('ahu') ? `AHU${name.slice(3)}` : name.charAt(0).toUpperCase() + name.slice(1);
-	return note === null ? capital : `${capital} (${note})`;
-}
-
-/** The picture of the word that names the part: the last of its kind, a fire damper before a damper. */
-function pictureOf(known: readonly Word[], roles: ReadonlySet<Role>): Picture {
-	const word = wordOf(roles);
-	const own = known.filter(
-		(entry) =>
-			entry.picture !== null &&
-			(word === 'device' ||
-				entry.role === word ||
-				(word === 'junction' && (JUNCTIONS.includes(entry.role) || entry.role === 'leg' || entry.role === 'straight')))
-	);
-	const special = known.find((entry) => entry.role === 'special-damper');
-	const shaped = own.find((entry) => entry.picture === 'shoe' || entry.picture === 'wye');
-	const device = word === 'device' ? own.find((entry) => entry.role === 'device') : undefined;
-	const fallback: Picture = word === 'elbow' ? 'elbow' : word === 'damper' ? 'damper' : 'transition';
-	return (special ?? shaped ?? device ?? own[0])?.picture ?? fallback;
 }

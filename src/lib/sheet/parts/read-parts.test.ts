@@ -226,11 +226,11 @@ describe('what a Parts cell says of what it read', () => {
 
 	it.each([
 		['tee', 'SI'],
-		['transition', 'SI'],
 		['entry', 'IP'],
+		['expansion', 'SI'],
 		['grille', 'SI'],
 		['silencer', 'IP'],
-		['1 FD', 'IP']
+		['1 SD', 'IP']
 	] as const)('answers “%s” with examples that it reads itself', (text, units) => {
 		const reading = readParts(text, units);
 		if (reading.ok) throw new Error('read');
@@ -246,9 +246,16 @@ describe('what is not understood in a Parts cell', () => {
 		['2E 1T 1D', '“1T”', 'C0.8'],
 		['silencer', '“silencer”', 'silencer 25 Pa, or silencer C0.6'],
 		['grille', 'the maker states', 'grille 25 Pa, or grille C0.6'],
-		['1 FD', '“1 FD”', 'fd 8 Pa, or fd C0.6'],
+		['1 SD', '“1 SD”', 'sd 8 Pa, or sd C0.6'],
 		['backdraught damper', '“backdraught damper”', 'C0.6'],
-		['transition', '“transition”', 'sudden expansion'],
+		['expansion', '“expansion”', 'sudden expansion'],
+		['intake louvre', 'what the maker states', 'intake louvre C1.2, or intake louvre 25 Pa'],
+		['fan outlet effect', 'K of the charts', 'fan outlet effect C0.3'],
+		['exhaust hood', 'take the air in or let it out', 'exhaust cowl C1.2'],
+		['elbow by smith', 'no method by smith', 'Rennels'],
+		['elbow C0.2 by rennels', 'a figure of its own beside a method', 'one of the two'],
+		['gate damper xyz', '“xyz”', 'nearest'],
+		['gate damper 25', '“25”', '25 Pa'],
 		['plenum entry', '“plenum entry”', 'flush entry'],
 		['elbo', '“elbo”', 'elbow'],
 		['silencr 25 Pa', '“silencr”', 'silencer'],

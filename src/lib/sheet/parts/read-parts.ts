@@ -3,7 +3,7 @@ import { describePart, describeSeveral } from './describe-part';
 import type { PartEquipment, PartFitting, Parts } from './parts';
 import { readPart } from './read-part';
 import { splitParts } from './split-parts';
-import { assumedOf, exampleOf } from './takes';
+import { assumedOf, cautionOf, exampleOf } from './assumed';
 
 const LONGEST = 2000; // characters
 const MOST = 100; // parts of one row, as typed
@@ -62,13 +62,13 @@ function whyOf({ junction, fittings, equipment }: Parts): string | null {
 		said.add(`${junction.name.toLowerCase()}: from the catalogue, with the flows and sizes of the rows that meet`);
 	const computed = fittings.filter((part) => part.kind !== 'fixed');
 	for (const part of computed) {
-		const assumed = assumedOf(part);
 		const name = part.name.toLowerCase();
-		said.add(
-			assumed === null
-				? `${name}: without a coefficient, from the catalogue`
-				: `${name}: from the catalogue, ${assumed}; for others type ${exampleOf(part)}`
-		);
+		// Its maker's figure was typed.
+		if (part.parameters['coefficient'] !== undefined) continue;
+		const [assumed, caution] = [assumedOf(part), cautionOf(part)];
+		const told = [assumed ?? 'without a coefficient', caution].filter((words) => words !== null);
+		if (assumed === null) said.add(`${name}: ${told[0]}, from the catalogue${caution === null ? '' : `; ${caution}`}`);
+		else said.add(`${name}: from the catalogue, ${told.join('; ')}; for others type ${exampleOf(part)}`);
 	}
 	if (equipment.some((one, at) => one === equipment[at + 1])) said.add('a pressure behind a count is that of each');
 	return said.size === 0 ? null : [...said].map(sentence).join(' ');

@@ -1,7 +1,6 @@
 /** What a part takes, with an example: the answer to a word that stands without its figures. */
-import { fittingEntry, type UnitSystem } from '$lib/engine';
-import { parameterWords } from './describe-part';
-import type { PartFitting, PartWord } from './parts';
+import type { UnitSystem } from '$lib/engine';
+import type { PartWord } from './parts';
 
 /** A Parts cell as people fill it, for one who has nothing to go by yet. */
 export const EXAMPLES = {
@@ -29,7 +28,7 @@ export function takesOf(word: PartWord, typed: string, units: UnitSystem): Takes
 		}
 		case 'transition':
 			return {
-				message: 'a transition needs its coefficient C; or its kind, with the smaller area over the larger',
+				message: 'a change of area needs its coefficient C; or whether it is gradual or sudden',
 				expected: `C, such as ${typed} C0.1; or gradual contraction a0.5 20°, or sudden expansion a0.5`
 			};
 		case 'entry':
@@ -53,32 +52,4 @@ function pressureLike(typed: string, units: UnitSystem): string {
 			? [60, 0.25]
 			: [25, 0.1];
 	return units === 'SI' ? `${pa} Pa` : `${inches} in wg`;
-}
-
-/** What a part of the catalogue is computed with where it was not typed; null where all of it was, or nothing is asked. */
-export function assumedOf(part: PartFitting): string | null {
-	const kinds =
-		part.kind === 'damper' ? ['damper-butterfly'] : [`round-${part.kind}`, `rectangular-${part.kind}`, part.kind];
-	const sets = kinds.flatMap((key) => {
-		const untyped = (fittingEntry(key)?.parameters ?? []).filter(
-			({ name, options }) => options === undefined && part.parameters[name] === undefined
-		);
-		const words = parameterWords(Object.fromEntries(untyped.map(({ name, default: value }) => [name, value]))).join(
-			', '
-		);
-		return words ? [{ shape: /^(round|rectangular)-/.exec(key)?.[1] ?? '', words }] : [];
-	});
-	const [first] = sets;
-	if (!first) return null;
-	if (part.word === 'damper') return 'fully open';
-	if (sets.every(({ words }) => words === first.words)) return `at ${first.words}`;
-	return `at ${sets.map(({ shape, words }) => `${words} in ${shape} duct`).join(' or ')}`;
-}
-
-/** How to type other figures of a part of the catalogue. */
-export function exampleOf(part: PartFitting): string {
-	const name = part.name.toLowerCase();
-	if (part.word === 'elbow') return `${name} r1.5 45° or ${name} C0.23`;
-	if (part.word === 'damper') return `${name} 20° or ${name} C0.2`;
-	return `${name} C0.3`;
 }
