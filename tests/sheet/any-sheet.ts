@@ -24,7 +24,7 @@ export function done(sheet: Sheet, edit: Edit): Sheet {
 
 /** A sheet typed from blank; the rows have the ids `rowId(0)` and on. */
 export function sheetOf(rows: readonly TypedRow[], settings: TypedSettings = {}, units: UnitSystem = 'SI'): Sheet {
-	const edits: SingleEdit[] = Object.entries(settings).map(([field, typed]) => ({
+	const edits: SingleEdit[] = Object.entries<string>(settings as Record<string, string>).map(([field, typed]) => ({
 		...{ kind: 'set', row: null, field, typed, units }
 	}));
 	if (rows.length)

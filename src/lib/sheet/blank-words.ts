@@ -20,6 +20,9 @@ const LIKE: Readonly<Record<RowField, Readonly<Record<UnitSystem, readonly strin
 	rise: { SI: ['3.2', '-3.2'], IP: ['10.5', '-10.5'] },
 	flex: { SI: ['1.2', '1200 mm'], IP: ['4', `4'-6"`] },
 	material: { SI: [], IP: [] },
+	lining: { SI: ['25', '25 metal'], IP: ['1', '1 metal'] },
+	leakage: { SI: ['C', 'ATC 3'], IP: ['CL 6', 'C'] },
+	temperature: { SI: ['16'], IP: ['61'] },
 	parts: EXAMPLES,
 	outlet: { SI: ['grille 25 Pa', 'louvre C 1.2', '12 static'], IP: ['grille 0.1', 'louvre C 1.2', '0.05 static'] },
 	pressure: { SI: ['10', '-10'], IP: ['0.04', '-0.04'] }
@@ -31,6 +34,9 @@ const MEANS: Readonly<Partial<Record<RowField, string>>> = {
 	rise: 'Blank: level',
 	flex: 'Blank: none',
 	material: 'Blank: as in the basis of design',
+	lining: 'Blank: no lining',
+	leakage: 'Blank: as in the basis of design',
+	temperature: 'Blank: as the row it joins',
 	parts: 'Blank: no parts',
 	outlet: 'Blank: an open end, one velocity pressure',
 	pressure: 'Blank: as outside'

@@ -1,5 +1,15 @@
 /** Quantities that a sheet takes within narrower bounds than their reader. */
-import { LIMITS, readFlow, readNumber, readTemperature, refusal, type Reader, type UnitSystem } from '$lib/engine';
+import {
+	LIMITS,
+	readDensity,
+	readFlow,
+	readNumber,
+	readPressure,
+	readTemperature,
+	refusal,
+	type Reader,
+	type UnitSystem
+} from '$lib/engine';
 
 interface Bounds {
 	readonly min: number;
@@ -44,4 +54,18 @@ export const aspectRatio = bounded(readNumber, {
 	...{ min: 1, max: 1_000 },
 	why: () => 'the longer side over the shorter is 1 or more',
 	expected: () => 'a number from 1 to 1000, such as 4'
+});
+
+/** Ductwork is tested at some 100 to 2000 Pa, common practice; the engine takes up to 10 000 [Pa]. */
+export const testPressure = bounded(readPressure, {
+	...{ min: 1, max: 10_000 },
+	why: () => 'ductwork is tested at 1 to 10\u2009000 Pa',
+	expected: (units) => `a pressure, such as ${units === 'SI' ? '400 or 400 Pa' : '1.5 or 1.5 in wg'}`
+});
+
+/** Standard air is near 1.2 kg/m3 in every convention [kg/m3]. */
+export const standardDensity = bounded(readDensity, {
+	...{ min: 1, max: 1.5 },
+	why: () => 'no convention of standard air has such a density',
+	expected: (units) => `a density near ${units === 'SI' ? '1.2 kg/m³, such as 1.204' : '0.075 lb/ft³, such as 0.075'}`
 });

@@ -6,11 +6,14 @@ import {
 	formatLength,
 	formatPressure,
 	formatSize,
+	formatTemperature,
 	materials,
 	type UnitSystem
 } from '$lib/engine';
 import { SIDES } from './fields';
 import type { Parts } from './parts';
+import { leakageName } from './read-leakage';
+import { liningToEdit, thicknessText } from './read-lining';
 import type { Cell, OutletLoss, RowField, RowValues, SheetRow } from './sheet';
 
 type Shown = { readonly [F in RowField]: (value: RowValues[F], units: UnitSystem) => string };
@@ -26,6 +29,9 @@ const SHOWN: Shown = {
 	rise: formatLength,
 	flex: formatLength,
 	material: (value) => Object.values(materials).find(({ key }) => key === value)?.name ?? value,
+	lining: ({ thickness, sizeIs }, units) => `${thicknessText(thickness, units)}${sizeIs === 'metal' ? ' metal' : ''}`,
+	leakage: leakageName,
+	temperature: formatTemperature,
 	parts: () => '',
 	outlet: (value, units) => outletText(value, units),
 	pressure: formatPressure
@@ -75,6 +81,10 @@ export function textToEdit(row: SheetRow, field: RowField, units: UnitSystem): s
 		case 'rise':
 		case 'flex':
 			return editText('length', cell.value as number, units);
+		case 'temperature':
+			return editText('temperature', cell.value as number, units);
+		case 'lining':
+			return liningToEdit(cell.value as RowValues['lining'], units);
 		case 'pressure':
 			return editText('pressure', cell.value as number, units);
 		case 'outlet': {

@@ -47,6 +47,18 @@ export const COLUMNS: readonly Column[] = [
 	entered('rise', 'Rise', 42, 'Far end over the fan end', { quantity: 'length', optional: true }),
 	entered('flex', 'Flex.', 42, 'Length of flexible duct', { quantity: 'length' }),
 	entered('material', 'Material', 96, 'Blank as in the basis of design', { align: 'left', optional: true }),
+	entered('lining', 'Lining', 62, 'Thickness of the liner; the size is the free one unless metal stands behind it', {
+		quantity: 'size',
+		optional: true
+	}),
+	entered('leakage', 'Leakage', 60, 'Leakage class; blank as in the basis of design', {
+		align: 'left',
+		optional: true
+	}),
+	entered('temperature', 'Temp.', 48, 'Of the air in the row and those beyond it; blank as the row it joins', {
+		quantity: 'temperature',
+		optional: true
+	}),
 	entered('parts', 'Parts', 104, 'Junction at the fan end, fittings and equipment', { align: 'left' }),
 	entered('outlet', 'Outlet', 52, 'Total-pressure loss of the outlet at its flow; blank is an open end', {
 		quantity: 'pressure'

@@ -6,9 +6,13 @@ import {
 	type DesignDocument,
 	type DesignRow,
 	type FittingEntry,
+	type RowSize,
 	type Side
 } from '$lib/engine';
-import { fittingsFor } from './parts';
+import { freeSizeOf } from './free-size';
+import { methodsOfSheet } from './methods';
+import { asksForPlace, fittingsFor } from './parts';
+import { leakageOf } from './read-leakage';
 import { settingOf, valueOf, type OutletLoss, type RowField, type Sheet, type SheetRow } from './sheet';
 import type { SheetProblem } from './sheet-problem';
 import { readingOf } from './reading-of';
@@ -58,7 +62,9 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 	const surroundings = settingOf(sheet, 'surroundings');
 	// Left out until a person names it: the engine then asks where a room's name hints at a special service.
 	const service = settingOf(sheet, 'service');
-	const [leakage, flowBasis] = [settingOf(sheet, 'leakage'), settingOf(sheet, 'flowBasis')];
+	const [leakage, testPressure] = [settingOf(sheet, 'leakage'), settingOf(sheet, 'testPressure')];
+	const [flowBasis, standardDensity] = [settingOf(sheet, 'flowBasis'), settingOf(sheet, 'standardDensity')];
+	const methods = methodsOfSheet(sheet);
 	const criteria = criteriaOf(sheet);
 	return {
 		format: 'evendraft/design@1',
@@ -72,14 +78,14 @@ function frameOf(sheet: Sheet): Omit<DesignDocument, 'rows'> {
 			}
 		}),
 		material: settingOf(sheet, 'material') ?? 'galvanized-steel',
-		...(leakage !== null && { leakage: leakageOf(leakage) }),
+		...(leakage !== null && { leakage: { ...leakageOf(leakage), ...(testPressure !== null && { testPressure }) } }),
 		...(flowBasis !== null && { flowBasis }),
+		...(flowBasis === 'standard' && standardDensity !== null && { standardDensity }),
+		...(methods && { methods }),
 		...(service !== null && { service }),
 		...(criteria && { criteria })
 	};
 }
-
-const leakageOf = (key: string) => (key.startsWith('CL') ? { cl: Number(key.slice(2)) } : { class: key });
 
 function criteriaOf(sheet: Sheet): Criteria | null {
 	const fields = [
@@ -111,12 +117,23 @@ function keptDraft(
 	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
 	const meetsFan = !links.parent.get(row.id);
 	const twoStraight = goesStraight(row) && earlierStraight(row, links);
-	const on = `${twoStraight} ${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')}`;
+	const on = `${twoStraight} ${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')} ${onOthers(sheet, row, links)}`;
 	const kept = drafts.get(row);
 	if (kept?.on === on) return kept.draft;
 	const draft = draftRow(sheet, row, links, sides, problems);
 	if (draft) drafts.set(row, { on, draft });
 	return draft;
+}
+
+/** What the few rows depend on whose parts ask for the size that they join, or which name a temperature. */
+function onOthers(sheet: Sheet, row: SheetRow, links: Links): string {
+	const joined = asksForPlace(valueOf(row, 'parts')) ? JSON.stringify(joinedSize(row, links)) : '';
+	return row.cells.temperature ? `${joined} ${settingOf(sheet, 'density') !== null}` : joined;
+}
+
+function joinedSize(row: SheetRow, links: Links): RowSize | null {
+	const parent = links.parent.get(row.id);
+	return parent ? freeSizeOf(parent) : null;
 }
 
 /** One row as the document holds it; null, with problems, when its own cells do not suffice. */
@@ -150,7 +167,14 @@ function draftRow(
 	if (side === 'differs')
 		fault('side', 'Air cannot run toward the fan and away from it in one run.', sideExpected(row, links, sides));
 	const parts = valueOf(row, 'parts');
-	const fitted = parts && size ? fittingsFor(parts, size) : null;
+	const free = freeSizeOf(row);
+	if (size && !free)
+		fault('lining', 'This lining leaves no free space in the duct.', 'less than half of the least side');
+	const place =
+		asksForPlace(parts) && side !== null && side !== 'differs'
+			? { joined: joinedSize(row, links), towardFan: towardFan(side) }
+			: null;
+	const fitted = parts && free ? fittingsFor(parts, free, place) : null;
 	for (const { message, expected } of fitted?.problems ?? []) fault('parts', message, expected);
 	if (fitted?.junction && goesStraight(row) && earlierStraight(row, links))
 		fault(
@@ -158,6 +182,14 @@ function draftRow(
 			'Another row goes straight on at this junction already.',
 			'one straight way at a junction; the others are branches'
 		);
+	const temperature = valueOf(row, 'temperature');
+	if (temperature !== null && settingOf(sheet, 'density') !== null)
+		fault(
+			'temperature',
+			'The air of the design is given by its density, so that a row cannot have a temperature of its own.',
+			'a blank here; or temperature and humidity in the basis of design, and no density'
+		);
+	const [lining, leakage] = [valueOf(row, 'lining'), valueOf(row, 'leakage')];
 	const flow = valueOf(row, 'flow');
 	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
 	if (!isEnd)
@@ -184,6 +216,9 @@ function draftRow(
 		serves: valueOf(row, 'serves') ?? '',
 		rise: valueOf(row, 'rise') ?? 0,
 		...(valueOf(row, 'material') && { material: valueOf(row, 'material') ?? '' }),
+		...(temperature !== null && { temperature }),
+		...(lining && { lining }),
+		...(leakage !== null && { leakage: leakageOf(leakage) }),
 		...(flex && { flexible: { length: flex, ...(flexFactor !== null && { factor: flexFactor }) } }),
 		...(fitted?.junction && { junction: fitted.junction }),
 		fittings: [...(fitted?.fittings ?? []), ...(terminal ? [terminal] : [])],

@@ -31,7 +31,7 @@ export function cellOf(row: boolean, field: string, text: string, units: UnitSys
 	if (typed.trim() === '') return null;
 	const reading = row
 		? isRowField(field) && ROW_READERS[field](typed, units)
-		: isSettingField(field) && SETTING_READERS[field](typed, units);
+		: isSettingField(field) && SETTING_READERS[field]?.(typed, units);
 	return { typed, units, value: reading && reading.ok ? reading.value : null };
 }
 

@@ -1,6 +1,5 @@
 /** The columns and settings that a person types into: how each text is read. */
 import {
-	leakageClasses,
 	materials,
 	readDensity,
 	readElevation,
@@ -14,8 +13,19 @@ import {
 	type Reader,
 	type Reading
 } from '$lib/engine';
-import { aspectRatio, flexFactor, outletFlow, temperatureAround, temperatureOfAir } from './bounded';
+import {
+	aspectRatio,
+	flexFactor,
+	outletFlow,
+	standardDensity,
+	temperatureAround,
+	temperatureOfAir,
+	testPressure
+} from './bounded';
+import { METHOD_READERS } from './methods';
 import { readParts } from './parts';
+import { readLeakage } from './read-leakage';
+import { readLining } from './read-lining';
 import { readOutlet } from './read-outlet';
 import type { RowField, RowValues, SettingField, SettingValues } from './sheet';
 
@@ -85,20 +95,17 @@ export const ROW_READERS: Readers<RowValues> = {
 	rise: readRise,
 	flex: readLength,
 	material: readChoice(MATERIALS),
+	lining: readLining,
+	leakage: readLeakage,
+	temperature: temperatureAround,
 	parts: readParts,
 	outlet: readOutlet,
 	pressure: readRoomPressure
 };
 
-/** Inch-pound classes that are usual, from unsealed down. */
-const INCH_CLASSES = [48, 24, 12, 6, 3];
-export const LEAKAGES = [
-	...leakageClasses.map(({ key, name }) => ({ key, name })),
-	...INCH_CLASSES.map((cl) => ({ key: `CL${cl}`, name: `CL ${cl}` }))
-];
 export const FLOW_BASES = [
 	{ key: 'actual', name: 'Actual flows' },
-	{ key: 'standard', name: 'Standard flows, of air of 1.204 kg/m³' }
+	{ key: 'standard', name: 'Standard flows' }
 ] as const;
 
 export const SETTING_READERS: Readers<SettingValues> = {
@@ -115,14 +122,17 @@ export const SETTING_READERS: Readers<SettingValues> = {
 	surroundings: temperatureAround,
 	material: readChoice(MATERIALS),
 	flexFactor,
-	leakage: readChoice(LEAKAGES),
+	leakage: readLeakage,
+	testPressure,
 	flowBasis: readChoice(FLOW_BASES),
+	standardDensity,
 	mainVelocity: readVelocity,
 	runOutVelocity: readVelocity,
 	frictionRate: readRate,
 	flexibleLength: readLength,
 	aspectRatio,
-	damperAtOutlet: readYesNo
+	damperAtOutlet: readYesNo,
+	...METHOD_READERS
 };
 
 export const ROW_FIELDS = Object.keys(ROW_READERS) as RowField[];

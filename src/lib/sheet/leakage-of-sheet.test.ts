@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { sheetOf, type TypedRow, type TypedSettings } from '../../../tests/sheet/any-sheet';
-import { LEAKAGES, SETTING_READERS } from './fields';
+import { SETTING_READERS } from './fields';
+import { LEAKAGES } from './read-leakage';
 import { solveSheet } from './solve-sheet';
 
 const ROWS: TypedRow[] = [

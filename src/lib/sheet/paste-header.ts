@@ -27,6 +27,10 @@ const ALSO: Readonly<Record<string, RowField>> = {
 	'flexible length': 'flex',
 	fittings: 'parts',
 	terminal: 'outlet',
+	liner: 'lining',
+	'lining thickness': 'lining',
+	'leakage class': 'leakage',
+	'air temperature': 'temperature',
 	'outlet loss': 'outlet',
 	'room pressure': 'pressure'
 };
@@ -68,7 +72,17 @@ export function headerOf(cells: readonly (readonly string[])[]): readonly (Heade
 }
 
 const FIGURES_ALONE = /^[\s\d.,x×*/ØøФ⌀+-]+$/;
-const WITH_UNIT: readonly RowField[] = ['flow', 'size', 'length', 'rise', 'flex', 'outlet', 'pressure'];
+const WITH_UNIT: readonly RowField[] = [
+	'flow',
+	'size',
+	'length',
+	'rise',
+	'flex',
+	'outlet',
+	'pressure',
+	'temperature',
+	'lining'
+];
 
 /** The rows of a headed block by field; a figure without a unit takes the one in its head. */
 export function byHeader(

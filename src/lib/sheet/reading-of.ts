@@ -7,5 +7,10 @@ export function readingOf(kind: 'row' | 'setting', field: string, cell: { typed:
 		kind === 'row' ? isRowField(field) && ROW_READERS[field] : isSettingField(field) && SETTING_READERS[field];
 	const reading = reader ? reader(cell.typed, cell.units) : null;
 	if (reading && !reading.ok) return { message: reading.message, expected: reading.expected };
+	if (reading)
+		return {
+			message: `“${cell.typed}” was not understood when it was typed, and is now.`,
+			expected: 'the same text, entered again'
+		};
 	return { message: `“${cell.typed}” was not understood.`, expected: 'another text' };
 }

@@ -184,10 +184,16 @@ export class RunGrid {
 		if (!now) return true;
 		const row = this.#rowOf(now);
 		const before = row ? textToEdit(row, now.field, this.open.units) : '';
-		if (now.text !== before) this.#do(this.#editOf(now));
+		const isReadNow = row?.cells[now.field]?.value === null && now.text.trim() !== '' && this.#reads(now);
+		if (now.text !== before || isReadNow) this.#do(this.#editOf(now));
 		if (now.id !== null && !row)
 			this.notice = `The row was deleted meanwhile; ${quoted(now.text)} could not be written into it.`;
 		return true;
+	}
+
+	/** What an older program did not understand is read when it is entered again. */
+	#reads({ field, text }: Editing): boolean {
+		return ROW_READERS[field](text, this.open.units).ok;
 	}
 
 	/** Closes the editor and leaves the cell as it was. */

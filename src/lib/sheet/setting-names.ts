@@ -70,6 +70,18 @@ export const SETTING_NAMES = {
 		blank: 'actual flows',
 		meanwhile: 'they are taken as actual flows'
 	},
+	standardDensity: {
+		name: 'Density of standard air',
+		quantity: 'density',
+		blank: '1.204 kg/m³',
+		meanwhile: 'it is taken as 1.204 kg/m³'
+	},
+	testPressure: {
+		name: 'Test pressure of the ductwork',
+		quantity: 'pressure',
+		blank: 'none: no allowable leakage is told',
+		meanwhile: 'no allowable leakage is told'
+	},
 	mainVelocity: { name: 'Velocity in mains, at most', quantity: 'velocity', ...notChecked('it') },
 	runOutVelocity: { name: 'Velocity in run-outs, at most', quantity: 'velocity', ...notChecked('it') },
 	frictionRate: { name: 'Friction rate, at most', quantity: 'rate', ...notChecked('it') },

@@ -1,4 +1,6 @@
 import { readingOf } from './reading-of';
+import { methodSetting } from './methods';
+import { authorOf } from './parts/authors';
 import { SETTING_NAMES, type SettingName } from './setting-names';
 import type { SettingField, Sheet } from './sheet';
 import type { SheetProblem } from './sheet-problem';
@@ -13,14 +15,27 @@ export function settingProblems(sheet: Sheet): SheetProblem[] {
 			{ row: null, field: field as SettingField, message: `${name} – ${message} Meanwhile ${meanwhile}.`, expected }
 		];
 	});
-	const { density, surroundings, elevation } = sheet.settings;
-	if (!density || !surroundings || elevation) return notRead;
-	const message = 'The air around the ducts is compared with a given density, so it must be known at what elevation.';
-	return [...notRead, { row: null, field: 'elevation', message, expected: 'the elevation, as 0 m' }];
+	const { density, surroundings, elevation, testPressure, leakage } = sheet.settings;
+	const lacking: SheetProblem[] = [];
+	if (density && surroundings && !elevation) {
+		const message = 'The air around the ducts is compared with a given density, so it must be known at what elevation.';
+		lacking.push({ row: null, field: 'elevation', message, expected: 'the elevation, as 0 m' });
+	}
+	if (testPressure && !leakage) {
+		const message = 'What may leak at the test pressure goes by a leakage class, and none is named.';
+		lacking.push({ row: null, field: 'leakage', message, expected: 'the leakage class, as C; or no test pressure' });
+	}
+	return lacking.length ? [...notRead, ...lacking] : notRead;
 }
 
 /** Units are switched in the title block, and have no line in the basis of design. */
 function namesOf(field: SettingField): Pick<SettingName, 'name' | 'meanwhile'> {
 	if (field === 'units') return { name: 'Units', meanwhile: 'the design is shown in SI' };
-	return SETTING_NAMES[field];
+	const method = methodSetting(field);
+	if (method) {
+		const { entry, methods } = method;
+		const meanwhile = `it is computed by ${authorOf(methods[0] ?? '')}`;
+		return { name: `Method of “${entry.name}”`, meanwhile };
+	}
+	return SETTING_NAMES[field as keyof typeof SETTING_NAMES];
 }

@@ -1,8 +1,10 @@
 /** The settings as a form edits them: typed text in, one edit out. */
 import { editText, type UnitSystem } from '$lib/engine';
 import type { Edit } from './edit';
+import { METHOD_SETTINGS } from './methods';
 import { SETTING_NAMES, type SettingName } from './setting-names';
 import { unitsOf, type Cell, type SettingField, type Sheet } from './sheet';
+import { MOST_TYPED } from './storable-text';
 
 type Typed<F extends string> = { typedIn: UnitSystem } & Record<F, string>;
 
@@ -33,4 +35,21 @@ export function settingEdits<F extends keyof typeof SETTING_NAMES>(
 		.filter((field) => typed[field].trim() !== textOf(sheet, field, units).trim())
 		.map((field) => ({ kind: 'set' as const, row: null, field: field as SettingField, typed: typed[field], units }));
 	return edits.length ? { kind: 'batch', edits } : null;
+}
+
+/** The same for the methods: those that were sent and differ. */
+export function methodEdits(sheet: Sheet, sent: Readonly<Record<string, string>>, units: UnitSystem): Edit | null {
+	const edits = METHOD_SETTINGS.flatMap(({ field }) => {
+		const typed = sent[field]?.slice(0, MOST_TYPED);
+		const before = sheet.settings[field]?.typed ?? '';
+		if (typed === undefined || typed.trim() === before.trim()) return [];
+		return [{ kind: 'set' as const, row: null, field, typed, units }];
+	});
+	return edits.length ? { kind: 'batch', edits } : null;
+}
+
+/** Two edits as one step; null where there is neither. */
+export function together(...edits: readonly (Edit | null)[]): Edit | null {
+	const single = edits.flatMap((edit) => (edit === null ? [] : edit.kind === 'batch' ? edit.edits : [edit]));
+	return single.length ? { kind: 'batch', edits: single } : null;
 }

@@ -22,6 +22,13 @@ export interface OutletLoss {
 	readonly toBeConfirmed: boolean;
 }
 
+/** A liner inside the metal, and which of the two the size of the row is. */
+export interface Lining {
+	/** [m] */
+	readonly thickness: number;
+	readonly sizeIs: 'clear' | 'metal';
+}
+
 /** What a cell of each column holds once understood; SI units. */
 export interface RowValues {
 	tag: string;
@@ -40,11 +47,19 @@ export interface RowValues {
 	flex: number;
 	/** Key of the engine's catalogue of materials. */
 	material: string;
+	lining: Lining;
+	/** A class as the setting has it. */
+	leakage: string;
+	/** Of the air in the row and those beyond it [degC]. */
+	temperature: number;
 	parts: Parts;
 	outlet: OutletLoss;
 	/** Of the room, gauge [Pa]. */
 	pressure: number;
 }
+
+/** Setting of the method of an entry of the catalogue, by its key. */
+export type MethodField = `method-${string}`;
 
 /** What the settings of a design hold; SI units. */
 export interface SettingValues {
@@ -66,8 +81,14 @@ export interface SettingValues {
 	flexFactor: number;
 	/** A class of the list by its key, or an inch-pound class as `CL24`. */
 	leakage: string;
+	/** At which the allowable leakage is told [Pa]. */
+	testPressure: number;
 	/** Of what air the flows of outlets are. */
 	flowBasis: 'actual' | 'standard';
+	/** Of the air of standard flows [kg/m3]. */
+	standardDensity: number;
+	/** Keys of methods, by their authors. */
+	[method: MethodField]: string;
 	mainVelocity: number;
 	runOutVelocity: number;
 	frictionRate: number;

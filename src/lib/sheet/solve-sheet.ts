@@ -30,8 +30,11 @@ export function solveSheet(sheet: Sheet): SolvedSheet {
 function placeOf({ id, path, field }: Problem, { rows }: DesignDocument): Pick<SheetProblem, 'row' | 'field'> {
 	if (id !== null) return { row: id, field: FIELD_OF[field ?? ''] ?? 'tag' };
 	if (path.startsWith('rows')) return { row: rows[0]?.id ?? null, field: 'joins' };
-	return { row: null, field: path.startsWith('surroundings') ? 'surroundings' : 'temperature' };
+	const setting = SETTINGS.find((one) => path.startsWith(one)) ?? 'temperature';
+	return { row: null, field: setting };
 }
+
+const SETTINGS = ['surroundings', 'leakage', 'standardDensity'] as const;
 
 /** The cell where a key of the document was typed. */
 const FIELD_OF: Readonly<Record<string, SheetProblem['field']>> = {
@@ -46,7 +49,10 @@ const FIELD_OF: Readonly<Record<string, SheetProblem['field']>> = {
 	junction: 'parts',
 	fittings: 'parts',
 	equipment: 'parts',
-	outlet: 'outlet'
+	outlet: 'outlet',
+	lining: 'lining',
+	leakage: 'leakage',
+	temperature: 'temperature'
 };
 
 /** Whether the figures stand for the whole sheet. */

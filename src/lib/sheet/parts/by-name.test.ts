@@ -101,9 +101,11 @@ const PHRASES: readonly Phrase[] = [
 	['plenum', 'plenum', rectangular]
 ];
 
+const CASES = PHRASES.map(([text, key, size, place = null]) => [text, key, size, place] as const);
+
 describe('a part of the catalogue by the words of the trade', () => {
-	it.each(PHRASES)('“%s” is %s', (text, key, size, place) => {
-		const { fittings, junction, problems } = readIn(text, size, place ?? null);
+	it.each(CASES)('“%s” is %s', (text, key, size, place) => {
+		const { fittings, junction, problems } = readIn(text, size, place);
 		expect(problems).toEqual([]);
 		expect([...fittings, ...[junction ?? []].flat()].map(({ kind }) => kind)).toEqual([key]);
 	});
@@ -112,7 +114,7 @@ describe('a part of the catalogue by the words of the trade', () => {
 		expect(PHRASES.filter(([, named]) => named === key).map(([text]) => text)).not.toEqual([]);
 	});
 
-	it.each(PHRASES)('“%s” is drawn as its entry is', (text, key, size, place) => {
+	it.each(CASES)('“%s” is drawn as its entry is', (text, key, size, place) => {
 		const reading = readParts(text, 'SI');
 		const [part] = reading.ok ? [...reading.value.fittings, ...[reading.value.junction ?? []].flat()] : [];
 		// A cap is drawn before the side of the row tells which it is; both look alike.

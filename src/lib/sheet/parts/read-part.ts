@@ -91,7 +91,7 @@ function fromName(
 		);
 	if (coefficient === null && isByMaker(named)) return refuse(...makersOf(named, rest));
 	const leg = legOf(roles);
-	const parameters = {
+	const parameters: PartFitting['parameters'] = {
 		...amounts.parameters,
 		...(coefficient !== null && { coefficient }),
 		...(leg !== null && { leg })

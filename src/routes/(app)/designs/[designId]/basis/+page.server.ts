@@ -7,8 +7,12 @@ import { requireEditor } from '$lib/server/auth/require';
 import { appendEdits } from '$lib/server/designs/append-edits';
 import { changeDesign } from '$lib/server/designs/change-design';
 import { openDesign } from '$lib/server/designs/find-design';
-import { settingEdits, settingsToEdit } from '$lib/sheet/settings';
+import { methodEdits, settingEdits, settingsToEdit, together } from '$lib/sheet/settings';
 import type { Actions, PageServerLoad } from './$types';
+
+/** The methods stand beside the form’s own schema: one field for each entry of the catalogue that has several. */
+const methodsOf = (sent: FormData): Record<string, string> =>
+	Object.fromEntries([...sent].flatMap(([key, text]) => (typeof text === 'string' ? [[key, text]] : [])));
 
 export const load: PageServerLoad = async ({ parent }) => {
 	const { sheet, heading } = await parent();
@@ -19,7 +23,8 @@ export const load: PageServerLoad = async ({ parent }) => {
 export const actions: Actions = {
 	save: async ({ locals, params, request }) => {
 		const scope = requireEditor(locals);
-		const form = await superValidate(request, zod4(basisSchema));
+		const sent = await request.formData();
+		const form = await superValidate(sent, zod4(basisSchema));
 		if (!form.valid) return fail(400, { form });
 		const opened = await openDesign(scope, params.designId);
 		if (!opened) error(404, 'No such design');
@@ -27,7 +32,10 @@ export const actions: Actions = {
 		const renamed = name !== opened.heading.name || serves !== opened.heading.service;
 		if (renamed && (await changeDesign(scope, params.designId, { name, service: serves })) === 'taken')
 			return setError(form, 'name', `This project has a system ${name} already.`);
-		const edit = settingEdits(opened.sheet, form.data, typedIn, BASIS_FIELDS);
+		const edit = together(
+			settingEdits(opened.sheet, form.data, typedIn, BASIS_FIELDS),
+			methodEdits(opened.sheet, methodsOf(sent), typedIn)
+		);
 		if (edit && !(await appendEdits(scope, params.designId, opened.seq, [{ id: randomUUID(), edit }])))
 			error(404, 'No such design');
 		return message(form, edit || renamed ? 'Saved' : 'Nothing was changed');
