@@ -7,6 +7,8 @@ export const GOOD: TypedRow = { tag: 'S02', joins: 'S01', size: 'Ø200', length:
 export const TRIED: TypedRow = { tag: 'S03', joins: 'S01', size: 'Ø160', length: '9', flow: '60', outlet: '16' };
 const A_SIZE = 'a size, such as 600x350, ø200, oval 510x255 or 12"';
 const A_LENGTH = 'a length, such as 6.5, 6.5 m or 6500 mm';
+const A_CLASS = 'A, B, C or D, ATC 1 to ATC 6, or an inch-pound class such as CL 24; none for tight ductwork';
+const A_LINING = 'a thickness, such as 25 or 25 metal';
 const A_FLOW = 'a flow, such as 200, 200 L/s or 720 m³/h';
 
 type Answer = readonly [tried: string, field: RowField, typed: string, message: string, expected: string];
@@ -105,6 +107,74 @@ export const BAD_CELLS: readonly Answer[] = [
 		'at most 1000000, such as C0.23'
 	],
 	[
+		'a method of nobody',
+		'parts',
+		'elbow by smith',
+		'“elbow by smith”: the catalogue has no method by smith.',
+		'one of Bassett; Blevins; Crane; Gardel; Idelchik; Idelchik, equation; Idelchik, table; Ito; Miller; Rennels; SMACNA'
+	],
+	[
+		'a method that another fitting has',
+		'parts',
+		'elbow by crane',
+		'Elbow has no method by Crane.',
+		'by Idelchik; by SMACNA; by Rennels; by Miller; by Ito'
+	],
+	[
+		'a transition at a leg of a junction',
+		'parts',
+		'tee branch; reducer',
+		'Reducer: its coefficient C, or its kind, is missing: the size of the junction’s leg is not on the sheet.',
+		'transition C0.1; or gradual contraction a0.5 20°, or gradual expansion a0.5 20°'
+	],
+	[
+		'a louvre without its maker’s figure',
+		'parts',
+		'intake louvre',
+		'“intake louvre”: its coefficient or its pressure is missing: what the maker states.',
+		'intake louvre C1.2, or intake louvre 25 Pa'
+	],
+	[
+		'a hood that may let in or out',
+		'parts',
+		'exhaust hood',
+		'“exhaust hood”: does a hood take the air in or let it out.',
+		'hood, flanged hood or tapered hood 45° where it takes air in; exhaust cowl C1.2 where it lets it out'
+	],
+	[
+		'a screen that is more than open',
+		'parts',
+		'screen 150 % free',
+		'Screen: free-area ratio 1.5 is outside the catalogue’s range.',
+		'Free-area ratio 0.05 to 1, or C, such as C0.23'
+	],
+	[
+		'a fan’s effect without its figure',
+		'parts',
+		'fan outlet effect',
+		'“fan outlet effect”: its coefficient is missing: K of the charts, or of the maker of the fan.',
+		'fan outlet effect C0.3'
+	],
+	['a leakage class that is none', 'leakage', 'Z', '“Z” is no leakage class.', A_CLASS],
+	['a leakage class without end', 'leakage', 'CL 5000', '“CL 5000”: too leaky for a class (most CL 1000).', A_CLASS],
+	[
+		'a row too hot for air',
+		'temperature',
+		'300',
+		'“300”: outside −50 to 80 °C, for which the density of air is computed.',
+		'−50 to 80 °C'
+	],
+	['a lining in words', 'lining', 'thick', '“thick”: is not understood as a thickness.', A_LINING],
+	['a lining of nothing', 'lining', '0', '“0”: a duct without a lining has a blank here.', A_LINING],
+	['a lining in metres', 'lining', '25 m', '“25 m”: too thick for a lining (most 300 mm).', A_LINING],
+	[
+		'a lining that fills its duct',
+		'lining',
+		'80 metal',
+		'This lining leaves no free space in the duct.',
+		'less than half of the least side'
+	],
+	[
 		'a fitting outside its table',
 		'parts',
 		'elbow r99',
@@ -175,6 +245,30 @@ export const BAD_SETTINGS: readonly (readonly [SettingField, string, string, str
 		'perhaps',
 		'A damper at every outlet – “perhaps” is neither yes nor no. Meanwhile it is not checked.',
 		'yes or no'
+	],
+	[
+		'leakage',
+		'class Z',
+		'Leakage class of the ductwork – “class Z” is no leakage class. Meanwhile no leakage is counted.',
+		A_CLASS
+	],
+	[
+		'standardDensity',
+		'12',
+		'Density of standard air – “12”: no convention of standard air has such a density. Meanwhile it is taken as 1.204 kg/m³.',
+		'a density near 1.2 kg/m³, such as 1.204'
+	],
+	[
+		'flowBasis',
+		'both',
+		'Flows of outlets are – “both” is none of the choices here. Meanwhile they are taken as actual flows.',
+		'Actual flows, Standard flows'
+	],
+	[
+		'method-wye',
+		'gardel',
+		'Method of “Wye branch” – “gardel” is the author of no method here. Meanwhile it is computed by Idelchik.',
+		'Idelchik; Crane; Bassett; Idelchik, equation'
 	],
 	['units', 'metric', 'Units – “metric” is none of the choices here. Meanwhile the design is shown in SI.', 'SI, IP'],
 	[
