@@ -159,7 +159,9 @@ export class RowWorking {
 		);
 	}
 	private isUniform(): boolean {
-		return this.ground.document.rows.every(({ temperature }) => temperature === undefined);
+		// As the engine sees it: rows of one temperature hold one air, whoever names it.
+		const [first, ...others] = Object.values(this.ground.solution.rows);
+		return others.every(({ temperature }) => temperature === first?.temperature);
 	}
 
 	velocity(): Ref {
