@@ -1,8 +1,15 @@
-import { airChecks } from './air-and-service';
+import { airChecks } from './air';
+import { balanceChecks } from './balance';
 import { endChecks } from './ends';
 import { fanChecks } from './fan';
+import { fittingChecks } from './fittings';
+import { flexibleChecks } from './flexible';
 import { flowChecks } from './flows';
+import { leakageChecks } from './leakage';
+import { marginChecks } from './margins';
+import { pressureChecks } from './pressures';
 import { recordChecks } from './record';
+import { serviceChecks } from './services';
 import { shapeChecks } from './shapes';
 import type { CheckDefinition } from './types';
 import { velocityChecks } from './velocities';
@@ -11,9 +18,16 @@ export const definitions: readonly CheckDefinition[] = [
 	...flowChecks,
 	...velocityChecks,
 	...shapeChecks,
+	...fittingChecks,
+	...flexibleChecks,
 	...endChecks,
-	...fanChecks,
+	...pressureChecks,
 	...airChecks,
+	...leakageChecks,
+	...balanceChecks,
+	...fanChecks,
+	...marginChecks,
+	...serviceChecks,
 	...recordChecks
 ];
 

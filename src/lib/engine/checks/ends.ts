@@ -1,49 +1,20 @@
 import { fittingEntry } from '../fitting';
-import { above, basis, flagged, foundOf, hasNamed, notApplicable, PASS, PRACTICE } from './found';
-import { isDamper } from './shapes';
+import { basis, flagged, foundOf, notApplicable, practice, whole } from './found';
+import { FAN_REVIEW, REGAIN_REVIEW } from './sources';
 import type { CheckDefinition } from './types';
 
-const MIL = 'MIL-HDBK-1003/3';
-const DAMPER = /damper|\b(vcd|mvd)\b/i;
 const END = ['entries', 'exits'];
+const COUNTED = { clean: 'clean', mean: 'between clean and dirty' } as const;
+const FILTER = /\bfilters?\b/i;
 
 export const endChecks: readonly CheckDefinition[] = [
 	{
-		key: 'flexible-length',
-		title: 'Length of flexible duct',
-		looksAt: 'flexible duct of each row',
-		severity: 'caution',
-		threshold: { default: 1.5, unit: 'm', label: 'Flexible duct, at most' },
-		basis: basis('handbook', `${MIL}: 5 ft, straight, not in place of an elbow`),
-		test: (context, most) =>
-			above(context, most, 'The flexible duct is long.', ({ flexible }) => (flexible?.length ? flexible.length : null))
-	},
-	{
-		key: 'flexible-compression',
-		title: 'Compression of flexible duct',
-		looksAt: 'what is missing of the stretched length',
-		severity: 'caution',
-		threshold: { default: 0.1, unit: '', label: 'Compression, at most' },
-		basis: PRACTICE('published tests: the loss grows many times with compression'),
-		test: (context, most) =>
-			above(context, most, 'The flexible duct is compressed.', ({ flexible }) => flexible?.compression ?? null)
-	},
-	{
-		key: 'flexible-assumption',
-		title: 'The assumption on flexible duct is the designer’s',
-		looksAt: 'flexible duct without a factor or a compression of its own',
-		severity: 'note',
-		threshold: null,
-		basis: PRACTICE('the compression assumption is printed'),
-		test: (context) => flagged(context, 'flexible-default')
-	},
-	{
 		key: 'ends-to-the-open',
-		title: 'Intakes and discharges are counted',
-		looksAt: 'outdoor intakes and exhaust ends: louvre, screen, cowl or the velocity pressure',
+		title: 'Intakes are counted',
+		looksAt: 'intakes of outdoor air: louvre, screen, cowl or the velocity pressure',
 		severity: 'caution',
 		threshold: null,
-		basis: PRACTICE(),
+		basis: practice('louvre, screen and cowl are in the path'),
 		test: ({ rows }) => {
 			const ends = rows.filter(([{ outlet, side }]) => outlet && side === 'outdoor');
 			if (ends.length === 0) return notApplicable('No row takes in outdoor air.');
@@ -63,10 +34,10 @@ export const endChecks: readonly CheckDefinition[] = [
 	{
 		key: 'ends-once',
 		title: 'Each end is counted once',
-		looksAt: 'an entry or exit beside the loss of an outlet, and losses given as static',
+		looksAt: 'an entry or exit beside the loss of an outlet, and losses of inlets given as static',
 		severity: 'caution',
 		threshold: null,
-		basis: PRACTICE('an end loses its velocity pressure once'),
+		basis: practice('an end loses its velocity pressure once'),
 		test: (context) => flagged(context, 'end-counted-twice', 'static-loss-at-inlet')
 	},
 	{
@@ -75,15 +46,35 @@ export const endChecks: readonly CheckDefinition[] = [
 		looksAt: 'outlets of supply without a loss: taken as an open end',
 		severity: 'note',
 		threshold: null,
-		basis: PRACTICE('catalogue loss at the design flow'),
-		test: ({ rows }) =>
-			foundOf(
-				rows.flatMap(([{ tag, side, outlet }]) =>
-					side === 'supply' && outlet && outlet.loss === undefined
+		basis: practice('the catalogue’s loss at the design flow'),
+		test: ({ rows }) => {
+			const ends = rows.filter(([{ side, outlet }]) => side === 'supply' && outlet);
+			if (ends.length === 0) return notApplicable('No row has a supply outlet.');
+			return foundOf(
+				ends.flatMap(([{ tag, outlet }]) =>
+					outlet?.loss === undefined
 						? [{ row: tag, message: 'The outlet has no loss of its own and is taken as an open end.' }]
 						: []
 				)
-			)
+			);
+		}
+	},
+	{
+		key: 'terminal-loss-basis',
+		title: 'Losses of terminals say total or static',
+		looksAt: 'outlets with a loss that does not say which it is: taken as total pressure',
+		severity: 'note',
+		threshold: null,
+		basis: basis('handbook', REGAIN_REVIEW, 'total and static pressure are never mixed: catalogues print either'),
+		test: ({ rows }) => {
+			const stated = rows.flatMap(([{ outlet }]) => (outlet && (outlet.loss ?? 0) > 0 ? [outlet] : []));
+			if (stated.length === 0) return notApplicable('No outlet has a loss of its own.');
+			const value = stated.filter(({ lossIs }) => lossIs === undefined).length;
+			return whole(value > 0, `${value} of ${stated.length} losses of outlets are taken as total pressure unsaid.`, {
+				value,
+				unit: ''
+			});
+		}
 	},
 	{
 		key: 'apparatus-counted',
@@ -91,69 +82,37 @@ export const endChecks: readonly CheckDefinition[] = [
 		looksAt: 'equipment in the rows: coils, filters, silencers',
 		severity: 'note',
 		threshold: null,
-		basis: PRACTICE(),
+		basis: practice('coil, filter, silencer, fire damper: what is often missed'),
 		test: ({ rows }) =>
-			rows.some(([{ equipment }]) => (equipment?.length ?? 0) > 0)
-				? PASS
-				: foundOf([{ row: null, message: 'No equipment is in any row: no coil, filter, silencer or fire damper.' }])
+			whole(
+				!rows.some(([{ equipment }]) => (equipment?.length ?? 0) > 0),
+				'No equipment is in any row: no coil, filter, silencer or fire damper.'
+			)
 	},
 	{
 		key: 'filter-basis',
 		title: 'Filters are counted dirty for the selection',
-		looksAt: 'state of each filter',
+		looksAt: 'state of each filter, and filters whose loss does not say which it is',
 		severity: 'caution',
 		threshold: null,
-		basis: PRACTICE('dirty for the selection; clean to look for overflow'),
+		basis: basis('handbook', FAN_REVIEW, 'dirty for the selection; clean to look for overflow'),
 		test: ({ rows }) => {
-			const filters = rows.flatMap(([{ tag, equipment }]) =>
-				(equipment ?? []).flatMap(({ name, filter }) => (filter ? [{ tag, name, state: filter.state }] : []))
-			);
-			if (filters.length === 0) return notApplicable('No filter states its clean and its final loss.');
-			return foundOf(
-				filters
-					.filter(({ state }) => state === 'clean')
-					.map(({ tag, name }) => ({ row: tag, message: `${name} is counted clean.` }))
-			);
-		}
-	},
-	{
-		key: 'branch-dampers',
-		title: 'A damper in every branch',
-		looksAt: 'rows with an outlet, where several outlets share a fan',
-		severity: 'caution',
-		threshold: null,
-		basis: basis('handbook', 'a damper for each space, remote from the outlet (MIL-HDBK-1191)'),
-		test: ({ rows }) => {
-			const ends = rows.filter(([{ outlet, side }]) => outlet && side !== 'outdoor');
-			if (ends.length < 2) return notApplicable('There is nothing to balance.');
-			return foundOf(
-				ends
-					.filter(([row]) => !hasNamed(row, DAMPER) && !row.fittings?.some(({ kind }) => isDamper(kind)))
-					.map(([{ tag }]) => ({ row: tag, message: 'The branch has no damper.' }))
-			);
-		}
-	},
-	{
-		key: 'dampers-not-overloaded',
-		title: 'No damper takes too much',
-		looksAt: 'spare pressure of each path, which its damper must take',
-		severity: 'caution',
-		threshold: { default: 50, unit: 'Pa', label: 'Pressure on one damper, at most' },
-		basis: basis('handbook', 'guides on noise: above 0.20 in. w.g. a quiet device'),
-		test: ({ solution }, most) =>
-			foundOf(
-				solution.paths.flatMap(({ outlet, spare }) =>
-					spare > most ? [{ row: outlet, value: spare, message: 'So much on one damper will be heard.' }] : []
+			const filters = rows.flatMap(([{ tag, equipment = [] }]) =>
+				equipment.flatMap(({ name, filter }) =>
+					filter || FILTER.test(name) ? [{ tag, name, state: filter?.state ?? null }] : []
 				)
-			)
-	},
-	{
-		key: 'dampers-open',
-		title: 'Dampers are counted as set',
-		looksAt: 'dampers without an angle',
-		severity: 'note',
-		threshold: null,
-		basis: PRACTICE(),
-		test: (context) => flagged(context, 'damper-open-assumed')
+			);
+			if (filters.length === 0) return notApplicable('No equipment is a filter.');
+			return foundOf(
+				filters.flatMap(({ tag, name, state }) => {
+					if (state === 'dirty') return [];
+					const message =
+						state === null
+							? `${name} does not say whether its loss is clean or dirty.`
+							: `${name} is counted ${COUNTED[state]}.`;
+					return [{ row: tag, message }];
+				})
+			);
+		}
 	}
 ];

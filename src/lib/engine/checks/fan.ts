@@ -1,144 +1,122 @@
-import { basis, flagged, foundOf, notApplicable, PASS, PRACTICE } from './found';
-import { marginLedger } from './margin-ledger';
-import type { CheckDefinition } from './types';
+import type { DesignDocument } from '../document/types';
+import { basis, foundOf, notApplicable, whole } from './found';
+import { FAN_MOUNTING, FAN_REVIEW, FAN_STORY, VA_CEMETERY } from './sources';
+import type { CheckContext, CheckDefinition, Found } from './types';
 
-const atFan = (kinds: readonly string[]) => kinds.some((kind) => /^fan-(inlet|outlet)-effect$/.test(kind));
+type Curve = NonNullable<NonNullable<DesignDocument['fan']>['curve']>;
+const NO_FAN = 'The design states no fan.';
+const NO_CURVE = 'The design states no fan curve.';
+
+/** Total pressure of the fan at a flow [Pa], by straight lines between the points of its curve; null beyond them. */
+function pressureAt(curve: Curve, flow: number): number | null {
+	for (let at = 1; at < curve.length; at += 1) {
+		const [before = 0, p = 0] = curve[at - 1] ?? [];
+		const [after = 0, q = 0] = curve[at] ?? [];
+		if (flow >= before && flow <= after) return p + ((q - p) * (flow - before)) / (after - before);
+	}
+	return null;
+}
+
+/** What the fan gives at the flow it is selected for, over what is asked of it there [Pa]. */
+function given({ document: { fan }, ledger }: CheckContext): { pressure: number | null; asked: number } | null {
+	const asked = ledger.selectionPressure;
+	if (fan?.curve) return { pressure: pressureAt(fan.curve, ledger.selectionFlow), asked };
+	return fan?.totalPressure === undefined ? null : { pressure: fan.totalPressure, asked };
+}
+
+/** Straight duct, or an entry of the system effect, where rows of one side meet the fan. */
+function straightAtFan({ rows }: CheckContext, supply: boolean, least: number): Found {
+	const first = rows.filter(([{ joins, side }]) => joins === null && (side === 'supply') === supply);
+	if (first.length === 0) return notApplicable(`No row is at the ${supply ? 'outlet' : 'inlet'} of the fan.`);
+	const kind = supply ? 'fan-outlet-effect' : 'fan-inlet-effect';
+	return foundOf(
+		first.flatMap(([{ tag, length, fittings }, { hydraulicDiameter }]) => {
+			const value = length / hydraulicDiameter;
+			if (value >= least || fittings?.some((one) => one.kind === kind)) return [];
+			const message = `The duct at the ${supply ? 'outlet' : 'inlet'} of the fan is short, and no system effect is entered.`;
+			return [{ row: tag, value, unit: '', message }];
+		})
+	);
+}
+
+const systemEffect = (supply: boolean, least: number, key: string): CheckDefinition => {
+	const place = supply ? 'outlet' : 'inlet';
+	return {
+		key,
+		title: `System effect at the ${place} is filled in or declined`,
+		looksAt: `straight duct at the fan’s ${place}, or an entry of the system effect`,
+		severity: 'caution',
+		threshold: { default: least, unit: '', label: `Straight duct at the ${place}, diameters, at least` },
+		basis: basis('handbook', FAN_MOUNTING, 'as a screen, 1 diameter at the inlet and 3 at the outlet; others ask more'),
+		test: (context, limit) => straightAtFan(context, supply, limit)
+	};
+};
 
 export const fanChecks: readonly CheckDefinition[] = [
+	systemEffect(true, 3, 'system-effect'),
+	systemEffect(false, 1, 'system-effect-inlet'),
 	{
-		key: 'governing-path',
-		title: 'The governing path is the one that requires most',
-		looksAt: 'requirement of every path of each side',
+		key: 'fan-gives-the-duty',
+		title: 'The fan gives what is asked',
+		looksAt: 'total pressure of the stated fan against that of the selection, at the flow of the selection',
 		severity: 'fault',
 		threshold: null,
-		basis: PRACTICE('highest total, not longest'),
-		test: ({ solution }) =>
-			foundOf(
-				solution.paths.flatMap(({ outlet, spare }) =>
-					spare < -1e-9 ? [{ row: outlet, value: spare, message: 'This path requires more than the index path.' }] : []
-				)
-			)
-	},
-	{
-		key: 'duty-positive',
-		title: 'The fan has something to do',
-		looksAt: 'total pressure of the fan',
-		severity: 'caution',
-		threshold: null,
-		basis: PRACTICE(),
-		test: (context) => flagged(context, 'negative-duty')
-	},
-	{
-		key: 'static-class',
-		title: 'Pressure class holds the static pressure',
-		looksAt: 'highest static pressure in each row against its pressure class, by sign',
-		severity: 'fault',
-		threshold: null,
-		basis: basis('standard', 'pressure classes of ductwork'),
-		test: ({ rows }) => {
-			const classed = rows.filter(([{ pressureClass }]) => pressureClass !== undefined);
-			if (classed.length === 0) return notApplicable('No row has a pressure class.');
-			return foundOf(
-				classed.flatMap(
-					([
-						{ tag, pressureClass = 0 },
+		basis: basis('handbook', FAN_REVIEW, 'a fan that is too weak runs short of flow until its speed is raised'),
+		test: (context) => {
+			const fan = given(context);
+			if (!fan) return notApplicable(NO_FAN);
+			const { pressure, asked } = fan;
+			if (pressure === null)
+				return whole(true, 'The flow of the selection lies beyond the fan curve.', {
+					value: context.ledger.selectionFlow,
+					unit: 'm3/s'
+				});
+			return pressure >= asked
+				? { outcome: 'pass' }
+				: foundOf([
 						{
-							staticPressure: [near, far]
+							...{ row: null, value: pressure, unit: 'Pa', limit: asked },
+							message: 'The fan gives less total pressure than the selection asks.'
 						}
-					]) => {
-						const value = Math.abs(near) > Math.abs(far) ? near : far;
-						const holds = Math.abs(value) <= Math.abs(pressureClass) && (pressureClass > 0 || value <= 0);
-						return holds ? [] : [{ row: tag, value, message: 'The static pressure is beyond the pressure class.' }];
-					}
-				)
-			);
+					]);
 		}
 	},
 	{
-		key: 'system-effect',
-		title: 'System effect is filled in or declined',
-		looksAt: 'straight duct at the fan’s outlet, or an entry of the system effect',
+		key: 'fan-not-oversized',
+		title: 'The fan is not far too strong',
+		looksAt: 'total pressure of the stated fan over that of the selection',
 		severity: 'caution',
-		threshold: { default: 3, unit: '', label: 'Straight duct at the outlet, diameters, at least' },
-		basis: basis('handbook', 'as a screen, 1 D at the inlet and 3 D at the outlet; AMCA 201 for the figure'),
-		test: ({ rows }, least) => {
-			const first = rows.filter(([{ joins, side }]) => joins === null && side === 'supply');
-			if (first.length === 0) return notApplicable('No supply row leaves the fan.');
-			return foundOf(
-				first.flatMap(([row, { hydraulicDiameter }]) => {
-					const value = row.length / hydraulicDiameter;
-					const filled = atFan((row.fittings ?? []).map(({ kind }) => kind));
-					return filled || value >= least
-						? []
-						: [
-								{
-									row: row.tag,
-									value,
-									message: 'The duct at the fan’s outlet is short, and no system effect is entered.'
-								}
-							];
-				})
-			);
+		threshold: { default: 0.2, unit: '', label: 'Total pressure beyond the selection, at most' },
+		basis: basis(
+			'from memory',
+			FAN_STORY,
+			'against too little resistance a forward-curved fan overloads its motor; the figure is from memory'
+		),
+		test: (context, most) => {
+			const fan = given(context);
+			if (!fan) return notApplicable(NO_FAN);
+			if (fan.pressure === null || !(fan.asked > 0)) return notApplicable('There is no duty on the curve to compare.');
+			const value = fan.pressure / fan.asked - 1;
+			return whole(value > most, 'The fan gives far more total pressure than is asked: it runs away from its duty.', {
+				value,
+				unit: ''
+			});
 		}
 	},
 	{
-		key: 'traverse-place',
-		title: 'A place to measure on each main',
-		looksAt: 'length of rows that meet the fan, in hydraulic diameters',
-		severity: 'note',
-		threshold: { default: 7.5, unit: '', label: 'Straight duct for a traverse, diameters, at least' },
-		basis: basis('handbook', '6 to 10 diameters downstream; 7.5 is often quoted'),
-		test: ({ rows }, least) =>
-			foundOf(
-				rows.flatMap(([{ tag, joins, length }, { hydraulicDiameter }]) => {
-					const value = length / hydraulicDiameter;
-					return joins === null && value < least
-						? [{ row: tag, value, message: 'The main is too short for a traverse.' }]
-						: [];
-				})
-			)
-	},
-	{
-		key: 'margins-once',
-		title: 'Each margin stands once',
-		looksAt: 'names of the margins',
+		key: 'fan-on-stable-side',
+		title: 'The duty lies on the stable side of the curve',
+		looksAt: 'flow of the selection over that at the peak of the curve',
 		severity: 'caution',
-		threshold: null,
-		basis: basis('handbook', 'margins appear once, with their product'),
-		test: ({ document, solution }) => {
-			const { lines, repeated } = marginLedger(document, solution);
-			if (lines.length === 0) return notApplicable('No margin is named.');
-			return foundOf(repeated.map((name) => ({ row: null, message: `“${name}” stands more than once.` })));
-		}
-	},
-	{
-		key: 'margin-on-flow',
-		title: 'Margin on flow',
-		looksAt: 'product of the margins on flow',
-		severity: 'caution',
-		threshold: { default: 0.05, unit: '', label: 'Margin on flow, at most' },
-		basis: basis('handbook', 'at most 5 % on flow'),
-		test: ({ document, solution }, most) => {
-			const { flowFactor, lines } = marginLedger(document, solution);
-			if (lines.length === 0) return notApplicable('No margin is named.');
-			const value = flowFactor - 1;
-			return value <= most + 1e-12 ? PASS : foundOf([{ row: null, value, message: 'The margins on flow are large.' }]);
-		}
-	},
-	{
-		key: 'margin-on-pressure',
-		title: 'Margin on pressure',
-		looksAt: 'selection pressure over the duty',
-		severity: 'caution',
-		threshold: { default: 0.1, unit: '', label: 'Margin on pressure, at most' },
-		basis: basis('handbook', 'at most 10 % on pressure'),
-		test: ({ document, solution }, most) => {
-			const { selectionPressure, lines } = marginLedger(document, solution);
-			if (lines.length === 0) return notApplicable('No margin is named.');
-			const value = selectionPressure / solution.fan.totalPressure - 1;
-			return value <= most + 1e-12
-				? PASS
-				: foundOf([{ row: null, value, message: 'The margins on pressure are large.' }]);
+		threshold: { default: 1, unit: '', label: 'Flow over that of the peak, at least' },
+		basis: basis('handbook', `${VA_CEMETERY}; ${FAN_REVIEW}`, 'in the stable region, not far left or right'),
+		test: ({ document: { fan }, ledger }, least) => {
+			if (!fan?.curve) return notApplicable(NO_CURVE);
+			const most = Math.max(...fan.curve.map(([, pressure = 0]) => pressure));
+			const [peak = 0] = fan.curve.find(([, pressure]) => pressure === most) ?? [];
+			if (peak === 0) return notApplicable('The curve falls from its first point: it shows no peak.');
+			const value = ledger.selectionFlow / peak;
+			return whole(value < least, 'The duty lies left of the peak of the fan curve.', { value, unit: '' });
 		}
 	}
 ];

@@ -1,5 +1,5 @@
 export { checkList } from './check-list';
 export { checksOf } from './checks-of';
 export { marginLedger, type MarginLedger, type MarginLine } from './margin-ledger';
-export { NOT_SHOWN } from './record';
+export { NOT_SHOWN } from './not-shown';
 export type { CheckBasis, CheckResult, CheckThreshold, Finding } from './types';

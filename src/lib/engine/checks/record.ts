@@ -1,5 +1,19 @@
-import { basis, flagged, foundOf, notApplicable, PASS, PRACTICE } from './found';
-import type { CheckDefinition } from './types';
+import type { DesignDocument } from '../document/types';
+import { basis, flagged, foundOf, notApplicable, PASS, practice, whole } from './found';
+import { DIFFUSER_SOUND, NAVY, TOLERANCE } from './sources';
+import type { CheckBasis, CheckDefinition, Finding } from './types';
+
+type Entry = keyof NonNullable<DesignDocument['record']>;
+
+const stated = (key: string, title: string, entry: Entry, message: string, ground: CheckBasis): CheckDefinition => ({
+	key,
+	title,
+	looksAt: 'record of the design',
+	severity: 'note',
+	threshold: null,
+	basis: ground,
+	test: ({ document: { record } }) => whole(!record?.[entry]?.trim(), message)
+});
 
 export const recordChecks: readonly CheckDefinition[] = [
 	{
@@ -8,7 +22,7 @@ export const recordChecks: readonly CheckDefinition[] = [
 		looksAt: 'values marked so',
 		severity: 'caution',
 		threshold: null,
-		basis: PRACTICE('none is left open before construction'),
+		basis: practice('none is left open before construction'),
 		test: (context) => flagged(context, 'to-be-confirmed')
 	},
 	{
@@ -17,57 +31,81 @@ export const recordChecks: readonly CheckDefinition[] = [
 		looksAt: 'keys that this version does not know',
 		severity: 'note',
 		threshold: null,
-		basis: PRACTICE(),
+		basis: practice('what is not read is not counted'),
 		test: (context) => flagged(context, 'key-not-read')
 	},
 	{
-		key: 'codes-stated',
-		title: 'Codes and their editions are stated',
-		looksAt: 'record of the design',
+		key: 'criteria-stated',
+		title: 'The design names its criteria',
+		looksAt: 'limits of velocity and friction rate in the basis of design',
 		severity: 'note',
 		threshold: null,
-		basis: basis('handbook', 'criteria and editions stand on the sheet (a naval calculation standard)'),
-		test: ({ document }) =>
-			document.record?.codes?.trim() ? PASS : foundOf([{ row: null, message: 'No code with its edition is named.' }])
+		basis: basis('handbook', NAVY, 'a summary of the criteria stands on the sheet'),
+		test: ({ document: { criteria = {} } }) =>
+			whole(
+				[criteria.mainVelocity, criteria.runOutVelocity, criteria.frictionRate].every((one) => one === undefined),
+				'The design names no limit of velocity or friction rate.'
+			)
 	},
-	{
-		key: 'noise-criterion-stated',
-		title: 'The noise criterion is stated',
-		looksAt: 'record of the design',
-		severity: 'note',
-		threshold: null,
-		basis: basis('handbook', 'NC 30 for meeting rooms and 35 to 40 for open offices are published examples'),
-		test: ({ document }) =>
-			document.record?.noiseCriterion?.trim() ? PASS : foundOf([{ row: null, message: 'No noise criterion is named.' }])
-	},
+	stated(
+		'codes-stated',
+		'Codes and their editions are stated',
+		'codes',
+		'No code with its edition is named.',
+		basis('handbook', NAVY, 'criteria are cited by publication, edition and page')
+	),
+	stated(
+		'noise-criterion-stated',
+		'The noise criterion is stated',
+		'noiseCriterion',
+		'No noise criterion is named.',
+		basis('handbook', DIFFUSER_SOUND, 'NC 30 for meeting rooms and 35 to 40 for open offices are published examples')
+	),
+	stated(
+		'tolerance-stated',
+		'The tolerance of the balance is stated',
+		'tolerance',
+		'No tolerance is named within which the measured flows are accepted.',
+		basis('handbook', TOLERANCE, 'the designer states it for each system; it is not ±10 % by itself')
+	),
 	{
 		key: 'checked-by-another',
 		title: 'Originator and checker are two people',
 		looksAt: 'record of the design',
 		severity: 'caution',
 		threshold: null,
-		basis: basis('handbook', 'a naval calculation standard'),
-		test: ({ document }) => {
-			const { originator = '', checker = '' } = document.record ?? {};
-			if (!originator.trim() || !checker.trim()) return notApplicable('Originator and checker are not both named.');
-			return originator.trim().toLowerCase() === checker.trim().toLowerCase()
-				? foundOf([{ row: null, message: 'One person is named as originator and as checker.' }])
-				: PASS;
+		basis: basis('handbook', NAVY, 'both stand on every sheet, and are not the same'),
+		test: ({ document: { record = {} } }) => {
+			const [originator, checker] = [record.originator, record.checker].map((name = '') => name.trim().toLowerCase());
+			if (!originator || !checker) return notApplicable('Originator and checker are not both named.');
+			return originator === checker ? whole(true, 'One person is named as originator and as checker.') : PASS;
+		}
+	},
+	{
+		key: 'decisions-count',
+		title: 'Decisions on the checks count',
+		looksAt: 'overrides, thresholds and checks left out: their reason, name, check and row',
+		severity: 'note',
+		threshold: null,
+		basis: practice('an override says who, when and why, or it does not count'),
+		test: ({ document: { checks = {}, overrides = [] }, thresholds, rowOf }) => {
+			const keys = Object.entries(checks);
+			if (keys.length + overrides.length === 0) return notApplicable('Nothing is decided on the checks.');
+			const findings: Finding[] = [];
+			const told = (message: string, row: string | null = null) => findings.push({ row, message });
+			for (const [key, { threshold, off }] of keys) {
+				if (!thresholds.has(key)) told(`No check is called “${key}”.`);
+				else if (threshold !== undefined && thresholds.get(key) === null) told(`“${key}” has no threshold to edit.`);
+				if (off && off.reason.trim() === '') told(`“${key}” is left out without a reason: it is made.`);
+			}
+			for (const { check, row, reason, by } of overrides) {
+				if (!thresholds.has(check)) told(`An override names no check: “${check}”.`, row);
+				else if (row !== null && !rowOf(row))
+					told(`An override of “${check}” names a row that is not there: “${row}”.`);
+				if (reason.trim() === '' || by.trim() === '')
+					told(`An override of “${check}” lacks its reason or its name: it does not count.`, row);
+			}
+			return foundOf(findings);
 		}
 	}
-];
-
-/** What a reviewer checks and a design document cannot show, with the reason. */
-export const NOT_SHOWN: readonly { readonly what: string; readonly why: string }[] = [
-	{ what: 'Every fitting on the drawing is in the calculation', why: 'the document holds no drawing to count against' },
-	{ what: 'Revision of the calculation is that of drawing and schedule', why: 'other papers are not known here' },
-	{ what: 'Rated walls that a duct crosses', why: 'walls are not part of the document' },
-	{
-		what: 'Fan point against its curve, motor margin, specific fan power',
-		why: 'they belong to the selection of the fan'
-	},
-	{ what: 'Louvre free-area velocity', why: 'it is the maker’s figure, not the duct’s' },
-	{ what: 'Supports and weights', why: 'they belong to the take-off' },
-	{ what: 'New, existing and demolished work', why: 'rows do not tell them apart' },
-	{ what: 'Access to dampers and test holes', why: 'places are not part of the document' }
 ];

@@ -1,4 +1,6 @@
 import type { DesignDocument, DesignRow, Flag, FlagRule, Solution, SolvedRow } from '../document/types';
+import type { PartHints } from '../network/part-hints';
+import type { MarginLedger } from './margin-ledger';
 
 /** How firm the ground of a check is. */
 export type Mark = 'standard' | 'handbook' | 'common practice' | 'from memory';
@@ -7,6 +9,8 @@ export interface CheckBasis {
 	readonly mark: Mark;
 	/** Where the test, or its threshold, comes from. */
 	readonly source: string;
+	/** What stands there, or why it is tested. */
+	readonly text: string;
 }
 
 export interface CheckThreshold {
@@ -21,6 +25,10 @@ export interface Finding {
 	readonly row: string | null;
 	readonly message: string;
 	readonly value?: number;
+	/** SI unit of the value; '' for a pure number */
+	readonly unit?: string;
+	/** What the value was held against, where it is the design's own and not the threshold of the check. */
+	readonly limit?: number;
 }
 
 export type Found =
@@ -28,29 +36,45 @@ export type Found =
 	| { readonly outcome: 'flag'; readonly findings: readonly Finding[] }
 	| { readonly outcome: 'not-applicable'; readonly reason: string };
 
+/** A row with what it came to. */
+export type Pair = readonly [DesignRow, SolvedRow];
+
 /** All that a check looks into. */
 export interface CheckContext {
 	readonly document: DesignDocument;
 	readonly solution: Solution;
-	/** Rows with what they came to, in the order of the document. */
-	readonly rows: readonly (readonly [DesignRow, SolvedRow])[];
+	/** In the order of the document. */
+	readonly rows: readonly Pair[];
+	/** What the engine has flagged, by rule. */
 	readonly flags: (...rules: readonly FlagRule[]) => readonly Flag[];
 	/** Whether another row joins this one. */
 	readonly isJoined: (tag: string) => boolean;
+	/** The row of a tag. */
+	readonly rowOf: (tag: string) => DesignRow | undefined;
+	/** How many rows join it. */
+	readonly joinedBy: (tag: string) => number;
+	/** What the fittings and the equipment of a row are. */
+	readonly hintsOf: (row: DesignRow) => PartHints;
+	readonly ledger: MarginLedger;
+	/** Thresholds by the key of each check; null where it has none. */
+	readonly thresholds: ReadonlyMap<string, CheckThreshold | null>;
 }
+
+export type Severity = 'note' | 'caution' | 'fault';
 
 export interface CheckDefinition {
 	readonly key: string;
 	readonly title: string;
 	readonly looksAt: string;
-	readonly severity: 'note' | 'caution' | 'fault';
+	readonly severity: Severity;
 	readonly threshold: CheckThreshold | null;
 	readonly basis: CheckBasis;
 	readonly test: (context: CheckContext, threshold: number) => Found;
 }
 
-/** A finding that a person has answered. */
+/** Who answered a finding, when and why. */
 export interface Answered {
+	/** Null where the whole check was answered. */
 	readonly row: string | null;
 	readonly by: string;
 	readonly at: string;
@@ -60,7 +84,7 @@ export interface Answered {
 export interface CheckResult {
 	readonly key: string;
 	readonly title: string;
-	readonly severity: 'note' | 'caution' | 'fault';
+	readonly severity: Severity;
 	readonly outcome: 'pass' | 'flag' | 'not-applicable' | 'overridden';
 	/** What was tested with; null without a threshold. */
 	readonly threshold: (CheckThreshold & { readonly value: number; readonly isEdited: boolean }) | null;

@@ -177,34 +177,37 @@ export const criteriaSchema = open({
 
 /** A check with a threshold of its own, or left out with a reason. */
 const checkSchema = open({
-	threshold: z.number().optional(),
-	off: open({ reason: text }).optional()
+	threshold: z.number().describe('in the SI unit that the check names').optional(),
+	off: open({ reason: text.describe('without one the check is made') })
+		.describe('left out')
+		.optional()
 });
 
 /** A finding that a person has looked at and lets stand. */
 const overrideSchema = open({
 	check: tag,
 	row: tag.nullable().describe('null: all that the check finds'),
-	reason: text,
-	by: text,
+	reason: text.describe('without one the override does not count'),
+	by: text.describe('who decided it'),
 	at: text.describe('date')
 });
 
 /** An allowance on the duty, by its name. */
 const marginSchema = open({
 	name: text,
-	of: z.enum(['flow', 'pressure']),
-	fraction: z.number().min(-0.9).max(10).optional(),
-	pressure: either(LIMITS.loss, 'Pa').optional(),
+	of: z.enum(['flow', 'pressure']).describe('flow of the fan, or fan total pressure'),
+	fraction: z.number().min(-0.9).max(10).describe('of it, as 0.05').optional(),
+	pressure: either(LIMITS.loss, 'total pressure, Pa; of a margin on pressure').optional(),
 	reason: text.optional()
 });
 
 /** What stands on the sheet beside the figures. */
 const recordSchema = open({
 	codes: text.describe('codes and their editions').optional(),
-	noiseCriterion: text.optional(),
-	originator: text.optional(),
-	checker: text.optional()
+	noiseCriterion: text.describe('of the rooms, as NC 35').optional(),
+	tolerance: text.describe('within which the balanced flows are accepted').optional(),
+	originator: text.describe('who made the calculation').optional(),
+	checker: text.describe('who checked it').optional()
 });
 
 export const designSchema = open({
