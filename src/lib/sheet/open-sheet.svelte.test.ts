@@ -41,6 +41,18 @@ function serverOf(sheet: Sheet) {
 	return server;
 }
 
+/** A worker that answers when it is told to. */
+class LateWorker {
+	static answers: (() => void)[] = [];
+	onmessage: ((event: { data: unknown }) => void) | null = null;
+	postMessage({ turn, solve, sheet }: { turn: number; solve?: boolean; sheet?: Sheet }) {
+		if (!solve || !sheet) return;
+		const solved = solveSheet(sheet);
+		LateWorker.answers.push(() => this.onmessage?.({ data: { kind: 'solved', turn, solved, took: 30 } }));
+	}
+	terminate() {}
+}
+
 const opened = (sheet: Sheet) => new OpenSheet({ designId: 'design-1', sheet, seq: 0 });
 const settled = () => vi.advanceTimersByTimeAsync(0);
 let server: ReturnType<typeof serverOf>;
@@ -102,6 +114,25 @@ describe('an open sheet', () => {
 		expect(open.sheet.rows[0]?.cells.serves).toEqual({ typed: 'ab \ufffd', units: 'SI', value: 'ab \ufffd' });
 		await settled();
 		expect(open.sheet).toEqual(server.sheet);
+	});
+
+	it('keeps its figures where the worker answers late, for the sheet as it stood before', async () => {
+		vi.stubGlobal('Worker', LateWorker);
+		vi.stubGlobal('addEventListener', () => {});
+		vi.stubGlobal('removeEventListener', () => {});
+		const open = opened(server.sheet);
+		const stop = open.start();
+		// The page has become quick by itself before the worker has answered for the sheet as it was opened.
+		await vi.advanceTimersByTimeAsync(1_000);
+		expect(LateWorker.answers).toHaveLength(1);
+		open.do(set(1, 'length', '90'));
+		const { solved } = open;
+		expect(solved.solution?.fan.totalPressure).toBeGreaterThan(solveSheet(sheetOf(ROWS)).solution!.fan.totalPressure);
+		LateWorker.answers[0]!();
+		expect(open.solved).toBe(solved);
+		await settled();
+		expect(open.isConfirmed).toBe(true);
+		stop();
 	});
 
 	it('passes over steps of undo whose rows another person has deleted', async () => {

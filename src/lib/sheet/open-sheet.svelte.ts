@@ -49,6 +49,8 @@ export class OpenSheet {
 		this.#solved = solveSheet(opened.sheet);
 		this.#figures = new PreviewFigures({
 			onsolved: (turn, solved, took) => {
+				// The worker may answer for an older state after a newer one was solved here.
+				if (turn < this.#solvedTurn) return;
 				this.#solvedTurn = turn;
 				this.#solved = solved;
 				this.took = took;

@@ -157,6 +157,27 @@ describe('the outbox', () => {
 		expect([server.log, replies.map(({ seq }) => seq), box.unsent]).toEqual([[rowId(1)], [1], []]);
 	});
 
+	it('gives up a connection that never answers, and sends the edits anew', async () => {
+		vi.spyOn(AbortSignal, 'timeout').mockImplementation((wait) => {
+			const cut = new AbortController();
+			setTimeout(() => cut.abort(new DOMException('too long', 'TimeoutError')), wait);
+			return cut.signal;
+		});
+		const server = serverOf();
+		let hung = 0;
+		const { box } = boxOf((address, init) => {
+			if (hung++ > 0) return server.send(address, init);
+			return new Promise((_, reject) => init?.signal?.addEventListener('abort', () => reject(init.signal?.reason)));
+		});
+		box.put(edit(1));
+		await vi.advanceTimersByTimeAsync(14_000);
+		expect([box.state, hung]).toEqual(['saving', 1]);
+		await vi.advanceTimersByTimeAsync(1_000);
+		expect([box.state, box.reason]).toEqual(['kept', 'The server cannot be reached.']);
+		await vi.advanceTimersByTimeAsync(500);
+		expect([box.state, server.log]).toEqual(['saved', [rowId(1)]]);
+	});
+
 	it('waits longer each time, up to ten seconds, and not at all once told to', async () => {
 		const server = serverOf();
 		for (let n = 0; n < 9; n++) server.answers.push(() => Promise.reject(new TypeError('failed')));

@@ -7,6 +7,8 @@ export type SendState = 'saved' | 'saving' | 'kept' | 'refused';
 
 /** Waits between tries while the server cannot be reached [ms]. */
 const WAITS = [500, 1_000, 2_000, 5_000, 10_000];
+/** A connection that gives no answer by then is given up and tried anew; the ids keep an edit from being taken twice [ms]. */
+const LONGEST_ANSWER = 15_000;
 /** Edits in one message, so that a large paste stays below the server's limit. */
 const MOST_AT_ONCE = 200;
 /** Answers that the same message would get for ever: it is malformed, too large or not of the form. */
@@ -179,7 +181,8 @@ export class Outbox {
 			const answer = await send(`/api/v1/designs/${this.#options.designId}/edits`, {
 				method: 'POST',
 				headers: { 'content-type': 'application/json' },
-				body: JSON.stringify({ base: this.#options.base(), edits })
+				body: JSON.stringify({ base: this.#options.base(), edits }),
+				signal: AbortSignal.timeout(LONGEST_ANSWER)
 			});
 			const reply: unknown = answer.ok ? await answer.json() : null;
 			if (isReply(reply)) return reply;
