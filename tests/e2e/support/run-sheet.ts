@@ -28,9 +28,9 @@ export class RunSheet {
 		await this.awake();
 	}
 
-	/** The worker is started when the scripts have taken the page over. */
+	/** The grid is busy until the scripts have taken the page over. A worker may still be that of the page before. */
 	async awake(): Promise<void> {
-		if (!this.page.workers().length) await this.page.waitForEvent('worker');
+		await this.page.locator('[role="grid"]:not([aria-busy])').waitFor();
 		await this.grid.focus();
 	}
 
