@@ -2,7 +2,8 @@ import type { DesignDocument, Solution } from '../document/types';
 import { definitions } from './check-list';
 import { contextOf } from './context';
 import { overridesOf } from './overrides';
-import type { Answered, CheckContext, CheckDefinition, CheckResult, Finding, Found } from './types';
+import type { Finding } from './finding';
+import type { Answered, CheckContext, CheckDefinition, CheckResult, Found } from './types';
 
 const thresholds: CheckContext['thresholds'] = new Map(definitions.map(({ key, threshold }) => [key, threshold]));
 

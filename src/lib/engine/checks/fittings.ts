@@ -1,7 +1,8 @@
 import type { Item } from '../document/types';
 import { basis, beyond, flagged, foundOf, notApplicable, practice, whole } from './found';
 import { LBL_ELBOWS, MIL_AIR, SMACNA_DESIGN, VA_CEMETERY } from './sources';
-import type { CheckContext, CheckDefinition, Finding, Pair } from './types';
+import type { Finding } from './finding';
+import type { CheckContext, CheckDefinition, Pair } from './types';
 
 /** Splitter vanes are what a short throat is given them for. */
 const isBend = ({ kind }: Item) => kind !== null && kind.includes('elbow') && !kind.endsWith('splitter');

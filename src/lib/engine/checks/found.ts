@@ -1,5 +1,6 @@
 import type { DesignRow, Flag, FlagRule, SolvedRow } from '../document/types';
-import type { CheckBasis, CheckContext, Finding, Found, Mark, Pair } from './types';
+import type { Finding } from './finding';
+import type { CheckBasis, CheckContext, Found, Mark, Pair } from './types';
 
 export const PASS: Found = { outcome: 'pass' };
 export const notApplicable = (reason: string): Found => ({ outcome: 'not-applicable', reason });

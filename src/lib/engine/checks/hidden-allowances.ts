@@ -1,5 +1,5 @@
 import type { DesignDocument, Solution } from '../document/types';
-import type { Finding } from './types';
+import type { Finding } from './finding';
 
 const ALLOWANCE = /\b(allowances?|margins?|contingenc(y|ies)|safety factor|reserves?|unforeseen)\b/i;
 

@@ -2,4 +2,5 @@ export { checkList } from './check-list';
 export { checksOf } from './checks-of';
 export { marginLedger, type MarginLedger, type MarginLine } from './margin-ledger';
 export { NOT_SHOWN } from './not-shown';
-export type { CheckBasis, CheckResult, CheckThreshold, Finding } from './types';
+export type { Finding } from './finding';
+export type { CheckBasis, CheckResult, CheckThreshold } from './types';

@@ -1,6 +1,6 @@
 import type { DesignDocument, Solution } from '../document/types';
 import { hiddenAllowances } from './hidden-allowances';
-import type { Finding } from './types';
+import type { Finding } from './finding';
 
 export interface MarginLine {
 	readonly name: string;

@@ -78,7 +78,7 @@ export const pressureChecks: readonly CheckDefinition[] = [
 					const value = extremeStatic(pair);
 					const isBeyond = Math.abs(value) > Math.abs(limit);
 					// A little suction beside a fitting asks for no other class: the farther end tells the sign.
-					const isOpposite = limit !== 0 && Math.sign(value) === -Math.sign(limit);
+					const isOpposite = limit * value < 0;
 					if (!isBeyond && !isOpposite) return [];
 					const message = isOpposite
 						? `The class is for ${limit > 0 ? 'pressure' : 'suction'}, and the static pressure is of the other sign.`

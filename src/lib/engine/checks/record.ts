@@ -1,7 +1,8 @@
 import type { DesignDocument } from '../document/types';
 import { basis, flagged, foundOf, notApplicable, PASS, practice, whole } from './found';
 import { DIFFUSER_SOUND, NAVY, TOLERANCE } from './sources';
-import type { CheckBasis, CheckDefinition, Finding } from './types';
+import type { Finding } from './finding';
+import type { CheckBasis, CheckDefinition } from './types';
 
 type Entry = keyof NonNullable<DesignDocument['record']>;
 

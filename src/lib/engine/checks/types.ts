@@ -1,5 +1,6 @@
 import type { DesignDocument, DesignRow, Flag, FlagRule, Solution, SolvedRow } from '../document/types';
 import type { PartHints } from '../network/part-hints';
+import type { Finding } from './finding';
 import type { MarginLedger } from './margin-ledger';
 
 /** How firm the ground of a check is. */
@@ -18,17 +19,6 @@ export interface CheckThreshold {
 	/** SI; '' for a pure number */
 	readonly unit: string;
 	readonly label: string;
-}
-
-/** What was found at a row; `row` is null where it concerns the whole design. */
-export interface Finding {
-	readonly row: string | null;
-	readonly message: string;
-	readonly value?: number;
-	/** SI unit of the value; '' for a pure number */
-	readonly unit?: string;
-	/** What the value was held against, where it is the design's own and not the threshold of the check. */
-	readonly limit?: number;
 }
 
 export type Found =
