@@ -2,13 +2,15 @@
 // Abramowitz & Stegun, Handbook of Mathematical Functions (1964), 4.1.27.
 // The first two terms are kept in two parts, so that a power of the result loses nothing.
 import { nearestExponent, scale } from './float-parts';
-import { addParts, exactProduct, exactSum, multiplyParts, type TwoPart } from './two-part';
+import { addParts, exactProduct, exactSum, LOW, multiplyParts } from './two-part';
 
 /** ln 2; the first part has 33 bits, so that its product with an exponent is exact. */
 export const LN2_HIGH = 0.6931471804855391;
 export const LN2_LOW = 7.440617110012397e-11;
-const INVERSE_LN10: TwoPart = { hi: 0.4342944819032518, lo: 1.098319650216765e-17 };
-const TWO_THIRDS: TwoPart = { hi: 0.6666666666666666, lo: 3.700743415417188e-17 };
+const INVERSE_LN10 = 0.4342944819032518;
+const INVERSE_LN10_LOW = 1.098319650216765e-17;
+const TWO_THIRDS = 0.6666666666666666;
+const TWO_THIRDS_LOW = 3.700743415417188e-17;
 
 /** 2/5 + 2/7 z + 2/9 z^2 + … up to s^25 */
 function tail(z: number): number {
@@ -17,20 +19,27 @@ function tail(z: number): number {
 	return sum;
 }
 
-/** The natural logarithm of a positive finite x, good to some 100 bits less the tail's rounding (about 2^-64). */
-export function logParts(x: number): TwoPart {
+/** The natural logarithm of a positive finite x in two parts, good to some 100 bits less the tail's rounding (about 2^-64). */
+export function logParts(x: number): number {
 	const k = nearestExponent(x);
 	const f = scale(x, -k) - 1;
 	if (f === 0) return exactSum(k * LN2_HIGH, k * LN2_LOW);
 	const d = exactSum(f, 2);
-	const s1 = f / d.hi;
-	const p = exactProduct(s1, d.hi);
-	const s = exactSum(s1, (f - p.hi - p.lo - s1 * d.lo) / d.hi);
-	const z = multiplyParts(s, s);
-	const cubic = multiplyParts(multiplyParts(s, z), TWO_THIRDS);
-	const rest = s.hi * z.hi * z.hi * tail(z.hi);
-	const fraction = addParts({ hi: 2 * s.hi, lo: 2 * s.lo }, exactSum(cubic.hi, cubic.lo + rest));
-	return k === 0 ? fraction : addParts(exactSum(k * LN2_HIGH, k * LN2_LOW), fraction);
+	const dLow = LOW[0] as number;
+	const s1 = f / d;
+	const p = exactProduct(s1, d);
+	const s = exactSum(s1, (f - p - (LOW[0] as number) - s1 * dLow) / d);
+	const sLow = LOW[0] as number;
+	const z = multiplyParts(s, sLow, s, sLow);
+	const cube = multiplyParts(s, sLow, z, LOW[0] as number);
+	const cubic = multiplyParts(cube, LOW[0] as number, TWO_THIRDS, TWO_THIRDS_LOW);
+	const rest = s * z * z * tail(z);
+	const terms = exactSum(cubic, (LOW[0] as number) + rest);
+	const fraction = addParts(2 * s, 2 * sLow, terms, LOW[0] as number);
+	if (k === 0) return fraction;
+	const low = LOW[0] as number;
+	const whole = exactSum(k * LN2_HIGH, k * LN2_LOW);
+	return addParts(whole, LOW[0] as number, fraction, low);
 }
 
 /** What a logarithm of an x outside the positive finite numbers is; null for those within. */
@@ -49,5 +58,8 @@ function special(x: number): number | null {
  * @check none: compared with the platform's own function and pinned bits in arithmetic.test.ts
  */
 export function log10(x: number): number {
-	return special(x) ?? multiplyParts(logParts(x), INVERSE_LN10).hi;
+	const limit = special(x);
+	if (limit !== null) return limit;
+	const ln = logParts(x);
+	return multiplyParts(ln, LOW[0] as number, INVERSE_LN10, INVERSE_LN10_LOW);
 }

@@ -1,7 +1,7 @@
 // Powers: x^y = e^(y ln x), with ln x and the product in two parts so that large exponents lose nothing.
 import { expOfParts } from './exponential';
 import { logParts } from './logarithm';
-import { exactProduct, exactSum } from './two-part';
+import { exactProduct, exactSum, LOW } from './two-part';
 
 const isWhole = (y: number): boolean => Math.floor(y) === y;
 const isOdd = (y: number): boolean => isWhole(y) && Math.abs(y) < 9007199254740992 && y - 2 * Math.floor(y / 2) === 1;
@@ -14,12 +14,13 @@ function powerOfLimit(size: number, y: number): number {
 /** x^y for x positive and finite. */
 function powerOfPositive(x: number, y: number): number {
 	if (x === 1) return 1;
-	const l = logParts(x);
-	const size = y * l.hi;
+	const ln = logParts(x);
+	const lnLow = LOW[0] as number;
+	const size = y * ln;
 	if (Math.abs(size) > 800) return size > 0 ? Infinity : 0;
-	const p = exactProduct(y, l.hi);
-	const e = exactSum(p.hi, p.lo + y * l.lo);
-	return expOfParts(e.hi, e.lo);
+	const product = exactProduct(y, ln);
+	const exponent = exactSum(product, (LOW[0] as number) + y * lnLow);
+	return expOfParts(exponent, LOW[0] as number);
 }
 
 /**

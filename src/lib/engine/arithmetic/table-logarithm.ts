@@ -3,6 +3,7 @@
 // arithmetic, ACM Transactions on Mathematical Software 16 (1990); the series is Abramowitz & Stegun 4.1.24.
 import { POWERS_OF_TWO } from './float-parts';
 import { LN2_HIGH, LN2_LOW, logParts } from './logarithm';
+import { LOW } from './two-part';
 
 const LN2 = 0.6931471805599453;
 const SMALLEST_NORMAL = 2.2250738585072014e-308;
@@ -26,7 +27,8 @@ const PLACE = 1074 + 1023;
 const ROUNDING = 1536; // 1.5 times 2^10, whose last bit is 2^-42
 for (let j = 0; j < 128; j += 1) {
 	const c = 1 + j / 128;
-	const { hi, lo } = logParts(c);
+	const hi = logParts(c);
+	const lo = LOW[0] as number;
 	INVERSE[j] = 1 / c;
 	LN_HIGH[j] = hi + ROUNDING - ROUNDING;
 	LN_LOW[j] = hi - (LN_HIGH[j] as number) + lo;
@@ -58,7 +60,7 @@ function byTable(x: number): number {
 export function log(x: number): number {
 	const beside = x - 1;
 	if (x >= SMALLEST_NORMAL && x < Infinity && (beside > NEAR_ONE || beside < -NEAR_ONE)) return byTable(x);
-	if (x > 0) return x === Infinity ? x : logParts(x).hi;
+	if (x > 0) return x === Infinity ? x : logParts(x);
 	return x === 0 ? -Infinity : NaN;
 }
 

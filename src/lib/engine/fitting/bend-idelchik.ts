@@ -14,11 +14,14 @@ const ASPECT_FACTOR = [1.3, 1.17, 1.09, 1, 0.9, 0.85, 0.85, 0.9, 0.95, 0.98, 1];
 /** Aspect ratios H/W of the factor [-]. */
 export const BEND_ASPECT: Range = { min: 0.25, max: 8 };
 
+/** Between the two formulas of the angle, straight lines through 1 at 90°. */
+const TURN = [70, 90, 100];
+const TURN_FACTOR = [0.9 * sin(radians(70)), 1, 0.7 + 35 / 90];
+
 function angleFactor(d: number): number {
 	if (d <= 70) return 0.9 * sin(radians(d));
 	if (d >= 100) return 0.7 + (0.35 * d) / 90;
-	const at70 = 0.9 * sin(radians(70));
-	return interpolate([70, 90, 100], [at70, 1, 0.7 + 35 / 90], d);
+	return interpolate(TURN, TURN_FACTOR, d);
 }
 
 /**

@@ -1,6 +1,7 @@
 import { findDefinition, findJunction } from './catalogue';
 import type { Note, Definition, ParameterValues } from './definition';
 import { readParameters } from './parameters';
+import type { Size } from '../shape';
 import type { CatalogueEntry, CoefficientResult, FittingContext, FittingParameters, JunctionContext } from './types';
 
 /** Below this Reynolds number no source of the catalogue was measured. */
@@ -20,11 +21,7 @@ const TURBULENT = 4_000;
 export function coefficientOf(kind: string, parameters: FittingParameters, context: FittingContext): CoefficientResult {
 	const definition = findDefinition(kind);
 	if (!definition) throw new Error(`the catalogue has no fitting ${kind}`);
-	return resultOf(definition, parameters, context, (notes) => {
-		if (!definition.entry.shapes.includes(context.size.shape))
-			notes.unshift(`the source is not for ${context.size.shape} ducts`);
-		if (context.reynolds < TURBULENT) notes.push(turbulentNote(context.reynolds, notes));
-	});
+	return resultOf(definition, parameters, context, context.reynolds);
 }
 
 /**
@@ -46,29 +43,30 @@ export function junctionCoefficientOf(
 ): CoefficientResult {
 	const definition = findJunction(kind);
 	if (!definition) throw new Error(`the catalogue has no junction ${kind}`);
-	return resultOf(definition, parameters, context, (notes) => {
-		if (!definition.entry.shapes.includes(context.size.shape))
-			notes.unshift(`the source is not for ${context.size.shape} ducts`);
-	});
+	return resultOf(definition, parameters, context, Infinity);
 }
 
+/** What was said of the coefficient in hand; one for all, as a network asks for many thousand. */
+const outside: string[] = [];
+const within: string[] = [];
+const note: Note = (text, isWithin = false) => {
+	const list = isWithin ? within : outside;
+	if (!list.includes(text)) list.push(text);
+};
+
 /** By the method that the parameters name, or the entry's own. */
-function resultOf<Context>(
-	{ entry, coefficient: standard, rivals = {} }: Definition<Context>,
+function resultOf<Context extends { readonly size: Size }>(
+	{ entry, coefficient: standard, rivals }: Definition<Context>,
 	parameters: FittingParameters,
 	context: Context,
-	look: (notes: string[]) => void
+	reynolds: number
 ): CoefficientResult {
-	const notes: string[] = [];
-	const within: string[] = [];
-	const note: Note = (text, isWithin = false) => {
-		const list = isWithin ? within : notes;
-		if (!list.includes(text)) list.push(text);
-	};
-	const rival = entry.rivals?.find(({ key }) => key === parameters.method);
+	outside.length = within.length = 0;
+	const rival = entry.rivals === undefined ? undefined : rivalOf(entry, parameters.method);
 	const values = readParameters(entry, parameters, note);
-	const coefficient = ((rival && rivals[rival.key]) ?? standard)(values, context, note);
-	look(notes);
+	const coefficient = ((rival && rivals?.[rival.key]) ?? standard)(values, context, note);
+	if (!entry.shapes.includes(context.size.shape)) outside.unshift(`the source is not for ${context.size.shape} ducts`);
+	if (reynolds < TURBULENT) outside.push(turbulentNote(reynolds, outside));
 	const { method, source, known, uncertainty } = rival ?? entry;
 	return {
 		coefficient: coefficient === 0 ? 0 : coefficient, // never -0
@@ -78,10 +76,13 @@ function resultOf<Context>(
 		known,
 		uncertainty,
 		parameters: parametersAsUsed(entry, values, parameters),
-		inRange: notes.length === 0,
-		rangeNote: notes.length + within.length === 0 ? null : [...notes, ...within].join('; ')
+		inRange: outside.length === 0,
+		rangeNote: outside.length + within.length === 0 ? null : [...outside, ...within].join('; ')
 	};
 }
+
+const rivalOf = ({ rivals }: CatalogueEntry, method: unknown) =>
+	method === undefined ? undefined : rivals?.find(({ key }) => key === method);
 
 type UsedParameters = CoefficientResult['parameters'];
 const standing = new Map<CatalogueEntry, UsedParameters>();

@@ -1,4 +1,4 @@
-import type { DesignDocument, DesignRow, Fitting, Item, Junction } from '../document/types';
+import type { DesignDocument, Fitting, Item, Junction } from '../document/types';
 import { coefficientOf, fittingEntry, junctionCoefficientOf, type CoefficientResult } from '../fitting';
 import type { CatalogueUses } from './catalogue-uses';
 import type { Hydraulics } from './hydraulics';
@@ -76,7 +76,6 @@ interface Catalogued {
 
 export function fittingItem(
 	fitting: Fitting,
-	row: DesignRow,
 	hydraulics: Hydraulics,
 	{ methods, uses }: Catalogued,
 	notes: RangeNote[]
@@ -99,15 +98,7 @@ export function fittingItem(
 	}
 	const entry = fittingEntry(kind);
 	const name = fitting.name ?? entry?.name ?? kind;
-	const { reynolds, velocity, relativeRoughness } = hydraulics;
-	const context = {
-		size: row.size,
-		reynolds,
-		velocity,
-		relativeRoughness,
-		frictionFactor: hydraulics.frictionFactor
-	};
-	const result = coefficientOf(kind, withMethod(fitting, methods), context);
+	const result = coefficientOf(kind, withMethod(fitting, methods), hydraulics);
 	noteRange(name, result, notes);
 	return {
 		part: 'fitting',

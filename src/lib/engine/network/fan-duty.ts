@@ -7,7 +7,8 @@ import type { RowLoss } from './row-loss';
 export function totalsOf({ rows, parents, order }: Network, flows: Float64Array): Solution['totals'] {
 	let supplyFlow = 0;
 	let returnFlow = 0;
-	for (const place of order) {
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		if ((parents[place] ?? -1) >= 0) continue;
 		if (rows[place]?.side === 'supply') supplyFlow += flows[place] ?? 0;
 		else returnFlow += flows[place] ?? 0;
@@ -48,7 +49,8 @@ export function fanDuty(
 function velocityPressureAtOutlet({ rows, parents, order }: Network, rowLosses: readonly RowLoss[]): number | null {
 	let flow = 0;
 	let sum = 0;
-	for (const place of order) {
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		const solved = rowLosses[place];
 		if (solved === undefined || (parents[place] ?? -1) >= 0 || rows[place]?.side !== 'supply') continue;
 		// Where the row leaks, more leaves the fan than the mean flow that its velocity pressure is of.

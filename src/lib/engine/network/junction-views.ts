@@ -64,7 +64,8 @@ export function junctionViews(
 	if (!rows.some((_, place) => asked(place))) return views;
 
 	const nodes = new Map<number, Node>();
-	for (const place of order) {
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		const parent = parents[place] ?? -1;
 		if (parent < 0) continue;
 		let node = nodes.get(parent);

@@ -20,7 +20,8 @@ export function massBalanceOf(
 	airs: readonly RowAir[]
 ): Solution['massBalance'] {
 	const sums = { supply: { fan: 0, outlets: 0, leakage: 0 }, return: { fan: 0, outlets: 0, leakage: 0 } };
-	for (const place of order) {
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		const sum = sums[rows[place]?.side === 'supply' ? 'supply' : 'return'];
 		if ((parents[place] ?? -1) < 0) sum.fan += masses.leg[place] ?? 0;
 		if (joined[place] !== 1) sum.outlets += masses.common[place] ?? 0;

@@ -4,7 +4,7 @@ import { OutOfRangeError } from '../errors';
 import { shortFigure } from '../short-figure';
 import { designFlows, type RowFlows } from './flows';
 import { sectionOf } from '../shape';
-import { hydraulicsOf } from './hydraulics';
+import { blankHydraulics, findHydraulics } from './hydraulics';
 import type { RangeNote } from './items';
 import { junctionViews, type MassFlows } from './junction-views';
 import type { Network } from './network';
@@ -42,34 +42,33 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	const { network, settings, airs, uniform } = ground;
 	const flows = designFlows(network, { airs, uniform, standard: settings.standard, leaks });
 	const problems: Problem[] = [];
-	const areas = Float64Array.from(network.rows, ({ size }) => sectionOf(size).area);
+	const areas = new Float64Array(network.rows.length);
+	network.rows.forEach(({ size }, place) => (areas[place] = sectionOf(size).area));
 	const masses = massFlowsOf(airs, flows);
 	const views = junctionViews(network, { areas, airs }, masses, flows.farEnd);
 	const notes = new Map<string, readonly RangeNote[]>();
 	const rowLosses: RowLoss[] = [];
 	let ofRow: RangeNote[] = [];
+	const noOwnAir: RowAir = { ...settings.air, temperature: null, relativeHumidity: null, condenses: false };
+	const hydraulics = blankHydraulics(noOwnAir);
 	network.rows.forEach((row, place) => {
-		const air = airs[place] ?? { ...settings.air, temperature: null, relativeHumidity: null, condenses: false };
+		const air = airs[place] ?? noOwnAir;
 		const far = flows.farEnd[place] ?? 0;
 		const flow = leaks ? (far + (flows.fanEnd[place] ?? 0)) / 2 : far;
-		// What the row's own flow comes to lives no longer than its losses are worked.
-		const solved = orProblem(
-			() => rowLoss(row, hydraulicsOf(row, flow, air, settings), views[place], settings, ofRow),
-			place
-		);
-		if ('code' in solved) problems.push(solved);
-		else if (Number.isFinite(solved.loss)) rowLosses.push(solved);
-		else problems.push(tooGreat(place));
+		try {
+			const solved = rowLoss(row, findHydraulics(hydraulics, row, flow, air, settings), views[place], settings, ofRow);
+			if (Number.isFinite(solved.loss)) rowLosses.push(solved);
+			else problems.push(tooGreat(place));
+		} catch (error) {
+			problems.push(outsideProblem(error, ['rows', place]));
+		}
 		if (ofRow.length === 0) return;
 		notes.set(row.tag, ofRow);
 		ofRow = [];
 	});
 	if (problems.length > 0) return problems;
 
-	const along = lossesFromFan(
-		network,
-		Float64Array.from(rowLosses, (one) => one.loss)
-	);
+	const along = lossesFromFan(network, rowLosses);
 	const paths = pathsOf(network, along);
 	placePressures(network, along, paths.required, paths.spares, rowLosses);
 	return { flows, masses, rowLosses, notes, paths };
@@ -77,20 +76,17 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 
 /** Of each row at the node where it joins, and of the common leg there [kg/s]. */
 function massFlowsOf(airs: readonly RowAir[], { fanEnd, farEnd }: RowFlows): MassFlows {
-	const mass = (flows: Float64Array) => flows.map((flow, place) => flow * (airs[place]?.density ?? 1));
-	return { leg: mass(fanEnd), common: mass(farEnd) };
+	const common = new Float64Array(farEnd.length);
+	const leg = fanEnd === farEnd ? common : new Float64Array(fanEnd.length);
+	airs.forEach(({ density }, place) => {
+		common[place] = (farEnd[place] ?? 0) * density;
+		if (leg !== common) leg[place] = (fanEnd[place] ?? 0) * density;
+	});
+	return { leg, common };
 }
 
 const tooGreat = (place: number): Problem =>
 	fault('too-great', ['rows', place], 'loses more than a number can tell', 'a row of usual size and flow');
-
-function orProblem<T extends object>(find: () => T, place: number): T | Problem {
-	try {
-		return find();
-	} catch (error) {
-		return outsideProblem(error, ['rows', place]);
-	}
-}
 
 /** Only a formula asked outside its range is a problem of the document; anything else is a bug and goes on. */
 export function outsideProblem(error: unknown, path: readonly (string | number)[]): Problem {

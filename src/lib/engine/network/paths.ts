@@ -27,7 +27,8 @@ export function pathsOf(network: Network, along: Float64Array): PathsResult {
 	const required: Record<HalfKey, number | null> = { supply: null, return: null };
 	const index: Record<HalfKey, string | null> = { supply: null, return: null };
 	// In the order of the tree, so that of equal paths the same one governs for any order of rows.
-	for (const place of order) {
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		const row = rows[place];
 		if (row === undefined || joined[place] === 1) continue;
 		const half = row.side === 'supply' ? 'supply' : 'return';
@@ -63,12 +64,15 @@ export function pathsOf(network: Network, along: Float64Array): PathsResult {
 }
 
 /** Sum of the losses from the fan to the far end of each row [Pa]. */
-export function lossesFromFan({ parents, order }: Network, losses: Float64Array): Float64Array {
-	const along = new Float64Array(losses.length);
-	for (const place of order) {
+export function lossesFromFan(
+	{ parents, order }: Network,
+	rowLosses: readonly { readonly loss: number }[]
+): Float64Array {
+	const along = new Float64Array(rowLosses.length);
+	order.forEach((place) => {
 		const parent = parents[place] ?? -1;
-		along[place] = (parent < 0 ? 0 : (along[parent] ?? 0)) + (losses[place] ?? 0);
-	}
+		along[place] = (parent < 0 ? 0 : (along[parent] ?? 0)) + (rowLosses[place]?.loss ?? 0);
+	});
 	return along;
 }
 

@@ -31,7 +31,8 @@ export function rowAirs({ rows, parents, order }: Network, document: DesignDocum
 	const airs = new Array<RowAir>(rows.length).fill(own);
 	if ('density' in condition) return airs;
 	const known = new Map<number, RowAir>();
-	for (const place of order) {
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		const named = rows[place]?.temperature;
 		if (named === undefined) {
 			const parent = parents[place] ?? -1;

@@ -47,23 +47,23 @@ export function rowLoss(
 	// Of just its length: lists that grow keep room that is never used.
 	const items = new Array<Item>(itemCount(row, gain));
 	let at = 0;
-	/** Puts the item in, and gives its loss. */
-	const lossOf = (item: Item): number => {
-		items[at++] = item;
-		return item.loss;
-	};
 
-	const frictionLoss = lossOf(ductItem(row.length, row.size.shape, hydraulics, notes));
-	const flexibleLoss = row.flexible === undefined ? 0 : lossOf(flexibleItem(row.flexible, hydraulics, notes));
-	const junctionLoss =
-		row.junction === undefined ? 0 : lossOf(junctionItem(row.junction, hydraulics, view, settings, notes));
+	const duct = ductItem(row.length, row.size.shape, hydraulics, notes);
+	items[at++] = duct;
+	let flexibleLoss = 0;
+	if (row.flexible !== undefined) flexibleLoss = (items[at++] = flexibleItem(row.flexible, hydraulics, notes)).loss;
+	let junctionLoss = 0;
+	if (row.junction !== undefined)
+		junctionLoss = (items[at++] = junctionItem(row.junction, hydraulics, view, settings, notes)).loss;
 	let fittingLoss = 0;
-	for (const one of fittings) fittingLoss += lossOf(fittingItem(one, row, hydraulics, settings, notes));
+	for (const one of fittings) fittingLoss += (items[at++] = fittingItem(one, hydraulics, settings, notes)).loss;
 	let equipmentLoss = 0;
-	for (const one of equipment) equipmentLoss += lossOf(equipmentItem(one, flow, notes));
-	const outletLoss = row.outlet === undefined ? 0 : lossOf(outletItem(row.outlet, row.side, hydraulics));
+	for (const one of equipment) equipmentLoss += (items[at++] = equipmentItem(one, flow, notes)).loss;
+	let outletLoss = 0;
+	if (row.outlet !== undefined) outletLoss = (items[at++] = outletItem(row.outlet, row.side, hydraulics)).loss;
 	if (gain !== 0) items[at] = gravityItem(gain);
 
+	const frictionLoss = duct.loss;
 	const losses = frictionLoss + flexibleLoss + fittingLoss + junctionLoss + equipmentLoss + outletLoss;
 	const solved: RowLoss = {
 		side: row.side,
