@@ -1,61 +1,79 @@
 import { performance } from 'node:perf_hooks';
-import { solveDesign, validateDocument } from '$lib/engine';
+import { solveDesign, validateDocument, type DesignDocument } from '$lib/engine';
 import { building } from '../../tests/bench/building';
 import { benchFriction } from './bench/friction';
 
-const COUNTS = [500, 1_000, 10_000] as const;
-const WARM_UP_ROWS = 40_000;
-const RUNS = 15;
+const COUNTS = [100, 1_000, 10_000] as const;
+/** Rows of one reading, whatever the size of a design. */
+const ROWS = 10_000;
+const WARM_UP = 6;
+const RUNS = 21;
 
 interface Timing {
 	readonly rows: number;
+	/** One design [ms]. */
 	readonly total_ms: number;
 	readonly perRow_us: number;
+	/** The same where one design is solved again and again, as while typing: it stays in the processor's cache. */
+	readonly again_perRow_us: number;
 	readonly validate_ms: number;
 }
 
-/**
- * Median times of solving and of validating, in one process after a warm-up, the sizes taken in turn; and how many
- * friction factors a second.
- */
+interface Sized {
+	readonly rows: number;
+	/** Designs of their own, together as large as the largest, so that none finds the caches warmer than another. */
+	readonly documents: readonly DesignDocument[];
+	readonly solving: number[];
+	readonly again: number[];
+	readonly validating: number[];
+}
+
+/** Median times in one process after a warm-up, the sizes taken in turn; and how many friction factors a second. */
 export function bench() {
-	const documents = COUNTS.map((rows) => building(rows));
-	for (const document of documents)
-		for (let done = 0; done < WARM_UP_ROWS; done += document.rows.length) {
-			solved(document);
-			validated(document);
+	const sizes = COUNTS.map((rows): Sized => {
+		const documents = Array.from({ length: ROWS / rows }, () => building(rows));
+		return { rows, documents, solving: [], again: [], validating: [] };
+	});
+	for (let run = -WARM_UP; run < RUNS; run += 1)
+		for (const { documents, solving, again } of sizes) {
+			const [same] = documents;
+			const each = timeOf(() => documents.forEach(solved));
+			const repeated = timeOf(() => documents.forEach(() => same && solved(same)));
+			if (run < 0) continue;
+			solving.push(each);
+			again.push(repeated);
 		}
-	const solving = documents.map((): number[] => []);
-	const validating = documents.map((): number[] => []);
-	for (let run = 0; run < RUNS; run += 1)
-		documents.forEach((document, i) => {
-			// Small documents several times in one reading, so that all readings are of about the same length.
-			const times = Math.max(1, Math.round(10_000 / document.rows.length));
-			solving[i]?.push(timeOf(() => solved(document), times));
-			validating[i]?.push(timeOf(() => validated(document), times));
-		});
-	const timings = COUNTS.map((rows, i): Timing => {
-		const total_ms = median(solving[i] ?? []);
-		const perRow_us = (total_ms * 1000) / rows;
+	for (let run = -WARM_UP; run < RUNS; run += 1)
+		for (const { documents, validating } of sizes) {
+			const took = timeOf(() => documents.forEach(validated));
+			if (run >= 0) validating.push(took);
+		}
+	const timings = sizes.map(({ rows, documents, solving, again, validating }): Timing => {
+		const perRow = (times: number[]) => rounded((median(times) * 1000) / ROWS);
 		return {
 			rows,
-			total_ms: rounded(total_ms),
-			perRow_us: rounded(perRow_us),
-			validate_ms: rounded(median(validating[i] ?? []))
+			total_ms: rounded(median(solving) / documents.length),
+			perRow_us: perRow(solving),
+			again_perRow_us: perRow(again),
+			validate_ms: rounded(median(validating) / documents.length)
 		};
 	});
-	const [, thousand, tenThousand] = timings;
-	const ratio = (tenThousand?.perRow_us ?? 0) / (thousand?.perRow_us ?? 1);
+	const [hundred, thousand, tenThousand] = timings;
+	const ratio = (key: 'perRow_us' | 'again_perRow_us', to?: Timing) =>
+		rounded((tenThousand?.[key] ?? 0) / (to?.[key] ?? 1));
 	return {
 		node: process.version,
+		options: process.execArgv,
 		runs: RUNS,
 		solve: timings,
-		perRowAt10000To1000: rounded(ratio),
+		perRowAt10000To1000: ratio('perRow_us', thousand),
+		perRowAt10000To100: ratio('perRow_us', hundred),
+		again: { perRowAt10000To1000: ratio('again_perRow_us', thousand) },
 		friction: benchFriction()
 	};
 }
 
-function solved(document: Parameters<typeof solveDesign>[0]): void {
+function solved(document: DesignDocument): void {
 	if (!solveDesign(document).ok) throw new Error('the building of the benchmark does not solve');
 }
 
@@ -63,11 +81,11 @@ function validated(document: unknown): void {
 	if (!validateDocument(document).ok) throw new Error('the building of the benchmark does not validate');
 }
 
-/** Of one call [ms]. */
-function timeOf(call: () => void, times: number): number {
+/** [ms] */
+function timeOf(call: () => void): number {
 	const start = performance.now();
-	for (let i = 0; i < times; i += 1) call();
-	return (performance.now() - start) / times;
+	call();
+	return performance.now() - start;
 }
 
 function median(values: readonly number[]): number {

@@ -12,6 +12,8 @@ import { complain, Interrupted, Refusal } from '../machine/say.mjs';
 const LOG_LIMIT = 5e6;
 const ERROR_LEVEL = 50;
 const PATIENCE = 30_000;
+/** The solution of 10,000 rows is 17 MB: with the usual room for new objects it would be copied several times as it grows [MB]. */
+const ROOM_FOR_SOLUTIONS = '--max-semi-space-size=64';
 
 /** @param {string} line of the log @returns {string | null} an error in words, null for anything less */
 export function errorIn(line) {
@@ -36,7 +38,7 @@ export async function startServer(life, { entry, port, env, onStart }) {
 	if (existsSync(file) && statSync(file).size > LOG_LIMIT) renameSync(file, `${file}.1`);
 	const log = createWriteStream(file, { flags: 'a', mode: 0o600 });
 	log.on('error', (error) => complain(`The server's log cannot be written: ${error.message}`));
-	const child = spawn(process.execPath, [entry], {
+	const child = spawn(process.execPath, [ROOM_FOR_SOLUTIONS, entry], {
 		cwd: PROJECT,
 		env: { ...process.env, ...env },
 		detached: true,

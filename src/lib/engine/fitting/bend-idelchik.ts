@@ -24,6 +24,17 @@ function angleFactor(d: number): number {
 	return interpolate(TURN, TURN_FACTOR, d);
 }
 
+/** Nearly all elbows of a design have one radius: its power is taken once. */
+const last = new Float64Array([1, 1]);
+
+function radiusFactor(R: number): number {
+	if (last[0] !== R) {
+		last[1] = R <= 1 ? pow(R, -2.5) : pow(R, -0.5);
+		last[0] = R;
+	}
+	return last[1] as number;
+}
+
 /**
  * Bend of round or square section, smooth walls, local part (wall friction along the arc belongs to the duct's length).
  *
@@ -37,7 +48,7 @@ function angleFactor(d: number): number {
  * @check fixtures/published/elbows.json
  */
 export function bendIdelchik(d: number, R: number): number {
-	return angleFactor(d) * 0.21 * (R <= 1 ? pow(R, -2.5) : pow(R, -0.5));
+	return angleFactor(d) * 0.21 * radiusFactor(R);
 }
 
 /**

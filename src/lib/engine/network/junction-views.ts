@@ -1,5 +1,6 @@
 import { velocityPressure } from '../air';
 import type { JunctionContext } from '../fitting';
+import { sectionOf } from '../shape';
 import type { Network } from './network';
 import type { RowAir } from './row-airs';
 
@@ -22,11 +23,6 @@ export interface MassFlows {
 	readonly common: Float64Array;
 }
 
-interface Sections {
-	readonly areas: Float64Array;
-	readonly airs: readonly RowAir[];
-}
-
 interface Node {
 	/** Place of the straight leg; -1 where none goes straight on. */
 	straight: number;
@@ -43,7 +39,7 @@ interface Node {
  *   q = m_leg/m_common, a = A_leg/A_common
  *
  * @param network rows as trees
- * @param sections area of each row [m2], and its air: density [kg/m3]
+ * @param airs of each row: density [kg/m3]
  * @param massFlows of each row at the node where it joins [kg/s], and of the common leg at that node
  * @param farFlows of each row where others join it [m3/s]
  * @returns for each row with a junction of the catalogue its view of the node; undefined for the others
@@ -52,7 +48,7 @@ interface Node {
  */
 export function junctionViews(
 	{ rows, parents, order }: Network,
-	{ areas, airs }: Sections,
+	airs: readonly RowAir[],
 	massFlows: MassFlows,
 	farFlows: Float64Array
 ): readonly (JunctionView | undefined)[] {
@@ -80,6 +76,7 @@ export function junctionViews(
 		if (node.greatest < 0 || flow > (massFlows.leg[node.greatest] ?? 0)) node.greatest = place;
 	}
 
+	const areas = rows.map(({ size }) => sectionOf(size).area);
 	rows.forEach((row, place) => {
 		const parent = parents[place] ?? -1;
 		const node = nodes.get(parent);

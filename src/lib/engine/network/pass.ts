@@ -3,7 +3,6 @@ import type { Problem } from '../document/types';
 import { OutOfRangeError } from '../errors';
 import { shortFigure } from '../short-figure';
 import { designFlows, type RowFlows } from './flows';
-import { sectionOf } from '../shape';
 import { blankHydraulics, findHydraulics } from './hydraulics';
 import type { RangeNote } from './items';
 import { junctionViews, type MassFlows } from './junction-views';
@@ -42,12 +41,11 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	const { network, settings, airs, uniform } = ground;
 	const flows = designFlows(network, { airs, uniform, standard: settings.standard, leaks });
 	const problems: Problem[] = [];
-	const areas = new Float64Array(network.rows.length);
-	network.rows.forEach(({ size }, place) => (areas[place] = sectionOf(size).area));
 	const masses = massFlowsOf(airs, flows);
-	const views = junctionViews(network, { areas, airs }, masses, flows.farEnd);
+	const views = junctionViews(network, airs, masses, flows.farEnd);
 	const notes = new Map<string, readonly RangeNote[]>();
-	const rowLosses: RowLoss[] = [];
+	const rowLosses = new Array<RowLoss>(network.rows.length);
+	const losses = new Float64Array(network.rows.length);
 	let ofRow: RangeNote[] = [];
 	const noOwnAir: RowAir = { ...settings.air, temperature: null, relativeHumidity: null, condenses: false };
 	const hydraulics = blankHydraulics(noOwnAir);
@@ -57,8 +55,9 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 		const flow = leaks ? (far + (flows.fanEnd[place] ?? 0)) / 2 : far;
 		try {
 			const solved = rowLoss(row, findHydraulics(hydraulics, row, flow, air, settings), views[place], settings, ofRow);
-			if (Number.isFinite(solved.loss)) rowLosses.push(solved);
-			else problems.push(tooGreat(place));
+			rowLosses[place] = solved;
+			losses[place] = solved.loss;
+			if (!Number.isFinite(solved.loss)) problems.push(tooGreat(place));
 		} catch (error) {
 			problems.push(outsideProblem(error, ['rows', place]));
 		}
@@ -68,7 +67,7 @@ export function workPass(ground: PassGround, leaks: Float64Array | null): Pass |
 	});
 	if (problems.length > 0) return problems;
 
-	const along = lossesFromFan(network, rowLosses);
+	const along = lossesFromFan(network, losses);
 	const paths = pathsOf(network, along);
 	placePressures(network, along, paths.required, paths.spares, rowLosses);
 	return { flows, masses, rowLosses, notes, paths };

@@ -64,15 +64,13 @@ export function pathsOf(network: Network, along: Float64Array): PathsResult {
 }
 
 /** Sum of the losses from the fan to the far end of each row [Pa]. */
-export function lossesFromFan(
-	{ parents, order }: Network,
-	rowLosses: readonly { readonly loss: number }[]
-): Float64Array {
-	const along = new Float64Array(rowLosses.length);
-	order.forEach((place) => {
+export function lossesFromFan({ parents, order }: Network, losses: Float64Array): Float64Array {
+	const along = new Float64Array(losses.length);
+	for (let i = 0; i < order.length; i += 1) {
+		const place = order[i] ?? 0;
 		const parent = parents[place] ?? -1;
-		along[place] = (parent < 0 ? 0 : (along[parent] ?? 0)) + (rowLosses[place]?.loss ?? 0);
-	});
+		along[place] = (parent < 0 ? 0 : (along[parent] ?? 0)) + (losses[place] ?? 0);
+	}
 	return along;
 }
 
