@@ -30,6 +30,7 @@ export class OpenSheet {
 	#confirmed: Sheet;
 	#base: number;
 	#sheet = $state.raw<Sheet>() as Sheet;
+	#units = $state.raw<UnitSystem>('SI');
 	#solved = $state.raw<SolvedSheet>() as SolvedSheet;
 	#whatIf = $state.raw<SolvedSheet | null>(null);
 	#server = $state.raw<ServerFigures | null>(null);
@@ -44,7 +45,8 @@ export class OpenSheet {
 
 	constructor(opened: Opened) {
 		this.designId = opened.designId;
-		this.#confirmed = this.#sheet = opened.sheet;
+		this.#confirmed = opened.sheet;
+		this.#show(opened.sheet);
 		this.#base = opened.seq;
 		this.#solved = solveSheet(opened.sheet);
 		this.#figures = new PreviewFigures({
@@ -69,8 +71,10 @@ export class OpenSheet {
 	get sheet() {
 		return this.#sheet;
 	}
-	/** Derived, so that what hangs on the units is not asked anew with every edit. */
-	readonly units: UnitSystem = $derived.by(() => unitsOf(this.#sheet));
+	/** Told only where they change: most figures of the screen hang on them, and need not be asked with every edit. */
+	get units(): UnitSystem {
+		return this.#units;
+	}
 	get solved() {
 		return this.#solved;
 	}
@@ -101,10 +105,12 @@ export class OpenSheet {
 		this.#figures.start(() => this.#sheet);
 		this.outbox.recall();
 		const kept = readKept(this.designId);
-		for (const { edit } of kept) {
-			const entry = entryOf(edit);
-			if (entry) this.#sheet = applyEntry(this.#sheet, entry);
-		}
+		this.#show(
+			applyMany(
+				this.#sheet,
+				kept.flatMap(({ edit }) => entryOf(edit) ?? [])
+			)
+		);
 		this.#solve('all');
 		if (kept.length) this.outbox.fill(kept);
 		const online = () => void this.outbox.flush();
@@ -165,10 +171,15 @@ export class OpenSheet {
 	#apply(edit: Edit): void {
 		const entry = entryOf(edit);
 		if (!entry) return;
-		this.#sheet = applyEntry(this.#sheet, entry);
+		this.#show(applyEntry(this.#sheet, entry));
 		this.tryOut(null);
 		this.#solve(entry);
 		this.outbox.put({ id: newId(), edit });
+	}
+
+	#show(sheet: Sheet): void {
+		this.#sheet = sheet;
+		this.#units = unitsOf(sheet);
 	}
 
 	#solve(change: Entry | 'all'): void {
@@ -188,7 +199,7 @@ export class OpenSheet {
 		const gone = new Set(sent.map(({ id }) => id));
 		const waiting = this.outbox.unsent.filter(({ id }) => !gone.has(id));
 		const entries = waiting.flatMap(({ edit }) => (entryOf(edit) ?? []) as Entry | []);
-		this.#sheet = applyMany(this.#confirmed, entries);
+		this.#show(applyMany(this.#confirmed, entries));
 		this.#solve('all');
 	}
 }
