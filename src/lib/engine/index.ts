@@ -29,7 +29,7 @@ export {
 	type SolveResult,
 	type ValidateResult
 } from './document';
-export { solveDesign } from './network';
+export { solveDesign, STANDARD_DENSITY } from './network';
 export { ENGINE_VERSION } from './version';
 export { leakageClasses, type LeakageClass } from './leakage';
 export {
@@ -66,6 +66,7 @@ export {
 } from './working';
 export * from './quantity';
 export {
+	authorOf,
 	catalogue,
 	coefficientOf,
 	fittingEntry,

@@ -1,11 +1,15 @@
 import {
+	authorOf,
 	findMaterial,
+	fittingEntry,
 	formatDensity,
 	formatElevation,
 	formatFlow,
 	formatHumidity,
 	formatRoughness,
 	formatTemperature,
+	formatViscosity,
+	STANDARD_DENSITY,
 	unitOf,
 	type DesignAir,
 	type DesignDocument,
@@ -19,21 +23,23 @@ import { SERVICE } from './wording';
 /** What the figures rest on: air, formulas, roughness, what is counted and what is not. */
 export function basisOf({ document, solution, units, heading }: ReportInput): Labelled[] {
 	const density = `${formatDensity(solution.air.density, units)} ${unitOf('density', units)}`;
+	const viscosity = `${formatViscosity(solution.air.viscosity, units)} ${unitOf('viscosity', units)}`;
 	const { surroundings } = document;
 	const assumed = 'density' in document.air && document.air.viscosity === undefined ? ', of air at 20 °C' : '';
 	return [
 		{ label: 'Air', value: [...airWords(document.air, units), density].join(', ') },
-		{ label: 'Viscosity', value: `${(solution.air.viscosity * 1e6).toFixed(2)} µPa s${assumed}` },
+		{ label: 'Viscosity', value: `${viscosity}${assumed}` },
 		...(surroundings ? [{ label: 'Surroundings', value: surroundingsWords(surroundings, units) }] : []),
 		{ label: 'Service', value: document.service ? SERVICE[document.service] : 'not named; taken as general' },
 		...(heading.service.trim() ? [{ label: 'Serves', value: heading.service.trim() }] : []),
 		{ label: 'Friction', value: 'Darcy–Weisbach, Colebrook–White' },
 		{ label: 'Roughness', value: roughnessWords(document, units) },
 		{ label: 'Losses', value: 'coefficient × own velocity pressure; equipment and outlets as entered' },
+		...methodWords(solution).map((value) => ({ label: 'Methods', value })),
 		{ label: 'Flexible duct', value: flexibleWords(document) },
 		{ label: 'Leakage, margin', value: leakageWords(document, solution, units) },
 		...(document.flowBasis === 'standard'
-			? [{ label: 'Flows', value: 'of outlets as standard air; others actual' }]
+			? [{ label: 'Flows', value: `of outlets as air of ${standardWords(document, units)}; others actual` }]
 			: []),
 		{ label: 'Engine', value: `Evendraft ${solution.engineVersion}` }
 	];
@@ -52,6 +58,23 @@ function airWords(air: DesignAir, units: UnitSystem): string[] {
 function surroundingsWords(air: DesignAir, units: UnitSystem): string {
 	if ('density' in air) return `${formatDensity(air.density, units)} ${unitOf('density', units)}, for thermal gravity`;
 	return `${formatTemperature(air.temperature, units)} ${unitOf('temperature', units)}, for thermal gravity`;
+}
+
+function standardWords({ standardDensity = STANDARD_DENSITY }: DesignDocument, units: UnitSystem): string {
+	return `${formatDensity(standardDensity, units)} ${unitOf('density', units)}`;
+}
+
+/** Authors that were chosen in place of the catalogue's own, each kind of fitting once; nothing where none was. */
+function methodWords({ rows }: Solution): string[] {
+	const chosen = new Set<string>();
+	for (const { items } of Object.values(rows))
+		for (const { kind, catalogue } of items) {
+			const entry = kind === null ? null : fittingEntry(kind);
+			const key = catalogue?.methodKey;
+			if (entry && key !== undefined && key !== entry.standardMethod)
+				chosen.add(`${lowered(entry.name)} by ${authorOf(key).replace(',', '')}`);
+		}
+	return chosen.size === 0 ? [] : [`${[...chosen].join('; ')}; others by the catalogue’s own`];
 }
 
 type Holder = { readonly roughness?: number; readonly material?: string };

@@ -74,6 +74,15 @@ describe('the basis of design', () => {
 		expect(basis({ service: 'kitchen-grease' })['Service']).toBe('Kitchen grease exhaust');
 	});
 
+	it('names the authors that were chosen in place of the catalogue’s own, and the density of standard flows', () => {
+		expect(basis({})).not.toHaveProperty('Methods');
+		const bend = { ...row('S1', 'supply'), fittings: [{ kind: 'round-elbow-smooth' }] };
+		const chosen = report([bend], { methods: { 'round-elbow-smooth': 'rennels' }, flowBasis: 'standard' }).basis;
+		const words = Object.fromEntries(chosen.map(({ label, value }) => [label, value]));
+		expect(words['Methods']).toBe('round elbow, smooth radius by Rennels; others by the catalogue’s own');
+		expect(words['Flows']).toBe('of outlets as air of 1.20 kg/m³; others actual');
+	});
+
 	it('says where the viscosity is assumed', () => expect(basis({})['Viscosity']).toMatch(/of air at 20 °C/));
 });
 

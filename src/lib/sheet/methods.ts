@@ -1,6 +1,6 @@
 /** Settings that choose, of several authors' methods, the one by which fittings and junctions of a kind are computed. */
-import { catalogue, quoted, type CatalogueEntry, type Reader } from '$lib/engine';
-import { authorOf, methodKeyOf, methodsOf } from './parts/authors';
+import { authorOf, catalogue, quoted, type CatalogueEntry, type Reader } from '$lib/engine';
+import { methodKeyOf, methodsOf } from './parts/authors';
 import type { MethodField, Sheet } from './sheet';
 
 export interface MethodSetting {

@@ -1,6 +1,6 @@
+import { authorOf } from '$lib/engine';
 import { readingOf } from './reading-of';
 import { methodSetting } from './methods';
-import { authorOf } from './parts/authors';
 import { SETTING_NAMES, type SettingName } from './setting-names';
 import type { SettingField, Sheet } from './sheet';
 import type { SheetProblem } from './sheet-problem';

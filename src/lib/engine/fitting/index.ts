@@ -1,3 +1,4 @@
+export { authorOf } from './author';
 export { catalogue, fittingEntry } from './catalogue';
 export { coefficientOf, junctionCoefficientOf } from './coefficient-of';
 export { lossFromPoints, powerLawFit, type CurveLoss, type LossPoint, type PowerLaw } from './equipment-loss';

@@ -22,6 +22,7 @@ export const COLUMNS = {
 	elevation: { SI: column(U.metre, 0), IP: column(U.foot, 0) },
 	roughness: { SI: column(U.millimetre, 3), IP: column(U.foot, 5) },
 	density: { SI: column(U.kilogramPerCubicMetre, 2), IP: column(U.poundPerCubicFoot, 4) },
+	viscosity: { SI: column(U.micropascalSecond, 2), IP: column(U.poundPerFootHour, 4) },
 	temperature: { SI: column(U.celsius, 1), IP: column(U.fahrenheit, 1) },
 	humidity: { SI: column(U.percent, 0), IP: column(U.percent, 0) },
 	area: { SI: column(U.squareMetre, 1), IP: column(U.squareFoot, 0) },

@@ -27,6 +27,9 @@ describe('figures as the look has them', () => {
 		[q.formatLength(3.81, 'IP'), '12.5'],
 		[q.formatDensity(1.204, 'SI'), '1.20'],
 		[q.formatDensity(1.2013847530470105, 'IP'), '0.0750'],
+		[q.formatViscosity(1.82e-5, 'SI'), '18.20'],
+		// 1.82e-5 Pa s × 2419.088 lb/(ft h) to 1 Pa s
+		[q.formatViscosity(1.82e-5, 'IP'), '0.0440'],
 		[q.formatTemperature(20, 'SI'), '20'],
 		[q.formatTemperature(-5.25, 'SI'), '−5.3'],
 		[q.formatTemperature(20, 'IP'), '68'],
@@ -64,6 +67,7 @@ describe('figures as the look has them', () => {
 		['size', 'mm', 'in'],
 		['length', 'm', 'ft'],
 		['density', 'kg/m³', 'lb/ft³'],
+		['viscosity', 'µPa s', 'lb/ft h'],
 		['temperature', '°C', '°F']
 	] as const)('heads %s with %s or %s', (name, si, ip) => {
 		expect([q.unitOf(name, 'SI'), q.unitOf(name, 'IP')]).toEqual([si, ip]);

@@ -31,6 +31,7 @@ export const formatLength = formatter('length');
 export const formatElevation = formatter('elevation');
 export const formatRoughness = formatter('roughness');
 export const formatDensity = formatter('density');
+export const formatViscosity = formatter('viscosity');
 export const formatHumidity = formatter('humidity');
 export const formatArea = formatter('area');
 export const formatMass = formatter('mass');

@@ -21,6 +21,7 @@ export {
 	formatSize,
 	formatTemperature,
 	formatVelocity,
+	formatViscosity,
 	type FigureName,
 	type Shown
 } from './format';

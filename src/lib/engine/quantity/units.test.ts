@@ -16,6 +16,7 @@ const printed: [string, Unit, string][] = [
 	['millibar', UNITS.hectopascal, '100'],
 	['pound', UNITS.pound, '0.4535924'],
 	['pound per cubic foot', UNITS.poundPerCubicFoot, '16.01846'],
+	['pound per foot hour', UNITS.poundPerFootHour, '0.0004133789'],
 	['horsepower (550 foot pounds-force per second)', UNITS.horsepower, '745.6999']
 ];
 

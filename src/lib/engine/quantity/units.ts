@@ -67,6 +67,9 @@ export const UNITS = {
 	footPerSecond: unit('ft/s', 'ft/s fps ft/sec', '0.3048'),
 
 	kilogramPerCubicMetre: unit('kg/m³', 'kg/m3', '1'),
+	micropascalSecond: unit('µPa s', 'µpas upas', '0.000001'),
+	// 0.45359237 kg over 0.3048 m × 3600 s
+	poundPerFootHour: unit('lb/ft h', 'lb/fth lbm/fth', POUND, '1097.28'),
 	poundPerCubicFoot: unit('lb/ft³', 'lb/ft3 lbm/ft3 lb/cuft lbs/ft3 pcf', POUND, CUBIC_FOOT),
 
 	celsius: unit('°C', '°c c degc', '1'),

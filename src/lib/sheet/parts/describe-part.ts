@@ -1,5 +1,4 @@
-import { formatPressure, unitOf, type UnitSystem } from '$lib/engine';
-import { authorOf } from './authors';
+import { authorOf, formatPressure, unitOf, type UnitSystem } from '$lib/engine';
 import type { PartEquipment, PartFitting, Picture } from './parts';
 
 /** Which way an offset's second elbow turns. */

@@ -1,4 +1,5 @@
 import {
+	authorOf,
 	fittingEntry,
 	sentence,
 	type CatalogueEntry,
@@ -6,7 +7,7 @@ import {
 	type Junction,
 	type RowSize
 } from '$lib/engine';
-import { authorOf, methodsOf } from './authors';
+import { methodsOf } from './authors';
 import { placedKind } from './by-place';
 import { parameterWords } from './describe-part';
 import { ofPlane } from './of-plane';
