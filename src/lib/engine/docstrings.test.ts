@@ -19,6 +19,7 @@ const NO_FORMULA = [
 	'friction/friction-factor.ts regime',
 	'friction/materials.ts findMaterial',
 	'leakage/leakage-class.ts findLeakageClass',
+	'fitting/author.ts authorOf',
 	'fitting/catalogue.ts fittingEntry',
 	'fitting/catalogue.ts findDefinition',
 	'fitting/catalogue.ts findJunction',
