@@ -1,7 +1,7 @@
 import { requirePerson, requireScope } from '$lib/server/auth/require';
 import { download } from '$lib/server/http/download';
 import { problem } from '$lib/server/http/problem';
-import { reportPdf } from '$lib/server/pdf/report-pdf';
+import { printReport } from '$lib/server/pdf/print-report';
 import { printSchema, reportOfSheet } from '$lib/server/versions/report-of';
 import type { RequestHandler } from './$types';
 
@@ -12,7 +12,7 @@ export const GET: RequestHandler = async ({ locals, params, url }) => {
 	const report = await reportOfSheet(requireScope(locals), params.designId, print, person.name || person.email);
 	if (report === null) return problem('not-found', 'No such design');
 	if (report === 'no-answer') return problem('invalid', 'Mend the rows that do not count, then print.');
-	const bytes = await reportPdf(report);
+	const bytes = await printReport(report);
 	const { project, system } = report.titleBlock;
 	return download(new Uint8Array(bytes), 'application/pdf', `${project} ${system} working sheet.pdf`);
 };

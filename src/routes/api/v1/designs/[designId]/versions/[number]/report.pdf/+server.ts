@@ -1,7 +1,7 @@
 import { requireScope } from '$lib/server/auth/require';
 import { download } from '$lib/server/http/download';
 import { problem } from '$lib/server/http/problem';
-import { reportPdf } from '$lib/server/pdf/report-pdf';
+import { printReport } from '$lib/server/pdf/print-report';
 import { printSchema, reportOfVersion } from '$lib/server/versions/report-of';
 import type { RequestHandler } from './$types';
 
@@ -13,7 +13,7 @@ export const GET: RequestHandler = async ({ locals, params, url }) => {
 		? await reportOfVersion(scope, params.designId, Number(params.number), print)
 		: null;
 	if (!report) return problem('not-found', 'No such version');
-	const bytes = await reportPdf(report);
+	const bytes = await printReport(report);
 	const { project, system, revision } = report.titleBlock;
 	return download(new Uint8Array(bytes), 'application/pdf', `${project} ${system} ${revision}.pdf`);
 };
