@@ -7,7 +7,7 @@ const EMAIL = 'engineer@example.test';
 
 /** A riser with an outlet at each piece. */
 function riser(pieces: number) {
-	return Array.from({ length: pieces }, (_, at) => [
+	return Array.from({ length: pieces }, (_, at): Record<string, string>[] => [
 		{ tag: `R${at}`, joins: at === 0 ? '' : `R${at - 1}`, size: '900x600', length: '3' },
 		{ tag: `R${at}-1`, joins: `R${at}`, serves: `Room ${at}`, flow: '40', size: 'Ø160', length: '4', outlet: '20' }
 	]).flat();

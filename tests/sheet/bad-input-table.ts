@@ -229,6 +229,12 @@ export const BAD_SETTINGS: readonly (readonly [SettingField, string, string, str
 		'a number from 1 to 100, such as 4'
 	],
 	[
+		'flexCompression',
+		'80 %',
+		'Flexible duct, compressed by – “80 %”: too great for a compression (most 60 %). Meanwhile flexible duct is taken by its factor on the rigid rate.',
+		'a compression, such as 15 or 15 %'
+	],
+	[
 		'aspectRatio',
 		'0.5',
 		'Aspect ratio, at most – “0.5”: the longer side over the shorter is 1 or more. Meanwhile it is checked against 4, common practice.',

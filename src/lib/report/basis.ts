@@ -96,6 +96,11 @@ function roughnessWords(document: DesignDocument, units: UnitSystem): string {
 function flexibleWords(document: DesignDocument): string {
 	const flexible = document.rows.flatMap((row) => row.flexible ?? []);
 	if (flexible.length === 0) return 'none';
+	const shares = flexible.flatMap(({ factor, compression }) => (factor === undefined ? (compression ?? []) : []));
+	if (shares.length === flexible.length) {
+		const pressed = [...new Set(shares)].map((share) => `${formatHumidity(share, 'SI')} %`);
+		return `compressed by ${pressed.join(', ')}, on the rate of stretched duct`;
+	}
 	const byDefault = flexible.some(({ factor }) => factor === undefined) ? ' (the program’s default)' : '';
 	const factors = flexible.map(({ factor }) => factor ?? 4);
 	const [least, most] = [Math.min(...factors), Math.max(...factors)].map((factor) => String(Number(factor.toFixed(2))));

@@ -83,6 +83,15 @@ describe('the basis of design', () => {
 		expect(words['Flows']).toBe('of outlets as air of 1.20 kg/m³; others actual');
 	});
 
+	it('says by how much flexible duct is compressed', () => {
+		const flexible = (more: object) => [{ ...row('S1', 'supply'), flexible: { length: 1, ...more } }];
+		const words = (more: object) =>
+			report(flexible(more), {}).basis.find(({ label }) => label === 'Flexible duct')?.value;
+		expect(words({ compression: 0.15 })).toBe('compressed by 15 %, on the rate of stretched duct');
+		expect(words({ compression: 0.15, factor: 6 })).toBe('6 × the rigid rate');
+		expect(words({})).toContain('the program’s default');
+	});
+
 	it('says where the viscosity is assumed', () => expect(basis({})['Viscosity']).toMatch(/of air at 20 °C/));
 });
 

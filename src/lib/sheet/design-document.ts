@@ -117,7 +117,7 @@ function keptDraft(
 	const isEnd = (links.children.get(row.id)?.length ?? 0) === 0;
 	const meetsFan = !links.parent.get(row.id);
 	const twoStraight = goesStraight(row) && earlierStraight(row, links);
-	const on = `${twoStraight} ${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')} ${onOthers(sheet, row, links)}`;
+	const on = `${twoStraight} ${sides.get(row.id)} ${isEnd} ${meetsFan} ${links.faulty.has(row.id)} ${settingOf(sheet, 'flexFactor')} ${settingOf(sheet, 'flexCompression')} ${onOthers(sheet, row, links)}`;
 	const kept = drafts.get(row);
 	if (kept?.on === on) return kept.draft;
 	const draft = draftRow(sheet, row, links, sides, problems);
@@ -134,6 +134,14 @@ function onOthers(sheet: Sheet, row: SheetRow, links: Links): string {
 function joinedSize(row: SheetRow, links: Links): RowSize | null {
 	const parent = links.parent.get(row.id);
 	return parent ? freeSizeOf(parent) : null;
+}
+
+/** How flexible duct lies: compressed by so much, which goes before a factor on the rigid rate. */
+function flexibleOf(sheet: Sheet): { readonly compression?: number; readonly factor?: number } {
+	const compression = settingOf(sheet, 'flexCompression');
+	if (compression !== null) return { compression };
+	const factor = settingOf(sheet, 'flexFactor');
+	return factor === null ? {} : { factor };
 }
 
 /** One row as the document holds it; null, with problems, when its own cells do not suffice. */
@@ -199,7 +207,6 @@ function draftRow(
 	if (links.faulty.has(row.id) || problems.length > before || tag === null || !size || length === null) return null;
 	if (side === null || side === 'differs') return null;
 	const flex = valueOf(row, 'flex');
-	const flexFactor = settingOf(sheet, 'flexFactor');
 	const outlet = valueOf(row, 'outlet');
 	const name = outlet?.description ?? valueOf(row, 'serves');
 	// An entry or exit among the parts is the end of the run: a blank outlet then loses nothing more.
@@ -219,7 +226,7 @@ function draftRow(
 		...(temperature !== null && { temperature }),
 		...(lining && { lining }),
 		...(leakage !== null && { leakage: leakageOf(leakage) }),
-		...(flex && { flexible: { length: flex, ...(flexFactor !== null && { factor: flexFactor }) } }),
+		...(flex && { flexible: { length: flex, ...flexibleOf(sheet) } }),
 		...(fitted?.junction && { junction: fitted.junction }),
 		fittings: [...(fitted?.fittings ?? []), ...(terminal ? [terminal] : [])],
 		equipment: fitted?.equipment ?? [],

@@ -60,6 +60,12 @@ export const SETTING_NAMES = {
 		blank: '4, the program’s default; illustrative',
 		meanwhile: 'flexible duct is taken at 4 times the rigid rate'
 	},
+	flexCompression: {
+		name: 'Flexible duct, compressed by',
+		quantity: 'humidity',
+		blank: 'not known: by the factor above',
+		meanwhile: 'flexible duct is taken by its factor on the rigid rate'
+	},
 	leakage: {
 		name: 'Leakage class of the ductwork',
 		blank: 'none: no leakage is counted',

@@ -79,6 +79,8 @@ export interface SettingValues {
 	material: string;
 	/** Flexible duct loses this many times the rigid rate. */
 	flexFactor: number;
+	/** What flexible duct lacks of its stretched length, 0 to 0.6. */
+	flexCompression: number;
 	/** A class of the list by its key, or an inch-pound class as `CL24`. */
 	leakage: string;
 	/** At which the allowable leakage is told [Pa]. */

@@ -259,6 +259,7 @@ describe('whatever is typed', { timeout: 30_000 }, () => {
 		['temperature', '-50', '80'],
 		['surroundings', '-50', '80'],
 		['flexFactor', '1', '100'],
+		['flexCompression', '0', '60 %'],
 		['aspectRatio', '1', '1000'],
 		['elevation', '-500', '9000'],
 		['density', '0.01', '100'],

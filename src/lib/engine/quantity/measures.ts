@@ -163,6 +163,14 @@ export const HUMIDITY: Measure = {
 			: null
 };
 
+/** What flexible duct lacks of its stretched length. */
+export const COMPRESSION: Measure = {
+	...HUMIDITY,
+	noun: 'a compression',
+	max: 0.6, // where the law of compressed duct ends
+	example: { SI: '15 or 15 %', IP: '15 or 15 %' }
+};
+
 export const ANGLE: Measure = {
 	noun: 'an angle',
 	units: [U.degree],

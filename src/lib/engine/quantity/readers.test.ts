@@ -16,6 +16,7 @@ const readers = {
 	temperature: quantity.readTemperature as Reader<number>,
 	density: quantity.readDensity as Reader<number>,
 	humidity: quantity.readHumidity as Reader<number>,
+	compression: quantity.readCompression as Reader<number>,
 	angle: quantity.readAngle as Reader<number>,
 	number: quantity.readNumber
 };
@@ -100,6 +101,8 @@ const typed: [Kind, string, UnitSystem, number][] = [
 	['density', '1.2', 'SI', 1.2],
 	['density', '1 lb/ft³', 'SI', 16.018463373960138],
 	['humidity', '50', 'SI', 0.5],
+	['compression', '15 %', 'SI', 0.15],
+	['compression', '0.15', 'IP', 0.15],
 	['humidity', '50 %', 'IP', 0.5],
 	['humidity', '0.5', 'SI', 0.5],
 	['roughness', '0.09', 'SI', 0.00009],
@@ -175,6 +178,8 @@ describe('what is no figure', () => {
 		['temperature', '=68 °F + 5 °F'],
 		['temperature', '-300'],
 		['humidity', '120'],
+		['compression', '61 %'],
+		['compression', '-4 %'],
 		['density', '0'],
 		['number', '5 m']
 	];

@@ -44,6 +44,8 @@ export const readTemperature = reader(measures.TEMPERATURE, degreeCelsius);
 export const readDensity = reader(measures.DENSITY, kilogramPerCubicMetre);
 /** Percent, or below 1 a part of one; the value is 0 to 1. */
 export const readHumidity = reader(measures.HUMIDITY, ratio);
+/** Percent, or below 1 a part of one; the value is 0 to 0.6. */
+export const readCompression = reader(measures.COMPRESSION, ratio);
 /** Degrees, 0 to 180. */
 export const readAngle = reader(measures.ANGLE, degree);
 /** A plain number of either sign. */
