@@ -6,7 +6,7 @@ const OPEN = /^(open|open end|o)$/i;
 const BASIS = /\b(total|static|tp|sp)\b/gi;
 /** Words that begin with a letter, before a figure or at the end. */
 const WORDS = /^([a-z][^\d"]*?(?: [a-z]{1,4}-?\d{1,4}(?= |$))?)(?= -?[\d.,]| c ?[=:]? ?-?[\d.,]|$)/i;
-const COEFFICIENT = /^c ?[=:]? ?(-?\d*[.,]?\d+)$/i;
+const COEFFICIENT = /^c ?[=:]? ?(-?(?:\d+(?:[.,]\d+)?|[.,]\d+))$/i;
 const MOST_COEFFICIENT = 1_000_000;
 const LONGEST = 60; // characters of the words
 const ALSO = '“open”, or a word before it, such as grille 25 Pa or louvre C 1.2';

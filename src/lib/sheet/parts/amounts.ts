@@ -1,4 +1,5 @@
 import { readPressure, type Pascal, type Reading, type UnitSystem } from '$lib/engine';
+import { NUMBER, SIGNED_NUMBER } from './number-pattern';
 import { wordedFigures } from './worded-figures';
 
 /** The figures of one part, taken out of its text. */
@@ -18,18 +19,20 @@ export interface Amounts {
 	readonly rest: string;
 }
 
-const N = '(-?\\d*[.,]?\\d+)';
 const DECIMAL = '(\\d*[.,]\\d+)';
 const START = '(?<![a-z0-9])';
 
-const COEFFICIENT = new RegExp(`${START}(?:c|zeta|ζ) ?[=:]? ?${N}(?![\\d.,]*\\d)`);
+const COEFFICIENT = new RegExp(`${START}(?:c|zeta|ζ) ?[=:]? ?${SIGNED_NUMBER}(?![\\d.,]*\\d)`);
 // A lone inch mark is a pressure only behind a decimal figure below ten: `12" damper` tells a size.
-const PRESSURE =
-	/(?:(?<![^ ])-)?\d*[.,]?\d+ ?(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o)|(?<![\d.,])\d?[.,]\d+ ?(?:in\b\.?|")/;
+const PRESSURE = new RegExp(
+	`(?:(?<![^ ])-)?${NUMBER} ?` +
+		/(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o)/.source +
+		/|(?<![\d.,])\d?[.,]\d+ ?(?:in\b\.?|")/.source
+);
 const PARAMETERS: readonly (readonly [string, RegExp])[] = [
-	['radiusRatio', new RegExp(`${START}r(?: ?/ ?[dwh])? ?=? ?${N}`)],
+	['radiusRatio', new RegExp(`${START}r(?: ?/ ?[dwh])? ?=? ?${SIGNED_NUMBER}`)],
 	['pieces', /(?<![\d.,])(\d+)[ -]?(?=(?:pieces?|pc|gores?|segments?)\b)/],
-	['angle', new RegExp(`${N} ?(?:°|deg(?:rees?)?\\b)`)],
+	['angle', new RegExp(`${SIGNED_NUMBER} ?(?:°|deg(?:rees?)?\\b)`)],
 	['areaRatio', new RegExp(`${START}(?:area ratio|a) ?=? ?${DECIMAL}`)],
 	['freeArea', new RegExp(`${START}(?:free area|f) ?=? ?${DECIMAL}`)],
 	['vanes', /(?<![\d.,])([123])[ -]?(?=(?:splitters?|splitter vanes?)\b)/],

@@ -1,3 +1,5 @@
+import { NUMBER, SIGNED_NUMBER } from './number-pattern';
+
 /** Figures and choices that only some parts have, each read where a word of such a part is there. */
 interface Worded {
 	readonly name: string;
@@ -6,7 +8,6 @@ interface Worded {
 	readonly value: (typed: string) => number | string;
 }
 
-const N = '(-?\\d*[.,]?\\d+)';
 const figure = (typed: string) => Number(typed.replace(',', '.'));
 const percent = (typed: string) => Number((figure(typed) / 100).toPrecision(12));
 const word = (typed: string) => typed;
@@ -15,9 +16,14 @@ const PERCENT = '(?<![\\d.,-])(\\d{1,3}(?:[.,]\\d+)?) ?%';
 const WORDED: readonly Worded[] = [
 	{ name: 'vanes', of: /vane/, pattern: /(?<![\d.,])(\d{2,3}\/\d{2,3})(?: ?mm)?/, value: word },
 	{ name: 'bend', of: /elbow|bend|\bell/, pattern: /\b(easy|hard)(?: way)?\b/, value: word },
-	{ name: 'spacing', of: /offset/, pattern: new RegExp(`\\bspacing ?=? ?${N}`), value: figure },
+	{ name: 'spacing', of: /offset/, pattern: new RegExp(`\\bspacing ?=? ?${SIGNED_NUMBER}`), value: figure },
 	{ name: 'second', of: /offset/, pattern: /\b(back|onward|across)\b/, value: word },
-	{ name: 'distanceRatio', of: /\bcap/, pattern: new RegExp(`\\b(?:distance|h ?/ ?d) ?=? ?${N}`), value: figure },
+	{
+		name: 'distanceRatio',
+		of: /\bcap/,
+		pattern: new RegExp(`\\b(?:distance|h ?/ ?d) ?=? ?${SIGNED_NUMBER}`),
+		value: figure
+	},
 	{
 		...{ name: 'curtain', of: /\bfd\b|fire/, value: word },
 		pattern: /\bcurtain (in|out)\b(?: of)?(?: the)?(?: (?:air ?)?stream)?/
@@ -31,7 +37,12 @@ const WORDED: readonly Worded[] = [
 		...{ name: 'freeArea', of: /screen|mesh|plate/, value: percent },
 		pattern: new RegExp(`${PERCENT}(?: (?:free|open))?(?: area)?`)
 	},
-	{ name: 'straight', of: /effect/, pattern: /\bstraight ?=? ?(\d*[.,]?\d+ ?(?:m|ft|'))(?![a-z])/, value: metres },
+	{
+		name: 'straight',
+		of: /effect/,
+		pattern: new RegExp(`\\bstraight ?=? ?(${NUMBER} ?(?:m|ft|'))(?![a-z])`),
+		value: metres
+	},
 	{ name: 'edges', of: /bullhead/, pattern: /\b(sharp|rounded)\b(?: edges?)?/, value: word }
 ];
 
