@@ -76,6 +76,7 @@ describe('flags', () => {
 		['service-caution E', {}, { serves: 'Isolation room' }, {}],
 		['service-caution M', { equipment: [{ name: 'Grease filter', loss: 40 }] }, {}, {}],
 		['fire-damper-caution M', { equipment: [{ name: 'FSD-2', loss: 6 }] }, {}, {}],
+		['fire-damper-caution M', { equipment: [{ name: 'FD01', loss: 6 }] }, {}, {}],
 		['key-not-read M', { lenght: 3 }, {}, {}],
 		['key-not-read null', {}, {}, { air: { density: 1.2, temperature: 20 } }]
 	])('%s', (expected, keysOfMain, keysOfEnd, keys) => {

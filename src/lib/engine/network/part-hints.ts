@@ -27,9 +27,10 @@ interface KindHint extends NameHint {
 	readonly entry: CatalogueEntry;
 }
 
-const DAMPER = /damper|\b(vcd|fsd)\b/i;
-const FIRE = /\b(fire|smoke|fsd)\b/i;
-const BY_ITSELF = /\b(fire|smoke|fsd|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
+/** `FD-01` and `FSD2` are tags of fire and fire and smoke dampers. */
+const DAMPER = /damper|\bvcd\b|\bfs?d(?![a-z])/i;
+const FIRE = /\b(fire|smoke)\b|\bfs?d(?![a-z])/i;
+const BY_ITSELF = /\bfs?d(?![a-z])|\b(fire|smoke|back-?\s?dra(?:ugh|f)t|non-?return|check)\b/i;
 const NOTHING: NameHint = { fireDamper: false, balances: false };
 const NONE: PartHints = { fireDamper: false, balances: false, toBeConfirmed: false, openAssumed: false, end: null };
 
