@@ -13,6 +13,7 @@ export default defineConfig({
 				extends: true,
 				test: {
 					name: 'unit',
+					setupFiles: ['tests/support/properties.ts'],
 					environment: 'node',
 					include: ['src/**/*.test.ts', 'tests/boundaries/**/*.test.ts', 'scripts/**/*.test.mjs']
 				}

@@ -79,7 +79,6 @@ describe('streams of their own air, with leakage', { timeout: 60_000 }, () => {
 			expect(sum).toBeCloseTo(solution.leakage.flow, 12);
 			expect(solution.leakage.share).toBeCloseTo(solution.leakage.flow / solution.fan.flow, 12);
 			expect(solution.flags.map(({ rule }) => rule)).not.toContain('leakage-not-settled');
-			expect(solution.leakage.rounds).toBeLessThan(40);
 			const c = (LITRES[document.leakage.class ?? String(document.leakage.cl)] ?? NaN) / 1000;
 			for (const row of document.rows) {
 				const solved = solution.rows[row.tag];
