@@ -15,6 +15,8 @@ export interface Amounts {
 	/** What stood in brackets and is no figure. */
 	readonly note: string | null;
 	readonly toBeConfirmed: boolean;
+	/** How a figure was read that is another one elsewhere; null where there is no doubt. */
+	readonly doubt: string | null;
 	/** What is left: words and tags. */
 	readonly rest: string;
 }
@@ -40,6 +42,8 @@ const PARAMETERS: readonly (readonly [string, RegExp])[] = [
 	['lengthRatio', new RegExp(`${START}l ?=? ?${DECIMAL}`)]
 ];
 const EXPONENT = new RegExp(`${START}n ?=? ?${DECIMAL}`);
+/** Beside a pressure; else it could be a tag. */
+const WHOLE_EXPONENT = new RegExp(`${START}n ?=? ?([0-9])(?![\\w.,-])`);
 const AUTHOR = /\bby ([a-z]+(?:[ -](?:table|equation))?)(?![a-z])/;
 const PLANE = /\bplane ?=? ?(width|height|w|h)\b/;
 /** Angles that people write before an elbow without the sign. */
@@ -50,6 +54,17 @@ const COUNT_AFTER = / ?[x*] ?(\d{1,4})$/;
 /** A figure with a point or a comma. */
 function figure(text: string): number {
 	return Number(text.replace(',', '.'));
+}
+
+function doubtOf(pressure: Reading<Pascal> | null): string | null {
+	if (!pressure?.ok || pressure.other === null) return null;
+	return `${pressure.why ?? 'it could be another figure'}; or is it ${pressure.other}`;
+}
+
+/** A coefficient is hardly ever above a thousand; who groups by commas is told. */
+function commaDoubt(coefficient: string | null): string | null {
+	if (coefficient === null || !/^-?[1-9]\d{0,2},\d{3}$/.test(coefficient)) return null;
+	return `the comma in “${coefficient}” is read as the decimal point`;
 }
 
 /** Takes count, coefficient, pressure, parameters and the question mark out of the plain text of one part. */
@@ -72,7 +87,7 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 	}
 	const plane = take(PLANE);
 	if (plane !== null) parameters['plane'] = plane.startsWith('w') ? 'width' : 'height';
-	const exponent = take(EXPONENT);
+	const exponent = take(EXPONENT) ?? (pressure === null ? null : take(WHOLE_EXPONENT));
 	rest = rest
 		.replace(/\(\s*\)/g, ' ')
 		.replace(/\( *([bs]) *\)/g, ' $1 ')
@@ -93,6 +108,7 @@ export function takeAmounts(plain: string, units: UnitSystem): Amounts {
 		author,
 		note: note === null || note.trim() === '' ? null : note.trim(),
 		toBeConfirmed,
+		doubt: doubtOf(pressure) ?? commaDoubt(coefficient),
 		rest
 	};
 }

@@ -5,20 +5,33 @@ import { entryByName, isNameWord, type NamedPart } from './by-name';
 import { findWord, nearestWords, type Role, type Word } from './lexicon';
 import type { PartEquipment, PartFitting, PartWord } from './parts';
 import { bladesOf, isTakeOff, junctionKind, kindOf, nameOf, pictureOf, wordOf } from './kind-of-part';
+import { notOnePart } from './not-one-part';
 import { UNCLEAR } from './phrases';
 import { takesOf } from './takes';
 
 export type PartReading =
-	| { readonly ok: true; readonly slot: 'junction' | 'fitting'; readonly part: PartFitting }
-	| { readonly ok: true; readonly slot: 'equipment'; readonly part: PartEquipment; readonly count: number }
+	| { readonly ok: true; readonly slot: 'junction' | 'fitting'; readonly part: PartFitting; readonly doubt?: string }
+	| {
+			readonly ok: true;
+			readonly slot: 'equipment';
+			readonly part: PartEquipment;
+			readonly count: number;
+			readonly doubt?: string;
+	  }
 	| { readonly ok: false; readonly message: string; readonly expected: string };
 
 const TAG = /^[a-z]{1,4}-?\d{1,4}[a-z]?$/;
 const MOST = { fittings: 1000, equipment: 50, coefficient: 1_000_000 } as const;
 
-/** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [by author] [?]`, in any order. Never throws. */
+/** Reads one part, and says where a figure of it could be another one. Never throws. */
 export function readPart(typed: string, units: UnitSystem): PartReading {
 	const amounts = takeAmounts(typed.toLowerCase(), units);
+	const reading = readAmounts(typed, units, amounts);
+	return reading.ok && amounts.doubt !== null ? { ...reading, doubt: amounts.doubt } : reading;
+}
+
+/** Reads one part: `[count x] words [r1.5] [45°] [C0.23] [25 Pa] [by author] [?]`, in any order. */
+function readAmounts(typed: string, units: UnitSystem, amounts: Amounts): PartReading {
 	const known: Word[] = [];
 	const tags: string[] = [];
 	for (const written of amounts.rest.split(/ +|(?=\+)|(?<=\+)/)) {
@@ -35,6 +48,8 @@ export function readPart(typed: string, units: UnitSystem): PartReading {
 	const roles = new Set(known.map((word) => word.role));
 	if (known.length === 0 && amounts.parameters['angle'] !== undefined) roles.add('elbow');
 	if (known.length === 0 && amounts.parameters['radiusRatio'] !== undefined) roles.add('elbow');
+	const more = notOnePart(typed.toLowerCase(), tags, roles);
+	if (more) return { ok: false, message: refusal(typed, more[0]), expected: more[1] };
 	const name = nameOf(known, tags, roles, amounts.note);
 	const named = entryByName(amounts.rest, roleOf);
 	if (named && isNamed(named, amounts)) return fromName(typed, amounts, named, name, roles, method);

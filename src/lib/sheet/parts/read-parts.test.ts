@@ -240,6 +240,37 @@ describe('what a Parts cell says of what it read', () => {
 	});
 });
 
+describe('a figure or a part more than one part has', () => {
+	it.each([
+		...['elbow C1.5E-1', 'elbow C1E-03', 'elbow C1e3', 'elbow C0x10', 'elbow C1 damper C2', 'elbow C0.2 C3'],
+		...['elbow C0.2 d2 C3', 'elbow r1.5 r2', 'elbow K3', '2 elbow r1.5 silencer 25 Pa', 'elbow r1.5 damper C0.2'],
+		...['elbow damper', 'bend VCD C0.2', 'elbow fire damper 8 Pa', 'coil n1']
+	])('is never left out: “%s” is refused', (text) => {
+		const reading = readParts(text, 'SI');
+		expect(reading.ok ? reading.words : reading.expected).toMatch(/comma|one coefficient|digits and a point|Pa|C/);
+		expect(reading.ok).toBe(false);
+	});
+
+	it.each([
+		['elbow C0.2 (C3)', ['1 fixed Elbow (c3) C0.2']],
+		['branch damper C0.2', ['1 fixed Branch damper C0.2']],
+		['diffuser with damper T9 18 Pa', ['Diffuser with damper T9 18 Pa']],
+		['elbow r1.5, silencer 25 Pa', ['1 elbow-smooth Elbow', 'Silencer 25 Pa']]
+	])('is kept where it stands for itself: “%s”', (text, parts) => expect(short(understood(text).value)).toEqual(parts));
+
+	it('tells the exponent of a loss, whole ones too', () => {
+		expect(understood('coil 50 Pa n1').value.equipment[0]?.exponent).toBe(1);
+		expect(understood('coil 50 Pa n1.8').value.equipment[0]?.exponent).toBe(1.8);
+	});
+
+	it('is told where it is another figure elsewhere', () => {
+		expect(understood('silencer 1.250 Pa').why).toContain('is read as the decimal point');
+		expect(understood('silencer 1,250 Pa').why).toContain('is read as thousands');
+		expect(understood('elbow C1,200').why).toContain('is read as the decimal point');
+		expect(understood('silencer 125 Pa').why).toBeNull();
+	});
+});
+
 describe('what is not understood in a Parts cell', () => {
 	it.each([
 		['tee', '“tee”: a junction needs to know which stream this row is', 'tee branch, tee straight, or tee C0.8'],

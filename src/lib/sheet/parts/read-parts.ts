@@ -22,9 +22,11 @@ export function readParts(text: string, units: UnitSystem): Reading<Parts> {
 	let junction: PartFitting | null = null;
 	const fittings: PartFitting[] = [];
 	const equipment: PartEquipment[] = [];
+	const doubts: string[] = [];
 	for (const piece of pieces) {
 		const reading = readPart(piece, units);
 		if (!reading.ok) return reading;
+		if (reading.doubt) doubts.push(`${quoted(piece)}: ${reading.doubt}`);
 		if (reading.slot === 'equipment') equipment.push(...Array.from({ length: reading.count }, () => reading.part));
 		else if (reading.slot === 'fitting') fittings.push(reading.part);
 		else if (junction === null) junction = reading.part;
@@ -40,7 +42,7 @@ export function readParts(text: string, units: UnitSystem): Reading<Parts> {
 			expected: `at most ${MOST_LOSSES}`
 		};
 	const parts: Parts = { junction, fittings, equipment };
-	return { ok: true, value: parts, words: wordsOf(parts, units), why: whyOf(parts), other: null };
+	return { ok: true, value: parts, words: wordsOf(parts, units), why: whyOf(parts, doubts), other: null };
 }
 
 function wordsOf({ junction, fittings, equipment }: Parts, units: UnitSystem): string {
@@ -56,8 +58,8 @@ function wordsOf({ junction, fittings, equipment }: Parts, units: UnitSystem): s
 }
 
 /** What a person should know of how it was read: what comes from the catalogue, and what a count counts. */
-function whyOf({ junction, fittings, equipment }: Parts): string | null {
-	const said = new Set<string>();
+function whyOf({ junction, fittings, equipment }: Parts, doubts: readonly string[]): string | null {
+	const said = new Set<string>(doubts);
 	if (junction && junction.kind !== 'fixed')
 		said.add(`${junction.name.toLowerCase()}: from the catalogue, with the flows and sizes of the rows that meet`);
 	const computed = fittings.filter((part) => part.kind !== 'fixed');
