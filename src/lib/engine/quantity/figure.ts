@@ -8,11 +8,14 @@ export interface Figure {
 	readonly text: string;
 	/** Where it ends in the text. */
 	readonly end: number;
-	/** Typed without decimals. */
+	/** Whole, and typed without decimals. */
 	readonly bareInteger: boolean;
 	/** Set where the same characters are two figures in two countries. */
 	readonly doubt: { readonly why: string; readonly other: string } | null;
 }
+
+/** `1e3` is a whole figure like 1000; one of more digits than anybody types is none. */
+const LIKE_TYPED = 1e6;
 
 const FIGURE = /(?:[1-9]\d{0,2}(?: \d{3})+(?![\d])(?:[.,]\d+)?|[.,]?\d[\d.,]*)(?:e[+-]?\d{1,3}(?![\d.,]))?/y;
 
@@ -35,7 +38,7 @@ export function figureAt(text: string, start: number, units: UnitSystem): Figure
 		value,
 		text: typed,
 		end: start + typed.length,
-		bareInteger: power === '' && !digits.includes('.'),
+		bareInteger: !digits.includes('.') && value.isInteger() && (power === '' || value.lt(LIKE_TYPED)),
 		doubt: units === 'SI' && power === '' ? doubtOf(mantissa) : null
 	};
 }

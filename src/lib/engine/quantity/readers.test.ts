@@ -141,11 +141,21 @@ describe('a figure that can be read two ways', () => {
 		['length', '500', 'SI', 0.5],
 		['pressure', '25', 'IP', 25],
 		['pressure', '0.08', 'SI', 19.9271128],
+		['length', '1e3', 'SI', 1000],
 		['humidity', '0.5', 'SI', 0.005]
 	] as const)('%s %s in %s says why and gives the other as a text that reads so', (kind, text, units, value) => {
 		const reading = understood(kind, text, units);
 		expect(reading.why).not.toBeNull();
 		expect(understood(kind, reading.other ?? '', units).value).toBe(value);
+	});
+
+	it.each([
+		['=1000+500', 1.5],
+		['=2*1900', 3.8],
+		['=3000/2', 1.5],
+		['=1000.0+500', 1500]
+	])('length %s in SI is read as the whole figure that it comes to', (text, metres) => {
+		expect(understood('length', text, 'SI').value).toBe(metres);
 	});
 
 	it.each([
@@ -177,6 +187,9 @@ describe('what is no figure', () => {
 		['pressure', '5 m'],
 		['temperature', '=68 °F + 5 °F'],
 		['temperature', '-300'],
+		['flow', '10²'],
+		['flow', '²00'],
+		['flow', '10^2'],
 		['humidity', '120'],
 		['compression', '61 %'],
 		['compression', '-4 %'],

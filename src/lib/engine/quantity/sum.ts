@@ -136,5 +136,7 @@ function inUnit(sum: Sum, unit: Unit | null): Decimal {
 
 function joined(left: Sum, right: Sum, unit: Unit | null, value: Decimal): Sum {
 	const compound = left.compound || right.compound;
-	return { value, unit, compound, bareInteger: false, doubt: left.doubt ?? right.doubt, worked: true };
+	// A sum of whole figures is read as the whole figure that it is.
+	const bareInteger = left.bareInteger && right.bareInteger && value.isInteger();
+	return { value, unit, compound, bareInteger, doubt: left.doubt ?? right.doubt, worked: true };
 }

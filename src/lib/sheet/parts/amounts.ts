@@ -25,11 +25,11 @@ const DECIMAL = '(\\d*[.,]\\d+)';
 const START = '(?<![a-z0-9])';
 
 const COEFFICIENT = new RegExp(`${START}(?:c|zeta|ζ) ?[=:]? ?${SIGNED_NUMBER}(?![\\d.,]*\\d)`);
-// A lone inch mark is a pressure only behind a decimal figure below ten: `12" damper` tells a size.
+// A lone inch mark is a pressure only behind a decimal figure below three: `12" damper` and `grille 5.5"` tell a size.
 const PRESSURE = new RegExp(
 	`(?:(?<![^ ])-)?${NUMBER} ?` +
 		/(?:k?pa\b|(?:in\.?|inch|")? ?w\.?[gc]\.?(?![a-z])|iwg\b|iwc\b|mm ?(?:w\.?[gc]\.?|h2o)|(?:in\.?|") ?h2o)/.source +
-		/|(?<![\d.,])\d?[.,]\d+ ?(?:in\b\.?|")/.source
+		/|(?<![\d.,])[0-2]?[.,]\d+ ?(?:in\b\.?|")/.source
 );
 const PARAMETERS: readonly (readonly [string, RegExp])[] = [
 	['radiusRatio', new RegExp(`${START}r(?: ?/ ?[dwh])? ?=? ?${SIGNED_NUMBER}`)],
