@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { keepable } from './keepable';
 
 /** An address in lower case. The pattern admits plain ASCII addresses only, so that none can look like another. */
 const email = z
@@ -21,8 +22,7 @@ export const newPassword = z
 	.max(PASSWORD_MAX, `A password has at most ${PASSWORD_MAX} characters.`);
 
 /** A person's name as colleagues read it. */
-export const personName = z
-	.string()
+export const personName = keepable()
 	.trim()
 	.min(1, 'Type your name.')
 	.max(100, 'A name has at most 100 characters here.');
@@ -39,8 +39,7 @@ export const emailSchema = z.object({ email });
 
 export const signUpSchema = z.object({
 	name: personName,
-	firmName: z
-		.string()
+	firmName: keepable()
 		.trim()
 		.min(1, 'Type the name of your firm.')
 		.max(120, 'A firm’s name has at most 120 characters here.'),

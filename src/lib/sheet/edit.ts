@@ -26,6 +26,8 @@ const move = z.object({
 });
 const single = z.discriminatedUnion('kind', [set, insert, remove, move]);
 const batch = z.object({ kind: z.literal('batch'), edits: z.array(single).min(1).max(100_000) });
+/** Insertions, deletions and moves of one message: each goes through the whole sheet, unlike a cell that is written. */
+const MOST_OF_ROWS = MOST_ROWS;
 
 /**
  * `set` writes one cell (row null: a setting; typed '' clears it). `insert`, `delete` and `move` act on whole rows,
@@ -40,8 +42,17 @@ export type TypedCell = z.infer<typeof cell>;
 export const sentEditSchema = z.object({ id: z.uuid().toLowerCase(), edit: editSchema });
 export type SentEdit = z.infer<typeof sentEditSchema>;
 
+const ofRows = (edit: Edit): number =>
+	edit.kind === 'batch' ? edit.edits.filter(({ kind }) => kind !== 'set').length : Number(edit.kind !== 'set');
+
 /** Body of the route that takes edits. `base` is the last entry that the client has. */
 export const editsBodySchema = z.object({
 	base: z.int().min(0),
-	edits: z.array(sentEditSchema).max(1_000)
+	edits: z
+		.array(sentEditSchema)
+		.max(1_000)
+		.refine(
+			(edits) => edits.reduce((sum, { edit }) => sum + ofRows(edit), 0) <= MOST_OF_ROWS,
+			`A message inserts, deletes or moves rows at most ${MOST_OF_ROWS} times.`
+		)
 });

@@ -13,6 +13,8 @@ import { loadSheet } from './load-sheet';
 
 /** The log is folded into a snapshot each time it has grown by this many entries. */
 const SNAPSHOT_EVERY = 100;
+/** And after entries that change so much: whoever opens the sheet would do all of it again. */
+const LARGE = 1_000;
 
 export interface Refused {
 	readonly id: string;
@@ -114,8 +116,14 @@ export async function appendEntries(
 		.insert(edit)
 		.values(accepted.map(({ id, entry }, at) => ({ firmId, designId, seq: seq + 1 + at, editId: id, userId, entry })));
 	const last = seq + accepted.length;
-	if (Math.floor(last / SNAPSHOT_EVERY) > Math.floor(seq / SNAPSHOT_EVERY))
+	const isLarge = accepted.reduce((sum, { entry }) => sum + sizeOf(entry), 0) >= LARGE;
+	if (isLarge || Math.floor(last / SNAPSHOT_EVERY) > Math.floor(seq / SNAPSHOT_EVERY))
 		await tx.insert(snapshot).values({ firmId, designId, seq: last, sheet });
+}
+
+function sizeOf(entry: Entry): number {
+	if (entry.kind === 'batch') return entry.entries.length;
+	return 'rows' in entry ? entry.rows.length : 1;
 }
 
 async function entriesAfter(tx: Tx, scope: FirmScope, designId: string, base: number): Promise<LoggedEntry[]> {

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { origin } from '../http/origin';
 
 const messageSchema = z.object({
 	id: z.string(),
@@ -15,6 +16,13 @@ export type InboxMessage = z.infer<typeof messageSchema>;
 
 /** Address of the fake mail server's inbox; null where there is none, as in production. */
 export const inboxUrl = (): string | null => process.env.MAIL_INBOX_URL || null;
+
+/**
+ * Whether a request may see the inbox: one that names this very server. A page of another site can lead its own name to
+ * this machine, and would read the letters under it.
+ */
+export const mayReadInbox = (request: Request): boolean =>
+	inboxUrl() !== null && request.headers.get('host') === new URL(origin()).host;
 
 async function read(path: string): Promise<unknown> {
 	const answer = await fetch(new URL(path, inboxUrl() ?? undefined));
