@@ -26,7 +26,8 @@ async function answer(event: RequestEvent, resolve: Parameters<Handle>[0]['resol
 /** Every request passes here: who asks, whether they may, the reply, its headers. */
 export const handle: Handle = async ({ event, resolve }) => {
 	event.locals.appearance = appearanceOf(event.cookies);
-	return withSecurityHeaders(event.url, await answer(event, resolve));
+	const reply = await answer(event, resolve);
+	return withSecurityHeaders(event.url, reply, Boolean(event.locals.person));
 };
 
 /** What went wrong stays in the log, under an id that the person can quote. */

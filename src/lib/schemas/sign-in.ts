@@ -4,10 +4,12 @@ import { keepable } from './keepable';
 /** An address in lower case. The pattern admits plain ASCII addresses only, so that none can look like another. */
 const email = z
 	.string()
+	// Before anything reads through it.
+	.max(1_000, { error: 'An address has at most 254 characters.', abort: true })
 	.trim()
 	.toLowerCase()
 	.min(1, { error: 'Type your e-mail address.', abort: true })
-	.max(254, 'An address has at most 254 characters.')
+	.max(254, { error: 'An address has at most 254 characters.', abort: true })
 	.regex(z.regexes.email, 'This is not an e-mail address. One looks like name@firm.example.');
 
 /** Shortest password that may be chosen. */

@@ -52,6 +52,11 @@ export function applyMany(sheet: Sheet, entries: readonly Entry[]): Sheet {
 			if (row && at !== undefined) rows[at] = { ...row, cells: withCell(row.cells, entry.field, entry.cell) };
 			continue;
 		}
+		if (entry.kind === 'set') {
+			// A setting touches no row, so that the run goes on behind it.
+			result = { ...result, settings: withCell(result.settings, entry.field, entry.cell) };
+			continue;
+		}
 		if (rows) result = { ...result, rows };
 		rows = place = null;
 		result = applyEntry(result, entry);

@@ -1,3 +1,4 @@
+import { endLetters } from './mail-tokens';
 import { isPassword, passwordHash } from './password';
 import { revokeSessions } from './sessions';
 import { changeUser, findUser } from './users';
@@ -15,6 +16,7 @@ export async function changePassword(
 	if (!found) return false;
 	if (found.passwordHash !== null && !(await isPassword(change.present, found.passwordHash))) return false;
 	await changeUser(userId, { passwordHash: await passwordHash(change.password) });
+	await endLetters(userId, found.email);
 	await revokeSessions(userId, sessionId);
 	return true;
 }

@@ -1,7 +1,7 @@
 import { createHash, randomBytes } from 'node:crypto';
 import { and, eq, gt, isNull } from 'drizzle-orm';
 import { database } from '../db';
-import { mailToken } from '../db/schema';
+import { mailToken, verificationToken } from '../db/schema';
 
 type Purpose = (typeof mailToken.$inferSelect)['purpose'];
 
@@ -34,6 +34,14 @@ export async function newMailToken(userId: string, purpose: Purpose): Promise<st
 export async function isLiveMailToken(token: string, purpose: Purpose): Promise<boolean> {
 	const rows = await database().select({ userId: mailToken.userId }).from(mailToken).where(live(token, purpose));
 	return rows.length > 0;
+}
+
+/** Ends what letters to a person still open: tokens, and links to sign in, from before their password was changed. */
+export async function endLetters(userId: string, email: string): Promise<void> {
+	await database().transaction(async (tx) => {
+		await tx.delete(mailToken).where(eq(mailToken.userId, userId));
+		await tx.delete(verificationToken).where(eq(verificationToken.identifier, email));
+	});
 }
 
 /** Uses a token up and tells whose it was; null when it is unknown, used or too old. */

@@ -1,9 +1,9 @@
 import { sendResetPassword } from '../mail/letters';
 import { postBeside } from '../mail/post';
-import { isLiveMailToken, newMailToken, useMailToken } from './mail-tokens';
+import { endLetters, isLiveMailToken, newMailToken, useMailToken } from './mail-tokens';
 import { passwordHash } from './password';
 import { revokeSessions } from './sessions';
-import { changeUser, findUserByEmail } from './users';
+import { changeUser, findUser, findUserByEmail } from './users';
 
 /** Sends the letter for a new password to a known address; whoever asks sees no difference. */
 export function askForReset(email: string): void {
@@ -25,6 +25,8 @@ export async function resetPassword(token: string, password: string): Promise<bo
 	const userId = await useMailToken(token, 'reset-password');
 	if (!userId) return false;
 	await changeUser(userId, { passwordHash: hash, emailVerified: new Date() });
+	const found = await findUser(userId);
+	if (found) await endLetters(userId, found.email);
 	await revokeSessions(userId, null);
 	return true;
 }

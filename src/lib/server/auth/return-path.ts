@@ -8,5 +8,7 @@ export const FIRST_PAGE = '/register';
 export function returnPath(asked: string | null | undefined): string {
 	if (!asked || !/^\/(?![/\\])[^\\\s]*$/.test(asked)) return FIRST_PAGE;
 	const url = new URL(asked, 'http://own.invalid');
-	return url.origin === 'http://own.invalid' ? url.pathname + url.search : FIRST_PAGE;
+	// Dots are worked out on the way: `/.//elsewhere` becomes the address of another site.
+	const isOwn = url.origin === 'http://own.invalid' && !url.pathname.startsWith('//');
+	return isOwn ? url.pathname + url.search : FIRST_PAGE;
 }

@@ -19,6 +19,6 @@ export async function signUp({ name, firmName, email, password }: SignUp): Promi
 	const founded = await foundFirm({ name, firmName, email, passwordHash: await passwordHash(password) });
 	postBeside(async () => {
 		if (!founded) return sendAddressKnown(email);
-		return sendVerifyAddress(email, await newMailToken(founded.userId, 'verify-address'), firmName);
+		return sendVerifyAddress(email, await newMailToken(founded.userId, 'verify-address'));
 	});
 }

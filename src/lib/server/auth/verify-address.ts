@@ -1,4 +1,3 @@
-import { findMembership } from '../firms/find-membership';
 import { sendVerifyAddress } from '../mail/letters';
 import { postBeside } from '../mail/post';
 import { newMailToken, useMailToken } from './mail-tokens';
@@ -16,8 +15,7 @@ export function sendVerificationAgain(email: string): void {
 	postBeside(async () => {
 		const found = await findUserByEmail(email);
 		if (!found || found.emailVerified) return;
-		const current = await findMembership(found.id, null);
 		const token = await newMailToken(found.id, 'verify-address');
-		await sendVerifyAddress(email, token, current?.firm.name ?? 'your firm');
+		await sendVerifyAddress(email, token);
 	});
 }

@@ -3,6 +3,7 @@ import { applyEntry } from '$lib/sheet/apply';
 import type { SentEdit } from '$lib/sheet/edit';
 import { entryOf, type Entry, type LoggedEntry } from '$lib/sheet/entry';
 import { MOST_ROWS, type Sheet } from '$lib/sheet/sheet';
+import { MOST_PARTS, partsOf } from '$lib/sheet/count-parts';
 import { solveSheet, type SolvedSheet } from '$lib/sheet/solve-sheet';
 import type { FirmScope } from '../auth/scope';
 import { inFirm, type Tx } from '../db';
@@ -82,6 +83,11 @@ function readEdits(sheet: Sheet, sent: readonly SentEdit[], known: ReadonlySet<s
 			step.refused.push({
 				id,
 				reason: `A sheet holds at most ${MOST_ROWS} rows; this would make ${after.rows.length}.`
+			});
+		else if (partsOf(after) > MOST_PARTS)
+			step.refused.push({
+				id,
+				reason: `A sheet holds at most ${MOST_PARTS} parts; this would make ${partsOf(after)}.`
 			});
 		else {
 			step.accepted.push({ id, entry });

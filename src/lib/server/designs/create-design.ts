@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import { and, eq } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import type { SingleEdit } from '$lib/sheet/edit';
 import { entryOf } from '$lib/sheet/entry';
 import { applyEntry } from '$lib/sheet/apply';
@@ -26,7 +26,9 @@ export async function createDesign(
 			const [of] = await tx
 				.select({ units: project.units, elevation_m: project.elevation_m })
 				.from(project)
-				.where(and(eq(project.firmId, scope.firmId), eq(project.projectId, wanted.projectId)));
+				.where(
+					and(eq(project.firmId, scope.firmId), eq(project.projectId, wanted.projectId), isNull(project.archivedAt))
+				);
 			if (!of) return 'absent';
 			const designId = randomUUID();
 			const edits: SingleEdit[] = [

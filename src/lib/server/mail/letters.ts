@@ -11,15 +11,18 @@ function address(path: string, query: Readonly<Record<string, string>> = {}): st
 
 const NOT_YOU = 'If this was not you, leave the letter unanswered; nothing changes.';
 
-/** Asks the person who signed up to confirm that the address is theirs. Valid for 24 hours. */
-export function sendVerifyAddress(to: string, token: string, firmName: string): Promise<void> {
+/**
+ * Asks the person who signed up to confirm that the address is theirs. Valid for 24 hours. Nothing that was typed at
+ * sign-up stands in it: anybody can type anybody's address there.
+ */
+export function sendVerifyAddress(to: string, token: string): Promise<void> {
 	return post(
 		letter({
 			to,
 			subject: 'Confirm your address for Evendraft',
 			heading: 'Confirm your address',
 			paragraphs: [
-				`This address was given to start the firm “${firmName}” in Evendraft. Confirm it, then sign in with the password that you chose.`,
+				`This address was given to start a firm in Evendraft. Confirm it, then sign in with the password that you chose.`,
 				`${NOT_YOU} Do not confirm a firm that you did not start.`
 			],
 			link: { words: 'Confirm this address', url: address('/verify', { token }) },

@@ -27,7 +27,7 @@ export const actions: Actions = {
 		const form = await superValidate(sent, zod4(basisSchema));
 		if (!form.valid) return fail(400, { form });
 		const opened = await openDesign(scope, params.designId);
-		if (!opened) error(404, 'No such design');
+		if (!opened || opened.heading.archivedAt) error(404, 'No such design');
 		const { name, serves, typedIn } = form.data;
 		const renamed = name !== opened.heading.name || serves !== opened.heading.service;
 		if (renamed && (await changeDesign(scope, params.designId, { name, service: serves })) === 'taken')

@@ -22,7 +22,7 @@ afterAll(async () => {
 	await made?.drop();
 });
 
-const submit = (path: string, form: Record<string, string>, run: (event: never) => unknown) =>
+const submit = (path: string, form: Record<string, string>, run?: (event: never) => unknown) =>
 	browser().ask({ routeId: `/(site)${path}`, path, form, run });
 const tokenFor = async (email: string) => (await mail.link(email)).searchParams.get('token') ?? '';
 const choose = (token: string, password: string) => submit('/reset', { token, password }, reset.default);
