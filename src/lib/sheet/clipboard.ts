@@ -22,7 +22,7 @@ export function readBlock(text: string, room: number): PasteBlock {
 		Papa.parse<string[]>(lines, { delimiter: '\t', quoteChar, preview: Math.max(1, room + 2) });
 	const quoted = read('"');
 	const data = lines === '' && text !== '' ? [['']] : quoted.errors.length ? read('\0').data : quoted.data;
-	const heads = headerOf(data) ? 1 : 0;
+	const heads = longestOf(data) <= MOST_TYPED && headerOf(data) ? 1 : 0;
 	if (data.length - heads > room) {
 		const rows = counted(countLines(text) - heads, 'row');
 		return refused(`the clipboard holds ${rows}, and the sheet has room for ${room === 0 ? 'no' : room} more`);
@@ -30,13 +30,16 @@ export function readBlock(text: string, room: number): PasteBlock {
 	const cells = data.reduce((sum, row) => sum + row.length, 0);
 	if (cells > MOST_CELLS)
 		return refused(`the clipboard holds ${counted(cells, 'cell')}, and at most ${MOST_CELLS} are pasted at once`);
-	const longest = data.reduce((most, row) => row.reduce((more, { length }) => Math.max(more, length), most), 0);
+	const longest = longestOf(data);
 	if (longest > MOST_TYPED)
 		return refused(
 			`the clipboard holds a cell of ${counted(longest, 'character')}, and a cell of the sheet holds at most ${MOST_TYPED}`
 		);
 	return { ok: true, cells: data };
 }
+
+const longestOf = (cells: readonly (readonly string[])[]): number =>
+	cells.reduce((most, row) => row.reduce((more, { length }) => Math.max(more, length), most), 0);
 
 function countLines(text: string): number {
 	let lines = text && !text.endsWith('\n') ? 1 : 0;

@@ -395,6 +395,15 @@ describe('commands of the keyboard', () => {
 });
 
 describe('copy and paste', () => {
+	it('tells pasted figures that could be read otherwise, and says nothing of others', () => {
+		const grid = gridOf();
+		go(grid, 0, 'flow');
+		grid.paste('150\n1.5');
+		expect(grid.notice).toBe('');
+		grid.paste('1,200\n1.350');
+		expect(grid.notice).toMatch(/^2 figures of these could be read otherwise: “1,200” is read as 1\u2009200 L\/s/);
+	});
+
 	it('bring a block back as it was typed', () => {
 		const grid = gridOf();
 		press(grid, 'Ctrl+a');

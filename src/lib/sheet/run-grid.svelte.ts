@@ -4,6 +4,7 @@ import { textToCopy, textToEdit } from './cell-text';
 import { COLUMNS, type Column } from './columns';
 import * as commands from './commands';
 import { END_FIELDS } from './design-document';
+import { doubtsOf } from './doubts';
 import type { Edit } from './edit';
 import { isRowField, ROW_READERS } from './fields';
 import type { OpenSheet } from './open-sheet.svelte';
@@ -254,7 +255,9 @@ export class RunGrid {
 		const [[single = ''] = []] = block.cells;
 		const fills = block.cells.length === 1 && block.cells[0]?.length === 1 && this.selection.isRange;
 		const cells = fills ? this.#rangeRows().map(() => this.#rangeFields().map(() => single)) : block.cells;
-		this.#do(commands.pasteBlock(this.open.sheet, { row: top, fields }, cells, this.open.units));
+		const edit = commands.pasteBlock(this.open.sheet, { row: top, fields }, cells, this.open.units);
+		this.#do(edit);
+		this.notice = doubtsOf(edit, this.open.units);
 	}
 
 	/** Goes to the row with a tag. */
