@@ -12,9 +12,17 @@ import { withSecurityHeaders } from '$lib/server/http/security-headers';
 /** The one address of Auth.js that is open: where the form of a sign-in link leads. */
 const LINK_CALLBACK = '/auth/callback/email';
 
+/** Of anything but the edits of a sheet, which may paste a whole building [bytes]. */
+const LARGEST_FORM = 1_000_000;
+const EDITS = '/api/v1/designs/[designId]/edits';
+
+const isTooLarge = ({ request, route }: RequestEvent): boolean =>
+	route.id !== EDITS && Number(request.headers.get('content-length') ?? 0) > LARGEST_FORM;
+
 async function answer(event: RequestEvent, resolve: Parameters<Handle>[0]['resolve']): Promise<Response> {
 	if (fromForeignOrigin(event.request, event.url))
 		return problem('foreign-origin', 'This was sent by a page of another site and was not done.');
+	if (isTooLarge(event)) return problem('too-large', 'This is more than one form may hold.');
 	if (event.url.pathname === LINK_CALLBACK && event.request.method === 'GET') return authJs.handle({ event, resolve });
 	await identify(event);
 	const refused = await refusal(event);

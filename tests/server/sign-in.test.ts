@@ -116,14 +116,18 @@ describe('from sign-up to sign-in', () => {
 });
 
 describe('sign-in with a password', () => {
-	it('says the same for a wrong password and an unknown address, and keeps the address', async () => {
+	it('says the same for a wrong password, an unknown and an unconfirmed address, and keeps the address', async () => {
 		await owner('known@example.test');
 		const [wrong, unknown] = [
 			await enter(browser(), 'known@example.test', 'not the right one'),
 			await enter(browser(), 'nobody@example.test', 'not the right one')
 		];
+		const visitor = browser();
+		await start(visitor, 'unconfirmed@example.test');
+		const unconfirmed = await enter(visitor, 'unconfirmed@example.test', PASSWORD);
 		const told = (answer: typeof wrong) => (answer.body as { data: { form: { message: unknown } } }).data.form.message;
 		expect(told(wrong)).toEqual(told(unknown));
+		expect(told(unconfirmed)).toEqual(told(unknown));
 		expect(wrong.body).toMatchObject({ data: { form: { data: { email: 'known@example.test', password: '' } } } });
 	});
 

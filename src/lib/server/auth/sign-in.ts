@@ -3,7 +3,7 @@ import { isRedirect, redirect, type RequestEvent } from '@sveltejs/kit';
 import { origin } from '../http/origin';
 import { findUserByEmail } from './users';
 import { postBeside } from '../mail/post';
-import { AddressNotVerified, authJs } from './auth-js';
+import { authJs } from './auth-js';
 import { revokeSession } from './sessions';
 
 /** The event with a form of our making, and with headers from which no address of another host can be built. */
@@ -18,19 +18,17 @@ function withForm(event: RequestEvent, fields: Readonly<Record<string, string>>)
 	return { ...event, request };
 }
 
-/** Signs in with a password and goes to `to`, a path of ours; or tells why not. */
+/** Signs in with a password and goes to `to`, a path of ours; returns where that is refused. */
 export async function signInWithPassword(
 	event: RequestEvent,
 	{ email, password, to }: { readonly email: string; readonly password: string; readonly to: string }
-): Promise<'wrong' | 'address-not-verified'> {
+): Promise<void> {
 	try {
 		await authJs.signIn(withForm(event, { providerId: 'credentials', email, password, redirectTo: to }));
 	} catch (cause) {
 		if (isRedirect(cause)) redirect(303, to);
-		if (cause instanceof AddressNotVerified) return 'address-not-verified';
 		if (!(cause instanceof CredentialsSignin)) throw cause;
 	}
-	return 'wrong';
 }
 
 /** Sends a link to a known address; whoever asks sees no difference. */

@@ -7,13 +7,11 @@ import { signInWithPassword } from '$lib/server/auth/sign-in';
 import { sendVerificationAgain } from '$lib/server/auth/verify-address';
 import type { Actions, PageServerLoad } from './$types';
 
+/** One answer for all: whoever signs up with an address must not learn here whether it was known before. */
 const REFUSED = {
-	wrong: { text: 'No account has this address with this password.', again: false },
-	'address-not-verified': {
-		text: 'The password fits, but this address is not confirmed yet. Open the letter that was sent to it.',
-		again: true
-	}
-} as const;
+	text: 'No confirmed account has this address with this password. A new one works once the letter to its address was opened.',
+	again: true
+};
 
 export const load: PageServerLoad = async ({ locals, url }) => {
 	const to = url.searchParams.get('to') ?? '';
@@ -27,8 +25,8 @@ export const actions: Actions = {
 		const { email, password, to } = form.data;
 		form.data.password = '';
 		if (!form.valid) return fail(400, { form });
-		const refused = await signInWithPassword(event, { email, password, to: returnPath(to) });
-		return message(form, REFUSED[refused], { status: 400 });
+		await signInWithPassword(event, { email, password, to: returnPath(to) });
+		return message(form, REFUSED, { status: 400 });
 	},
 	again: async ({ request }) => {
 		const form = await superValidate(request, zod4(passwordSignInSchema));
