@@ -68,7 +68,7 @@ describe('hoods and caps', () => {
 	});
 
 	it('take the coefficient of the maker as it is, and say when there is none', () => {
-		for (const kind of ['intake-hood', 'intake-louvre', 'exhaust-hood', 'exhaust-louvre']) {
+		for (const kind of ['intake-hood', 'intake-louvre', 'exhaust-hood', 'exhaust-louvre', 'discharge-against-wall']) {
 			expect(coefficientOf(kind, { coefficient: 2.4 }, ROW)).toMatchObject({ coefficient: 2.4, rangeNote: null });
 			expect(coefficientOf(kind, {}, ROW)).toMatchObject({ coefficient: 0, inRange: false });
 		}

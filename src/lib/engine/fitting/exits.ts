@@ -75,9 +75,32 @@ const diffuser: FittingDefinition = {
 const MAKERS_CAUTION =
 	'The maker says whether the velocity pressure of the duct is in the coefficient: if it is, add no plain exit.';
 
+/** No figure that could be read was published for it: a person enters one. */
+const againstWall = byMaker({
+	key: 'discharge-against-wall',
+	name: 'Exit against a wall',
+	family: 'exits',
+	picture: 'diffuser',
+	drawing: 'exit',
+	caution:
+		'The nearer the wall, the more is lost beyond the velocity pressure of a plain exit; most where the way out along the wall is narrower than the duct.'
+});
+
 export const exits: readonly FittingDefinition[] = [
 	plain,
 	diffuser,
+	{
+		...againstWall,
+		entry: {
+			...againstWall.entry,
+			range:
+				'as its source states: distance of the wall, shape of the end, and whether the velocity pressure of the duct is in it',
+			method: 'Coefficient entered by hand',
+			source: 'No published figure is carried: a measurement or a handbook at hand',
+			known: 'entered by hand',
+			uncertainty: 0.5
+		}
+	},
 	flatCap('exhaust', {
 		key: 'exhaust-cap',
 		name: 'Exit under a flat cap',

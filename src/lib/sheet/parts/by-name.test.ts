@@ -75,6 +75,8 @@ const PHRASES: readonly Phrase[] = [
 	['exit diffuser a0.5 14°', 'exit-diffuser', round],
 	['exhaust cowl C1.2', 'exhaust-hood', round],
 	['exhaust louver C1.2', 'exhaust-louvre', rectangular],
+	['exit against wall C1.6', 'discharge-against-wall', round],
+	['exit against a wall C1.6', 'discharge-against-wall', round],
 	['damper', 'damper-butterfly', round],
 	['parallel blade damper 20°', 'damper-parallel-blades', rectangular],
 	['opposed blade damper', 'damper-opposed-blades', rectangular],

@@ -45,6 +45,7 @@ export const PHRASES: readonly Phrase[] = [
 	...phrase('intake-hood', 'entry', 'intake cowl'),
 	...phrase('exhaust-hood', 'exit', 'exhaust cowl', 'discharge cowl', 'discharge hood', 'exhaust hood cowl'),
 	...phrase('exhaust-louvre', 'exit', 'discharge louvre'),
+	...phrase('discharge-against-wall', 'exit', 'exit against wall', 'exit against a wall'),
 	...phrase('damper-fire-curtain', 'damper', 'fire damper', 'fd', 'curtain fire damper'),
 	...phrase('damper-gate', 'damper', 'gate', 'blast gate', 'slide damper', 'slide gate'),
 	...phrase('screen-wire', 'device', 'screen', 'mesh', 'wire mesh', 'bird screen', 'insect screen', 'wire screen'),

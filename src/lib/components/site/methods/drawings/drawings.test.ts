@@ -37,6 +37,7 @@ describe('the drawings of the parts', () => {
 		differ('damper-parallel-blades', 'damper-opposed-blades');
 		differ('intake-louvre', 'exhaust-louvre');
 		differ('intake-cap', 'exhaust-cap');
+		differ('exit-plain', 'discharge-against-wall');
 		differ('rectangular-elbow-vaned', 'rectangular-elbow-vaned-double');
 	});
 

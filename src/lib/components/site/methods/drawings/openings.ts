@@ -189,6 +189,14 @@ export function louvre(key: string): PartFigure {
 	return board.figure();
 }
 
+/** The air turns along a wall that stands before the end of the duct. */
+function beforeWall(board: DrawingBoard): PartFigure {
+	board.lined(236, 20, 14, 200).dimension([176, Y - HALF - 18], [236, Y - HALF - 18], 'h');
+	for (const sign of [-1, 1])
+		board.flow([182, Y + sign * 16], 0, '', 36).flow([214, Y + sign * (HALF - 6)], sign * 90, '', 44);
+	return board.figure();
+}
+
 export function exit(key: string): PartFigure {
 	const board = new DrawingBoard(labelOf(key));
 	board
@@ -197,8 +205,9 @@ export function exit(key: string): PartFigure {
 		.add('axis', line([12, Y], [300, Y]))
 		.broken([26, Y], 0, 2 * HALF)
 		.dimension([56, Y - HALF], [56, Y + HALF], 'D')
-		.flow([86, Y], 0, '', 44)
-		.flow([186, Y], 0, '', 64);
+		.flow([86, Y], 0, '', 44);
+	if (key === 'discharge-against-wall') return beforeWall(board);
+	board.flow([186, Y], 0, '', 64);
 	for (const sign of [-1, 1])
 		board
 			.flow([184, Y + sign * 24], sign * 14, '', 62)
