@@ -86,7 +86,7 @@ const asked = (routeId: string, params: Params, run: Run) => ({ routeId, path: p
 /** Valid for every form there is, so that none is refused for what it holds. */
 const formOf = (more: Params = {}) => ({
 	...{ number: randomUUID().slice(0, 8), name: 'Taken', client: '', place: '', elevation: '0 m', units: 'SI' },
-	...{ service: '', serves: '', typedIn: 'SI', note: 'Taken', status: 'work-in-progress', before: '1' },
+	...{ service: '', serves: '', typedIn: 'SI', note: 'Taken', status: 'work-in-progress', before: '2' },
 	...{ archived: 'yes', designId: target.designId, ...more }
 });
 const act = (visitor: Browser, [id, name, run]: (typeof actions)[number], params: Params, more?: Params) => {
@@ -173,7 +173,8 @@ describe.each(['viewer', 'field'] as const)('a member as %s', (role) => {
 describe.each(['checker', 'owner'] as const)('a member as %s', (role) => {
 	it('gets through with the very same requests', async () => {
 		for (const action of actions) {
-			const answer = await act(inside[role], action, target, { archived: 'no', name: `${SECRET} ${role}` });
+			const name = `${SECRET} ${randomUUID().slice(0, 8)}`;
+			const answer = await act(inside[role], action, target, { archived: 'no', name });
 			expect([200, 303], wordsFor(action)).toContain(answer.status);
 			// A form that was sent back has a status of its own.
 			expect(answer.body ?? {}, wordsFor(action)).not.toHaveProperty('status');
