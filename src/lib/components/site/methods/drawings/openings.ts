@@ -191,7 +191,7 @@ export function louvre(key: string): PartFigure {
 
 /** The air turns along a wall that stands before the end of the duct. */
 function beforeWall(board: DrawingBoard): PartFigure {
-	board.lined(236, 20, 14, 200).dimension([176, Y - HALF - 18], [236, Y - HALF - 18], 'h');
+	board.lined(236, 20, 14, 200).dimension([176, Y - HALF - 54], [236, Y - HALF - 54], 'h');
 	for (const sign of [-1, 1])
 		board.flow([182, Y + sign * 16], 0, '', 36).flow([214, Y + sign * (HALF - 6)], sign * 90, '', 44);
 	return board.figure();
