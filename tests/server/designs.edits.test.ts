@@ -7,6 +7,7 @@ import { appendEdits } from '../../src/lib/server/designs/append-edits';
 import { changeDesign } from '../../src/lib/server/designs/change-design';
 import { openDesign } from '../../src/lib/server/designs/find-design';
 import { applyMany } from '../../src/lib/sheet/apply';
+import { MOST_PARTS } from '../../src/lib/sheet/count-parts';
 import type { Edit } from '../../src/lib/sheet/edit';
 import type { Entry } from '../../src/lib/sheet/entry';
 import { EMPTY_SHEET, MOST_ROWS, type Sheet } from '../../src/lib/sheet/sheet';
@@ -185,6 +186,17 @@ describe('what no sheet can hold', () => {
 		expect(reply.refused).toEqual([{ id: many.id, reason: expect.stringContaining(`${MOST_ROWS} rows`) }]);
 		expect(reply.entries.map(({ id }) => id)).toEqual([small.id]);
 		expect((await opened(ours, designId)).sheet.rows).toHaveLength(3);
+	});
+
+	it(`is refused beyond ${MOST_PARTS} parts of all rows together`, async () => {
+		const { designId } = await treeDesign(ours);
+		const parts = Array<string>(100).fill('elbow').join(', ');
+		const rows = (count: number) =>
+			sent(rowsOf(Array.from({ length: count }, (_, at) => ({ tag: `P${at}`, parts }))).edit);
+		const [tooMany, enough] = [rows(MOST_PARTS / 100), rows(20)];
+		const reply = await append(ours, designId, [tooMany, enough], 2);
+		expect(reply.refused).toEqual([{ id: tooMany.id, reason: expect.stringContaining(`${MOST_PARTS} parts`) }]);
+		expect(reply.entries.map(({ id }) => id)).toEqual([enough.id]);
 	});
 
 	it('a column or a setting that does not exist is refused, also one that every object has', async () => {
