@@ -19,11 +19,17 @@ const EDITS = '/api/v1/designs/[designId]/edits';
 const isTooLarge = ({ request, route }: RequestEvent): boolean =>
 	route.id !== EDITS && Number(request.headers.get('content-length') ?? 0) > LARGEST_FORM;
 
+/** A page of another site may not sign a visitor in as somebody else; our own form asks first, and sends itself. */
+const isOwnForm = ({ headers }: Request): boolean => ['same-origin', null].includes(headers.get('sec-fetch-site'));
+
 async function answer(event: RequestEvent, resolve: Parameters<Handle>[0]['resolve']): Promise<Response> {
 	if (fromForeignOrigin(event.request, event.url))
 		return problem('foreign-origin', 'This was sent by a page of another site and was not done.');
 	if (isTooLarge(event)) return problem('too-large', 'This is more than one form may hold.');
-	if (event.url.pathname === LINK_CALLBACK && event.request.method === 'GET') return authJs.handle({ event, resolve });
+	if (event.url.pathname === LINK_CALLBACK && event.request.method === 'GET') {
+		if (isOwnForm(event.request)) return authJs.handle({ event, resolve });
+		return new Response(null, { status: 303, headers: { location: `/sign-in/link/open${event.url.search}` } });
+	}
 	await identify(event);
 	const refused = await refusal(event);
 	if (refused) return refused;

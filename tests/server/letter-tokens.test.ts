@@ -81,4 +81,29 @@ describe('the token of a sign-in link', () => {
 		expect((await choose(token, 'the next sentence')).body).toMatchObject({ outcome: 'expired' });
 		expect((await submit('/verify', { token }, verify.default)).body).toEqual({ verified: false });
 	});
+
+	it('is taken from our own form alone: from another site it leads to that form, and is not used up', async () => {
+		const { email } = await owner('led@example.test');
+		await submit('/sign-in/link', { email, to: '' }, link.default);
+		const token = await tokenFor(email);
+		const path = `/auth/callback/email?${new URLSearchParams({ token, email })}`;
+		const visitor = browser();
+		const led = await visitor.ask({ routeId: null, path, headers: { 'sec-fetch-site': 'cross-site' } });
+		expect([led.status, led.location?.split('?')[0]]).toEqual([303, '/sign-in/link/open']);
+		expect((await whoIs(visitor)).person).toBeNull();
+		await visitor.ask({ routeId: null, path, headers: { 'sec-fetch-site': 'same-origin' } });
+		expect((await whoIs(visitor)).person?.email).toBe(email);
+	});
+
+	it('ends with the password: a link from before a reset signs nobody in', async () => {
+		const { email } = await owner('reset@example.test');
+		await submit('/sign-in/link', { email, to: '' }, link.default);
+		const before = await tokenFor(email);
+		await submit('/forgotten', { email }, forgotten.default);
+		await expect.poll(() => tokenFor(email)).not.toBe(before);
+		expect((await choose(await tokenFor(email), 'the next sentence')).body).toMatchObject({ outcome: 'changed' });
+		const visitor = browser();
+		await press(visitor, before, email);
+		expect((await whoIs(visitor)).person).toBeNull();
+	});
 });
