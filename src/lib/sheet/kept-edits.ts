@@ -30,3 +30,23 @@ export function keep(designId: string, unsent: readonly SentEdit[], gone: Readon
 		return false;
 	}
 }
+
+const seqKey = (designId: string) => `evendraft/seen/${designId}`;
+
+/** Keeps how far this device has seen the log of a design. */
+export function keepSeen(designId: string, seq: number): void {
+	try {
+		if (seq > readSeen(designId)) localStorage.setItem(seqKey(designId), String(seq));
+	} catch {
+		// Without room the page is as fresh as the server made it.
+	}
+}
+
+/** The last entry of the log that this device has seen; 0 where it has seen none. */
+export function readSeen(designId: string): number {
+	try {
+		return Number(localStorage.getItem(seqKey(designId)) ?? 0) || 0;
+	} catch {
+		return 0;
+	}
+}

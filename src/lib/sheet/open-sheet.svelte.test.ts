@@ -3,6 +3,7 @@ import { rowId, sheetOf, type TypedRow } from '../../../tests/sheet/any-sheet';
 import { applyEntry } from './apply';
 import type { Edit, SentEdit } from './edit';
 import { entryOf, type LoggedEntry } from './entry';
+import { readKept } from './kept-edits';
 import { OpenSheet } from './open-sheet.svelte';
 import { MOST_ROWS, type RowField, type Sheet } from './sheet';
 import { solveSheet } from './solve-sheet';
@@ -132,6 +133,32 @@ describe('an open sheet', () => {
 		expect(open.solved).toBe(solved);
 		await settled();
 		expect(open.isConfirmed).toBe(true);
+		stop();
+	});
+
+	it('asks for what the page before it sent while this one was on its way', async () => {
+		const kept = new Map<string, string>();
+		vi.stubGlobal('localStorage', {
+			getItem: (key: string) => kept.get(key) ?? null,
+			setItem: (key: string, text: string) => void kept.set(key, text),
+			removeItem: (key: string) => void kept.delete(key)
+		});
+		vi.stubGlobal('Worker', LateWorker);
+		vi.stubGlobal('addEventListener', () => {});
+		vi.stubGlobal('removeEventListener', () => {});
+		const [before, after] = [opened(server.sheet), opened(server.sheet)];
+		before.do(set(0, 'serves', 'sent at last'));
+		await settled();
+		expect([before.outbox.state, readKept('design-1')]).toEqual(['saved', []]);
+		expect(after.sheet.rows[0]?.cells.serves).toBeUndefined();
+		const stop = after.start();
+		await settled();
+		expect(after.sheet).toEqual(server.sheet);
+		expect([after.sheet.rows[0]?.cells.serves?.typed, after.seq, after.outbox.state]).toEqual([
+			'sent at last',
+			1,
+			'saved'
+		]);
 		stop();
 	});
 

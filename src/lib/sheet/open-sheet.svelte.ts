@@ -3,7 +3,7 @@ import { applyEntry, applyMany } from './apply';
 import type { Edit, SentEdit } from './edit';
 import { entryOf, type Entry } from './entry';
 import { inverseOf } from './invert';
-import { readKept } from './kept-edits';
+import { readKept, readSeen } from './kept-edits';
 import { newId } from './new-id';
 import { Outbox } from './outbox.svelte';
 import { PreviewFigures } from './preview-figures';
@@ -113,6 +113,8 @@ export class OpenSheet {
 		);
 		this.#solve('all');
 		if (kept.length) this.outbox.fill(kept);
+		// The page before this one may have sent its last edits while this one was already on its way.
+		else if (readSeen(this.designId) > this.#base) void this.outbox.ask();
 		const online = () => void this.outbox.flush();
 		addEventListener('online', online);
 		return () => {

@@ -1,5 +1,5 @@
 import type { SentEdit } from './edit';
-import { keep } from './kept-edits';
+import { keep, keepSeen } from './kept-edits';
 import type { EditsReply } from './server-reply';
 import { keepSetAside, readSetAside, setAsideWords, type SetAside } from './set-aside';
 
@@ -113,6 +113,14 @@ export class Outbox {
 		}
 	}
 
+	/** Asks for what the log has beyond this page, sending nothing. */
+	async ask(): Promise<void> {
+		this.#state = 'saving';
+		const reply = await this.#post([]);
+		if (reply && !('notTaken' in reply)) this.#options.onreply(reply, []);
+		if (!this.#unsent.length) this.#rest();
+	}
+
 	/** Ends the tries: what is not sent by then stays kept on this device. */
 	stop(): void {
 		this.#stopped = true;
@@ -138,6 +146,8 @@ export class Outbox {
 		this.#tries = 0;
 		this.#options.onreply(reply, sent);
 		const gone = new Set(sent.map(({ id }) => id));
+		// Before the edits are forgotten: a page that is being loaded meanwhile may not have them.
+		keepSeen(this.#options.designId, reply.seq);
 		this.#unsent = this.#unsent.filter(({ id }) => !gone.has(id));
 		keep(this.#options.designId, this.#unsent, gone);
 		this.#savedAt = new Date();
